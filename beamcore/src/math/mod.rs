@@ -1,0 +1,18 @@
+//! The only place where transcendental functions and root finding live.
+//!
+//! The standard library's `exp`, `powf` and their like are the system's, and their last bits change
+//! with it. These are computed by one portable implementation, so that one build gives the same
+//! bits everywhere.
+
+pub(crate) mod polynomial;
+
+/// e to the power `x`.
+#[cfg(test)]
+pub(crate) fn exp(x: f64) -> f64 {
+    libm::exp(x)
+}
+
+/// `base` to the power `exponent`.
+pub(crate) fn pow(base: f64, exponent: f64) -> f64 {
+    libm::pow(base, exponent)
+}

@@ -1,0 +1,207 @@
+//! What can be wrong with a member, beside its section.
+
+use super::action::{Action, ActionKind, Load};
+use super::layout::SAME_PLACE;
+use super::support::{Support, SupportKind};
+use crate::check;
+use crate::error::{ErrorKind, Problem};
+use crate::path;
+use crate::section::Section;
+use crate::units::Length;
+
+/// All problems of a member; without a section, those that do not concern it.
+pub(crate) fn problems_of(
+    section: Option<&Section>,
+    length: Length,
+    supports: &[Support],
+    actions: &[Action],
+) -> Vec<Problem> {
+    let mut problems = Vec::new();
+    check::positive(&mut problems, length, "member.length");
+    // Without a usable length nothing can lie inside or outside the member.
+    let length = problems.is_empty().then_some(length);
+    check_supports(&mut problems, length, supports);
+    check_actions(&mut problems, length, actions);
+    if let Some(section) = section {
+        check_self_weight(&mut problems, section, actions);
+    }
+    problems
+}
+
+fn check_supports(problems: &mut Vec<Problem>, length: Option<Length>, supports: &[Support]) {
+    let all = "member.supports";
+    if supports.is_empty() {
+        problems.push(Problem::new(
+            ErrorKind::Missing,
+            all,
+            "no supports",
+            "at least two supports, or one fixed support",
+        ));
+        return;
+    }
+    for support in supports {
+        check::name(problems, support.name(), all);
+        inside(problems, length, support.at(), &at(support));
+    }
+    check::unique(
+        problems,
+        supports.iter().map(Support::name),
+        "supports",
+        all,
+    );
+    for (i, support) in supports.iter().enumerate() {
+        for earlier in &supports[..i] {
+            let apart = (support.at() - earlier.at()).abs();
+            if length.is_some_and(|length| apart <= length * SAME_PLACE) {
+                problems.push(Problem::new(
+                    ErrorKind::Duplicate,
+                    at(support),
+                    format!(
+                        "{}, where the support \"{}\" stands",
+                        support.at(),
+                        earlier.name()
+                    ),
+                    "a place of its own for each support",
+                ));
+            }
+        }
+    }
+    if supports
+        .iter()
+        .all(|support| support.kind() == SupportKind::Roller)
+    {
+        problems.push(Problem::new(
+            ErrorKind::Mechanism,
+            all,
+            "only rollers, so that the member is free to move along its axis",
+            "at least one pin or fixed support",
+        ));
+    }
+}
+
+fn at(support: &Support) -> String {
+    path::key(&path::named("member.supports", support.name()), "at")
+}
+
+fn check_actions(problems: &mut Vec<Problem>, length: Option<Length>, actions: &[Action]) {
+    if actions.is_empty() {
+        problems.push(Problem::new(
+            ErrorKind::Missing,
+            "actions",
+            "no actions",
+            "at least one action with its loads",
+        ));
+    }
+    check::unique(
+        problems,
+        actions.iter().map(Action::name),
+        "actions",
+        "actions",
+    );
+    for action in actions {
+        check::name(problems, action.name(), "actions");
+        let base = path::named("actions", action.name());
+        if let ActionKind::Variable(factors) = action.kind() {
+            let base = path::key(&path::key(&base, "kind"), "variable");
+            check::between(
+                problems,
+                factors.psi_0,
+                0.0,
+                1.0,
+                &path::key(&base, "psi_0"),
+            );
+            check::between(
+                problems,
+                factors.psi_1,
+                0.0,
+                1.0,
+                &path::key(&base, "psi_1"),
+            );
+            check::between(
+                problems,
+                factors.psi_2,
+                0.0,
+                1.0,
+                &path::key(&base, "psi_2"),
+            );
+        }
+        let loads = path::key(&base, "loads");
+        if action.loads().is_empty() {
+            problems.push(Problem::new(
+                ErrorKind::Missing,
+                &loads,
+                "an action without loads",
+                "at least one load",
+            ));
+        }
+        for (i, load) in action.loads().iter().enumerate() {
+            let base = path::key(&path::indexed(&loads, i), load.name());
+            check_load(problems, length, load, &base);
+        }
+    }
+}
+
+fn check_load(problems: &mut Vec<Problem>, length: Option<Length>, load: &Load, base: &str) {
+    let field = |name: &str| path::key(base, name);
+    match *load {
+        Load::SelfWeight => {}
+        Load::Uniform { load } => check::finite(problems, load, &field("load")),
+        Load::Partial { load, from, to } => {
+            check::finite(problems, load, &field("load"));
+            inside(problems, length, from, &field("from"));
+            inside(problems, length, to, &field("to"));
+            let slack = length.map_or(Length::ZERO, |length| length * SAME_PLACE);
+            if from.is_finite() && to.is_finite() && to - from <= slack {
+                problems.push(Problem::new(
+                    ErrorKind::Position,
+                    field("to"),
+                    to.to_string(),
+                    format!("a place to the right of the stretch's beginning at {from}"),
+                ));
+            }
+        }
+        Load::Point { load, at } => {
+            check::finite(problems, load, &field("load"));
+            inside(problems, length, at, &field("at"));
+        }
+    }
+}
+
+/// A problem unless the place lies on the member.
+fn inside(problems: &mut Vec<Problem>, length: Option<Length>, place: Length, path: &str) {
+    let before = problems.len();
+    check::finite(problems, place, path);
+    let Some(length) = length else { return };
+    if problems.len() == before && !(place >= Length::ZERO && place <= length) {
+        problems.push(Problem::new(
+            ErrorKind::Position,
+            path,
+            place.to_string(),
+            format!("a place on the member, from 0 m to {length}"),
+        ));
+    }
+}
+
+/// Self-weight needs the density of each part.
+fn check_self_weight(problems: &mut Vec<Problem>, section: &Section, actions: &[Action]) {
+    let carries = |action: &&Action| action.loads().contains(&Load::SelfWeight);
+    let Some(action) = actions.iter().find(carries) else {
+        return;
+    };
+    let mut told: Vec<&str> = Vec::new();
+    for part in section.placed() {
+        let material = part.material();
+        if material.mean_density().is_none() && !told.contains(&material.name()) {
+            told.push(material.name());
+            problems.push(Problem::new(
+                ErrorKind::Missing,
+                path::key(&path::named("materials", material.name()), "density"),
+                "no density",
+                format!(
+                    "a density, since the action \"{}\" carries the self-weight",
+                    action.name()
+                ),
+            ));
+        }
+    }
+}

@@ -1,0 +1,148 @@
+//! Members: a section along a length, on supports, under actions.
+
+mod action;
+mod checks;
+mod combination;
+mod layout;
+mod plan;
+mod support;
+
+pub use action::{Action, ActionKind, CombinationFactors, Load};
+pub use combination::Combination;
+pub use plan::MemberPlan;
+pub use support::{Support, SupportKind};
+
+pub(crate) use layout::load_case;
+
+use crate::error::Result;
+use crate::response::Response;
+use crate::section::{Section, Stiffness};
+use crate::solve::beam::Beam;
+use crate::time::Time;
+use crate::units::Length;
+use std::sync::Arc;
+
+/// A member that has passed all checks and is ready to be solved.
+///
+/// Made by [`MemberPlan::check`]. A clone shares the data and costs nothing.
+#[derive(Clone, Debug)]
+pub struct Member {
+    data: Arc<Data>,
+}
+
+#[derive(Debug)]
+struct Data {
+    plan: MemberPlan,
+    combinations: Vec<Combination>,
+    states: [MemberState; 2],
+    notes: Vec<String>,
+}
+
+/// What the solver needs of a member at one time.
+#[derive(Clone, Debug)]
+pub(crate) struct MemberState {
+    pub(crate) stiffness: Stiffness,
+    pub(crate) beam: Beam,
+}
+
+impl Member {
+    /// A plan of a member on two supports at its ends: a pin "left" and a roller "right".
+    ///
+    /// # Examples
+    /// ```
+    /// use beamcore::material::{ServiceClass, timber};
+    /// use beamcore::member::{Action, Member};
+    /// use beamcore::section::{Part, Section, rectangle};
+    /// use beamcore::time::Time;
+    /// use beamcore::units::Number;
+    /// let joist = Part::new("joist", rectangle(80.mm(), 220.mm()), timber("C24", ServiceClass::One)?);
+    /// let member = Member::simple_span(Section::of([joist])?, 4.0.m())
+    ///     .action(Action::permanent("floor").uniform(1.2.kN_per_m()))
+    ///     .check()?;
+    /// let sag = member.solve().deflection("quasi-permanent", Time::Final)?.greatest();
+    /// assert_eq!(sag.at.to_m(), 2.0);
+    /// # Ok::<(), beamcore::Error>(())
+    /// ```
+    #[must_use]
+    pub fn simple_span(section: Section, span: Length) -> MemberPlan {
+        MemberPlan::new(section, span)
+            .support(Support::pin("left", Length::ZERO))
+            .support(Support::roller("right", span))
+    }
+
+    /// A plan of a member of the given length, without supports yet.
+    #[must_use]
+    pub fn of_length(section: Section, length: Length) -> MemberPlan {
+        MemberPlan::new(section, length)
+    }
+
+    pub(crate) fn from_plan(plan: MemberPlan) -> Result<Self> {
+        let layout = layout::Layout::new(&plan);
+        let states = Time::ALL.map(|time| {
+            let stiffness = plan.section().stiffness(time);
+            layout
+                .beam(stiffness.bending_yy())
+                .map(|beam| MemberState { stiffness, beam })
+        });
+        let [initial, end] = states;
+        let combinations = combination::all(plan.actions());
+        let data = Data {
+            combinations,
+            states: [initial?, end?],
+            notes: layout.notes(),
+            plan,
+        };
+        Ok(Self {
+            data: Arc::new(data),
+        })
+    }
+
+    /// The section.
+    #[must_use]
+    pub fn section(&self) -> &Section {
+        self.data.plan.section()
+    }
+
+    /// The length.
+    #[must_use]
+    pub fn length(&self) -> Length {
+        self.data.plan.length()
+    }
+
+    /// The supports, in the order given.
+    #[must_use]
+    pub fn supports(&self) -> &[Support] {
+        self.data.plan.supports()
+    }
+
+    /// The actions, in the order given.
+    #[must_use]
+    pub fn actions(&self) -> &[Action] {
+        self.data.plan.actions()
+    }
+
+    /// The combinations of the actions, each with its factors.
+    #[must_use]
+    pub fn combinations(&self) -> &[Combination] {
+        &self.data.combinations
+    }
+
+    /// What was noticed while the member was laid out: for example stations that were merged.
+    #[must_use]
+    pub fn notes(&self) -> &[String] {
+        &self.data.notes
+    }
+
+    pub(crate) fn state(&self, time: Time) -> &MemberState {
+        match time {
+            Time::Initial => &self.data.states[0],
+            Time::Final => &self.data.states[1],
+        }
+    }
+
+    /// Solves the member for each action at each time.
+    #[must_use]
+    pub fn solve(&self) -> Response {
+        Response::new(self.clone())
+    }
+}

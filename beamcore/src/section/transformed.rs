@@ -1,0 +1,129 @@
+//! The transformed section: presentation only, no other result rests on it.
+
+use super::part::PlacedPart;
+use crate::error::Result;
+use crate::lookup;
+use crate::time::Time;
+use crate::units::{Area, Length, Modulus, Moment, SecondMoment, Stress};
+
+/// One part of a transformed section: its width is multiplied by n = E/E_ref about its own
+/// centroid, its height is kept.
+#[derive(Clone, Debug, PartialEq)]
+pub struct TransformedPart {
+    /// The name of the part.
+    pub name: String,
+    /// The modular ratio n = E/E_ref.
+    pub ratio: f64,
+    /// The transformed width, n b.
+    pub width: Length,
+    /// The least z of the outline.
+    pub bottom: Length,
+    /// The greatest z of the outline.
+    pub top: Length,
+}
+
+/// A section as if made of one chosen material.
+///
+/// Source: e.g. Beer and Johnston, Mechanics of Materials, ch. 4.
+#[derive(Clone, Debug, PartialEq)]
+pub struct TransformedSection {
+    reference: Modulus,
+    parts: Vec<TransformedPart>,
+    area: Area,
+    centroid_z: Length,
+    second_moment: SecondMoment,
+}
+
+impl TransformedSection {
+    pub(super) fn new(parts: &[PlacedPart], material: &str, time: Time) -> Result<Self> {
+        let Some(reference) = parts
+            .iter()
+            .map(PlacedPart::material)
+            .find(|m| m.name() == material)
+        else {
+            let mut names: Vec<_> = parts.iter().map(|part| part.material().name()).collect();
+            names.dedup();
+            return Err(lookup::unknown("material", material, &names).into());
+        };
+        let reference = reference.modulus_at(time);
+        let parts: Vec<_> = parts
+            .iter()
+            .map(|part| {
+                let ratio = part.material().modulus_at(time) / reference;
+                TransformedPart {
+                    name: part.name().into(),
+                    ratio,
+                    width: part.outline().width() * ratio,
+                    bottom: part.bottom(),
+                    top: part.top(),
+                }
+            })
+            .collect();
+        let area = |p: &TransformedPart| p.width * (p.top - p.bottom);
+        let middle = |p: &TransformedPart| (p.top + p.bottom) / 2.0;
+        let total: Area = parts.iter().map(area).sum();
+        let first: f64 = parts.iter().map(|p| (area(p) * middle(p)).si()).sum();
+        let centroid_z = Length::from_si(first / total.si());
+        let second_moment = parts
+            .iter()
+            .map(|p| {
+                let (height, arm) = (p.top - p.bottom, middle(p) - centroid_z);
+                p.width * height * height * height / 12.0 + area(p) * arm * arm
+            })
+            .sum();
+        Ok(Self {
+            reference,
+            parts,
+            area: total,
+            centroid_z,
+            second_moment,
+        })
+    }
+
+    /// The modulus of the reference material at the time asked for.
+    #[must_use]
+    pub const fn reference_modulus(&self) -> Modulus {
+        self.reference
+    }
+
+    /// The transformed parts.
+    #[must_use]
+    pub fn parts(&self) -> &[TransformedPart] {
+        &self.parts
+    }
+
+    /// Area: sum of n b h. Times the reference modulus it is EA.
+    #[must_use]
+    pub const fn area(&self) -> Area {
+        self.area
+    }
+
+    /// z of the centroid.
+    #[must_use]
+    pub const fn centroid_z(&self) -> Length {
+        self.centroid_z
+    }
+
+    /// Second moment of area about the horizontal axis through the centroid:
+    /// sum of n (b h^3/12 + b h dz^2). Times the reference modulus it is EI_yy.
+    #[must_use]
+    pub const fn second_moment(&self) -> SecondMoment {
+        self.second_moment
+    }
+
+    /// The stress in the real material of a part at height z under a moment (positive sagging):
+    /// -n M (z - z_centroid)/I, tension positive.
+    ///
+    /// # Errors
+    /// [`crate::ErrorKind::Lookup`] if there is no such part.
+    pub fn stress(&self, part: &str, z: Length, moment: Moment) -> Result<Stress> {
+        let Some(found) = self.parts.iter().find(|p| p.name == part) else {
+            let names: Vec<_> = self.parts.iter().map(|p| p.name.as_str()).collect();
+            return Err(lookup::unknown("part", part, &names).into());
+        };
+        let arm = (z - self.centroid_z).si();
+        Ok(Stress::from_si(
+            -found.ratio * moment.si() * arm / self.second_moment.si(),
+        ))
+    }
+}

@@ -1,0 +1,195 @@
+//! The solver against closed forms, and laws of the sweep.
+
+use super::beam::{Beam, LoadCase};
+use super::condition::Holds;
+use super::mechanism::Motion;
+use super::polynomial::PolynomialPiece;
+use super::relation::{Piece, Relation};
+use super::state::{HALF, STATES, Scale};
+use super::sweep::{ChainLoad, Sweep};
+use crate::math::polynomial::value;
+use nalgebra::{SMatrix, SVector};
+use proptest::prelude::*;
+
+fn near(value: f64, expected: f64, peak: f64, what: &str) {
+    assert!(
+        (value - expected).abs() <= 1e-12 * peak.abs(),
+        "{what}: {value} {expected}"
+    );
+}
+
+#[test]
+fn uniform_load_on_a_simple_span() {
+    let (l, ei, q) = (7.3, 2.4e6, 6.1e3);
+    let beam = Beam::new(vec![0.0, l], vec![Holds::DEFLECTION; 2], &[ei]).unwrap();
+    let solved = beam.solve(&LoadCase {
+        line: vec![q],
+        point: vec![0.0; 2],
+    });
+    let peak = 5.0 * q * l * l * l * l / (384.0 * ei);
+    near(
+        value(&solved.fields[0].deflection, 0.5),
+        peak,
+        peak,
+        "deflection",
+    );
+    near(
+        value(&solved.fields[0].moment, 0.5),
+        q * l * l / 8.0,
+        q * l * l / 8.0,
+        "moment",
+    );
+    near(
+        solved.reactions[0].force,
+        q * l / 2.0,
+        q * l / 2.0,
+        "reaction",
+    );
+    assert!(solved.residual < 1e-15, "{}", solved.residual);
+}
+
+#[test]
+fn point_load_on_a_fixed_span() {
+    // Both ends fixed, point load P at a: M_A = -P a b^2/L^2, clockwise couple at the left end.
+    let (a, b, ei, p) = (1.3, 2.9, 1.7e6, 9.0e3);
+    let l = a + b;
+    let beam = Beam::new(
+        vec![0.0, a, l],
+        vec![Holds::BOTH, Holds::NOTHING, Holds::BOTH],
+        &[ei, ei],
+    )
+    .unwrap();
+    let solved = beam.solve(&LoadCase {
+        line: vec![0.0; 2],
+        point: vec![0.0, p, 0.0],
+    });
+    let left = -p * a * b * b / (l * l);
+    near(solved.reactions[0].couple, left, left, "left couple");
+    near(
+        solved.reactions[2].couple,
+        p * a * a * b / (l * l),
+        left,
+        "right couple",
+    );
+    let w = p * a * a * a * b * b * b / (3.0 * ei * l * l * l);
+    near(
+        solved.fields[1].deflection[0],
+        w,
+        w,
+        "deflection under the load",
+    );
+}
+
+#[test]
+fn ten_thousand_equal_spans_keep_their_digits() {
+    // An inner span far from the ends behaves as one with both ends fixed.
+    let spans = 10_000_u32;
+    let (ei, q) = (1.0e6, 5.0e3);
+    let stations: Vec<f64> = (0..=spans).map(f64::from).collect();
+    let n = stations.len();
+    let beam = Beam::new(stations, vec![Holds::DEFLECTION; n], &vec![ei; n - 1]).unwrap();
+    let solved = beam.solve(&LoadCase {
+        line: vec![q; n - 1],
+        point: vec![0.0; n],
+    });
+    let middle = &solved.fields[5000];
+    near(middle.moment[0], -q / 12.0, q / 12.0, "support moment");
+    near(
+        value(&middle.deflection, 0.5),
+        q / (384.0 * ei),
+        q / (384.0 * ei),
+        "deflection",
+    );
+    assert!(solved.residual < 1e-12, "{}", solved.residual);
+}
+
+#[test]
+fn mechanisms_say_what_is_free() {
+    let free = |holds: Vec<Holds>| Beam::new(vec![0.0, 1.5, 4.0], holds, &[1.0e6; 2]).unwrap_err();
+    assert_eq!(
+        free(vec![Holds::NOTHING; 3]).to_string().split(' ').next(),
+        Some("free")
+    );
+    match free(vec![Holds::NOTHING, Holds::DEFLECTION, Holds::NOTHING]) {
+        Motion::Rotation(x) => assert!((x - 1.5).abs() < 1e-9, "{x}"),
+        Motion::Translation => panic!("a member on one support turns about it"),
+    }
+}
+
+#[test]
+fn a_chain_with_a_dependent_relation_is_singular() {
+    // The second relation repeats one equation: nothing then ties the states together.
+    let identity = SMatrix::<f64, 2, 2>::identity();
+    let mut broken = Relation {
+        left: -identity,
+        right: identity,
+    };
+    broken.left.row_mut(1).fill(0.0);
+    broken.right.row_mut(1).fill(0.0);
+    let whole = Relation {
+        left: -identity,
+        right: identity,
+    };
+    let left = SMatrix::<f64, 1, 2>::new(1.0, 0.0);
+    let singular = Sweep::<2, 1>::factor(left, &[whole, broken], &left);
+    let motion = singular.unwrap_err().motion;
+    assert!(motion.iter().any(|state| state.amax() > 0.0));
+}
+
+prop_compose! {
+    fn chain()(n in 1..6_usize)(
+        lengths in prop::collection::vec(0.2..3.0f64, n),
+        stiffness in prop::collection::vec(0.3..3.0f64, n),
+        line in prop::collection::vec(-5.0..5.0f64, n),
+        mix in prop::collection::vec(-1.0..1.0f64, n * STATES * STATES),
+    ) -> (Vec<f64>, Vec<f64>, Vec<f64>, Vec<f64>) {
+        (lengths, stiffness, line, mix)
+    }
+}
+
+proptest! {
+    /// The relations may be multiplied by any regular matrix: the solution is the same. So the
+    /// sweep does not rest on the special form that polynomial pieces give.
+    #[test]
+    fn mixing_the_relations_changes_nothing((lengths, stiffness, line, mix) in chain()) {
+        let scale = Scale { length: 1.0, stiffness: 1.0 };
+        let pieces: Vec<_> = lengths.iter().zip(&stiffness)
+            .map(|(&h, &ei)| PolynomialPiece::new(h, ei, scale)).collect();
+        let plain: Vec<_> = pieces.iter().map(Piece::relation).collect();
+        let sides: Vec<_> = pieces.iter().zip(&line).map(|(p, q)| p.load_side(q)).collect();
+        let mixer = |k: usize| {
+            SMatrix::<f64, STATES, STATES>::from_fn(|i, j| {
+                mix[(k * STATES + i) * STATES + j] + if i == j { 3.0 } else { 0.0 }
+            })
+        };
+        let mixed: Vec<_> = plain.iter().enumerate().map(|(k, r)| Relation {
+            left: mixer(k) * r.left, right: mixer(k) * r.right,
+        }).collect();
+        let mixed_sides: Vec<_> = sides.iter().enumerate().map(|(k, s)| mixer(k) * s).collect();
+        let end = super::condition::end(Holds::DEFLECTION);
+        let solve = |relations: &[Relation<STATES>], sides: Vec<SVector<f64, STATES>>| {
+            Sweep::<STATES, HALF>::factor(end, relations, &end).unwrap().solve(&ChainLoad {
+                left: SVector::zeros(), relations: sides, right: SVector::zeros(),
+            })
+        };
+        let (a, b) = (solve(&plain, sides), solve(&mixed, mixed_sides));
+        let peak = a.iter().map(|s| s.amax()).fold(0.0, f64::max);
+        for (x, y) in a.iter().zip(&b) {
+            prop_assert!((x - y).amax() <= 1e-10 * peak, "{} {}", x, y);
+        }
+    }
+
+    /// Cutting a piece in two changes nothing.
+    #[test]
+    fn a_cut_changes_nothing(cut in 0.05..0.95f64, q in 1.0..5.0f64) {
+        let whole = Beam::new(vec![0.0, 1.0], vec![Holds::BOTH, Holds::DEFLECTION], &[1.0]).unwrap();
+        let halves = Beam::new(vec![0.0, cut, 1.0],
+            vec![Holds::BOTH, Holds::NOTHING, Holds::DEFLECTION], &[1.0; 2]).unwrap();
+        let a = whole.solve(&LoadCase { line: vec![q], point: vec![0.0; 2] });
+        let b = halves.solve(&LoadCase { line: vec![q; 2], point: vec![0.0; 3] });
+        let peak = q / 185.0;
+        let at_cut = value(&a.fields[0].deflection, cut);
+        prop_assert!((at_cut - b.fields[1].deflection[0]).abs() <= 1e-12 * peak);
+        prop_assert!((a.reactions[0].couple - b.reactions[0].couple).abs() <= 1e-12 * q);
+    }
+}

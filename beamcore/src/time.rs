@@ -1,0 +1,54 @@
+//! The times at which results are given.
+
+use crate::error::{ErrorKind, Problem};
+use std::fmt;
+use std::str::FromStr;
+
+/// When a result holds.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
+pub enum Time {
+    /// The day the load comes on: every material with its short-term modulus.
+    Initial,
+    /// The end of the life: the quasi-permanent share of the load with effective moduli, the rest
+    /// with short-term moduli.
+    Final,
+}
+
+impl Time {
+    /// Both times, in order.
+    pub const ALL: [Self; 2] = [Self::Initial, Self::Final];
+
+    /// The word used in documents: `initial` or `final`.
+    #[must_use]
+    pub const fn name(self) -> &'static str {
+        match self {
+            Self::Initial => "initial",
+            Self::Final => "final",
+        }
+    }
+}
+
+impl fmt::Display for Time {
+    fn fmt(&self, f: &mut fmt::Formatter<'_>) -> fmt::Result {
+        f.write_str(self.name())
+    }
+}
+
+impl FromStr for Time {
+    type Err = crate::Error;
+
+    fn from_str(text: &str) -> Result<Self, Self::Err> {
+        Self::ALL
+            .into_iter()
+            .find(|time| time.name() == text)
+            .ok_or_else(|| {
+                Problem::new(
+                    ErrorKind::Name,
+                    "time",
+                    format!("\"{text}\""),
+                    "one of \"initial\", \"final\"",
+                )
+                .into()
+            })
+    }
+}
