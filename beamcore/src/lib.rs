@@ -33,10 +33,14 @@ mod check;
 pub mod constants;
 mod error;
 pub mod field;
+#[cfg(feature = "document")]
+pub mod job;
 mod lookup;
 pub mod material;
 mod math;
 pub mod member;
+#[cfg(feature = "document")]
+pub mod outcome;
 mod path;
 pub mod response;
 pub mod section;
@@ -44,5 +48,8 @@ mod solve;
 pub mod stress;
 pub mod time;
 pub mod units;
+
+/// The version of this library.
+pub const VERSION: &str = env!("CARGO_PKG_VERSION");
 
 pub use error::{Error, ErrorKind, Problem, Result};

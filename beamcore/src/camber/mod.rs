@@ -7,6 +7,7 @@ pub use rounding::Rounding;
 use crate::check;
 use crate::error::{Error, ErrorKind, Problem, Result};
 use crate::lookup;
+use crate::member::{Combination, Support};
 use crate::path;
 use crate::response::Response;
 use crate::time::Time;
@@ -34,6 +35,57 @@ pub struct CamberPlan {
     pub rounding: Rounding,
     /// The number of equal divisions of the chord; ordinates are given at their ends.
     pub divisions: u32,
+}
+
+impl CamberPlan {
+    /// Everything that is wrong with the plan for a member of these supports and combinations.
+    pub(crate) fn problems(
+        &self,
+        supports: &[Support],
+        combinations: &[Combination],
+    ) -> Vec<Problem> {
+        let mut problems = Vec::new();
+        let names: Vec<_> = combinations.iter().map(Combination::name).collect();
+        known(&mut problems, "combination", &self.combination, &names);
+        check::between(&mut problems, self.fraction, 0.0, 2.0, "camber.fraction");
+        let names: Vec<_> = supports.iter().map(Support::name).collect();
+        let chord = [("from", &self.from), ("to", &self.to)]
+            .map(|(key, end)| known(&mut problems, key, end, &names).map(|i| supports[i].at()));
+        if let [Some(from), Some(to)] = chord
+            && to <= from
+        {
+            problems.push(Problem::new(
+                ErrorKind::Position,
+                "camber.to",
+                format!("\"{}\" at {to}", self.to),
+                format!("a support to the right of \"{}\" at {from}", self.from),
+            ));
+        }
+        check::positive(&mut problems, self.step, "camber.step");
+        if !(1..=MOST_DIVISIONS).contains(&self.divisions) {
+            problems.push(Problem::new(
+                ErrorKind::Value,
+                "camber.divisions",
+                self.divisions.to_string(),
+                format!("a number from 1 to {MOST_DIVISIONS}"),
+            ));
+        }
+        problems
+    }
+}
+
+/// The position of a name among those that can be meant; a problem if it is not there.
+fn known(problems: &mut Vec<Problem>, key: &str, name: &str, names: &[&str]) -> Option<usize> {
+    let found = names.iter().position(|known| *known == name);
+    if found.is_none() {
+        problems.push(Problem::new(
+            ErrorKind::Name,
+            path::key("camber", key),
+            format!("the unknown name \"{name}\""),
+            format!("one of {}", lookup::listed(names)),
+        ));
+    }
+    found
 }
 
 /// One ordinate of a camber.
@@ -64,44 +116,10 @@ impl Response {
     /// All of: an unknown combination or support, a chord that does not run from left to right, a
     /// fraction outside 0 to 2, a step that is not positive, no division or more than 1000.
     pub fn camber(&self, plan: &CamberPlan) -> Result<Camber> {
-        let mut problems = Vec::new();
-        check::between(&mut problems, plan.fraction, 0.0, 2.0, "camber.fraction");
-        check::positive(&mut problems, plan.step, "camber.step");
-        if !(1..=MOST_DIVISIONS).contains(&plan.divisions) {
-            problems.push(Problem::new(
-                ErrorKind::Value,
-                "camber.divisions",
-                plan.divisions.to_string(),
-                format!("a number from 1 to {MOST_DIVISIONS}"),
-            ));
-        }
-        let from = self.chord_end(&mut problems, &plan.from, "from");
-        let to = self.chord_end(&mut problems, &plan.to, "to");
-        if let (Some(from), Some(to)) = (from, to)
-            && to <= from
-        {
-            problems.push(Problem::new(
-                ErrorKind::Position,
-                path::key("camber", "to"),
-                format!("\"{}\" at {to}", plan.to),
-                format!("a support to the right of \"{}\" at {from}", plan.from),
-            ));
-        }
-        let names: Vec<_> = self
-            .member()
-            .combinations()
-            .iter()
-            .map(|c| c.name())
-            .collect();
-        if !names.contains(&plan.combination.as_str()) {
-            problems.push(Problem::new(
-                ErrorKind::Name,
-                path::key("camber", "combination"),
-                format!("the unknown combination \"{}\"", plan.combination),
-                format!("one of {}", lookup::listed(&names)),
-            ));
-        }
-        Error::check(problems)?;
+        let supports = self.member().supports();
+        Error::check(plan.problems(supports, self.member().combinations()))?;
+        let end = |name: &str| supports.iter().find(|s| s.name() == name).map(Support::at);
+        let (from, to) = (end(&plan.from), end(&plan.to));
         let (from, to) = (from.expect("checked above"), to.expect("checked above"));
         let line = self.deflection(&plan.combination, plan.time)?;
         // The chord's ends are supports, whose deflection is zero.
@@ -123,21 +141,6 @@ impl Response {
             chord: (from, to),
             ordinates,
         })
-    }
-
-    fn chord_end(&self, problems: &mut Vec<Problem>, name: &str, key: &str) -> Option<Length> {
-        let supports = self.member().supports();
-        let found = supports.iter().find(|support| support.name() == name);
-        if found.is_none() {
-            let names: Vec<_> = supports.iter().map(|support| support.name()).collect();
-            problems.push(Problem::new(
-                ErrorKind::Name,
-                path::key("camber", key),
-                format!("the unknown support \"{name}\""),
-                format!("one of {}", lookup::listed(&names)),
-            ));
-        }
-        found.map(|support| support.at())
     }
 }
 

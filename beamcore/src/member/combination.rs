@@ -44,7 +44,7 @@ impl Combination {
 /// - quasi-permanent: sum of G + psi_2 Q
 /// - characteristic: sum of G + leading Q + sum of psi_0 Q
 /// - fundamental: 1.35 sum of G + 1.5 leading Q + 1.5 sum of psi_0 Q
-pub(super) fn all(actions: &[Action]) -> Vec<Combination> {
+pub(crate) fn all(actions: &[Action]) -> Vec<Combination> {
     let plain = |name: &str, factor: fn(&Action) -> f64| Combination {
         name: name.into(),
         factors: actions.iter().map(factor).collect(),

@@ -1,0 +1,175 @@
+//! What rests on which rule, what was assumed, what deserves a look, what was not checked.
+
+use super::build::distinct;
+use super::document::{CombinationOutcome, OutcomeDocument};
+use crate::constants::GRAVITY;
+use crate::job::Job;
+use crate::member::{ActionKind, GAMMA_PERMANENT, GAMMA_VARIABLE, Load, Member, SupportKind};
+use crate::time::Time;
+
+/// The rules that the results rest on.
+pub(super) fn rules() -> Vec<String> {
+    vec![
+        "Combinations: EN 1990:2002 6.4.3.2 eq. 6.10 and 6.5.3 (from memory)".into(),
+        format!(
+            "Partial factors: {GAMMA_PERMANENT} permanent, {GAMMA_VARIABLE} variable, \
+             EN 1990:2002 Table A1.2(B), recommended values (from memory)"
+        ),
+        "Final state: (combination - quasi-permanent share) with E, plus the quasi-permanent \
+         share with E/(1 + creep factor) of each material"
+            .into(),
+    ]
+}
+
+/// What was assumed.
+pub(super) fn assumptions(job: &Job) -> Vec<String> {
+    let member = job.member();
+    let mut notes: Vec<String> = vec![
+        "Plane sections stay plane; materials are linear elastic; deflections are small".into(),
+        "The parts are joined rigidly, without slip".into(),
+        "Deflection by bending only; shear deflection is left out".into(),
+        "The member bends about the horizontal axis only; it is held sideways".into(),
+        "The axial and longitudinal restraint of supports causes no axial force".into(),
+    ];
+    if member
+        .actions()
+        .iter()
+        .any(|action| action.loads().contains(&Load::SelfWeight))
+    {
+        notes.push(format!(
+            "Self-weight from mean densities with g = {GRAVITY} m/s2"
+        ));
+    }
+    let holding = |kind| kind == SupportKind::Pin || kind == SupportKind::Fixed;
+    if member
+        .supports()
+        .iter()
+        .filter(|support| holding(support.kind()))
+        .count()
+        > 1
+    {
+        notes.push(
+            "More than one support holds the axis; small deflections do not stretch it".into(),
+        );
+    }
+    for material in distinct(member.section()) {
+        notes.push(format!(
+            "Creep of \"{}\": factor {} ({})",
+            material.name(),
+            material.creep().value(),
+            material.creep().basis()
+        ));
+    }
+    if let Some(plan) = job.camber() {
+        notes.push(format!(
+            "Camber: a parabola whose rise is {} of the deflection at the middle of the chord, \
+             {}, {}, rounded ({}) to {}",
+            plan.fraction,
+            plan.combination,
+            plan.time,
+            plan.rounding.name(),
+            plan.step
+        ));
+    }
+    notes
+}
+
+/// What the engineer should look at.
+pub(super) fn warnings(member: &Member, document: &OutcomeDocument) -> Vec<String> {
+    let mut notes: Vec<String> = Vec::new();
+    for (combination, time, results) in each(document) {
+        for stress in &results.stresses {
+            if let Some(utilisation) = &stress.utilisation
+                && utilisation.value > 1.0
+            {
+                notes.push(format!(
+                    "OVERSTRESSED: part \"{}\" is used to {:.2} of its design strength ({}, {time})",
+                    stress.name, utilisation.value, combination.name
+                ));
+            }
+        }
+        for reaction in results
+            .reactions
+            .iter()
+            .filter(|reaction| reaction.force_N < 0.0)
+        {
+            notes.push(format!(
+                "UPLIFT: the support \"{}\" must hold the member down ({}, {time})",
+                reaction.name, combination.name
+            ));
+        }
+    }
+    let section = &document.section.initial;
+    let (yy, yz) = (
+        section.bending_stiffness_yy_Nm2,
+        section.bending_stiffness_yz_Nm2,
+    );
+    if yz.abs() > 1e-9 * yy {
+        notes.push(
+            "The section has no axis of symmetry: left free sideways it would also bend \
+             sideways, and stresses would be others"
+                .into(),
+        );
+    }
+    let variable = member
+        .actions()
+        .iter()
+        .any(|action| matches!(action.kind(), ActionKind::Variable(_)));
+    if variable && member.supports().len() > 2 {
+        notes.push(
+            "Variable actions act on the whole of their loads at once: the worst pattern of \
+             loaded and unloaded spans was not searched"
+                .into(),
+        );
+    }
+    for material in distinct(member.section()) {
+        if let Some(origin) = material.origin() {
+            notes.push(format!(
+                "Check before use: E and density of \"{}\" are of class {origin}",
+                material.name()
+            ));
+        }
+    }
+    notes.extend(member.section().notes().iter().cloned());
+    notes.extend(member.notes().iter().cloned());
+    notes
+}
+
+/// What was not checked.
+pub(super) fn not_checked(member: &Member) -> Vec<String> {
+    let mut notes: Vec<String> = Vec::new();
+    for part in member.section().placed() {
+        if part.material().strength().is_none() {
+            notes.push(format!(
+                "Strength of part \"{}\": its material has no design strengths",
+                part.name()
+            ));
+        }
+    }
+    notes.extend(
+        [
+            "Shear stress in the parts and between them",
+            "Fasteners and glue lines that make the parts act together",
+            "Transfer of load from part to part, and at the ends of parts",
+            "Bearing at supports and under point loads",
+            "Lateral buckling, local buckling and torsion",
+            "Limits of deflection, vibration",
+            "Fire, corrosion, moisture, fatigue, accidental actions",
+            "Unfavourable patterns of variable actions, favourable permanent actions",
+        ]
+        .map(String::from),
+    );
+    notes
+}
+
+/// Every combination at every time.
+pub(super) fn each(
+    document: &OutcomeDocument,
+) -> impl Iterator<Item = (&CombinationOutcome, Time, &super::document::ResultsOutcome)> {
+    document.combinations.iter().flat_map(|combination| {
+        [
+            (combination, Time::Initial, &combination.initial),
+            (combination, Time::Final, &combination.end),
+        ]
+    })
+}

@@ -1,0 +1,264 @@
+//! The outcome as a plain text of 80 columns, the governing results first.
+
+use super::document::{OutcomeDocument, ResultsOutcome};
+use super::figure::figure;
+use super::notes::each;
+use super::page::Page;
+use crate::time::Time;
+
+/// The summary of an outcome.
+pub(super) fn text(outcome: &OutcomeDocument) -> String {
+    let mut page = Page::default();
+    page.title(&format!("{} - {}", outcome.job.mark, outcome.job.title));
+    page.line(&format!(
+        "Calculated by beamcore {}. All results are the engineer's responsibility.",
+        outcome.beamcore
+    ));
+    governing(&mut page, outcome);
+    description(&mut page, outcome);
+    deflections(&mut page, outcome);
+    stresses(&mut page, outcome);
+    strengths(&mut page, outcome);
+    reactions(&mut page, outcome);
+    camber(&mut page, outcome);
+    page.list("ASSUMED", &outcome.assumptions);
+    page.list("RULES", &outcome.rules);
+    page.list("LOOK AT", &outcome.warnings);
+    page.list("NOT CHECKED", &outcome.not_checked);
+    page.text()
+}
+
+fn governing(page: &mut Page, outcome: &OutcomeDocument) {
+    page.heading("GOVERNING");
+    let mut worst: Option<(f64, String)> = None;
+    for (combination, time, results) in each(outcome) {
+        for stress in &results.stresses {
+            let Some(utilisation) = &stress.utilisation else {
+                continue;
+            };
+            if worst
+                .as_ref()
+                .is_none_or(|(value, _)| utilisation.value > *value)
+            {
+                let place = format!(
+                    "{} of \"{}\" at {} m, {} combination, {time}",
+                    figure(utilisation.value, 2),
+                    stress.name,
+                    figure(utilisation.at_m, 3),
+                    combination.name
+                );
+                worst = Some((utilisation.value, place));
+            }
+        }
+    }
+    match worst {
+        Some((value, place)) => {
+            let verdict = if value > 1.0 {
+                "OVERSTRESSED"
+            } else {
+                "within its strength"
+            };
+            page.line(&format!("Bending strength used to {place}: {verdict}"));
+        }
+        None => page.line("Strength: no design strengths were given, none was checked"),
+    }
+    for (combination, time, results) in each(outcome) {
+        if combination.name == "quasi-permanent" && time == Time::Final {
+            let greatest = &results.deflection.greatest;
+            page.line(&format!(
+                "Lasting deflection {} mm at {} m, quasi-permanent combination, final",
+                figure(greatest.value_m * 1e3, 1),
+                figure(greatest.at_m, 3)
+            ));
+        }
+    }
+}
+
+fn description(page: &mut Page, outcome: &OutcomeDocument) {
+    page.heading("MEMBER");
+    let member = &outcome.member;
+    let mass = member
+        .mass_kg
+        .map_or_else(String::new, |mass| format!(", {} kg", figure(mass, 0)));
+    page.line(&format!("Length {} m{mass}", figure(member.length_m, 3)));
+    for support in &outcome.job.member.supports {
+        page.line(&format!(
+            "Support \"{}\": {}",
+            support.name,
+            support.described()
+        ));
+    }
+    page.blank();
+    page.line("Part              Material          Width x height      E now   E final   Share");
+    page.line("                                            mm         N/mm2     N/mm2   of EI");
+    for part in &outcome.section.parts {
+        let size = format!(
+            "{} x {}",
+            figure((part.right_m - part.left_m) * 1e3, 1),
+            figure((part.top_m - part.bottom_m) * 1e3, 1)
+        );
+        page.line(&format!(
+            "{:<17} {:<17} {size:<16} {:>8}  {:>8}   {:>4} %",
+            short(&part.name),
+            short(&part.material),
+            figure(part.initial.modulus_Pa / 1e6, 0),
+            figure(part.end.modulus_Pa / 1e6, 0),
+            figure(part.initial.share * 100.0, 0),
+        ));
+    }
+    let (now, end) = (&outcome.section.initial, &outcome.section.end);
+    page.line(&format!(
+        "Bending stiffness EI {} kN m2 now, {} kN m2 final",
+        figure(now.bending_stiffness_yy_Nm2 / 1e3, 1),
+        figure(end.bending_stiffness_yy_Nm2 / 1e3, 1)
+    ));
+    page.line(&format!(
+        "Elastic centroid at z = {} mm now, {} mm final",
+        figure(now.centroid_z_m * 1e3, 1),
+        figure(end.centroid_z_m * 1e3, 1)
+    ));
+    page.blank();
+    for action in &outcome.job.actions {
+        page.line(&format!(
+            "Action \"{}\": {}",
+            action.name,
+            action.described()
+        ));
+    }
+}
+
+fn deflections(page: &mut Page, outcome: &OutcomeDocument) {
+    page.heading("GREATEST DEFLECTION (downward positive)");
+    page.line("Combination                           instant             final");
+    for combination in &outcome.combinations {
+        let cell = |results: &ResultsOutcome| {
+            let greatest = &results.deflection.greatest;
+            let (value, at) = (figure(greatest.value_m * 1e3, 1), figure(greatest.at_m, 2));
+            format!("{value:>7} mm at {at} m")
+        };
+        page.line(&format!(
+            "{:<30} {:>20} {:>20}",
+            short_to(&combination.name, 30),
+            cell(&combination.initial),
+            cell(&combination.end)
+        ));
+    }
+}
+
+fn stresses(page: &mut Page, outcome: &OutcomeDocument) {
+    page.heading("GREATEST NORMAL STRESS, N/mm2 (tension positive)");
+    page.line("Part              Combination, time            Tension  Compression  Used");
+    for name in outcome.section.parts.iter().map(|part| &part.name) {
+        for (combination, time, results) in each(outcome) {
+            if combination.name == "permanent" {
+                continue;
+            }
+            let Some(stress) = results.stresses.iter().find(|stress| stress.name == *name) else {
+                continue;
+            };
+            let used = stress
+                .utilisation
+                .as_ref()
+                .map_or_else(String::new, |u| figure(u.value, 2));
+            page.line(&format!(
+                "{:<17} {:<26} {:>9} {:>12} {used:>5}",
+                short(name),
+                short_to(&format!("{}, {time}", combination.name), 26),
+                figure(stress.tension.value_Pa / 1e6, 2),
+                figure(stress.compression.value_Pa / 1e6, 2),
+            ));
+        }
+    }
+}
+
+/// The design strengths that the stresses were compared with, as they were given.
+fn strengths(page: &mut Page, outcome: &OutcomeDocument) {
+    for (name, material) in &outcome.job.materials {
+        if let Some(strength) = &material.design_strength {
+            page.line(&format!(
+                "Design strength of \"{name}\": {}",
+                strength.described()
+            ));
+        }
+    }
+}
+
+fn reactions(page: &mut Page, outcome: &OutcomeDocument) {
+    page.heading("REACTIONS (force upward positive, couple clockwise positive)");
+    page.line("Support           Combination                   instant        final");
+    for support in outcome
+        .job
+        .member
+        .supports
+        .iter()
+        .map(|support| &support.name)
+    {
+        for combination in &outcome.combinations {
+            let of = |results: &ResultsOutcome| {
+                let found = results
+                    .reactions
+                    .iter()
+                    .find(|reaction| reaction.name == *support);
+                found.map_or((0.0, 0.0), |reaction| {
+                    (reaction.force_N, reaction.couple_Nm)
+                })
+            };
+            let (now, end) = (of(&combination.initial), of(&combination.end));
+            let mut row = |now: f64, end: f64, unit: &str| {
+                page.line(&format!(
+                    "{:<17} {:<24} {:>9} {unit} {:>9} {unit}",
+                    short(support),
+                    short_to(&combination.name, 24),
+                    figure(now / 1e3, 2),
+                    figure(end / 1e3, 2),
+                ));
+            };
+            row(now.0, end.0, "kN  ");
+            if now.1 != 0.0 || end.1 != 0.0 {
+                row(now.1, end.1, "kN m");
+            }
+        }
+    }
+}
+
+fn camber(page: &mut Page, outcome: &OutcomeDocument) {
+    let Some(camber) = &outcome.camber else {
+        return;
+    };
+    page.heading("CAMBER TO BUILD IN");
+    page.line(&format!(
+        "Rise {} mm at the middle of the chord (wanted {} mm), {}",
+        figure(camber.rise_m * 1e3, 1),
+        figure(camber.target_m * 1e3, 1),
+        camber.shape
+    ));
+    page.line(&format!(
+        "Chord from {} m to {} m of the member; ordinates upward from the chord,",
+        figure(camber.chord_from_m, 3),
+        figure(camber.chord_to_m, 3)
+    ));
+    page.line("member unloaded, as when it lies on its side");
+    page.blank();
+    page.line("Station from the left end of the chord, m      Ordinate, mm");
+    for ordinate in &camber.ordinates {
+        page.line(&format!(
+            "{:>20} {:>36}",
+            figure(ordinate.station_m, 3),
+            figure(ordinate.ordinate_m * 1e3, 1)
+        ));
+    }
+}
+
+fn short(name: &str) -> String {
+    short_to(name, 17)
+}
+
+/// A name cut to a width, with a mark where it was cut.
+fn short_to(name: &str, width: usize) -> String {
+    if name.chars().count() <= width {
+        return name.into();
+    }
+    let mut cut: String = name.chars().take(width - 2).collect();
+    cut.push_str("..");
+    cut
+}
