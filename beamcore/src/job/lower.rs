@@ -14,7 +14,7 @@ use crate::error::{Error, ErrorKind, Problem};
 use crate::lookup;
 use crate::material::Material;
 use crate::member::{
-    self, Action, ActionKind, CombinationFactors, Load, Member, Support, SupportKind,
+    self, Action, ActionKind, CombinationFactors, Known, Load, Member, Support, SupportKind,
 };
 use crate::path;
 use crate::section::{Part, Section, Side, rectangle};
@@ -26,27 +26,27 @@ pub(super) fn lower(document: &JobDocument) -> Result<(Member, Option<CamberPlan
     let materials = lower_material::all(&document.materials, &mut problems);
     let section = section(document, &materials, &mut problems);
     let length = document.member.length.value();
-    let supports: Option<Vec<_>> = document.member.supports.iter().map(support).collect();
-    let actions: Option<Vec<_>> = document.actions.iter().map(action).collect();
+    let supports: Vec<_> = document.member.supports.iter().filter_map(support).collect();
+    let actions: Vec<_> = document.actions.iter().filter_map(action).collect();
+    let known_supports = Known {
+        entries: &supports,
+        is_complete: supports.len() == document.member.supports.len(),
+    };
+    let known_actions =
+        Known { entries: &actions, is_complete: actions.len() == document.actions.len() };
+    let all_known = known_supports.is_complete && known_actions.is_complete;
+    problems.extend(member::problems_of(section.as_ref(), length, known_supports, known_actions));
     let camber = document.camber.as_ref().map(camber);
-    if let (Some(supports), Some(actions)) = (&supports, &actions) {
-        if let Some(length) = length {
-            let of_member = member::problems_of(section.as_ref(), length, supports, actions);
-            problems.extend(of_member);
-        }
-        if let Some(Some(plan)) = &camber {
-            problems.extend(plan.problems(supports, &member::combinations_of(actions)));
-        }
+    if let Some(Some(plan)) = &camber
+        && all_known
+    {
+        problems.extend(plan.problems(&supports, &member::combinations_of(&actions)));
     }
-    if !problems.is_empty() {
+    if !problems.is_empty() || !all_known {
         return Err(problems);
     }
     // Whatever is still unknown was told by the check against the schema.
-    let (Some(section), Some(length), Some(supports), Some(actions)) =
-        (section, length, supports, actions)
-    else {
-        return Err(problems);
-    };
+    let (Some(section), Some(length)) = (section, length) else { return Err(problems) };
     let plan = Member::of_length(section, length);
     let plan = supports.into_iter().fold(plan, member::MemberPlan::support);
     let plan = actions.into_iter().fold(plan, member::MemberPlan::action);

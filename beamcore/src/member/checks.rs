@@ -9,28 +9,49 @@ use crate::path;
 use crate::section::Section;
 use crate::units::Length;
 
-/// All problems of a member; without a section, those that do not concern it.
+/// A list as far as it is known: an entry whose text cannot be read is left out of it.
+#[derive(Clone, Copy)]
+pub(crate) struct Known<'a, T> {
+    /// The entries that are known.
+    pub(crate) entries: &'a [T],
+    /// Whether these are all of them.
+    pub(crate) is_complete: bool,
+}
+
+impl<'a, T> From<&'a [T]> for Known<'a, T> {
+    fn from(entries: &'a [T]) -> Self {
+        Self { entries, is_complete: true }
+    }
+}
+
+/// All problems of a member, as far as its section, length, supports and actions are known.
 pub(crate) fn problems_of(
     section: Option<&Section>,
-    length: Length,
-    supports: &[Support],
-    actions: &[Action],
+    length: Option<Length>,
+    supports: Known<'_, Support>,
+    actions: Known<'_, Action>,
 ) -> Vec<Problem> {
     let mut problems = Vec::new();
-    check::positive(&mut problems, length, "member.length");
+    if let Some(length) = length {
+        check::positive(&mut problems, length, "member.length");
+    }
     // Without a usable length nothing can lie inside or outside the member.
-    let length = problems.is_empty().then_some(length);
+    let length = length.filter(|_| problems.is_empty());
     check_supports(&mut problems, length, supports);
     check_actions(&mut problems, length, actions);
     if let Some(section) = section {
-        check_self_weight(&mut problems, section, actions);
+        check_self_weight(&mut problems, section, actions.entries);
     }
     problems
 }
 
-fn check_supports(problems: &mut Vec<Problem>, length: Option<Length>, supports: &[Support]) {
+fn check_supports(
+    problems: &mut Vec<Problem>,
+    length: Option<Length>,
+    Known { entries: supports, is_complete }: Known<'_, Support>,
+) {
     let all = "member.supports";
-    if supports.is_empty() {
+    if supports.is_empty() && is_complete {
         problems.push(Problem::new(
             ErrorKind::Missing,
             all,
@@ -83,8 +104,12 @@ fn at(support: &Support) -> String {
     path::key(&path::named("member.supports", support.name()), "at")
 }
 
-fn check_actions(problems: &mut Vec<Problem>, length: Option<Length>, actions: &[Action]) {
-    if actions.is_empty() {
+fn check_actions(
+    problems: &mut Vec<Problem>,
+    length: Option<Length>,
+    Known { entries: actions, is_complete }: Known<'_, Action>,
+) {
+    if actions.is_empty() && is_complete {
         problems.push(Problem::new(
             ErrorKind::Missing,
             "actions",

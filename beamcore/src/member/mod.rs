@@ -13,7 +13,7 @@ pub use plan::MemberPlan;
 pub use support::{Support, SupportKind};
 
 #[cfg(feature = "document")]
-pub(crate) use checks::problems_of;
+pub(crate) use checks::{Known, problems_of};
 #[cfg(feature = "document")]
 pub(crate) use combination::{GAMMA_PERMANENT, GAMMA_VARIABLE, all as combinations_of};
 pub(crate) use layout::load_case;

@@ -48,9 +48,9 @@ impl MemberPlan {
     pub fn check(self) -> Result<Member> {
         let problems = checks::problems_of(
             Some(&self.section),
-            self.length,
-            &self.supports,
-            &self.actions,
+            Some(self.length),
+            self.supports.as_slice().into(),
+            self.actions.as_slice().into(),
         );
         Error::check(problems)?;
         Member::from_plan(self)
