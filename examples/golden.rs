@@ -21,7 +21,11 @@ fn main() -> ExitCode {
         Ok((answers, misses)) => {
             print!("{answers}");
             misses.iter().for_each(|miss| eprintln!("{miss}"));
-            if misses.is_empty() { ExitCode::SUCCESS } else { ExitCode::FAILURE }
+            if misses.is_empty() {
+                ExitCode::SUCCESS
+            } else {
+                ExitCode::FAILURE
+            }
         }
         Err(error) => {
             eprintln!("{error}");

@@ -16,21 +16,30 @@ fn read(name: &str) -> String {
 #[test]
 fn every_wrong_job_gives_its_message() {
     let cases = read("cases.txt");
-    let cases: Vec<_> = cases.lines().filter(|line| !line.starts_with('#')).collect();
+    let cases: Vec<_> = cases
+        .lines()
+        .filter(|line| !line.starts_with('#'))
+        .collect();
     assert!(cases.len() >= 50);
     for case in cases {
         let error = match Job::read(&read(&format!("{case}.toml")), Format::Toml) {
             Err(error) => error,
             Ok(_) => panic!("{case} was taken for a good job"),
         };
-        assert_eq!(error.to_string(), read(&format!("{case}.message")).trim_end(), "{case}");
+        assert_eq!(
+            error.to_string(),
+            read(&format!("{case}.message")).trim_end(),
+            "{case}"
+        );
     }
 }
 
 #[test]
 fn the_kinds_are_the_ones_that_bindings_rely_on() {
     let kind = |case: &str| {
-        Job::read(&read(&format!("{case}.toml")), Format::Toml).unwrap_err().kind()
+        Job::read(&read(&format!("{case}.toml")), Format::Toml)
+            .unwrap_err()
+            .kind()
     };
     assert_eq!(kind("zero-size"), ErrorKind::Value);
     assert_eq!(kind("unknown-class"), ErrorKind::Name);
@@ -65,10 +74,15 @@ fn a_truncated_document_is_an_error_at_every_place() {
     for end in 0..last_table {
         // Before the actions are complete nothing can be a whole job.
         if whole.is_char_boundary(end) && end < whole.find("[[actions]]").unwrap() {
-            assert!(Job::read(&whole[..end], Format::Toml).is_err(), "cut at {end}");
+            assert!(
+                Job::read(&whole[..end], Format::Toml).is_err(),
+                "cut at {end}"
+            );
         }
     }
-    let json = Job::read(&whole, Format::Toml).unwrap().to_text(Format::Json);
+    let json = Job::read(&whole, Format::Toml)
+        .unwrap()
+        .to_text(Format::Json);
     for end in (0..json.len()).filter(|&end| json.is_char_boundary(end)) {
         let cut = Job::read(&json[..end], Format::Json);
         assert_eq!(cut.unwrap_err().kind(), ErrorKind::Syntax, "cut at {end}");

@@ -17,7 +17,10 @@ fn job_text_gives_the_outside_values() {
     assert!(misses.is_empty(), "{}", misses.join("\n"));
     assert!(answers.lines().count() > 900);
     for case in runner::cases(folder()) {
-        let outside = runner::expected(folder(), &case).iter().filter(|e| e.numbers.is_some()).count();
+        let outside = runner::expected(folder(), &case)
+            .iter()
+            .filter(|e| e.numbers.is_some())
+            .count();
         assert!(outside >= 4, "{case} has too few outside values");
     }
 }
@@ -25,7 +28,10 @@ fn job_text_gives_the_outside_values() {
 #[test]
 fn the_typed_way_gives_the_same_bits() {
     let (answers, _) = runner::job(folder()).unwrap();
-    let split = |line: &str| line.rsplit_once('\t').map(|(k, b)| (k.to_owned(), b.to_owned()));
+    let split = |line: &str| {
+        line.rsplit_once('\t')
+            .map(|(k, b)| (k.to_owned(), b.to_owned()))
+    };
     let by_path: HashMap<_, _> = answers.lines().filter_map(split).collect();
     let typed = runner::typed().unwrap();
     assert!(typed.lines().count() > 250);

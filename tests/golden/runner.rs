@@ -35,15 +35,25 @@ pub fn cases(folder: &Path) -> Vec<String> {
 pub fn expected(folder: &Path, case: &str) -> Vec<Expected> {
     let parse = |line: String| {
         let mut rest = line.splitn(4, ' ');
-        let numbers: Vec<_> = rest.by_ref().take(3).map(|word| word.parse::<f64>().ok()).collect();
+        let numbers: Vec<_> = rest
+            .by_ref()
+            .take(3)
+            .map(|word| word.parse::<f64>().ok())
+            .collect();
         let numbers = match numbers[..] {
             [Some(value), Some(peak), Some(tolerance)] => Some([value, peak, tolerance]),
             [None, None, None] => None,
             _ => panic!("{case}: a line must have three numbers or three dashes: {line}"),
         };
-        Expected { path: rest.next().expect("a line ends with a path").to_owned(), numbers }
+        Expected {
+            path: rest.next().expect("a line ends with a path").to_owned(),
+            numbers,
+        }
     };
-    lines(&folder.join(format!("{case}.expect"))).into_iter().map(parse).collect()
+    lines(&folder.join(format!("{case}.expect")))
+        .into_iter()
+        .map(parse)
+        .collect()
 }
 
 fn lines(file: &Path) -> Vec<String> {
@@ -64,7 +74,9 @@ pub fn job(folder: &Path) -> Result<(String, Vec<String>)> {
             if let Some([expected, peak, tolerance]) = numbers
                 && !((value - expected).abs() <= tolerance * peak)
             {
-                misses.push(format!("{case} {path}: {value} is not {expected} within {tolerance}"));
+                misses.push(format!(
+                    "{case} {path}: {value} is not {expected} within {tolerance}"
+                ));
             }
         }
     }

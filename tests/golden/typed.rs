@@ -38,7 +38,11 @@ fn two_span() -> Result<Member> {
     let brass = Material::new("brass", 100.GPa(), Creep::factor(0.0)).density(8500.kg_per_m3());
     let beam = Part::new("beam", rectangle(120.mm(), 240.mm()), oak);
     let strip = Part::new("strip", rectangle(100.mm(), 6.mm()), brass).below(&beam);
-    let store = CombinationFactors { psi_0: 1.0, psi_1: 0.9, psi_2: 0.8 };
+    let store = CombinationFactors {
+        psi_0: 1.0,
+        psi_1: 0.9,
+        psi_2: 0.8,
+    };
     Member::of_length(Section::of([beam, strip])?, 7.5.m())
         .support(Support::fixed("wall", 0.m()))
         .support(Support::roller("post", 3.2.m()))
@@ -49,7 +53,11 @@ fn two_span() -> Result<Member> {
                 .partial(2.4.kN_per_m(), 1.1.m(), 5.3.m())
                 .point(3.5.kN(), 7.5.m()),
         )
-        .action(Action::variable("store", store).uniform(3.1.kN_per_m()).point(4.2.kN(), 1.6.m()))
+        .action(
+            Action::variable("store", store)
+                .uniform(3.1.kN_per_m())
+                .point(4.2.kN(), 1.6.m()),
+        )
         .check()
 }
 
@@ -64,10 +72,22 @@ fn slab_strip() -> Result<Member> {
     })?;
     let c24 = timber("C24", ServiceClass::One)?;
     let joist = Part::new("joist", rectangle(100.mm(), 220.mm()), c24);
-    let slab = Part::new("slab", rectangle(600.mm(), 70.mm()), concrete("C30/37", &creep)?);
-    let live = CombinationFactors { psi_0: 0.7, psi_1: 0.5, psi_2: 0.3 };
+    let slab = Part::new(
+        "slab",
+        rectangle(600.mm(), 70.mm()),
+        concrete("C30/37", &creep)?,
+    );
+    let live = CombinationFactors {
+        psi_0: 0.7,
+        psi_1: 0.5,
+        psi_2: 0.3,
+    };
     Member::simple_span(Section::of([joist.clone(), slab.above(&joist)])?, 5.4.m())
-        .action(Action::permanent("dead").self_weight().uniform(0.9.kN_per_m()))
+        .action(
+            Action::permanent("dead")
+                .self_weight()
+                .uniform(0.9.kN_per_m()),
+        )
         .action(Action::variable("live", live).uniform(1.7.kN_per_m()))
         .check()
 }
@@ -105,12 +125,20 @@ fn fields(case: &str, response: &Response) -> Result<String> {
         put(&format!("{at}.axial_stiffness_N"), stiffness.axial().to_N());
         put(&format!("{at}.centroid_z_m"), stiffness.centroid_z().to_m());
     }
-    for combination in ["permanent", "quasi-permanent", "characteristic", "fundamental"] {
+    for combination in [
+        "permanent",
+        "quasi-permanent",
+        "characteristic",
+        "fundamental",
+    ] {
         for time in Time::ALL {
             let at = format!("combinations[\"{combination}\"].{time}");
             let deflection = response.deflection(combination, time)?.greatest();
             let place: Length = deflection.at;
-            put(&format!("{at}.deflection.greatest.value_m"), deflection.value.to_m());
+            put(
+                &format!("{at}.deflection.greatest.value_m"),
+                deflection.value.to_m(),
+            );
             put(&format!("{at}.deflection.greatest.at_m"), place.to_m());
             let slope = response.slope(combination, time)?.greatest().value;
             put(&format!("{at}.slope.greatest.value_rad"), slope.to_rad());
@@ -121,16 +149,28 @@ fn fields(case: &str, response: &Response) -> Result<String> {
             for support in member.supports() {
                 let name = support.name();
                 let reaction = response.reaction(combination, time, name)?;
-                put(&format!("{at}.reactions[\"{name}\"].force_N"), reaction.force.to_N());
-                put(&format!("{at}.reactions[\"{name}\"].couple_Nm"), reaction.couple.to_N_m());
+                put(
+                    &format!("{at}.reactions[\"{name}\"].force_N"),
+                    reaction.force.to_N(),
+                );
+                put(
+                    &format!("{at}.reactions[\"{name}\"].couple_Nm"),
+                    reaction.couple.to_N_m(),
+                );
             }
             for part in member.section().parts() {
                 let name = part.name();
                 let stress = response.stress(combination, time, name)?;
                 let tension = stress.greatest_tension().value.to_Pa();
                 let compression = stress.greatest_compression().value.to_Pa();
-                put(&format!("{at}.stresses[\"{name}\"].tension.value_Pa"), tension);
-                put(&format!("{at}.stresses[\"{name}\"].compression.value_Pa"), compression);
+                put(
+                    &format!("{at}.stresses[\"{name}\"].tension.value_Pa"),
+                    tension,
+                );
+                put(
+                    &format!("{at}.stresses[\"{name}\"].compression.value_Pa"),
+                    compression,
+                );
             }
         }
     }

@@ -26,16 +26,28 @@ pub(super) fn lower(document: &JobDocument) -> Result<(Member, Option<CamberPlan
     let materials = lower_material::all(&document.materials, &mut problems);
     let section = section(document, &materials, &mut problems);
     let length = document.member.length.value();
-    let supports: Vec<_> = document.member.supports.iter().filter_map(support).collect();
+    let supports: Vec<_> = document
+        .member
+        .supports
+        .iter()
+        .filter_map(support)
+        .collect();
     let actions: Vec<_> = document.actions.iter().filter_map(action).collect();
     let known_supports = Known {
         entries: &supports,
         is_complete: supports.len() == document.member.supports.len(),
     };
-    let known_actions =
-        Known { entries: &actions, is_complete: actions.len() == document.actions.len() };
+    let known_actions = Known {
+        entries: &actions,
+        is_complete: actions.len() == document.actions.len(),
+    };
     let all_known = known_supports.is_complete && known_actions.is_complete;
-    problems.extend(member::problems_of(section.as_ref(), length, known_supports, known_actions));
+    problems.extend(member::problems_of(
+        section.as_ref(),
+        length,
+        &known_supports,
+        &known_actions,
+    ));
     let camber = document.camber.as_ref().map(camber);
     if let Some(Some(plan)) = &camber
         && all_known
@@ -46,7 +58,9 @@ pub(super) fn lower(document: &JobDocument) -> Result<(Member, Option<CamberPlan
         return Err(problems);
     }
     // Whatever is still unknown was told by the check against the schema.
-    let (Some(section), Some(length)) = (section, length) else { return Err(problems) };
+    let (Some(section), Some(length)) = (section, length) else {
+        return Err(problems);
+    };
     let plan = Member::of_length(section, length);
     let plan = supports.into_iter().fold(plan, member::MemberPlan::support);
     let plan = actions.into_iter().fold(plan, member::MemberPlan::action);

@@ -10,7 +10,6 @@ use crate::section::Section;
 use crate::units::Length;
 
 /// A list as far as it is known: an entry whose text cannot be read is left out of it.
-#[derive(Clone, Copy)]
 pub(crate) struct Known<'a, T> {
     /// The entries that are known.
     pub(crate) entries: &'a [T],
@@ -20,7 +19,10 @@ pub(crate) struct Known<'a, T> {
 
 impl<'a, T> From<&'a [T]> for Known<'a, T> {
     fn from(entries: &'a [T]) -> Self {
-        Self { entries, is_complete: true }
+        Self {
+            entries,
+            is_complete: true,
+        }
     }
 }
 
@@ -28,8 +30,8 @@ impl<'a, T> From<&'a [T]> for Known<'a, T> {
 pub(crate) fn problems_of(
     section: Option<&Section>,
     length: Option<Length>,
-    supports: Known<'_, Support>,
-    actions: Known<'_, Action>,
+    supports: &Known<'_, Support>,
+    actions: &Known<'_, Action>,
 ) -> Vec<Problem> {
     let mut problems = Vec::new();
     if let Some(length) = length {
@@ -48,7 +50,10 @@ pub(crate) fn problems_of(
 fn check_supports(
     problems: &mut Vec<Problem>,
     length: Option<Length>,
-    Known { entries: supports, is_complete }: Known<'_, Support>,
+    &Known {
+        entries: supports,
+        is_complete,
+    }: &Known<'_, Support>,
 ) {
     let all = "member.supports";
     if supports.is_empty() && is_complete {
@@ -107,7 +112,10 @@ fn at(support: &Support) -> String {
 fn check_actions(
     problems: &mut Vec<Problem>,
     length: Option<Length>,
-    Known { entries: actions, is_complete }: Known<'_, Action>,
+    &Known {
+        entries: actions,
+        is_complete,
+    }: &Known<'_, Action>,
 ) {
     if actions.is_empty() && is_complete {
         problems.push(Problem::new(

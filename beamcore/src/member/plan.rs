@@ -49,8 +49,8 @@ impl MemberPlan {
         let problems = checks::problems_of(
             Some(&self.section),
             Some(self.length),
-            self.supports.as_slice().into(),
-            self.actions.as_slice().into(),
+            &self.supports.as_slice().into(),
+            &self.actions.as_slice().into(),
         );
         Error::check(problems)?;
         Member::from_plan(self)
