@@ -52,9 +52,14 @@ use crate::member::Member;
 use crate::outcome::Outcome;
 use reader::{Node, NodeValue};
 use std::path::Path;
+use std::sync::LazyLock;
 
 /// The version of the job document that this library reads and writes.
 pub const VERSION: i64 = 1;
+
+/// The schema against which every job is checked.
+static SCHEMA: LazyLock<serde_json::Value> =
+    LazyLock::new(|| schemars::schema_for!(JobDocument).to_value());
 
 /// A job that was read and found without fault.
 #[derive(Clone, Debug)]
@@ -75,8 +80,7 @@ impl Job {
         let node = reader::read(text, format)?;
         let found = version(&node)?;
         debug_assert_eq!(found, VERSION);
-        let schema = schemars::schema_for!(JobDocument).to_value();
-        let checked = reader::check(&node, &schema, &written::problem);
+        let checked = reader::check(&node, &SCHEMA, &written::problem);
         let mut problems = checked.problems;
         if !checked.complete {
             return Err(sorted(problems));
@@ -165,8 +169,7 @@ impl Job {
 /// The JSON schema of the job document.
 #[must_use]
 pub fn schema() -> String {
-    serde_json::to_string_pretty(&schemars::schema_for!(JobDocument))
-        .expect("a schema is plain data")
+    serde_json::to_string_pretty(&*SCHEMA).expect("a schema is plain data")
 }
 
 /// The version that the document states; any other than ours is an error of its own, because
