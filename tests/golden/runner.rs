@@ -71,9 +71,11 @@ pub fn job(folder: &Path) -> Result<(String, Vec<String>)> {
         for Expected { path, numbers } in expected(folder, &case) {
             let value = outcome.number(&path)?;
             let _ = write!(answers, "{}", line(&case, &path, value));
-            if let Some([expected, peak, tolerance]) = numbers
-                && !((value - expected).abs() <= tolerance * peak)
-            {
+            let Some([expected, peak, tolerance]) = numbers else {
+                continue;
+            };
+            let is_near = (value - expected).abs() <= tolerance * peak;
+            if !is_near {
                 misses.push(format!(
                     "{case} {path}: {value} is not {expected} within {tolerance}"
                 ));
