@@ -42,6 +42,7 @@ pub mod member;
 #[cfg(feature = "document")]
 pub mod outcome;
 mod path;
+pub mod plain;
 pub mod response;
 pub mod section;
 mod solve;

@@ -11,7 +11,7 @@ use crate::solve::condition::Holds;
 use crate::units::{BendingStiffness, Length};
 
 /// Places closer than this share of the length are one station.
-pub(super) const SAME_PLACE: f64 = 1e-9;
+pub(crate) const SAME_PLACE: f64 = 1e-9;
 
 /// The stations of a member and what is held at each.
 pub(super) struct Layout {

@@ -16,7 +16,7 @@ pub use support::{Support, SupportKind};
 pub(crate) use checks::{Known, problems_of};
 #[cfg(feature = "document")]
 pub(crate) use combination::{GAMMA_PERMANENT, GAMMA_VARIABLE, all as combinations_of};
-pub(crate) use layout::load_case;
+pub(crate) use layout::{SAME_PLACE, load_case};
 
 use crate::error::Result;
 use crate::response::Response;

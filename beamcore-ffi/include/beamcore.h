@@ -1,0 +1,719 @@
+/*
+ * beamcore: a calculation core for beams of more than one material. C ABI.
+ *
+ * Generated from the Rust source; do not edit.
+ *
+ * STATUS. Every function returns an int32_t status, BC_OK (0) when it is done, else BC_ERROR_...
+ * The exceptions are the functions that free a handle, which return nothing, and the plain
+ * functions at the end (bc_plain_...), which return a double, NaN when they fail.
+ * Numbers of statuses never change; new ones may come.
+ *
+ * RESULTS. Places for results come last and their names end in _out. Nothing is written to them
+ * when a function fails, except the length of a text that did not fit (see TEXTS).
+ *
+ * ERRORS. A function that fails leaves its error with the thread that called it, until the next
+ * failure in that thread: bc_error_text gives it as one text, the functions bc_error_problem_...
+ * one by one, for all that is wrong with an input is reported at once. Reading the error does not
+ * change it. A successful call does not clear it.
+ *
+ * BAD ARGUMENTS. NULL where a pointer is needed, text that is not UTF-8, NaN, infinity, counts
+ * below zero and unknown constants are answered with a status. Choices are int32_t constants
+ * (BC_TIME_...); they start at 1, so that a forgotten 0 is an error. An empty list (count 0, its
+ * pointer may then be NULL) is judged as what it means: a member without supports is
+ * BC_ERROR_MISSING.
+ *
+ * OWNERSHIP. A handle (bc_part * and its like) that a function gives out is the caller's, who frees
+ * it once with the free function of its type; freeing NULL does nothing. Handles never change:
+ * bc_action_with_point and its like give a new handle and leave the old one as it is. Handles do
+ * not depend on one another and are freed in any order: a section keeps what it needs of its parts.
+ * Texts and lists passed in are copied; they need to live only until the function returns.
+ *
+ * THREADS. Handles may be used by several threads at once and freed by any thread, once nobody
+ * uses them. The library starts no threads.
+ *
+ * TEXTS. Texts passed in are UTF-8 and end with a NUL. A text given out is written to a buffer of
+ * the caller, of capacity bytes, with a closing NUL; length_out is its length in bytes without the
+ * NUL, and is written even when the buffer is too small (BC_ERROR_BUFFER; the buffer is then left
+ * as it is). To ask for the length, pass NULL with capacity 0.
+ *
+ * UNITS. All numbers are SI; the unit stands at the end of a parameter's name: width_m, load_N,
+ * load_N_per_m, modulus_Pa, moment_Nm, stiffness_Nm2, second_moment_m4, age_s.
+ *
+ * SIGNS. x runs left to right, z up; a section is drawn as seen against x, with y to the right.
+ * Deflection and loads are positive downward, the slope is dw/dx, the shear force V = dM/dx, a
+ * positive (sagging) moment stretches the bottom, tension is positive, forces of supports are
+ * positive upward.
+ *
+ * PANICS. A fault inside the library is caught and reported as BC_ERROR_PANIC; the caller is never
+ * aborted by it.
+ *
+ * VERSIONS. bc_version gives the version of the library as a text, bc_abi_version the number of
+ * this binding, which is BC_ABI_VERSION in the header; where the two differ, header and library do
+ * not belong together.
+ */
+
+#ifndef BEAMCORE_H
+#define BEAMCORE_H
+
+#include <stdint.h>
+
+// The version of this binding that the header describes; it grows with each incompatible change,
+// and is the number of the shared library's name.
+#define BC_ABI_VERSION 0
+
+// Done.
+#define BC_OK 0
+
+// A number outside what is possible: negative size, NaN, infinity.
+#define BC_ERROR_VALUE 1
+
+// A name that nothing bears: a part, material, support, strength class.
+#define BC_ERROR_NAME 2
+
+// A key that the document does not know.
+#define BC_ERROR_KEY 3
+
+// A unit that is missing, unknown or of another kind of quantity.
+#define BC_ERROR_UNIT 4
+
+// Two things of one name, or two supports at one place.
+#define BC_ERROR_DUPLICATE 5
+
+// Parts that overlap, or places that refer to each other in a circle.
+#define BC_ERROR_GEOMETRY 6
+
+// Something that must be given is not.
+#define BC_ERROR_MISSING 7
+
+// A member, or a piece of it, that is free to move.
+#define BC_ERROR_MECHANISM 8
+
+// A support or load that lies outside the member, or a stretch without length.
+#define BC_ERROR_POSITION 9
+
+// A text that is not a document: broken or truncated TOML or JSON, a value of a wrong type.
+#define BC_ERROR_SYNTAX 10
+
+// A document of a version that this library does not read.
+#define BC_ERROR_VERSION 11
+
+// A file that cannot be read.
+#define BC_ERROR_FILE 12
+
+// A result that was asked for and that does not exist.
+#define BC_ERROR_LOOKUP 13
+
+// A calculation that did not reach its accuracy.
+#define BC_ERROR_NUMERICAL 14
+
+// A pointer that must not be NULL is NULL.
+#define BC_ERROR_NULL 100
+
+// A text is not UTF-8.
+#define BC_ERROR_UTF8 101
+
+// The library itself failed; the call had no effect. Please report the text of the error.
+#define BC_ERROR_PANIC 102
+
+// The buffer is too small; the length that is needed was written to length_out.
+#define BC_ERROR_BUFFER 103
+
+// An int32_t that stands for a choice is none of its constants.
+#define BC_ERROR_CHOICE 104
+
+// A count that is negative, or zero where something must be there, or an index past the end.
+#define BC_ERROR_COUNT 105
+
+// Time: the day the load comes on, every material with its short-term modulus.
+#define BC_TIME_INITIAL 1
+
+// Time: the end of the life, the quasi-permanent share of the load with effective moduli.
+#define BC_TIME_FINAL 2
+
+// Cement: hardens slowly.
+#define BC_CEMENT_S 1
+
+// Cement: hardens normally.
+#define BC_CEMENT_N 2
+
+// Cement: hardens rapidly.
+#define BC_CEMENT_R 3
+
+// Place of a part: at smaller y than the other, touching it, centred on its height.
+#define BC_PLACE_LEFT_OF 1
+
+// Place of a part: at greater y than the other, touching it, centred on its height.
+#define BC_PLACE_RIGHT_OF 2
+
+// Place of a part: at greater z than the other, touching it, centred on its width.
+#define BC_PLACE_ABOVE 3
+
+// Place of a part: at smaller z than the other, touching it, centred on its width.
+#define BC_PLACE_BELOW 4
+
+// Support: holds the deflection and the displacement along the axis.
+#define BC_SUPPORT_PIN 1
+
+// Support: holds the deflection only.
+#define BC_SUPPORT_ROLLER 2
+
+// Support: holds the deflection, the displacement along the axis and the rotation.
+#define BC_SUPPORT_FIXED 3
+
+// Rounding: to the nearest step, halves away from zero.
+#define BC_ROUNDING_NEAREST 1
+
+// Rounding: to the step below in magnitude.
+#define BC_ROUNDING_DOWN 2
+
+// Rounding: to the step above in magnitude.
+#define BC_ROUNDING_UP 3
+
+// Field: deflection in m, positive downward.
+#define BC_FIELD_DEFLECTION 1
+
+// Field: slope dw/dx in rad.
+#define BC_FIELD_SLOPE 2
+
+// Field: shear force V = dM/dx in N.
+#define BC_FIELD_SHEAR 3
+
+// Field: moment in N m, positive where it stretches the bottom.
+#define BC_FIELD_MOMENT 4
+
+// Extreme: the value of greatest magnitude, with its sign.
+#define BC_EXTREME_GREATEST 1
+
+// Extreme: the algebraically greatest value.
+#define BC_EXTREME_MAXIMUM 2
+
+// Extreme: the algebraically least value.
+#define BC_EXTREME_MINIMUM 3
+
+// Side of a place along the member: just left of it.
+#define BC_SIDE_LEFT 1
+
+// Side of a place along the member: just right of it.
+#define BC_SIDE_RIGHT 2
+
+// Fibre of a part: its bottom edge.
+#define BC_FIBRE_BOTTOM 1
+
+// Fibre of a part: its own centroid.
+#define BC_FIBRE_CENTROID 2
+
+// Fibre of a part: its top edge.
+#define BC_FIBRE_TOP 3
+
+// Sign of a stress: tension, positive.
+#define BC_STRESS_TENSION 1
+
+// Sign of a stress: compression, negative.
+#define BC_STRESS_COMPRESSION 2
+
+// An action: loads that act together, from one cause.
+typedef struct bc_action bc_action;
+
+// A camber: a rise over a chord between two supports, with its ordinates.
+typedef struct bc_camber bc_camber;
+
+// A material: elastic values, density, creep and design strengths of one stuff.
+typedef struct bc_material bc_material;
+
+// A member that has passed all checks and is ready to be solved.
+typedef struct bc_member bc_member;
+
+// A part: one piece of one material, with a name that addresses its results.
+typedef struct bc_part bc_part;
+
+// A response: the solved member.
+typedef struct bc_response bc_response;
+
+// A section: parts joined rigidly, each at its place.
+typedef struct bc_section bc_section;
+
+#ifdef __cplusplus
+extern "C" {
+#endif // __cplusplus
+
+// The version of the library, as in "0.1.0".
+int32_t bc_version(char *buffer, int64_t capacity, int64_t *length_out);
+
+// The version of the binding in the library that is running; compare it with BC_ABI_VERSION.
+int32_t bc_abi_version(int32_t *version_out);
+
+// The name of a status in one word, for example "Value"; an empty text for an unknown number.
+int32_t bc_status_name(int32_t status, char *buffer, int64_t capacity, int64_t *length_out);
+
+// Whether a status says that the input is at fault (1) or not (0: done, a file, a look-up, the
+// calculation itself, or a wrong use of this binding).
+int32_t bc_status_is_input(int32_t status, int32_t *is_input_out);
+
+// The status of the last call that failed in this thread; BC_OK if none did.
+int32_t bc_error_status(int32_t *status_out);
+
+// The whole text of the last error of this thread: a line for each problem, in the form
+// "path: found ...; expected ...". Empty if no call failed in this thread.
+int32_t bc_error_text(char *buffer, int64_t capacity, int64_t *length_out);
+
+// The path of the field, or the name of the parameter, at which the first problem stands. Empty
+// if no call failed in this thread.
+int32_t bc_error_path(char *buffer, int64_t capacity, int64_t *length_out);
+
+// The number of problems in the last error of this thread; 0 if no call failed.
+int32_t bc_error_problem_count(int32_t *count_out);
+
+// The kind of a problem, as a status. Problems are counted from 0.
+int32_t bc_error_problem_kind(int32_t index, int32_t *kind_out);
+
+// The line of the document, counted from 1, at which a problem stands; 0 where there is no
+// document or no single line.
+int32_t bc_error_problem_line(int32_t index, int64_t *line_out);
+
+// The path of the field, or the name of the parameter, of a problem.
+int32_t bc_error_problem_path(int32_t index, char *buffer, int64_t capacity, int64_t *length_out);
+
+// What was found at the place of a problem.
+int32_t bc_error_problem_found(int32_t index, char *buffer, int64_t capacity, int64_t *length_out);
+
+// What would be right at the place of a problem.
+int32_t bc_error_problem_expected(int32_t index,
+                                  char *buffer,
+                                  int64_t capacity,
+                                  int64_t *length_out);
+
+// Solid or glued laminated timber of a strength class ("C24", "GL28h"), in service class 1, 2
+// or 3: E, mean density and creep factor of the class.
+int32_t bc_material_timber(const char *class_name,
+                           int32_t service_class,
+                           bc_material **material_out);
+
+// Structural steel of a class ("S275"): E and density; no creep.
+int32_t bc_material_steel(const char *class_name, bc_material **material_out);
+
+// Concrete of a class ("C30/37") with its creep factor phi as a number: E_cm and density.
+int32_t bc_material_concrete(const char *class_name,
+                             double creep_factor,
+                             bc_material **material_out);
+
+// Concrete of a class with its creep factor calculated: mean strength f_cm, relative humidity in
+// percent (50 means 50 %), notional size h0 = 2 A/u, the ages at which the load comes on and at
+// which the creep is asked for, and the cement (BC_CEMENT_...).
+int32_t bc_material_concrete_with_creep(const char *class_name,
+                                        double mean_strength_Pa,
+                                        double relative_humidity_percent,
+                                        double notional_size_m,
+                                        double age_at_loading_s,
+                                        double age_at_end_s,
+                                        int32_t cement,
+                                        bc_material **material_out);
+
+// A material by its values: name, modulus of elasticity E and creep factor (0 for none). The
+// values are checked when the material is used in a section.
+int32_t bc_material_new(const char *name,
+                        double modulus_Pa,
+                        double creep_factor,
+                        bc_material **material_out);
+
+// The same material under another name.
+int32_t bc_material_named(const bc_material *material,
+                          const char *name,
+                          bc_material **material_out);
+
+// The same material with a mean density, from which self-weight follows.
+int32_t bc_material_with_density(const bc_material *material,
+                                 double density_kg_per_m3,
+                                 bc_material **material_out);
+
+// The same material with design strengths of timber along the grain: bending f_m,d, tension
+// f_t,0,d and compression f_c,0,d.
+int32_t bc_material_with_timber_strength(const bc_material *material,
+                                         double bending_Pa,
+                                         double tension_Pa,
+                                         double compression_Pa,
+                                         bc_material **material_out);
+
+// The same material with the design yield strength f_y,d of a metal.
+int32_t bc_material_with_metal_strength(const bc_material *material,
+                                        double yield_Pa,
+                                        bc_material **material_out);
+
+// The modulus at a time: E at first, E/(1 + creep factor) at the end.
+int32_t bc_material_modulus(const bc_material *material, int32_t time, double *modulus_Pa_out);
+
+// The name of a material, by which results and errors speak of it.
+int32_t bc_material_name(const bc_material *material,
+                         char *buffer,
+                         int64_t capacity,
+                         int64_t *length_out);
+
+// Frees a material; NULL is allowed.
+void bc_material_free(bc_material *material);
+
+// A rectangular part, width along y and height along z, with its middle at y = 0, z = 0. The
+// values are checked when the part is used in a section.
+int32_t bc_part_rectangle(const char *name,
+                          double width_m,
+                          double height_m,
+                          const bc_material *material,
+                          bc_part **part_out);
+
+// The same part with the middle of its outline at (y, z).
+int32_t bc_part_at(const bc_part *part, double y_m, double z_m, bc_part **part_out);
+
+// The same part touching another one of the section: place is BC_PLACE_...
+int32_t bc_part_beside(const bc_part *part,
+                       int32_t place,
+                       const char *other_name,
+                       bc_part **part_out);
+
+// The name of a part.
+int32_t bc_part_name(const bc_part *part, char *buffer, int64_t capacity, int64_t *length_out);
+
+// Frees a part; NULL is allowed.
+void bc_part_free(bc_part *part);
+
+// A section of parts. All that is wrong with them is reported at once; no part at all is
+// BC_ERROR_MISSING.
+int32_t bc_section_new(const bc_part *const *parts, int32_t part_count, bc_section **section_out);
+
+// EA, the sum of E A over the parts, at a time.
+int32_t bc_section_axial_stiffness(const bc_section *section,
+                                   int32_t time,
+                                   double *axial_stiffness_N_out);
+
+// The elastic centroid at a time.
+int32_t bc_section_centroid(const bc_section *section,
+                            int32_t time,
+                            double *y_m_out,
+                            double *z_m_out);
+
+// The bending stiffness at a time about the axes through the elastic centroid: yy about the
+// horizontal one, zz about the upright one, and the mixed term yz.
+int32_t bc_section_bending_stiffness(const bc_section *section,
+                                     int32_t time,
+                                     double *yy_Nm2_out,
+                                     double *zz_Nm2_out,
+                                     double *yz_Nm2_out);
+
+// The modulus of a part at a time and its share in the bending stiffness yy; the shares of all
+// parts sum to 1.
+int32_t bc_section_part_share(const bc_section *section,
+                              int32_t time,
+                              const char *part,
+                              double *modulus_Pa_out,
+                              double *share_out);
+
+// The edges of a part at its place, and its area.
+int32_t bc_section_part_edges(const bc_section *section,
+                              const char *part,
+                              double *left_m_out,
+                              double *right_m_out,
+                              double *bottom_m_out,
+                              double *top_m_out,
+                              double *area_m2_out);
+
+// Mass per length of the section. Where a part has no density, has_value_out is 0 and the mass
+// is left as it is.
+int32_t bc_section_line_mass(const bc_section *section,
+                             int32_t *has_value_out,
+                             double *line_mass_kg_per_m_out);
+
+// The number of notes on a section, for example on parts that do not touch.
+int32_t bc_section_note_count(const bc_section *section, int32_t *count_out);
+
+// A note on a section. Notes are counted from 0.
+int32_t bc_section_note(const bc_section *section,
+                        int32_t index,
+                        char *buffer,
+                        int64_t capacity,
+                        int64_t *length_out);
+
+// Frees a section; NULL is allowed.
+void bc_section_free(bc_section *section);
+
+// The section at a time as if made of one of its materials: the modulus of that material, and
+// area, centroid and second moment of area about the horizontal axis of the transformed section.
+int32_t bc_section_transformed(const bc_section *section,
+                               int32_t time,
+                               const char *material,
+                               double *reference_modulus_Pa_out,
+                               double *area_m2_out,
+                               double *centroid_z_m_out,
+                               double *second_moment_m4_out);
+
+// One part of the transformed section: its modular ratio n = E/E_ref and its width n b.
+int32_t bc_section_transformed_part(const bc_section *section,
+                                    int32_t time,
+                                    const char *material,
+                                    const char *part,
+                                    double *ratio_out,
+                                    double *width_m_out);
+
+// The stress in the real material of a part at height z under a moment (positive sagging),
+// tension positive.
+int32_t bc_section_transformed_stress(const bc_section *section,
+                                      int32_t time,
+                                      const char *material,
+                                      const char *part,
+                                      double z_m,
+                                      double moment_Nm,
+                                      double *stress_Pa_out);
+
+// A permanent action, without loads yet.
+int32_t bc_action_permanent(const char *name, bc_action **action_out);
+
+// A variable action with its combination factors, without loads yet.
+int32_t bc_action_variable(const char *name,
+                           double psi_0,
+                           double psi_1,
+                           double psi_2,
+                           bc_action **action_out);
+
+// The same action with the weight of the section, over the whole member.
+int32_t bc_action_with_self_weight(const bc_action *action, bc_action **action_out);
+
+// The same action with a line load over the whole member, positive downward.
+int32_t bc_action_with_uniform(const bc_action *action,
+                               double load_N_per_m,
+                               bc_action **action_out);
+
+// The same action with a line load between two places, positive downward.
+int32_t bc_action_with_partial(const bc_action *action,
+                               double load_N_per_m,
+                               double from_m,
+                               double to_m,
+                               bc_action **action_out);
+
+// The same action with a point load, positive downward.
+int32_t bc_action_with_point(const bc_action *action,
+                             double load_N,
+                             double at_m,
+                             bc_action **action_out);
+
+// The name of an action.
+int32_t bc_action_name(const bc_action *action,
+                       char *buffer,
+                       int64_t capacity,
+                       int64_t *length_out);
+
+// Frees an action; NULL is allowed.
+void bc_action_free(bc_action *action);
+
+// A member of the given length. Each support has a name, a kind (BC_SUPPORT_...) and a place
+// from the left end; the three lists are of one length. All that is wrong is reported at once.
+int32_t bc_member_new(const bc_section *section,
+                      double length_m,
+                      const char *const *support_names,
+                      const int32_t *support_kinds,
+                      const double *support_at_m,
+                      int32_t support_count,
+                      const bc_action *const *actions,
+                      int32_t action_count,
+                      bc_member **member_out);
+
+// A member on two supports at its ends: a pin "left" and a roller "right".
+int32_t bc_member_simple_span(const bc_section *section,
+                              double span_m,
+                              const bc_action *const *actions,
+                              int32_t action_count,
+                              bc_member **member_out);
+
+// Solves a member for each action at each time.
+int32_t bc_member_solve(const bc_member *member, bc_response **response_out);
+
+// The length of a member.
+int32_t bc_member_length(const bc_member *member, double *length_m_out);
+
+// The number of combinations of the actions of a member.
+int32_t bc_member_combination_count(const bc_member *member, int32_t *count_out);
+
+// The name of a combination, by which results are addressed. Combinations are counted from 0.
+int32_t bc_member_combination_name(const bc_member *member,
+                                   int32_t index,
+                                   char *buffer,
+                                   int64_t capacity,
+                                   int64_t *length_out);
+
+// The number of notes on a member, for example on places that were merged.
+int32_t bc_member_note_count(const bc_member *member, int32_t *count_out);
+
+// A note on a member. Notes are counted from 0.
+int32_t bc_member_note(const bc_member *member,
+                       int32_t index,
+                       char *buffer,
+                       int64_t capacity,
+                       int64_t *length_out);
+
+// Frees a member; NULL is allowed.
+void bc_member_free(bc_member *member);
+
+// An extreme (BC_EXTREME_...) of a field (BC_FIELD_...) and its place, found from the roots of
+// the field; the leftmost of equals. The value is in the SI unit of the field.
+int32_t bc_response_extreme(const bc_response *response,
+                            int32_t field,
+                            const char *combination,
+                            int32_t time,
+                            int32_t extreme,
+                            double *value_out,
+                            double *at_m_out);
+
+// The values of a field at count places, in the SI unit of the field. A shear force jumps at a
+// point load or support: side (BC_SIDE_...) says which of the two values is meant. x_m and
+// values_out may be the same list.
+int32_t bc_response_values(const bc_response *response,
+                           int32_t field,
+                           const char *combination,
+                           int32_t time,
+                           int32_t side,
+                           const double *x_m,
+                           int32_t count,
+                           double *values_out);
+
+// The number of stations: the ends of the member, supports, point loads and ends of line loads.
+int32_t bc_response_station_count(const bc_response *response, int32_t *count_out);
+
+// The place of a station. Stations are counted from 0, from the left.
+int32_t bc_response_station(const bc_response *response, int32_t index, double *at_m_out);
+
+// The reaction of a support: force positive upward, couple positive clockwise with x to the right
+// and z up (zero unless the support holds the rotation).
+int32_t bc_response_reaction(const bc_response *response,
+                             const char *combination,
+                             int32_t time,
+                             const char *support,
+                             double *force_N_out,
+                             double *couple_Nm_out);
+
+// What is left of equilibrium and continuity in the solution, relative to its greatest terms.
+int32_t bc_response_residual(const bc_response *response, double *residual_out);
+
+// Frees a response; NULL is allowed.
+void bc_response_free(bc_response *response);
+
+// The greatest tension or compression (BC_STRESS_...) in a part, tension positive, with its
+// place along the member and the height z of the fibre.
+int32_t bc_response_stress(const bc_response *response,
+                           const char *combination,
+                           int32_t time,
+                           const char *part,
+                           int32_t sign,
+                           double *value_Pa_out,
+                           double *at_m_out,
+                           double *z_m_out);
+
+// The stresses at count places along a fibre (BC_FIBRE_...) of a part, tension positive; where
+// they jump, side (BC_SIDE_...) says which of the two values is meant.
+int32_t bc_response_stress_values(const bc_response *response,
+                                  const char *combination,
+                                  int32_t time,
+                                  const char *part,
+                                  int32_t fibre,
+                                  int32_t side,
+                                  const double *x_m,
+                                  int32_t count,
+                                  double *values_Pa_out);
+
+// The greatest utilisation of a part, stress over design strength, and its place along the
+// member. Where the material has no design strengths, has_value_out is 0 and the other results
+// are left as they are.
+int32_t bc_response_utilisation(const bc_response *response,
+                                const char *combination,
+                                int32_t time,
+                                const char *part,
+                                int32_t *has_value_out,
+                                double *value_out,
+                                double *at_m_out);
+
+// The camber against the deflection of a combination at a time: fraction (1 is all of it) of the
+// deflection at the middle of the chord from one support to another, rounded (BC_ROUNDING_...)
+// to whole steps, with ordinates at the ends of equal divisions of the chord.
+int32_t bc_camber_new(const bc_response *response,
+                      const char *combination,
+                      int32_t time,
+                      double fraction,
+                      const char *from_support,
+                      const char *to_support,
+                      double step_m,
+                      int32_t rounding,
+                      int32_t divisions,
+                      bc_camber **camber_out);
+
+// The deflection to be built in, before rounding.
+int32_t bc_camber_target(const bc_camber *camber, double *target_m_out);
+
+// The rise at the middle of the chord, rounded; positive upward.
+int32_t bc_camber_rise(const bc_camber *camber, double *rise_m_out);
+
+// The places of the chord's ends, from the left end of the member.
+int32_t bc_camber_chord(const bc_camber *camber, double *from_m_out, double *to_m_out);
+
+// The number of ordinates, one more than the divisions.
+int32_t bc_camber_ordinate_count(const bc_camber *camber, int32_t *count_out);
+
+// An ordinate: its distance from the left end of the chord and the height above the chord,
+// positive upward. Ordinates are counted from 0, from the left.
+int32_t bc_camber_ordinate(const bc_camber *camber,
+                           int32_t index,
+                           double *station_m_out,
+                           double *ordinate_m_out);
+
+// The height above the chord at a place of the member, positive upward.
+int32_t bc_camber_ordinate_at(const bc_camber *camber, double at_m, double *ordinate_m_out);
+
+// Frees a camber; NULL is allowed.
+void bc_camber_free(bc_camber *camber);
+
+// EI of layers stacked upward and joined rigidly, about the horizontal axis through their elastic
+// centroid, in N m2. The three lists hold count numbers each, from the lowest layer upward.
+double bc_plain_stack_bending_stiffness(const double *modulus_Pa,
+                                        const double *width_m,
+                                        const double *height_m,
+                                        int32_t count);
+
+// EA of layers stacked upward, in N; lists as for bc_plain_stack_bending_stiffness.
+double bc_plain_stack_axial_stiffness(const double *modulus_Pa,
+                                      const double *width_m,
+                                      const double *height_m,
+                                      int32_t count);
+
+// Height of the elastic centroid of layers stacked upward above the lowest edge, in m; lists as
+// for bc_plain_stack_bending_stiffness.
+double bc_plain_stack_centroid(const double *modulus_Pa,
+                               const double *width_m,
+                               const double *height_m,
+                               int32_t count);
+
+// The greatest deflection in m of a beam on two supports at its ends under a line load over its
+// whole length; positive downward, as the load.
+double bc_plain_simple_span_uniform_deflection(double span_m,
+                                               double bending_stiffness_Nm2,
+                                               double load_N_per_m);
+
+// The greatest deflection in m of a beam on two supports at its ends under a point load at a
+// distance from its left end; positive downward, as the load.
+double bc_plain_simple_span_point_deflection(double span_m,
+                                             double bending_stiffness_Nm2,
+                                             double load_N,
+                                             double at_m);
+
+// The effective modulus in Pa of a material that creeps, E/(1 + creep factor).
+double bc_plain_effective_modulus(double modulus_Pa, double creep_factor);
+
+// The creep factor phi of concrete between two ages; parameters as for
+// bc_material_concrete_with_creep.
+double bc_plain_concrete_creep(double mean_strength_Pa,
+                               double relative_humidity_percent,
+                               double notional_size_m,
+                               double age_at_loading_s,
+                               double age_at_end_s,
+                               int32_t cement);
+
+// A number of one unit as a number of another unit of the same kind: 50 from "mm" to "m" is 0.05.
+double bc_plain_convert(double value, const char *from_unit, const char *to_unit);
+
+#ifdef __cplusplus
+}  // extern "C"
+#endif  // __cplusplus
+
+#endif  /* BEAMCORE_H */

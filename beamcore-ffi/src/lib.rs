@@ -1,0 +1,47 @@
+//! The C ABI of `beamcore`.
+//!
+//! This crate converts and forwards; it holds no formula, default or error text of the domain.
+//! The contract for the caller (status, ownership, threads, text buffers, units, signs, panics)
+//! stands once, in the head of `include/beamcore.h`, which is generated from this source.
+
+#![deny(unsafe_op_in_unsafe_fn, clippy::undocumented_unsafe_blocks)]
+#![allow(
+    clippy::missing_safety_doc,
+    reason = "the contract of all functions stands once, in the head of the header"
+)]
+#![allow(non_snake_case, reason = "parameters bear the symbols of their units")]
+
+// What every function is made with.
+mod fault;
+mod guard;
+mod handle;
+mod text;
+
+// The functions, in the order in which they stand in the header.
+pub mod version;
+
+pub mod status;
+
+pub mod error;
+
+pub mod choice;
+
+pub mod material;
+
+pub mod part;
+
+pub mod section;
+
+pub mod transformed;
+
+pub mod action;
+
+pub mod member;
+
+pub mod response;
+
+pub mod stress;
+
+pub mod camber;
+
+pub mod plain;
