@@ -211,17 +211,29 @@
 // Sign of a stress: compression, negative.
 #define BC_STRESS_COMPRESSION 2
 
+// Format of a document: TOML, for documents that are written by hand.
+#define BC_FORMAT_TOML 1
+
+// Format of a document: JSON, for documents that are written by programs.
+#define BC_FORMAT_JSON 2
+
 // An action: loads that act together, from one cause.
 typedef struct bc_action bc_action;
 
 // A camber: a rise over a chord between two supports, with its ordinates.
 typedef struct bc_camber bc_camber;
 
+// A job: all inputs of a calculation as one document, read and found without fault.
+typedef struct bc_job bc_job;
+
 // A material: elastic values, density, creep and design strengths of one stuff.
 typedef struct bc_material bc_material;
 
 // A member that has passed all checks and is ready to be solved.
 typedef struct bc_member bc_member;
+
+// An outcome: all results of a job, with its inputs, what was assumed and what was not checked.
+typedef struct bc_outcome bc_outcome;
 
 // A part: one piece of one material, with a name that addresses its results.
 typedef struct bc_part bc_part;
@@ -663,6 +675,64 @@ int32_t bc_camber_ordinate_at(const bc_camber *camber, double at_m, double *ordi
 
 // Frees a camber; NULL is allowed.
 void bc_camber_free(bc_camber *camber);
+
+// Reads a job from a text in TOML or JSON (BC_FORMAT_...). All that is wrong is reported at once.
+int32_t bc_job_read(const char *document, int32_t format, bc_job **job_out);
+
+// Reads a job from a file whose name ends in .toml or .json.
+int32_t bc_job_open(const char *file_name, bc_job **job_out);
+
+// A job written back as a text in TOML or JSON (BC_FORMAT_...).
+int32_t bc_job_text(const bc_job *job,
+                    int32_t format,
+                    char *buffer,
+                    int64_t capacity,
+                    int64_t *length_out);
+
+// Solves a job.
+int32_t bc_job_solve(const bc_job *job, bc_outcome **outcome_out);
+
+// Reads and solves a job in one call: the outcome as JSON.
+int32_t bc_job_run(const char *document,
+                   int32_t format,
+                   char *buffer,
+                   int64_t capacity,
+                   int64_t *length_out);
+
+// The JSON schema of the job document.
+int32_t bc_job_schema(char *buffer, int64_t capacity, int64_t *length_out);
+
+// Frees a job; NULL is allowed.
+void bc_job_free(bc_job *job);
+
+// The number at a path, in the SI unit that the path ends with, for example
+// combinations["quasi-permanent"].final.deflection.greatest.value_m
+int32_t bc_outcome_number(const bc_outcome *outcome, const char *path, double *value_out);
+
+// The text at a path, for example warnings[0]
+int32_t bc_outcome_text(const bc_outcome *outcome,
+                        const char *path,
+                        char *buffer,
+                        int64_t capacity,
+                        int64_t *length_out);
+
+// The outcome as JSON.
+int32_t bc_outcome_json(const bc_outcome *outcome,
+                        char *buffer,
+                        int64_t capacity,
+                        int64_t *length_out);
+
+// The outcome as a plain text of 80 columns, for reading.
+int32_t bc_outcome_summary(const bc_outcome *outcome,
+                           char *buffer,
+                           int64_t capacity,
+                           int64_t *length_out);
+
+// The JSON schema of the outcome document.
+int32_t bc_outcome_schema(char *buffer, int64_t capacity, int64_t *length_out);
+
+// Frees an outcome; NULL is allowed.
+void bc_outcome_free(bc_outcome *outcome);
 
 // EI of layers stacked upward and joined rigidly, about the horizontal axis through their elastic
 // centroid, in N m2. The three lists hold count numbers each, from the lowest layer upward.

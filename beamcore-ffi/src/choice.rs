@@ -2,6 +2,7 @@
 
 use crate::fault::Fault;
 use beamcore::camber::Rounding;
+use beamcore::job::Format;
 use beamcore::material::concrete::Cement;
 use beamcore::member::SupportKind;
 use beamcore::section::Side;
@@ -74,6 +75,11 @@ pub const BC_FIBRE_TOP: i32 = 3;
 pub const BC_STRESS_TENSION: i32 = 1;
 /// Sign of a stress: compression, negative.
 pub const BC_STRESS_COMPRESSION: i32 = 2;
+
+/// Format of a document: TOML, for documents that are written by hand.
+pub const BC_FORMAT_TOML: i32 = 1;
+/// Format of a document: JSON, for documents that are written by programs.
+pub const BC_FORMAT_JSON: i32 = 2;
 
 /// Which field of a response.
 #[derive(Clone, Copy)]
@@ -234,4 +240,13 @@ choice!(
     "BC_STRESS_TENSION, BC_STRESS_COMPRESSION",
     Tension = BC_STRESS_TENSION,
     Compression = BC_STRESS_COMPRESSION
+);
+choice!(
+    format,
+    format_number,
+    Format,
+    "format",
+    "BC_FORMAT_TOML, BC_FORMAT_JSON",
+    Toml = BC_FORMAT_TOML,
+    Json = BC_FORMAT_JSON
 );

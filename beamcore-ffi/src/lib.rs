@@ -44,4 +44,17 @@ pub mod stress;
 
 pub mod camber;
 
+pub mod job;
+
+pub mod outcome;
+
 pub mod plain;
+
+/// Handles may be used by several threads at once: a type of the core that could not be shared
+/// does not compile here.
+const _: () = {
+    const fn shared_between_threads<T: Send + Sync>() {}
+    shared_between_threads::<(material::BcMaterial, part::BcPart, section::BcSection)>();
+    shared_between_threads::<(action::BcAction, member::BcMember, response::BcResponse)>();
+    shared_between_threads::<(camber::BcCamber, job::BcJob, outcome::BcOutcome)>();
+};

@@ -19,7 +19,7 @@ pub unsafe extern "C" fn bc_version(
     guard::status(|| {
         // SAFETY: the caller keeps the header's contract for these pointers.
         let out = unsafe { TextOut::new(buffer, capacity, length_out)? };
-        out.put(env!("CARGO_PKG_VERSION"))
+        out.put(beamcore::VERSION)
     })
 }
 

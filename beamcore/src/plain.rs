@@ -16,7 +16,7 @@ use crate::solve::beam::{Beam, LoadCase};
 use crate::solve::condition::Holds;
 use crate::time::Time;
 use crate::units::{
-    AnyUnit, BendingStiffness, Duration, Force, Length, LineLoad, Modulus, Quantity, Stress,
+    AnyUnit, BendingStiffness, Duration, Force, Length, LineLoad, Modulus, Stress,
 };
 use std::sync::Arc;
 
