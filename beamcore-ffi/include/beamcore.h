@@ -709,7 +709,7 @@ void bc_job_free(bc_job *job);
 // combinations["quasi-permanent"].final.deflection.greatest.value_m
 int32_t bc_outcome_number(const bc_outcome *outcome, const char *path, double *value_out);
 
-// The text at a path, for example warnings[0]
+// The text at a path, for example job.mark
 int32_t bc_outcome_text(const bc_outcome *outcome,
                         const char *path,
                         char *buffer,

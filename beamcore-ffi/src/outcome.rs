@@ -31,7 +31,7 @@ pub unsafe extern "C" fn bc_outcome_number(
     })
 }
 
-/// The text at a path, for example warnings[0]
+/// The text at a path, for example job.mark
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn bc_outcome_text(
     outcome: *const BcOutcome,

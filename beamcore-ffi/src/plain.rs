@@ -61,12 +61,15 @@ pub unsafe extern "C" fn bc_plain_stack_centroid(
     unsafe { of_stack(plain::stack_centroid, modulus_Pa, width_m, height_m, count) }
 }
 
-/// A function of three lists of layers.
+/// A function of three lists of layers: modulus, width and height.
+type OfStack = fn(&[f64], &[f64], &[f64]) -> beamcore::Result<f64>;
+
+/// Calls a function of three lists of layers.
 ///
 /// # Safety
 /// Each pointer is NULL or points to `count` numbers.
 unsafe fn of_stack(
-    function: fn(&[f64], &[f64], &[f64]) -> beamcore::Result<f64>,
+    function: OfStack,
     modulus_Pa: *const f64,
     width_m: *const f64,
     height_m: *const f64,

@@ -15,9 +15,7 @@ use crate::section::{Part, Section, Stiffness, rectangle};
 use crate::solve::beam::{Beam, LoadCase};
 use crate::solve::condition::Holds;
 use crate::time::Time;
-use crate::units::{
-    AnyUnit, BendingStiffness, Duration, Force, Length, LineLoad, Modulus, Stress,
-};
+use crate::units::{AnyUnit, BendingStiffness, Duration, Force, Length, LineLoad, Modulus, Stress};
 use std::sync::Arc;
 
 /// EI of rectangular layers stacked upward and joined rigidly, in N m2: sum of
