@@ -1,6 +1,8 @@
 //! Rounding of a rise to steps that a shop can build.
 
+use crate::error::{Error, ErrorKind, Problem};
 use crate::units::Length;
+use std::str::FromStr;
 
 /// The direction of rounding; it works on the magnitude.
 #[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
@@ -45,10 +47,43 @@ impl Rounding {
     }
 }
 
+/// Reads the word used in documents; any other text is of the kind [`ErrorKind::Name`].
+impl FromStr for Rounding {
+    type Err = Error;
+
+    fn from_str(text: &str) -> Result<Self, Error> {
+        Self::ALL
+            .into_iter()
+            .find(|rounding| rounding.name() == text)
+            .ok_or_else(|| {
+                let expected = "one of \"nearest\", \"down\", \"up\"";
+                Problem::new(
+                    ErrorKind::Name,
+                    "camber.rounding",
+                    format!("\"{text}\""),
+                    expected,
+                )
+                .into()
+            })
+    }
+}
+
 #[cfg(test)]
 mod tests {
     use super::*;
     use crate::units::Number;
+
+    #[test]
+    fn every_word_is_read_back() {
+        for rounding in Rounding::ALL {
+            assert_eq!(rounding.name().parse(), Ok(rounding));
+        }
+        let error = "off".parse::<Rounding>().unwrap_err();
+        assert_eq!(
+            error.to_string(),
+            "camber.rounding: found \"off\"; expected one of \"nearest\", \"down\", \"up\""
+        );
+    }
 
     #[test]
     fn each_direction_rounds_the_magnitude() {

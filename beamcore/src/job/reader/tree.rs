@@ -2,8 +2,9 @@
 
 use super::steps::{self, Step};
 use super::{tree_json, tree_toml};
-use crate::error::{ErrorKind, Problem, Result};
+use crate::error::{Error, ErrorKind, Problem, Result};
 use crate::path;
+use std::str::FromStr;
 
 /// The notation that a document is written in.
 #[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
@@ -12,6 +13,35 @@ pub enum Format {
     Toml,
     /// JSON, for documents that are written by programs.
     Json,
+}
+
+impl Format {
+    /// Both notations.
+    pub const ALL: [Self; 2] = [Self::Toml, Self::Json];
+
+    /// The word for the notation, which is also the ending of a file: `toml` or `json`.
+    #[must_use]
+    pub const fn name(self) -> &'static str {
+        match self {
+            Self::Toml => "toml",
+            Self::Json => "json",
+        }
+    }
+}
+
+/// Reads the word for a notation; any other text is of the kind [`ErrorKind::Name`].
+impl FromStr for Format {
+    type Err = Error;
+
+    fn from_str(text: &str) -> Result<Self> {
+        Self::ALL
+            .into_iter()
+            .find(|format| format.name() == text)
+            .ok_or_else(|| {
+                let expected = "one of \"toml\", \"json\"";
+                Problem::new(ErrorKind::Name, "format", format!("\"{text}\""), expected).into()
+            })
+    }
 }
 
 /// What a number has to be.

@@ -159,3 +159,15 @@ fn a_long_text_is_cut_in_messages() {
     assert_eq!(shortened(&text[2..]), format!("\"{}\"", "ä".repeat(60)));
     assert_eq!(shortened("two\nlines"), "\"two\\u{a}lines\"");
 }
+
+#[test]
+fn every_word_for_a_notation_is_read_back() {
+    for format in Format::ALL {
+        assert_eq!(format.name().parse(), Ok(format));
+    }
+    let error = "yaml".parse::<Format>().unwrap_err();
+    assert_eq!(
+        error.to_string(),
+        "format: found \"yaml\"; expected one of \"toml\", \"json\""
+    );
+}
