@@ -1,0 +1,205 @@
+//! The class `Field`: a result along the member.
+
+use crate::convert;
+use crate::error::OrRaise;
+use crate::made::{Made, Reduced};
+use crate::quantity::Quantity;
+use crate::run::run;
+use beamcore::field;
+use beamcore::units::{Angle, Force, Length, Moment, Stress};
+use numpy::{AllowTypeChange, PyArray1, PyArrayLike1};
+use pyo3::exceptions::PyAttributeError;
+use pyo3::prelude::*;
+
+record! {
+    /// A greatest or least value and the place where it stands.
+    Extreme {
+        /// The value, with its sign.
+        value: Quantity,
+        /// The place, measured from the left end of the member.
+        at: Quantity,
+    }
+}
+
+record! {
+    /// The values just left and just right of a place.
+    Sides {
+        /// The value just left of the place.
+        left: Quantity,
+        /// The value just right of the place.
+        right: Quantity,
+    }
+}
+
+/// A field of any of the quantities that a member has along its length.
+#[derive(Debug)]
+pub(crate) enum Line {
+    Deflection(field::Field<Length>),
+    Slope(field::Field<Angle>),
+    Shear(field::Field<Force>),
+    Moment(field::Field<Moment>),
+    Stress(field::Field<Stress>),
+}
+
+/// The same expression for the field inside any kind of line.
+macro_rules! each {
+    ($line:expr, $field:ident => $result:expr) => {
+        match $line {
+            Line::Deflection($field) => $result,
+            Line::Slope($field) => $result,
+            Line::Shear($field) => $result,
+            Line::Moment($field) => $result,
+            Line::Stress($field) => $result,
+        }
+    };
+}
+
+impl Line {
+    /// The SI unit of the values, as it ends the name of their method.
+    const fn unit_name(&self) -> &'static str {
+        match self {
+            Self::Deflection(_) => "m",
+            Self::Slope(_) => "rad",
+            Self::Shear(_) => "N",
+            Self::Moment(_) => "Nm",
+            Self::Stress(_) => "Pa",
+        }
+    }
+
+    /// The SI values at places in m.
+    fn values(&self, x_m: &[f64]) -> beamcore::Result<Vec<f64>> {
+        let at = |&x: &f64| Length::from_m(x);
+        each!(self, field => x_m.iter().map(|x| Ok(field.value(at(x))?.si())).collect())
+    }
+}
+
+/// A quantity along the member, exact between stations and evaluated anywhere.
+///
+/// Deflection is positive downward, slope is dw/dx, shear force is V = dM/dx, a moment is positive
+/// where it stretches the bottom, a tensile stress is positive. At a support or a point load a
+/// shear force has two values.
+#[pyclass(frozen, module = "beamcore")]
+#[derive(Debug)]
+pub(crate) struct Field(pub(crate) Made<Line>);
+
+impl Field {
+    fn extreme(value: Quantity, at: Length) -> Extreme {
+        let at = Quantity::of(at);
+        Extreme { value, at }
+    }
+
+    /// The values as an array, if `unit_name` is the unit of this field.
+    fn array<'py>(
+        &self,
+        unit_name: &str,
+        x_m: &PyArrayLike1<'py, f64, AllowTypeChange>,
+    ) -> PyResult<Bound<'py, PyArray1<f64>>> {
+        let right = self.0.unit_name();
+        if unit_name != right {
+            return Err(PyAttributeError::new_err(format!(
+                "this field has no values_{unit_name}: its values are values_{right}"
+            )));
+        }
+        let py = x_m.py();
+        let places: Vec<f64> = x_m.as_array().iter().copied().collect();
+        let line = &self.0.inner;
+        Ok(PyArray1::from_vec(py, run(py, || line.values(&places))?))
+    }
+}
+
+type Places<'py> = PyArrayLike1<'py, f64, AllowTypeChange>;
+type Values<'py> = PyResult<Bound<'py, PyArray1<f64>>>;
+
+#[pymethods]
+impl Field {
+    /// The value of greatest magnitude, with its sign and place; the leftmost of equals.
+    #[getter]
+    fn greatest(&self) -> Extreme {
+        each!(&self.0.inner, field => {
+            let peak = field.greatest();
+            Self::extreme(Quantity::of(peak.value), peak.at)
+        })
+    }
+
+    /// The algebraically greatest value with its place; the leftmost of equals.
+    #[getter]
+    fn maximum(&self) -> Extreme {
+        each!(&self.0.inner, field => {
+            let peak = field.maximum();
+            Self::extreme(Quantity::of(peak.value), peak.at)
+        })
+    }
+
+    /// The algebraically least value with its place; the leftmost of equals.
+    #[getter]
+    fn minimum(&self) -> Extreme {
+        each!(&self.0.inner, field => {
+            let peak = field.minimum();
+            Self::extreme(Quantity::of(peak.value), peak.at)
+        })
+    }
+
+    /// The value at a place: where there are two, the one just right of it (at the right end of
+    /// the member, the one just left of it).
+    fn value(&self, at: &Bound<'_, PyAny>) -> PyResult<Quantity> {
+        let place = convert::read(at, "at")?;
+        each!(&self.0.inner, field => Ok(Quantity::of(field.value(place).or_raise(at.py())?)))
+    }
+
+    /// The values on both sides of a place.
+    fn sides(&self, at: &Bound<'_, PyAny>) -> PyResult<Sides> {
+        let place = convert::read(at, "at")?;
+        each!(&self.0.inner, field => {
+            let sides = field.sides(place).or_raise(at.py())?;
+            Ok(Sides { left: Quantity::of(sides.left), right: Quantity::of(sides.right) })
+        })
+    }
+
+    /// Deflections in m at places x in m, of a list or an array; positive downward.
+    fn values_m<'py>(&self, x_m: Places<'py>) -> Values<'py> {
+        self.array("m", &x_m)
+    }
+
+    /// Slopes in rad at places x in m, of a list or an array.
+    #[pyo3(name = "values_rad")]
+    fn values_rad<'py>(&self, x_m: Places<'py>) -> Values<'py> {
+        self.array("rad", &x_m)
+    }
+
+    /// Shear forces in N at places x in m, of a list or an array.
+    #[pyo3(name = "values_N")]
+    fn values_n<'py>(&self, x_m: Places<'py>) -> Values<'py> {
+        self.array("N", &x_m)
+    }
+
+    /// Moments in N m at places x in m, of a list or an array; positive sagging.
+    #[pyo3(name = "values_Nm")]
+    fn values_nm<'py>(&self, x_m: Places<'py>) -> Values<'py> {
+        self.array("Nm", &x_m)
+    }
+
+    /// Stresses in Pa at places x in m, of a list or an array; tension positive.
+    #[pyo3(name = "values_Pa")]
+    fn values_pa<'py>(&self, x_m: Places<'py>) -> Values<'py> {
+        self.array("Pa", &x_m)
+    }
+
+    /// The places in m where the pieces of the field meet: ends, supports, point loads, ends of
+    /// line loads.
+    #[getter]
+    fn stations_m<'py>(&self, py: Python<'py>) -> Bound<'py, PyArray1<f64>> {
+        let stations = each!(&self.0.inner, field => field.stations());
+        PyArray1::from_iter(py, stations.into_iter().map(Length::si))
+    }
+
+    fn __reduce__<'py>(&self, py: Python<'py>) -> PyResult<Reduced<'py>> {
+        self.0.reduce(py)
+    }
+}
+
+/// Adds the classes to the module.
+pub(crate) fn register(module: &Bound<'_, PyModule>) -> PyResult<()> {
+    module.add_class::<Extreme>()?;
+    module.add_class::<Sides>()?;
+    module.add_class::<Field>()
+}
