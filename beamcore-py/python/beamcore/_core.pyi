@@ -1,0 +1,277 @@
+from collections.abc import Sequence
+from os import PathLike
+from typing import Any, ClassVar, Final, Literal, TypeAlias, TypeVar, final, overload
+
+from beamcore._typing import QuantityLike
+from beamcore.errors import (
+    BeamcoreError as BeamcoreError, ValueProblem as ValueProblem, NameProblem as NameProblem,
+    KeyProblem as KeyProblem, UnitProblem as UnitProblem, DuplicateProblem as DuplicateProblem,
+    GeometryProblem as GeometryProblem, MissingProblem as MissingProblem,
+    MechanismProblem as MechanismProblem, PositionProblem as PositionProblem,
+    SyntaxProblem as SyntaxProblem, VersionProblem as VersionProblem, FileProblem as FileProblem,
+    LookupProblem as LookupProblem, NumericalProblem as NumericalProblem, Problem as Problem,
+)
+from beamcore.results import (
+    Extreme as Extreme, Sides as Sides, Field as Field, StressExtreme as StressExtreme,
+    Utilisation as Utilisation, PartStress as PartStress, Ordinate as Ordinate, Camber as Camber,
+    Reaction as Reaction, Response as Response,
+)
+
+__all__ = [
+    "__version__", "Unit", "Quantity", "TimberStrength", "MetalStrength", "ConcreteCreep",
+    "Material", "timber", "steel", "concrete", "Outline", "rectangle", "Part", "Section",
+    "Stiffness", "TransformedPart", "TransformedSection", "Support", "pin", "roller", "fixed",
+    "Load", "self_weight", "uniform", "partial", "point", "Action", "permanent", "variable",
+    "Member", "Job", "Outcome", "run", "job_schema", "outcome_schema", "BeamcoreError",
+    "ValueProblem", "NameProblem", "KeyProblem", "UnitProblem", "DuplicateProblem",
+    "GeometryProblem", "MissingProblem", "MechanismProblem", "PositionProblem", "SyntaxProblem",
+    "VersionProblem", "FileProblem", "LookupProblem", "NumericalProblem", "Problem", "Extreme",
+    "Sides", "Field", "StressExtreme", "Utilisation", "PartStress", "Ordinate", "Camber",
+    "Reaction", "Response",
+]
+
+_T = TypeVar("_T", Unit, Quantity)
+_Time: TypeAlias = Literal["initial", "final"]
+_Format: TypeAlias = Literal["toml", "json"]
+
+__version__: str
+
+@final
+class Unit:
+    __array_ufunc__: ClassVar[None]
+    def __new__(cls, symbol: str) -> Unit: ...
+    @overload
+    def __mul__(self, other: float, /) -> Quantity: ...
+    @overload
+    def __mul__(self, other: _T, /) -> _T: ...
+    def __rmul__(self, other: float, /) -> Quantity: ...
+    @overload
+    def __truediv__(self, other: float, /) -> Quantity: ...
+    @overload
+    def __truediv__(self, other: Unit, /) -> Unit: ...
+    @overload
+    def __truediv__(self, other: Quantity, /) -> Any: ...
+    def __rtruediv__(self, other: float, /) -> Quantity: ...
+    def __pow__(self, exponent: int, modulo: None = None, /) -> Unit: ...
+    def __rpow__(self, base: Any, modulo: Any = None, /) -> Any: ...
+    def __eq__(self, other: object, /) -> bool: ...
+    def __hash__(self) -> int: ...
+
+@final
+class Quantity:
+    __array_ufunc__: ClassVar[None]
+    si: Final[float]
+    def __new__(cls, number: float, unit: Unit | str) -> Quantity: ...
+    @staticmethod
+    def from_si(si: float, unit: Unit) -> Quantity: ...
+    def to(self, unit: Unit | str) -> float: ...
+    # Two quantities whose units cancel give a number.
+    @overload
+    def __mul__(self, other: float | Unit, /) -> Quantity: ...
+    @overload
+    def __mul__(self, other: Quantity, /) -> Any: ...
+    def __rmul__(self, other: float | Unit, /) -> Quantity: ...
+    @overload
+    def __truediv__(self, other: float | Unit, /) -> Quantity: ...
+    @overload
+    def __truediv__(self, other: Quantity, /) -> Any: ...
+    def __rtruediv__(self, other: float, /) -> Quantity: ...
+    def __add__(self, other: Quantity, /) -> Quantity: ...
+    def __sub__(self, other: Quantity, /) -> Quantity: ...
+    def __radd__(self, other: Any, /) -> Any: ...
+    def __rsub__(self, other: Any, /) -> Any: ...
+    def __pow__(self, exponent: int, modulo: None = None, /) -> Quantity: ...
+    def __rpow__(self, base: Any, modulo: Any = None, /) -> Any: ...
+    def __neg__(self) -> Quantity: ...
+    def __pos__(self) -> Quantity: ...
+    def __abs__(self) -> Quantity: ...
+    def __lt__(self, other: Quantity, /) -> bool: ...
+    def __le__(self, other: Quantity, /) -> bool: ...
+    def __gt__(self, other: Quantity, /) -> bool: ...
+    def __ge__(self, other: Quantity, /) -> bool: ...
+    def __eq__(self, other: object, /) -> bool: ...
+    def __hash__(self) -> int: ...
+
+@final
+class TimberStrength:
+    bending: Final[Quantity]
+    tension: Final[Quantity]
+    compression: Final[Quantity]
+    def __new__(
+        cls, bending: QuantityLike, tension: QuantityLike, compression: QuantityLike
+    ) -> TimberStrength: ...
+
+@final
+class MetalStrength:
+    yield_stress: Final[Quantity]
+    def __new__(cls, yield_stress: QuantityLike) -> MetalStrength: ...
+
+@final
+class ConcreteCreep:
+    coefficient: Final[float]
+    mean_strength: Final[Quantity]
+    relative_humidity_percent: Final[float]
+    notional_size: Final[Quantity]
+    age_at_loading: Final[Quantity]
+    age_at_end: Final[Quantity]
+    cement: Final[Literal["S", "N", "R"]]
+    def __new__(
+        cls,
+        mean_strength: QuantityLike,
+        relative_humidity_percent: float,
+        notional_size: QuantityLike,
+        age_at_loading: QuantityLike,
+        age_at_end: QuantityLike,
+        cement: Literal["S", "N", "R"],
+    ) -> ConcreteCreep: ...
+
+@final
+class Material:
+    name: Final[str]
+    modulus: Final[Quantity]
+    density: Final[Quantity | None]
+    creep_factor: Final[float]
+    creep_basis: Final[str]
+    design_strength: Final[TimberStrength | MetalStrength | None]
+    origin: Final[str | None]
+    def __new__(
+        cls,
+        name: str,
+        modulus: QuantityLike,
+        creep_factor: float,
+        density: QuantityLike | None = None,
+        design_strength: TimberStrength | MetalStrength | None = None,
+    ) -> Material: ...
+    def modulus_at(self, time: _Time) -> Quantity: ...
+    def named(self, name: str) -> Material: ...
+    def with_design_strength(self, strength: TimberStrength | MetalStrength) -> Material: ...
+
+def timber(strength_class: str, service_class: int) -> Material: ...
+def steel(strength_class: str) -> Material: ...
+def concrete(strength_class: str, creep: float | ConcreteCreep) -> Material: ...
+
+@final
+class Outline:
+    width: Final[Quantity]
+    height: Final[Quantity]
+    area: Final[Quantity]
+    second_moment_yy: Final[Quantity]
+    second_moment_zz: Final[Quantity]
+
+def rectangle(width: QuantityLike, height: QuantityLike) -> Outline: ...
+
+@final
+class Part:
+    name: Final[str]
+    outline: Final[Outline]
+    def __new__(cls, name: str, outline: Outline, material: Material) -> Part: ...
+    def at(self, y: QuantityLike, z: QuantityLike) -> Part: ...
+    def left_of(self, other: Part | str) -> Part: ...
+    def right_of(self, other: Part | str) -> Part: ...
+    def above(self, other: Part | str) -> Part: ...
+    def below(self, other: Part | str) -> Part: ...
+
+@final
+class Section:
+    part_names: Final[tuple[str, ...]]
+    line_mass: Final[Quantity | None]
+    notes: Final[tuple[str, ...]]
+    def __new__(cls, parts: Sequence[Part]) -> Section: ...
+    def stiffness(self, time: _Time) -> Stiffness: ...
+    def transformed_to(self, material: str, time: _Time) -> TransformedSection: ...
+
+@final
+class Stiffness:
+    axial: Final[Quantity]
+    centroid_y: Final[Quantity]
+    centroid_z: Final[Quantity]
+    bending_yy: Final[Quantity]
+    bending_zz: Final[Quantity]
+    bending_yz: Final[Quantity]
+    moduli: Final[tuple[Quantity, ...]]
+    shares: Final[tuple[float, ...]]
+
+@final
+class TransformedPart:
+    name: Final[str]
+    ratio: Final[float]
+    width: Final[Quantity]
+    bottom: Final[Quantity]
+    top: Final[Quantity]
+    def __new__(
+        cls, name: str, ratio: float, width: Quantity, bottom: Quantity, top: Quantity
+    ) -> TransformedPart: ...
+
+@final
+class TransformedSection:
+    reference_modulus: Final[Quantity]
+    area: Final[Quantity]
+    centroid_z: Final[Quantity]
+    second_moment: Final[Quantity]
+    parts: Final[tuple[TransformedPart, ...]]
+    def stress(self, part: str, z: QuantityLike, moment: QuantityLike) -> Quantity: ...
+
+@final
+class Support:
+    name: Final[str]
+    kind: Final[str]
+    at: Final[Quantity]
+
+def pin(name: str, at: QuantityLike) -> Support: ...
+def roller(name: str, at: QuantityLike) -> Support: ...
+def fixed(name: str, at: QuantityLike) -> Support: ...
+
+@final
+class Load:
+    kind: Final[str]
+
+def self_weight() -> Load: ...
+def uniform(load: QuantityLike) -> Load: ...
+def partial(load: QuantityLike, from_: QuantityLike, to: QuantityLike) -> Load: ...
+def point(load: QuantityLike, at: QuantityLike) -> Load: ...
+
+@final
+class Action:
+    name: Final[str]
+    kind: Final[str]
+
+def permanent(name: str, *loads: Load) -> Action: ...
+def variable(name: str, *loads: Load, psi_0: float, psi_1: float, psi_2: float) -> Action: ...
+
+@final
+class Member:
+    length: Final[Quantity]
+    support_names: Final[tuple[str, ...]]
+    combinations: Final[tuple[str, ...]]
+    notes: Final[tuple[str, ...]]
+    def __new__(
+        cls,
+        section: Section,
+        length: QuantityLike,
+        supports: Sequence[Support],
+        actions: Sequence[Action],
+    ) -> Member: ...
+    @staticmethod
+    def simple_span(section: Section, span: QuantityLike, actions: Sequence[Action]) -> Member: ...
+    def solve(self) -> Response: ...
+
+@final
+class Job:
+    @staticmethod
+    def read(text: str, format: _Format = "toml") -> Job: ...
+    @staticmethod
+    def open(path: str | PathLike[str]) -> Job: ...
+    def to_text(self, format: _Format = "toml") -> str: ...
+    def solve(self) -> Outcome: ...
+
+@final
+class Outcome:
+    json: Final[str]
+    def summary(self) -> str: ...
+    def number(self, path: str) -> float: ...
+    def text(self, path: str) -> str: ...
+    def as_dict(self) -> dict[str, Any]: ...
+
+def run(text: str, format: _Format = "toml") -> Outcome: ...
+def job_schema() -> str: ...
+def outcome_schema() -> str: ...

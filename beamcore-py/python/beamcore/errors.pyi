@@ -1,0 +1,49 @@
+from typing import Final, final
+
+__all__ = [
+    "BeamcoreError",
+    "ValueProblem",
+    "NameProblem",
+    "KeyProblem",
+    "UnitProblem",
+    "DuplicateProblem",
+    "GeometryProblem",
+    "MissingProblem",
+    "MechanismProblem",
+    "PositionProblem",
+    "SyntaxProblem",
+    "VersionProblem",
+    "FileProblem",
+    "LookupProblem",
+    "NumericalProblem",
+    "Problem",
+]
+
+class BeamcoreError(Exception):
+    kind: str
+    path: str
+    problems: tuple[Problem, ...]
+
+class ValueProblem(BeamcoreError, ValueError): ...
+class NameProblem(BeamcoreError, ValueError): ...
+class KeyProblem(BeamcoreError, ValueError): ...
+class UnitProblem(BeamcoreError, ValueError): ...
+class DuplicateProblem(BeamcoreError, ValueError): ...
+class GeometryProblem(BeamcoreError, ValueError): ...
+class MissingProblem(BeamcoreError, ValueError): ...
+class MechanismProblem(BeamcoreError, ValueError): ...
+class PositionProblem(BeamcoreError, ValueError): ...
+class SyntaxProblem(BeamcoreError, ValueError): ...
+class VersionProblem(BeamcoreError, ValueError): ...
+class FileProblem(BeamcoreError, OSError): ...
+class LookupProblem(BeamcoreError, LookupError): ...
+class NumericalProblem(BeamcoreError): ...
+
+@final
+class Problem:
+    kind: Final[str]
+    path: Final[str]
+    found: Final[str]
+    expected: Final[str]
+    line: Final[int | None]
+    def __new__(cls, kind: str, path: str, found: str, expected: str, line: int | None) -> Problem: ...
