@@ -13,6 +13,9 @@ use pyo3::prelude::*;
 
 record! {
     /// A greatest or least value and the place where it stands.
+    ///
+    /// >>> Extreme(8.6*mm, at=2.1*m)
+    /// Extreme(value=8.6 mm, at=2.1 m)
     Extreme {
         /// The value, with its sign.
         value: Quantity,

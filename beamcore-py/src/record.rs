@@ -28,12 +28,14 @@ macro_rules! record {
                 $crate::made::Recipe::call(py, stringify!($Name), fields)?.reduce(py)
             }
 
-            fn __repr__(&self) -> String {
-                let fields: &[String] = &[$(format!(
-                    concat!(stringify!($field), "={:?}"),
-                    self.$field
+            fn __repr__(&self, py: pyo3::Python<'_>) -> pyo3::PyResult<String> {
+                use pyo3::{IntoPyObjectExt, types::PyAnyMethods};
+                let fields = [$(format!(
+                    "{}={}",
+                    stringify!($field),
+                    self.$field.clone().into_bound_py_any(py)?.repr()?
                 )),+];
-                format!("{}({})", stringify!($Name), fields.join(", "))
+                Ok(format!("{}({})", stringify!($Name), fields.join(", ")))
             }
         }
     };

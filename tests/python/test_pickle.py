@@ -1,0 +1,142 @@
+"""Pickling: what comes back is equal, and gives the same bits."""
+
+import copy
+import pickle
+from typing import Any
+
+import golden
+import numpy as np
+import pytest
+
+import beamcore
+from beamcore import (
+    Camber, ConcreteCreep, Extreme, Field, Job, MetalStrength, Part, Problem, Quantity, Section,
+    TimberStrength, Unit, concrete, fixed, partial, permanent, pin, point, rectangle, roller,
+    self_weight, steel, timber, uniform, variable,
+)
+from beamcore.units import MPa, day, kN, m, mm
+
+CREEP = ConcreteCreep(38*MPa, 50, 150*mm, 28*day, 18250*day, "N")
+TIMBER = TimberStrength(14.8*MPa, 8.9*MPa, 12.9*MPa)
+METAL = MetalStrength("275 MPa")
+SECTION, MEMBER = golden.slab_strip()
+RESPONSE = MEMBER.solve()
+
+
+def camber() -> Camber:
+    return RESPONSE.camber(
+        combination="quasi-permanent", time="final", fraction=0.8, from_="left", to="right",
+        step="1 mm", rounding="up", divisions=4,
+    )
+
+
+def again(value: Any) -> Any:
+    for protocol in range(2, pickle.HIGHEST_PROTOCOL):
+        pickle.loads(pickle.dumps(value, protocol))
+    return pickle.loads(pickle.dumps(value))
+
+
+@pytest.mark.parametrize(
+    "value",
+    [
+        mm, kN/m, Unit("kip in2"), 75*mm, 5*kN/m * (4.2*m), (1*mm) / 3,
+        CREEP, TIMBER, METAL,
+        timber("C24", 2), steel("S355"), concrete("C30/37", CREEP), concrete("C25/30", 2.5),
+        timber("GL24h", 1).named("ridge").with_design_strength(TIMBER),
+        beamcore.Material("a", "10 GPa", 0.5, density="500 kg/m3", design_strength=METAL),
+        beamcore.Material("a", "10 GPa", 0.5),
+        rectangle(75*mm, 220*mm),
+        Part("a", rectangle(75*mm, 220*mm), steel("S235")),
+        Part("a", rectangle(75*mm, 220*mm), steel("S235")).at(1*m, "2 m").above("b"),
+        SECTION, SECTION.stiffness("final"), SECTION.transformed_to("C24", "final"),
+        SECTION.transformed_to("C24", "final").parts[1],
+        pin("left", 0*m), roller("r", 1*m), fixed("f", 2*m),
+        self_weight(), uniform(1*kN/m), partial(1*kN/m, 1*m, 2*m), point(1*kN, 1*m),
+        permanent("g", self_weight(), uniform(1*kN/m)),
+        variable("q", point(1*kN, 2*m), psi_0=0.7, psi_1=0.5, psi_2=0.3),
+        camber(), camber().ordinates[2],
+        RESPONSE.deflection("fundamental", "final").greatest,
+        RESPONSE.shear("fundamental", "final").sides(1*m),
+        RESPONSE.reaction("fundamental", "final", "left"),
+        RESPONSE.stress("fundamental", "final", "slab").greatest_tension,
+        beamcore.Utilisation(0.5, 2*m),
+        Problem("Unit", "a.b", "x", "y", 3),
+    ],
+)
+def test_values_come_back_equal(value: Any) -> None:
+    found = again(value)
+    assert type(found) is type(value)
+    assert found == value
+    assert copy.deepcopy(value) == value
+    assert str(found) == str(value) or type(value).__repr__ is object.__repr__
+
+
+def test_equality_tells_values_apart() -> None:
+    assert rectangle(75*mm, 220*mm) != rectangle(220*mm, 75*mm)
+    assert timber("C24", 1) != timber("C24", 2)
+    assert timber("C24", 1).named("a") != timber("C24", 1)
+    assert pin("left", 0*m) != roller("left", 0*m)
+    assert uniform(1*kN/m) != uniform(2*kN/m)
+    assert permanent("g", uniform(1*kN/m)) != permanent("g")
+    assert Extreme(1*mm, 2*m) != Extreme(1*mm, 1*m)
+    assert SECTION.stiffness("initial") != SECTION.stiffness("final")
+
+
+def test_a_quantity_keeps_its_bits_and_its_unit() -> None:
+    for quantity in ((1*m) / 3, 0.1*mm, 7*kN/m * (0.3*m)):
+        found: Quantity = again(quantity)
+        assert found.si == quantity.si
+        assert str(found) == str(quantity)
+    # Both go on with the same bits.
+    assert (again(1.3*kN) / mm).si == (1.3*kN / mm).si
+
+
+FIELDS = {
+    "deflection": (RESPONSE.deflection("fundamental", "final"), "values_m"),
+    "slope": (RESPONSE.slope("fundamental", "final"), "values_rad"),
+    "shear": (RESPONSE.shear("fundamental", "final"), "values_N"),
+    "moment": (RESPONSE.moment("fundamental", "final"), "values_Nm"),
+    "bottom": (RESPONSE.stress("fundamental", "final", "slab").bottom, "values_Pa"),
+    "centroid": (RESPONSE.stress("fundamental", "final", "slab").centroid, "values_Pa"),
+    "top": (RESPONSE.stress("fundamental", "final", "slab").top, "values_Pa"),
+}
+
+
+@pytest.mark.parametrize("name", FIELDS)
+def test_fields_come_back_with_their_bits(name: str) -> None:
+    field, values = FIELDS[name]
+    found: Field = again(field)
+    x_m = np.linspace(0, 5.4, 101)
+    assert getattr(found, values)(x_m).tobytes() == getattr(field, values)(x_m).tobytes()
+    assert found.greatest == field.greatest
+
+
+def test_members_and_responses_come_back() -> None:
+    for _, member in (golden.two_span(), golden.slab_strip()):
+        found = again(member)
+        assert found.length == member.length
+        assert found.support_names == member.support_names
+        response = again(member.solve())
+        assert response.combinations == member.combinations
+        for combination in member.combinations:
+            peak = member.solve().moment(combination, "final").greatest
+            assert response.moment(combination, "final").greatest == peak
+    stress = RESPONSE.stress("fundamental", "final", "slab")
+    assert again(stress).greatest_compression == stress.greatest_compression
+
+
+def test_jobs_and_outcomes_come_back() -> None:
+    file = golden.Path(__file__).parents[1] / "golden" / "slab-strip.toml"
+    for job in (Job.open(file), Job.read(file.read_text(encoding="utf-8"))):
+        assert again(job).to_text() == job.to_text()
+        assert again(job.solve()).json == job.solve().json
+
+
+def test_errors_come_back() -> None:
+    with pytest.raises(beamcore.UnitProblem) as caught:
+        rectangle("75", "200 kN")
+    found = again(caught.value)
+    assert type(found) is beamcore.UnitProblem
+    assert str(found) == str(caught.value)
+    assert found.problems == caught.value.problems and len(found.problems) == 2
+    assert (found.kind, found.path) == ("Unit", "rectangle.width")
