@@ -35,7 +35,7 @@ for name in ("kind", "path", "problems"):
 
 @pytest.mark.parametrize("name", DOCS)
 def test_everything_is_documented(name: str) -> None:
-    assert len(DOCS[name]) > 10
+    assert DOCS[name].strip().endswith((".", ")", "`", "True")) or ">>>" in DOCS[name]
 
 
 EXAMPLES = [name for name, text in DOCS.items() if ">>>" in text]

@@ -28,16 +28,18 @@ def test_arrays_do_not_take_units(array: Any, other: Any) -> None:
 
 def test_arrays_are_not_added_to_quantities() -> None:
     array: Any = np.array([1.0, 2.0])
+    distance: Any = 2*mm
     with pytest.raises(TypeError):
-        array + 2*mm
+        array + distance
     with pytest.raises(TypeError, match=REFUSAL):
-        2*mm + array
+        distance + array
     with pytest.raises(TypeError):
-        np.add(array, 2*mm)
+        np.add(array, distance)
 
 
 def test_scalars_of_numpy_are_numbers() -> None:
-    for scalar in (np.float64(75), np.int32(75), np.float32(75)):
+    scalars: list[Any] = [np.float64(75), np.int32(75), np.float32(75)]
+    for scalar in scalars:
         assert scalar * mm == mm * scalar == 75*mm
         assert type(scalar * mm) is beamcore.Quantity
     with pytest.raises(beamcore.UnitProblem):

@@ -2,6 +2,7 @@
 
 import copy
 import pickle
+from pathlib import Path
 from typing import Any
 
 import golden
@@ -16,6 +17,7 @@ from beamcore import (
 )
 from beamcore.units import MPa, day, kN, m, mm
 
+JOB = Path(__file__).parents[1] / "golden" / "slab-strip.toml"
 CREEP = ConcreteCreep(38*MPa, 50, 150*mm, 28*day, 18250*day, "N")
 TIMBER = TimberStrength(14.8*MPa, 8.9*MPa, 12.9*MPa)
 METAL = MetalStrength("275 MPa")
@@ -36,39 +38,49 @@ def again(value: Any) -> Any:
     return pickle.loads(pickle.dumps(value))
 
 
-@pytest.mark.parametrize(
-    "value",
-    [
-        mm, kN/m, Unit("kip in2"), 75*mm, 5*kN/m * (4.2*m), (1*mm) / 3,
-        CREEP, TIMBER, METAL,
-        timber("C24", 2), steel("S355"), concrete("C30/37", CREEP), concrete("C25/30", 2.5),
-        timber("GL24h", 1).named("ridge").with_design_strength(TIMBER),
-        beamcore.Material("a", "10 GPa", 0.5, density="500 kg/m3", design_strength=METAL),
-        beamcore.Material("a", "10 GPa", 0.5),
-        rectangle(75*mm, 220*mm),
-        Part("a", rectangle(75*mm, 220*mm), steel("S235")),
-        Part("a", rectangle(75*mm, 220*mm), steel("S235")).at(1*m, "2 m").above("b"),
-        SECTION, SECTION.stiffness("final"), SECTION.transformed_to("C24", "final"),
-        SECTION.transformed_to("C24", "final").parts[1],
-        pin("left", 0*m), roller("r", 1*m), fixed("f", 2*m),
-        self_weight(), uniform(1*kN/m), partial(1*kN/m, 1*m, 2*m), point(1*kN, 1*m),
-        permanent("g", self_weight(), uniform(1*kN/m)),
-        variable("q", point(1*kN, 2*m), psi_0=0.7, psi_1=0.5, psi_2=0.3),
-        camber(), camber().ordinates[2],
-        RESPONSE.deflection("fundamental", "final").greatest,
-        RESPONSE.shear("fundamental", "final").sides(1*m),
-        RESPONSE.reaction("fundamental", "final", "left"),
-        RESPONSE.stress("fundamental", "final", "slab").greatest_tension,
-        beamcore.Utilisation(0.5, 2*m),
-        Problem("Unit", "a.b", "x", "y", 3),
-    ],
-)
+VALUES: list[Any] = [
+    mm, kN/m, Unit("kip in2"), 75*mm, 5*kN/m * (4.2*m), (1*mm) / 3,
+    CREEP, TIMBER, METAL,
+    timber("C24", 2), steel("S355"), concrete("C30/37", CREEP), concrete("C25/30", 2.5),
+    timber("GL24h", 1).named("ridge").with_design_strength(TIMBER),
+    beamcore.Material("a", "10 GPa", 0.5, density="500 kg/m3", design_strength=METAL),
+    beamcore.Material("a", "10 GPa", 0.5),
+    rectangle(75*mm, 220*mm),
+    Part("a", rectangle(75*mm, 220*mm), steel("S235")),
+    Part("a", rectangle(75*mm, 220*mm), steel("S235")).at(1*m, "2 m").above("b"),
+    SECTION, SECTION.stiffness("final"), SECTION.transformed_to("C24", "final"),
+    SECTION.transformed_to("C24", "final").parts[1],
+    pin("left", 0*m), roller("r", 1*m), fixed("f", 2*m),
+    self_weight(), uniform(1*kN/m), partial(1*kN/m, 1*m, 2*m), point(1*kN, 1*m),
+    permanent("g", self_weight(), uniform(1*kN/m)),
+    variable("q", point(1*kN, 2*m), psi_0=0.7, psi_1=0.5, psi_2=0.3),
+    camber(), camber().ordinates[2],
+    RESPONSE.deflection("fundamental", "final").greatest,
+    RESPONSE.shear("fundamental", "final").sides(1*m),
+    RESPONSE.reaction("fundamental", "final", "left"),
+    RESPONSE.stress("fundamental", "final", "slab").greatest_tension,
+    beamcore.Utilisation(0.5, 2*m),
+    Problem("Unit", "a.b", "x", "y", 3),
+]
+
+
+@pytest.mark.parametrize("value", VALUES)
 def test_values_come_back_equal(value: Any) -> None:
     found = again(value)
     assert type(found) is type(value)
     assert found == value
     assert copy.deepcopy(value) == value
-    assert str(found) == str(value) or type(value).__repr__ is object.__repr__
+    assert str(found) == str(value) or " object at 0x" in str(value)
+
+
+@pytest.mark.parametrize("value", [*VALUES, MEMBER, RESPONSE, Job.open(JOB), Job.open(JOB).solve()])
+def test_objects_are_frozen(value: Any) -> None:
+    assert type(value).__module__ == "beamcore"
+    for name in ("extra", *(name for name in dir(value) if not name.startswith("_"))):
+        with pytest.raises(AttributeError):
+            setattr(value, name, 1)
+    with pytest.raises(TypeError, match="not an acceptable base type"):
+        type("Derived", (type(value),), {})
 
 
 def test_equality_tells_values_apart() -> None:
@@ -126,8 +138,7 @@ def test_members_and_responses_come_back() -> None:
 
 
 def test_jobs_and_outcomes_come_back() -> None:
-    file = golden.Path(__file__).parents[1] / "golden" / "slab-strip.toml"
-    for job in (Job.open(file), Job.read(file.read_text(encoding="utf-8"))):
+    for job in (Job.open(JOB), Job.read(JOB.read_text(encoding="utf-8"))):
         assert again(job).to_text() == job.to_text()
         assert again(job.solve()).json == job.solve().json
 
