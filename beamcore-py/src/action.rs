@@ -2,6 +2,7 @@
 
 use crate::convert::{self, Inputs};
 use crate::made::{Made, Recipe, Reduced};
+use crate::operand::Number;
 use beamcore::member::{self, ActionKind, CombinationFactors};
 use pyo3::prelude::*;
 use pyo3::types::{PyDict, PyTuple};
@@ -158,10 +159,11 @@ fn variable(
     py: Python<'_>,
     name: &str,
     loads: Vec<Py<Load>>,
-    psi_0: f64,
-    psi_1: f64,
-    psi_2: f64,
+    psi_0: Number,
+    psi_1: Number,
+    psi_2: Number,
 ) -> PyResult<Action> {
+    let [psi_0, psi_1, psi_2] = [psi_0.0, psi_1.0, psi_2.0];
     let keywords = PyDict::new(py);
     keywords.set_item("psi_0", psi_0)?;
     keywords.set_item("psi_1", psi_1)?;

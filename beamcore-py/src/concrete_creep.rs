@@ -3,6 +3,7 @@
 use crate::convert::Inputs;
 use crate::error::OrRaise;
 use crate::made::{Recipe, Reduced};
+use crate::operand::Number;
 use crate::quantity::Quantity;
 use beamcore::material::Creep;
 use beamcore::material::concrete::{Cement, ConcreteCreep as CoreCreep};
@@ -34,7 +35,7 @@ impl ConcreteCreep {
     fn new(
         py: Python<'_>,
         mean_strength: &Bound<'_, PyAny>,
-        relative_humidity_percent: f64,
+        relative_humidity_percent: Number,
         notional_size: &Bound<'_, PyAny>,
         age_at_loading: &Bound<'_, PyAny>,
         age_at_end: &Bound<'_, PyAny>,
@@ -49,7 +50,7 @@ impl ConcreteCreep {
         let inner = || {
             Some(CoreCreep {
                 mean_strength: mean_strength?,
-                relative_humidity_percent,
+                relative_humidity_percent: relative_humidity_percent.0,
                 notional_size: notional_size?,
                 age_at_loading: age_at_loading?,
                 age_at_end: age_at_end?,
@@ -123,7 +124,7 @@ impl ConcreteCreep {
 #[derive(FromPyObject)]
 pub(crate) enum ConcreteCreepOrNumber {
     Dependent(ConcreteCreep),
-    Number(f64),
+    Number(Number),
 }
 
 impl ConcreteCreepOrNumber {
@@ -131,7 +132,7 @@ impl ConcreteCreepOrNumber {
     pub(crate) fn into_core(self) -> beamcore::Result<Creep> {
         match self {
             Self::Dependent(creep) => Creep::concrete(&creep.inner),
-            Self::Number(factor) => Ok(Creep::factor(factor)),
+            Self::Number(factor) => Ok(Creep::factor(factor.0)),
         }
     }
 }

@@ -7,8 +7,8 @@ use crate::quantity::Quantity;
 use crate::run::run;
 use beamcore::field;
 use beamcore::units::{Angle, Force, Length, Moment, Stress};
-use numpy::{AllowTypeChange, PyArray1, PyArrayLike1};
-use pyo3::exceptions::PyAttributeError;
+use numpy::{PyArray1, PyReadonlyArray1};
+use pyo3::exceptions::{PyAttributeError, PyTypeError};
 use pyo3::prelude::*;
 
 record! {
@@ -92,25 +92,33 @@ impl Field {
     }
 
     /// The values as an array, if `unit_name` is the unit of this field.
-    fn array<'py>(
-        &self,
-        unit_name: &str,
-        x_m: &PyArrayLike1<'py, f64, AllowTypeChange>,
-    ) -> PyResult<Bound<'py, PyArray1<f64>>> {
+    fn array<'py>(&self, unit_name: &str, x_m: &Bound<'py, PyAny>) -> Values<'py> {
         let right = self.0.unit_name();
         if unit_name != right {
             return Err(PyAttributeError::new_err(format!(
                 "this field has no values_{unit_name}: its values are values_{right}"
             )));
         }
-        let py = x_m.py();
-        let places: Vec<f64> = x_m.as_array().iter().copied().collect();
-        let line = &self.0.inner;
-        Ok(PyArray1::from_vec(py, run(py, || line.values(&places))?))
+        let (places, line) = (numbers(x_m)?, &self.0.inner);
+        let values = run(x_m.py(), || line.values(&places))?;
+        Ok(PyArray1::from_vec(x_m.py(), values))
     }
 }
 
-type Places<'py> = PyArrayLike1<'py, f64, AllowTypeChange>;
+/// The numbers of a list or an array of one dimension.
+fn numbers(x_m: &Bound<'_, PyAny>) -> PyResult<Vec<f64>> {
+    let array = x_m.py().import("numpy")?.call_method1("asarray", (x_m,))?;
+    // NumPy would read texts as numbers and drop the imaginary part of others.
+    let kind: char = array.getattr("dtype")?.getattr("kind")?.extract()?;
+    if !matches!(kind, 'f' | 'i' | 'u') || array.getattr("ndim")?.extract::<usize>()? != 1 {
+        return Err(PyTypeError::new_err(
+            "a list or an array of numbers, of one dimension, is needed",
+        ));
+    }
+    let array: PyReadonlyArray1<'_, f64> = array.call_method1("astype", ("f8",))?.extract()?;
+    Ok(array.as_array().iter().copied().collect())
+}
+
 type Values<'py> = PyResult<Bound<'py, PyArray1<f64>>>;
 
 #[pymethods]
@@ -159,32 +167,31 @@ impl Field {
     }
 
     /// Deflections in m at places x in m, of a list or an array; positive downward.
-    fn values_m<'py>(&self, x_m: Places<'py>) -> Values<'py> {
-        self.array("m", &x_m)
+    fn values_m<'py>(&self, x_m: &Bound<'py, PyAny>) -> Values<'py> {
+        self.array("m", x_m)
     }
 
     /// Slopes in rad at places x in m, of a list or an array.
-    #[pyo3(name = "values_rad")]
-    fn values_rad<'py>(&self, x_m: Places<'py>) -> Values<'py> {
-        self.array("rad", &x_m)
+    fn values_rad<'py>(&self, x_m: &Bound<'py, PyAny>) -> Values<'py> {
+        self.array("rad", x_m)
     }
 
     /// Shear forces in N at places x in m, of a list or an array.
     #[pyo3(name = "values_N")]
-    fn values_n<'py>(&self, x_m: Places<'py>) -> Values<'py> {
-        self.array("N", &x_m)
+    fn values_n<'py>(&self, x_m: &Bound<'py, PyAny>) -> Values<'py> {
+        self.array("N", x_m)
     }
 
     /// Moments in N m at places x in m, of a list or an array; positive sagging.
     #[pyo3(name = "values_Nm")]
-    fn values_nm<'py>(&self, x_m: Places<'py>) -> Values<'py> {
-        self.array("Nm", &x_m)
+    fn values_nm<'py>(&self, x_m: &Bound<'py, PyAny>) -> Values<'py> {
+        self.array("Nm", x_m)
     }
 
     /// Stresses in Pa at places x in m, of a list or an array; tension positive.
     #[pyo3(name = "values_Pa")]
-    fn values_pa<'py>(&self, x_m: Places<'py>) -> Values<'py> {
-        self.array("Pa", &x_m)
+    fn values_pa<'py>(&self, x_m: &Bound<'py, PyAny>) -> Values<'py> {
+        self.array("Pa", x_m)
     }
 
     /// The places in m where the pieces of the field meet: ends, supports, point loads, ends of

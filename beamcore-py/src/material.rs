@@ -4,6 +4,7 @@ use crate::concrete_creep::ConcreteCreepOrNumber;
 use crate::convert::Inputs;
 use crate::error::OrRaise;
 use crate::made::{Made, Recipe, Reduced};
+use crate::operand::Number;
 use crate::quantity::Quantity;
 use crate::strength::Strength;
 use crate::time::TimeText;
@@ -30,14 +31,14 @@ impl Material {
         py: Python<'py>,
         name: &str,
         modulus: &Bound<'py, PyAny>,
-        creep_factor: f64,
+        creep_factor: Number,
         density: Option<&Bound<'py, PyAny>>,
         design_strength: Option<&Bound<'py, PyAny>>,
     ) -> PyResult<Self> {
         let mut inputs = Inputs::default();
         let given = inputs.read(modulus, "material.modulus")?;
         let material = given
-            .map(|modulus| material::Material::new(name, modulus, Creep::factor(creep_factor)));
+            .map(|modulus| material::Material::new(name, modulus, Creep::factor(creep_factor.0)));
         let mut material = match density {
             None => material,
             Some(density) => {
@@ -52,7 +53,7 @@ impl Material {
             material = material.map(|material| material.design_strength(strength.into_core()));
         }
         let material = inputs.done(py, material)?;
-        let args = (name, modulus, creep_factor, density, design_strength);
+        let args = (name, modulus, creep_factor.0, density, design_strength);
         Ok(Self(Made::new(
             material,
             Recipe::call(py, "Material", args)?,

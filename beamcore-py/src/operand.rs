@@ -53,6 +53,21 @@ impl Operand {
     }
 }
 
+/// A plain number as an input; neither a truth value nor an array.
+#[derive(Clone, Copy)]
+pub(crate) struct Number(pub(crate) f64);
+
+impl<'a, 'py> FromPyObject<'a, 'py> for Number {
+    type Error = PyErr;
+
+    fn extract(object: Borrowed<'a, 'py, PyAny>) -> PyResult<Self> {
+        number(&object)?.map(Self).ok_or_else(|| {
+            let found = object.get_type();
+            PyTypeError::new_err(format!("a number is needed, not {found}"))
+        })
+    }
+}
+
 /// The value of a number, of Python's own or registered as `numbers.Real`; not of a truth value.
 pub(crate) fn number(value: &Bound<'_, PyAny>) -> PyResult<Option<f64>> {
     if value.is_instance_of::<PyBool>() {

@@ -2,7 +2,7 @@
 
 use crate::error::OrRaise;
 use crate::made::{Recipe, Reduced};
-use crate::operand::{self, Answer, Operand};
+use crate::operand::{self, Answer, Number, Operand};
 use crate::unit::{Unit, UnitOrText};
 use beamcore::units::{AnyQuantity, Dimension, Quantity as CoreQuantity};
 use pyo3::basic::CompareOp;
@@ -131,8 +131,8 @@ impl Quantity {
     }
 
     #[new]
-    fn new(py: Python<'_>, number: f64, unit: UnitOrText) -> PyResult<Self> {
-        Ok(Self::written(number, unit.read(py)?))
+    fn new(py: Python<'_>, number: Number, unit: UnitOrText) -> PyResult<Self> {
+        Ok(Self::written(number.0, unit.read(py)?))
     }
 
     /// The quantity of an SI number, to be shown in the unit.
@@ -140,8 +140,8 @@ impl Quantity {
     /// >>> Quantity.from_si(0.075, mm)
     /// 75 mm
     #[staticmethod]
-    fn from_si(si: f64, unit: Unit) -> Self {
-        Self::calculated(AnyQuantity::new(si, unit.any().dimension()), unit)
+    fn from_si(si: Number, unit: Unit) -> Self {
+        Self::calculated(AnyQuantity::new(si.0, unit.any().dimension()), unit)
     }
 
     /// The number in SI units: m, N, N/m, N m, Pa, kg/m3, s, rad.

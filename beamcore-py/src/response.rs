@@ -5,6 +5,7 @@ use crate::convert::Inputs;
 use crate::error::OrRaise;
 use crate::field::{Field, Line};
 use crate::made::{Made, Recipe, Reduced};
+use crate::operand::Number;
 use crate::quantity::Quantity;
 use crate::run::run;
 use crate::stress::{PartStress, Utilisation};
@@ -153,7 +154,7 @@ impl Response {
         slf: &Bound<'py, Self>,
         combination: &str,
         time: TimeText,
-        fraction: f64,
+        fraction: Number,
         from_: &str,
         to: &str,
         step: &Bound<'py, PyAny>,
@@ -168,7 +169,7 @@ impl Response {
         let plan = height.zip(direction).map(|(step, rounding)| CamberPlan {
             combination: combination.to_owned(),
             time,
-            fraction,
+            fraction: fraction.0,
             from: from_.to_owned(),
             to: to.to_owned(),
             step,
@@ -181,7 +182,7 @@ impl Response {
         let keywords = PyDict::new(py);
         keywords.set_item("combination", combination)?;
         keywords.set_item("time", time.name())?;
-        keywords.set_item("fraction", fraction)?;
+        keywords.set_item("fraction", fraction.0)?;
         keywords.set_item("from_", from_)?;
         keywords.set_item("to", to)?;
         keywords.set_item("step", step)?;

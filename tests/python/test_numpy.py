@@ -80,10 +80,10 @@ def test_arrays_that_do_not_fit(deflection: Field) -> None:
         deflection.values_m([0, 4.1])
     with pytest.raises(beamcore.PositionProblem):
         deflection.values_m([float("nan")])
-    with pytest.raises(TypeError):
-        deflection.values_m([[0, 1], [2, 3]])
-    with pytest.raises((TypeError, ValueError)):
-        deflection.values_m(["a"])
+    wrong: list[Any] = [[[0, 1], [2, 3]], ["a"], ["1.5"], [1j], [True], [None], [1*m], 1.5]
+    for given in wrong:
+        with pytest.raises(TypeError, match="numbers, of one dimension"):
+            deflection.values_m(given)
 
 
 def test_each_field_has_values_in_its_unit() -> None:

@@ -139,6 +139,18 @@ def test_a_unit_takes_numbers_only(other: Any) -> None:
         mm * other
 
 
+@pytest.mark.parametrize("given", [True, "2", None, 2*mm, [1.0]])
+def test_numbers_are_plain_numbers(given: Any) -> None:
+    for make in (
+        lambda: Quantity(given, mm),
+        lambda: beamcore.Material("a", 1*GPa, given),
+        lambda: beamcore.concrete("C30/37", given),
+        lambda: beamcore.variable("a", psi_0=given, psi_1=0, psi_2=0),
+    ):
+        with pytest.raises(TypeError):
+            make()
+
+
 def test_unknown_and_wrong_units() -> None:
     with pytest.raises(UnitProblem) as caught:
         Unit("furlong")
