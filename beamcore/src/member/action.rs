@@ -1,17 +1,8 @@
-//! Actions and the loads that belong to them.
+//! Actions: what acts together, from one cause.
 
-use crate::units::{Force, Length, LineLoad};
-
-/// The factors by which a variable action enters combinations (EN 1990:2002 Table A1.1).
-#[derive(Clone, Copy, Debug, PartialEq)]
-pub struct CombinationFactors {
-    /// psi_0: beside another, leading variable action.
-    pub psi_0: f64,
-    /// psi_1: the frequent value.
-    pub psi_1: f64,
-    /// psi_2: the quasi-permanent value, which makes creep.
-    pub psi_2: f64,
-}
+use super::category::CombinationFactors;
+use super::load::Load;
+use crate::units::{AreaLoad, Force, Length, LineLoad, Moment};
 
 /// Whether an action always acts.
 #[derive(Clone, Copy, Debug, PartialEq)]
@@ -22,46 +13,14 @@ pub enum ActionKind {
     Variable(CombinationFactors),
 }
 
-/// One load; positive downward.
-#[derive(Clone, Copy, Debug, PartialEq)]
-#[non_exhaustive]
-pub enum Load {
-    /// The weight of the section: sum of density x area x g, over the whole member.
-    SelfWeight,
-    /// A constant line load over the whole member.
-    Uniform {
-        /// Load per length.
-        load: LineLoad,
-    },
-    /// A constant line load over a stretch.
-    Partial {
-        /// Load per length.
-        load: LineLoad,
-        /// Left end of the stretch.
-        from: Length,
-        /// Right end of the stretch.
-        to: Length,
-    },
-    /// A point load.
-    Point {
-        /// The force.
-        load: Force,
-        /// Its place.
-        at: Length,
-    },
-}
-
-impl Load {
-    /// The word used in documents.
-    #[must_use]
-    pub const fn name(&self) -> &'static str {
-        match self {
-            Self::SelfWeight => "self_weight",
-            Self::Uniform { .. } => "uniform",
-            Self::Partial { .. } => "partial",
-            Self::Point { .. } => "point",
-        }
-    }
+/// Whether an action makes things worse or better.
+#[derive(Clone, Copy, Debug, Default, PartialEq, Eq, Hash)]
+pub enum Effect {
+    /// It adds to what is being checked.
+    #[default]
+    Unfavourable,
+    /// It relieves: a permanent action gets its smaller factor, a variable one is left out.
+    Favourable,
 }
 
 /// A named action: what acts together, from one cause.
@@ -69,6 +28,7 @@ impl Load {
 pub struct Action {
     name: String,
     kind: ActionKind,
+    effect: Effect,
     loads: Vec<Load>,
 }
 
@@ -78,6 +38,7 @@ impl Action {
         Self {
             name: name.into(),
             kind,
+            effect: Effect::Unfavourable,
             loads: Vec::new(),
         }
     }
@@ -90,6 +51,14 @@ impl Action {
     /// A variable action with its combination factors, without loads yet.
     pub fn variable(name: impl Into<String>, factors: CombinationFactors) -> Self {
         Self::new(name, ActionKind::Variable(factors))
+    }
+
+    /// The same action, known to relieve what is being checked; without this, an action is taken
+    /// as unfavourable.
+    #[must_use]
+    pub fn favourable(mut self) -> Self {
+        self.effect = Effect::Favourable;
+        self
     }
 
     /// The same action with one more load.
@@ -123,6 +92,41 @@ impl Action {
         self.load(Load::Point { load, at })
     }
 
+    /// The same action with a line load that grows or falls linearly between two places, positive
+    /// downward; a triangular load where one of its ends is zero.
+    #[must_use]
+    pub fn trapezoidal(
+        self,
+        load_from: LineLoad,
+        load_to: LineLoad,
+        from: Length,
+        to: Length,
+    ) -> Self {
+        self.load(Load::Trapezoidal {
+            load_from,
+            load_to,
+            from,
+            to,
+        })
+    }
+
+    /// The same action with a load per area of floor over the whole member: the line load is
+    /// load x tributary width, positive downward.
+    #[must_use]
+    pub fn area(self, load: AreaLoad, tributary_width: Length) -> Self {
+        self.load(Load::Area {
+            load,
+            tributary_width,
+            stretch: None,
+        })
+    }
+
+    /// The same action with a couple, positive clockwise.
+    #[must_use]
+    pub fn couple(self, couple: Moment, at: Length) -> Self {
+        self.load(Load::Couple { couple, at })
+    }
+
     /// The name.
     #[must_use]
     pub fn name(&self) -> &str {
@@ -141,12 +145,36 @@ impl Action {
         &self.loads
     }
 
-    /// The factor of the quasi-permanent value: 1 for a permanent action, psi_2 for a variable one.
+    /// Whether it makes things worse or better.
+    #[must_use]
+    pub const fn effect(&self) -> Effect {
+        self.effect
+    }
+
+    pub(super) const fn is_variable(&self) -> bool {
+        matches!(self.kind, ActionKind::Variable(_))
+    }
+
+    /// The factors of a variable action; a permanent one is never reduced.
+    pub(super) const fn psi(&self) -> CombinationFactors {
+        match self.kind {
+            ActionKind::Permanent => CombinationFactors {
+                psi_0: 1.0,
+                psi_1: 1.0,
+                psi_2: 1.0,
+            },
+            ActionKind::Variable(factors) => factors,
+        }
+    }
+
+    /// The factor of the quasi-permanent value: 1 for a permanent action, psi_2 for a variable one
+    /// (0 if it is favourable).
     #[must_use]
     pub const fn quasi_permanent(&self) -> f64 {
-        match self.kind {
-            ActionKind::Permanent => 1.0,
-            ActionKind::Variable(factors) => factors.psi_2,
+        match (self.kind, self.effect) {
+            (ActionKind::Permanent, _) => 1.0,
+            (ActionKind::Variable(factors), Effect::Unfavourable) => factors.psi_2,
+            (ActionKind::Variable(_), Effect::Favourable) => 0.0,
         }
     }
 }

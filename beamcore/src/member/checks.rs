@@ -1,7 +1,8 @@
 //! What can be wrong with a member, beside its section.
 
-use super::action::{Action, ActionKind, Load};
+use super::action::{Action, ActionKind};
 use super::layout::SAME_PLACE;
+use super::load::Load;
 use super::support::{Support, SupportKind};
 use crate::check;
 use crate::error::{ErrorKind, Problem};
@@ -181,22 +182,59 @@ fn check_load(problems: &mut Vec<Problem>, length: Option<Length>, load: &Load, 
         Load::Uniform { load } => check::finite(problems, load, &field("load")),
         Load::Partial { load, from, to } => {
             check::finite(problems, load, &field("load"));
-            inside(problems, length, from, &field("from"));
-            inside(problems, length, to, &field("to"));
-            let slack = length.map_or(Length::ZERO, |length| length * SAME_PLACE);
-            if from.is_finite() && to.is_finite() && to - from <= slack {
-                problems.push(Problem::new(
-                    ErrorKind::Position,
-                    field("to"),
-                    to.to_string(),
-                    format!("a place to the right of the stretch's beginning at {from}"),
-                ));
+            check_stretch(problems, length, from, to, base);
+        }
+        Load::Trapezoidal {
+            load_from,
+            load_to,
+            from,
+            to,
+        } => {
+            check::finite(problems, load_from, &field("load_from"));
+            check::finite(problems, load_to, &field("load_to"));
+            check_stretch(problems, length, from, to, base);
+        }
+        Load::Area {
+            load,
+            tributary_width,
+            stretch,
+        } => {
+            check::finite(problems, load, &field("load"));
+            check::positive(problems, tributary_width, &field("tributary_width"));
+            if let Some((from, to)) = stretch {
+                check_stretch(problems, length, from, to, base);
             }
         }
         Load::Point { load, at } => {
             check::finite(problems, load, &field("load"));
             inside(problems, length, at, &field("at"));
         }
+        Load::Couple { couple, at } => {
+            check::finite(problems, couple, &field("couple"));
+            inside(problems, length, at, &field("at"));
+        }
+    }
+}
+
+/// Both ends of a stretch on the member, the second right of the first.
+fn check_stretch(
+    problems: &mut Vec<Problem>,
+    length: Option<Length>,
+    from: Length,
+    to: Length,
+    base: &str,
+) {
+    let field = |name: &str| path::key(base, name);
+    inside(problems, length, from, &field("from"));
+    inside(problems, length, to, &field("to"));
+    let slack = length.map_or(Length::ZERO, |length| length * SAME_PLACE);
+    if from.is_finite() && to.is_finite() && to - from <= slack {
+        problems.push(Problem::new(
+            ErrorKind::Position,
+            field("to"),
+            to.to_string(),
+            format!("a place to the right of the stretch's beginning at {from}"),
+        ));
     }
 }
 

@@ -1,14 +1,13 @@
 //! The member laid out for the solver: stations, what each holds, loads of each action.
 
-use super::action::{Action, Load};
+use super::action::Action;
+use super::load_case::places;
 use super::plan::MemberPlan;
 use super::support::{Support, SupportKind};
-use crate::constants::GRAVITY;
 use crate::error::{ErrorKind, Problem, Result};
-use crate::section::Section;
-use crate::solve::beam::{Beam, LoadCase};
+use crate::solve::beam::Beam;
 use crate::solve::condition::Holds;
-use crate::units::{BendingStiffness, Length};
+use crate::units::BendingStiffness;
 
 /// Places closer than this share of the length are one station.
 pub(crate) const SAME_PLACE: f64 = 1e-9;
@@ -93,49 +92,8 @@ impl Layout {
     }
 }
 
-/// The loads of one action on a laid out member.
-pub(crate) fn load_case(beam: &Beam, section: &Section, action: &Action) -> LoadCase {
-    let stations = beam.stations();
-    let mut case = LoadCase {
-        line: vec![0.0; stations.len() - 1],
-        point: vec![0.0; stations.len()],
-    };
-    for load in action.loads() {
-        match *load {
-            Load::SelfWeight => {
-                let mass = section
-                    .line_mass()
-                    .expect("densities are checked with the plan");
-                spread(&mut case, 0..stations.len() - 1, mass.si() * GRAVITY);
-            }
-            Load::Uniform { load } => spread(&mut case, 0..stations.len() - 1, load.si()),
-            Load::Partial { load, from, to } => {
-                let index = |place: Length| nearest(stations, place.si());
-                spread(&mut case, index(from)..index(to), load.si());
-            }
-            Load::Point { load, at } => case.point[nearest(stations, at.si())] += load.si(),
-        }
-    }
-    case
-}
-
-fn spread(case: &mut LoadCase, pieces: std::ops::Range<usize>, load: f64) {
-    for line in &mut case.line[pieces] {
-        *line += load;
-    }
-}
-
-/// The places where a load begins, ends or stands.
-fn places(load: &Load) -> Vec<f64> {
-    match *load {
-        Load::SelfWeight | Load::Uniform { .. } => vec![],
-        Load::Partial { from, to, .. } => vec![from.si(), to.si()],
-        Load::Point { at, .. } => vec![at.si()],
-    }
-}
-
 /// The index of the station nearest to a place.
-fn nearest(stations: &[f64], place: f64) -> usize {
+pub(super) fn nearest(stations: &[f64], place: f64) -> usize {
     let after = stations
         .partition_point(|&station| station < place)
         .min(stations.len() - 1);

@@ -1,22 +1,28 @@
 //! Members: a section along a length, on supports, under actions.
 
 mod action;
+mod category;
 mod checks;
 mod combination;
 mod layout;
+mod load;
+mod load_case;
 mod plan;
 mod support;
 
-pub use action::{Action, ActionKind, CombinationFactors, Load};
-pub use combination::Combination;
+pub use action::{Action, ActionKind, Effect};
+pub use category::{Category, CombinationFactors};
+pub use combination::{Combination, OwnCombination, PartialFactors};
+pub use load::Load;
 pub use plan::MemberPlan;
 pub use support::{Support, SupportKind};
 
 #[cfg(feature = "document")]
 pub(crate) use checks::{Known, problems_of};
 #[cfg(feature = "document")]
-pub(crate) use combination::{GAMMA_PERMANENT, GAMMA_VARIABLE, all as combinations_of};
-pub(crate) use layout::{SAME_PLACE, load_case};
+pub(crate) use combination::{all as combinations_of, problems as combination_problems};
+pub(crate) use layout::SAME_PLACE;
+pub(crate) use load_case::load_case;
 
 use crate::error::Result;
 use crate::response::Response;
@@ -89,7 +95,8 @@ impl Member {
                 .map(|beam| MemberState { stiffness, beam })
         });
         let [initial, end] = states;
-        let combinations = combination::all(plan.actions());
+        let combinations =
+            combination::all(plan.actions(), plan.factors(), plan.own_combinations());
         let data = Data {
             combinations,
             states: [initial?, end?],
@@ -129,6 +136,12 @@ impl Member {
     #[must_use]
     pub fn combinations(&self) -> &[Combination] {
         &self.data.combinations
+    }
+
+    /// The partial factors of the fundamental combination.
+    #[must_use]
+    pub fn partial_factors(&self) -> &PartialFactors {
+        self.data.plan.factors()
     }
 
     /// What was noticed while the member was laid out: for example stations that were merged.

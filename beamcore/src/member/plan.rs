@@ -1,6 +1,6 @@
 //! The plan of a member: everything given, nothing checked yet.
 
-use super::{Action, Member, Support, checks};
+use super::{Action, Member, OwnCombination, PartialFactors, Support, checks, combination};
 use crate::error::{Error, Result};
 use crate::section::Section;
 use crate::units::Length;
@@ -12,15 +12,19 @@ pub struct MemberPlan {
     length: Length,
     supports: Vec<Support>,
     actions: Vec<Action>,
+    factors: PartialFactors,
+    own: Vec<OwnCombination>,
 }
 
 impl MemberPlan {
-    pub(super) const fn new(section: Section, length: Length) -> Self {
+    pub(super) fn new(section: Section, length: Length) -> Self {
         Self {
             section,
             length,
             supports: Vec::new(),
             actions: Vec::new(),
+            factors: PartialFactors::default(),
+            own: Vec::new(),
         }
     }
 
@@ -38,20 +42,41 @@ impl MemberPlan {
         self
     }
 
+    /// The same plan with other partial factors for the fundamental combination than the
+    /// recommended ones.
+    #[must_use]
+    pub const fn partial_factors(mut self, factors: PartialFactors) -> Self {
+        self.factors = factors;
+        self
+    }
+
+    /// The same plan with one more combination, of one's own.
+    #[must_use]
+    pub fn combination(mut self, combination: OwnCombination) -> Self {
+        self.own.push(combination);
+        self
+    }
+
     /// Checks the plan and prepares the member for solving.
     ///
     /// # Errors
     /// All of: an impossible length, no support, no action, names that stand twice, supports or
     /// loads outside the member, two supports at one place, a stretch that ends before it begins,
-    /// self-weight of a material without density, combination factors outside 0 to 1; and a member
+    /// self-weight of a material without density, combination factors outside 0 to 1, partial
+    /// factors outside 0 to 3, an own combination of unknown actions or of a name that is taken; and a member
     /// that is free to move, with the motion that nothing resists.
     pub fn check(self) -> Result<Member> {
-        let problems = checks::problems_of(
+        let mut problems = checks::problems_of(
             Some(&self.section),
             Some(self.length),
             &self.supports.as_slice().into(),
             &self.actions.as_slice().into(),
         );
+        problems.extend(combination::problems(
+            &self.actions,
+            &self.factors,
+            &self.own,
+        ));
         Error::check(problems)?;
         Member::from_plan(self)
     }
@@ -70,5 +95,13 @@ impl MemberPlan {
 
     pub(super) fn actions(&self) -> &[Action] {
         &self.actions
+    }
+
+    pub(super) const fn factors(&self) -> &PartialFactors {
+        &self.factors
+    }
+
+    pub(super) fn own_combinations(&self) -> &[OwnCombination] {
+        &self.own
     }
 }

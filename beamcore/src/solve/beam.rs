@@ -19,12 +19,15 @@ pub(crate) struct Beam {
     sweep: Sweep<STATES, HALF>,
 }
 
-/// The loads of one case: a constant line load on each piece (N/m) and a point load at each
-/// station (N), both positive downward.
+/// The loads of one case.
 #[derive(Clone, Debug, Default, PartialEq)]
 pub(crate) struct LoadCase {
-    pub(crate) line: Vec<f64>,
+    /// The line load at the two ends of each piece, linear between them; N/m, positive downward.
+    pub(crate) line: Vec<[f64; 2]>,
+    /// The point load at each station; N, positive downward.
     pub(crate) point: Vec<f64>,
+    /// The couple at each station; N m, positive clockwise.
+    pub(crate) couple: Vec<f64>,
 }
 
 /// The reaction at a station: force in N, positive upward; couple in N m, positive clockwise.
@@ -41,6 +44,17 @@ pub(crate) struct Solved {
     pub(crate) reactions: Vec<Reaction>,
     /// What is left of equilibrium and continuity, relative to the greatest terms.
     pub(crate) residual: f64,
+}
+
+impl LoadCase {
+    /// No load on a member with so many stations.
+    pub(crate) fn none(stations: usize) -> Self {
+        Self {
+            line: vec![[0.0; 2]; stations - 1],
+            point: vec![0.0; stations],
+            couple: vec![0.0; stations],
+        }
+    }
 }
 
 impl Beam {
@@ -96,7 +110,7 @@ impl Beam {
     pub(crate) fn solve(&self, load: &LoadCase) -> Solved {
         let units = self.scale.units();
         let jump = |k: usize| {
-            let jump = condition::jump(load.point[k]);
+            let jump = condition::jump(load.point[k], load.couple[k]);
             SVector::<f64, STATES>::from_fn(|i, _| jump[i] / units[i])
         };
         let last = self.pieces.len();
@@ -138,7 +152,11 @@ impl Beam {
                     } else {
                         0.0
                     },
-                    couple: if rotation { after[1] - before[1] } else { 0.0 },
+                    couple: if rotation {
+                        after[1] - before[1] - load.couple[k]
+                    } else {
+                        0.0
+                    },
                 }
             })
             .collect();

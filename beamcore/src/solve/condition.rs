@@ -6,7 +6,7 @@
 //! it is zero, and its reaction is what the jump then needs.
 
 use super::relation::{LoadSide, Relation};
-use super::state::{HALF, PAIRS, STATES, V};
+use super::state::{HALF, M, PAIRS, STATES, V};
 use nalgebra::{SMatrix, SVector};
 
 /// Which displacements a station holds at zero, in the order of [`PAIRS`].
@@ -22,10 +22,12 @@ impl Holds {
     pub(crate) const BOTH: Self = Self([true, true]);
 }
 
-/// The jump of the forces at a station caused by a load P downward, without reactions.
-pub(crate) fn jump(point_load: f64) -> SVector<f64, STATES> {
+/// The jump of the forces at a station caused by a load P downward and a couple C clockwise,
+/// without reactions.
+pub(crate) fn jump(point_load: f64, couple: f64) -> SVector<f64, STATES> {
     let mut jump = SVector::zeros();
     jump[V] = -point_load;
+    jump[M] = couple;
     jump
 }
 

@@ -1,4 +1,4 @@
-//! A prismatic, shear-rigid piece under a constant line load: polynomials, exactly.
+//! A prismatic, shear-rigid piece under a linearly varying line load: polynomials, exactly.
 
 use super::relation::{LoadSide, Piece, Relation};
 use super::state::{M, STATES, Scale, THETA, V, W};
@@ -52,27 +52,25 @@ impl PolynomialPiece {
         line_load * (l * l * l) / self.scale.stiffness
     }
 
-    /// The fields, in SI units, from the scaled state at the left end and the line load in N/m:
+    /// The line load at the left end and its growth to the right end, in the scale's unit.
+    fn scaled_line(&self, [left, right]: [f64; 2]) -> (f64, f64) {
+        (self.scaled(left), self.scaled(right - left))
+    }
+
+    /// The fields, in SI units, from the scaled state at the left end and the line load q at the
+    /// two ends in N/m, which grows by g over the length h; t = x/h:
     ///
-    /// V = V0 - q x, M = M0 + V0 x - q x^2/2,
-    /// theta = theta0 - (M0 x + V0 x^2/2 - q x^3/6)/EI,
-    /// w = w0 + theta0 x - (M0 x^2/2 + V0 x^3/6 - q x^4/24)/EI.
-    pub(crate) fn fields(&self, start: &SVector<f64, STATES>, line_load: f64) -> PieceFields {
+    /// V = V0 - q x - g x t/2, M = M0 + V0 x - q x^2/2 - g x^2 t/6,
+    /// theta = theta0 - (M0 x + V0 x^2/2 - q x^3/6 - g x^3 t/24)/EI,
+    /// w = w0 + theta0 x - (M0 x^2/2 + V0 x^3/6 - q x^4/24 - g x^4 t/120)/EI.
+    pub(crate) fn fields(&self, start: &SVector<f64, STATES>, line_load: [f64; 2]) -> PieceFields {
         let (h, f) = (self.length, self.flexibility);
-        let (h2, q) = (h * h, self.scaled(line_load));
+        let (q, g) = self.scaled_line(line_load);
+        let h2 = h * h;
         let (h3, h4) = (h2 * h, h2 * h2);
         let (w, theta, v, m) = (start[W], start[THETA], start[V], start[M]);
         let units = self.scale.units();
-        let field = |unit: f64, c: [f64; 5]| {
-            [
-                c[0] * unit,
-                c[1] * unit,
-                c[2] * unit,
-                c[3] * unit,
-                c[4] * unit,
-                0.0,
-            ]
-        };
+        let field = |unit: f64, c: Coefficients| c.map(|term| term * unit);
         PieceFields {
             deflection: field(
                 units[W],
@@ -82,21 +80,29 @@ impl PolynomialPiece {
                     -f * m * h2 / 2.0,
                     -f * v * h3 / 6.0,
                     f * q * h4 / 24.0,
+                    f * g * h4 / 120.0,
                 ],
             ),
             slope: field(
                 units[THETA],
-                [theta, -f * m * h, -f * v * h2 / 2.0, f * q * h3 / 6.0, 0.0],
+                [
+                    theta,
+                    -f * m * h,
+                    -f * v * h2 / 2.0,
+                    f * q * h3 / 6.0,
+                    f * g * h3 / 24.0,
+                    0.0,
+                ],
             ),
-            shear: field(units[V], [v, -q * h, 0.0, 0.0, 0.0]),
-            moment: field(units[M], [m, v * h, -q * h2 / 2.0, 0.0, 0.0]),
+            shear: field(units[V], [v, -q * h, -g * h / 2.0, 0.0, 0.0, 0.0]),
+            moment: field(units[M], [m, v * h, -q * h2 / 2.0, -g * h2 / 6.0, 0.0, 0.0]),
         }
     }
 }
 
 impl Piece<STATES> for PolynomialPiece {
-    /// The constant line load in N/m, positive downward.
-    type Load = f64;
+    /// The line load at the two ends in N/m, positive downward.
+    type Load = [f64; 2];
 
     fn relation(&self) -> Relation<STATES> {
         let (h, f) = (self.length, self.flexibility);
@@ -113,14 +119,15 @@ impl Piece<STATES> for PolynomialPiece {
         }
     }
 
-    fn load_side(&self, line_load: &f64) -> LoadSide<STATES> {
-        let (h, f, q) = (self.length, self.flexibility, self.scaled(*line_load));
+    fn load_side(&self, line_load: &[f64; 2]) -> LoadSide<STATES> {
+        let (h, f) = (self.length, self.flexibility);
+        let (q, g) = self.scaled_line(*line_load);
         let h2 = h * h;
         SVector::<f64, STATES>::new(
-            f * q * h2 * h2 / 24.0,
-            f * q * h2 * h / 6.0,
-            -q * h,
-            -q * h2 / 2.0,
+            f * h2 * h2 * (q / 24.0 + g / 120.0),
+            f * h2 * h * (q / 6.0 + g / 24.0),
+            -h * (q + g / 2.0),
+            -h2 * (q / 2.0 + g / 6.0),
         )
     }
 }

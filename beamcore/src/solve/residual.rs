@@ -16,11 +16,16 @@ pub(super) fn of(stations: &[f64], load: &LoadCase, solved: &Solved) -> f64 {
         moments.add(arm * load.point[k]);
         moments.add(-arm * reaction.force);
         moments.add(reaction.couple);
+        moments.add(load.couple[k]);
     }
-    for (ends, &line) in stations.windows(2).zip(&load.line) {
-        let total = line * (ends[1] - ends[0]);
-        forces.add(total);
-        moments.add(total * (f64::midpoint(ends[0], ends[1]) - stations[0]));
+    for (ends, &[left, right]) in stations.windows(2).zip(&load.line) {
+        // A line load is two triangles, each with its force at a third of the length.
+        let third = (ends[1] - ends[0]) / 3.0;
+        for (line, arm) in [(left, third), (right, 2.0 * third)] {
+            let force = line * 1.5 * third;
+            forces.add(force);
+            moments.add(force * (ends[0] + arm - stations[0]));
+        }
     }
     let (mut w_jump, mut w_peak) = (0.0_f64, 0.0_f64);
     let (mut slope_jump, mut slope_peak) = (0.0_f64, 0.0_f64);

@@ -18,14 +18,18 @@ fn near(value: f64, expected: f64, peak: f64, what: &str) {
     );
 }
 
+fn uniform(pieces: usize, q: f64) -> LoadCase {
+    LoadCase {
+        line: vec![[q, q]; pieces],
+        ..LoadCase::none(pieces + 1)
+    }
+}
+
 #[test]
 fn uniform_load_on_a_simple_span() {
     let (l, ei, q) = (7.3, 2.4e6, 6.1e3);
     let beam = Beam::new(vec![0.0, l], vec![Holds::DEFLECTION; 2], &[ei]).unwrap();
-    let solved = beam.solve(&LoadCase {
-        line: vec![q],
-        point: vec![0.0; 2],
-    });
+    let solved = beam.solve(&uniform(1, q));
     let peak = 5.0 * q * l * l * l * l / (384.0 * ei);
     near(
         value(&solved.fields[0].deflection, 0.5),
@@ -60,8 +64,8 @@ fn point_load_on_a_fixed_span() {
     )
     .unwrap();
     let solved = beam.solve(&LoadCase {
-        line: vec![0.0; 2],
         point: vec![0.0, p, 0.0],
+        ..LoadCase::none(3)
     });
     let left = -p * a * b * b / (l * l);
     near(solved.reactions[0].couple, left, left, "left couple");
@@ -81,6 +85,46 @@ fn point_load_on_a_fixed_span() {
 }
 
 #[test]
+fn triangular_load_and_couple_on_a_simple_span() {
+    // Line load growing from 0 to q: M(x) = q x (L^2 - x^2)/(6 L), w(L/2) = 5 q L^4/(768 EI).
+    let (l, ei, q) = (3.7, 1.1e6, 8.0e3);
+    let beam = Beam::new(vec![0.0, l], vec![Holds::DEFLECTION; 2], &[ei]).unwrap();
+    let solved = beam.solve(&LoadCase {
+        line: vec![[0.0, q]],
+        ..LoadCase::none(2)
+    });
+    let w = 5.0 * q * l * l * l * l / (768.0 * ei);
+    near(value(&solved.fields[0].deflection, 0.5), w, w, "deflection");
+    near(
+        solved.reactions[0].force,
+        q * l / 6.0,
+        q * l,
+        "left reaction",
+    );
+    near(
+        solved.reactions[1].force,
+        q * l / 3.0,
+        q * l,
+        "right reaction",
+    );
+    let m = q * l * l / 16.0;
+    near(value(&solved.fields[0].moment, 0.5), m, m, "moment");
+    assert!(solved.residual < 1e-14, "{}", solved.residual);
+    // A clockwise couple C at the left end: reaction -C/L there; the couple makes the
+    // moment C at that end, so the beam sags, w(L/2) = C L^2/(16 EI).
+    let c = 5.0e3;
+    let solved = beam.solve(&LoadCase {
+        couple: vec![c, 0.0],
+        ..LoadCase::none(2)
+    });
+    near(solved.reactions[0].force, -c / l, c / l, "reaction");
+    near(solved.fields[0].moment[0], c, c, "moment at the couple");
+    let w = c * l * l / (16.0 * ei);
+    near(value(&solved.fields[0].deflection, 0.5), w, w, "deflection");
+    assert!(solved.residual < 1e-14, "{}", solved.residual);
+}
+
+#[test]
 fn ten_thousand_equal_spans_keep_their_digits() {
     // An inner span far from the ends behaves as one with both ends fixed.
     let spans = 10_000_u32;
@@ -88,10 +132,7 @@ fn ten_thousand_equal_spans_keep_their_digits() {
     let stations: Vec<f64> = (0..=spans).map(f64::from).collect();
     let n = stations.len();
     let beam = Beam::new(stations, vec![Holds::DEFLECTION; n], &vec![ei; n - 1]).unwrap();
-    let solved = beam.solve(&LoadCase {
-        line: vec![q; n - 1],
-        point: vec![0.0; n],
-    });
+    let solved = beam.solve(&uniform(n - 1, q));
     let middle = &solved.fields[5000];
     near(middle.moment[0], -q / 12.0, q / 12.0, "support moment");
     near(
@@ -156,7 +197,7 @@ proptest! {
         let pieces: Vec<_> = lengths.iter().zip(&stiffness)
             .map(|(&h, &ei)| PolynomialPiece::new(h, ei, scale)).collect();
         let plain: Vec<_> = pieces.iter().map(Piece::relation).collect();
-        let sides: Vec<_> = pieces.iter().zip(&line).map(|(p, q)| p.load_side(q)).collect();
+        let sides: Vec<_> = pieces.iter().zip(&line).map(|(p, &q)| p.load_side(&[q, 2.0 * q])).collect();
         let mixer = |k: usize| {
             SMatrix::<f64, STATES, STATES>::from_fn(|i, j| {
                 mix[(k * STATES + i) * STATES + j] + if i == j { 3.0 } else { 0.0 }
@@ -185,8 +226,8 @@ proptest! {
         let whole = Beam::new(vec![0.0, 1.0], vec![Holds::BOTH, Holds::DEFLECTION], &[1.0]).unwrap();
         let halves = Beam::new(vec![0.0, cut, 1.0],
             vec![Holds::BOTH, Holds::NOTHING, Holds::DEFLECTION], &[1.0; 2]).unwrap();
-        let a = whole.solve(&LoadCase { line: vec![q], point: vec![0.0; 2] });
-        let b = halves.solve(&LoadCase { line: vec![q; 2], point: vec![0.0; 3] });
+        let a = whole.solve(&uniform(1, q));
+        let b = halves.solve(&uniform(2, q));
         let peak = q / 185.0;
         let at_cut = value(&a.fields[0].deflection, cut);
         prop_assert!((at_cut - b.fields[1].deflection[0]).abs() <= 1e-12 * peak);

@@ -62,8 +62,8 @@ pub use any_unit::AnyUnit;
 pub use dimension::Dimension;
 pub use number::Number;
 pub use quantity::{
-    Angle, Area, AxialStiffness, BendingStiffness, Curvature, Density, Duration, FirstMoment,
-    Force, Length, LineLoad, LineMass, Mass, Modulus, Moment, Quantity, SecondMoment, Strain,
-    Stress, table,
+    Angle, Area, AreaLoad, AxialStiffness, BendingStiffness, Curvature, Density, Duration,
+    FirstMoment, Force, Length, LineLoad, LineMass, Mass, Modulus, Moment, Quantity, SecondMoment,
+    Strain, Stress, table,
 };
 pub use unit::{TypeRow, Unit};

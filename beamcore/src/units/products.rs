@@ -43,6 +43,7 @@ products! {
     FirstMoment * Length = SecondMoment;
     Force * Length = Moment;
     LineLoad * Length = Force;
+    AreaLoad * Length = LineLoad;
     Modulus * Strain = Stress;
     Stress * Area = Force;
     Modulus * Area = AxialStiffness;
@@ -68,7 +69,7 @@ mod tests {
                 .unwrap()
                 .dimension
         };
-        assert_eq!(PRODUCTS.len(), 14);
+        assert_eq!(PRODUCTS.len(), 15);
         for [a, b, c] in PRODUCTS {
             assert_eq!(
                 dimension(a).times(dimension(b)),
