@@ -15,6 +15,18 @@ pub(crate) fn positive<Q: Quantity>(problems: &mut Vec<Problem>, value: Q, path:
     }
 }
 
+/// A problem unless the quantity is finite and zero or greater.
+pub(crate) fn not_negative<Q: Quantity>(problems: &mut Vec<Problem>, value: Q, path: &str) {
+    if !(value.si() >= 0.0 && value.si().is_finite()) {
+        problems.push(Problem::new(
+            ErrorKind::Value,
+            path,
+            value.to_string(),
+            format!("a {} of zero or more", Q::NOUN),
+        ));
+    }
+}
+
 /// A problem unless the quantity is finite.
 pub(crate) fn finite<Q: Quantity>(problems: &mut Vec<Problem>, value: Q, path: &str) {
     if !value.si().is_finite() {

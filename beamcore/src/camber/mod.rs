@@ -1,92 +1,23 @@
 //! Camber: the rise to build in, with its ordinates from a stated chord.
 
+mod plan;
+mod reading;
 mod rounding;
+mod shape;
 
+pub use plan::CamberPlan;
+pub use reading::{Reading, Trestles};
 pub use rounding::Rounding;
+pub use shape::Shape;
 
-use crate::check;
 use crate::error::{Error, ErrorKind, Problem, Result};
-use crate::lookup;
-use crate::member::{Combination, Support};
-use crate::path;
+use crate::field::{Field, Piecewise};
+use crate::math::polynomial::Coefficients;
+use crate::member::Support;
 use crate::response::Response;
 use crate::time::Time;
 use crate::units::Length;
-
-/// A wish for camber: which deflection to build against, how much of it, in which steps.
-///
-/// The camber is a parabola over the chord between two supports. Its rise is `fraction` times the
-/// deflection at the middle of the chord, rounded.
-#[derive(Clone, Debug, PartialEq)]
-pub struct CamberPlan {
-    /// The combination whose deflection is built against.
-    pub combination: String,
-    /// The time of that deflection.
-    pub time: Time,
-    /// The share of the deflection that is built in; 1 is all of it.
-    pub fraction: f64,
-    /// The support at the left end of the chord.
-    pub from: String,
-    /// The support at the right end of the chord.
-    pub to: String,
-    /// The step to which the rise is rounded.
-    pub step: Length,
-    /// The direction in which it is rounded.
-    pub rounding: Rounding,
-    /// The number of equal divisions of the chord; ordinates are given at their ends.
-    pub divisions: u32,
-}
-
-impl CamberPlan {
-    /// Everything that is wrong with the plan for a member of these supports and combinations.
-    pub(crate) fn problems(
-        &self,
-        supports: &[Support],
-        combinations: &[Combination],
-    ) -> Vec<Problem> {
-        let mut problems = Vec::new();
-        let names: Vec<_> = combinations.iter().map(Combination::name).collect();
-        known(&mut problems, "combination", &self.combination, &names);
-        check::between(&mut problems, self.fraction, 0.0, 2.0, "camber.fraction");
-        let names: Vec<_> = supports.iter().map(Support::name).collect();
-        let chord = [("from", &self.from), ("to", &self.to)]
-            .map(|(key, end)| known(&mut problems, key, end, &names).map(|i| supports[i].at()));
-        if let [Some(from), Some(to)] = chord
-            && to <= from
-        {
-            problems.push(Problem::new(
-                ErrorKind::Position,
-                "camber.to",
-                format!("\"{}\" at {to}", self.to),
-                format!("a support to the right of \"{}\" at {from}", self.from),
-            ));
-        }
-        check::positive(&mut problems, self.step, "camber.step");
-        if !(1..=MOST_DIVISIONS).contains(&self.divisions) {
-            problems.push(Problem::new(
-                ErrorKind::Value,
-                "camber.divisions",
-                self.divisions.to_string(),
-                format!("a number from 1 to {MOST_DIVISIONS}"),
-            ));
-        }
-        problems
-    }
-}
-
-/// The position of a name among those that can be meant; a problem if it is not there.
-fn known(problems: &mut Vec<Problem>, key: &str, name: &str, names: &[&str]) -> Option<usize> {
-    let found = names.iter().position(|known| *known == name);
-    if found.is_none() {
-        problems.push(Problem::new(
-            ErrorKind::Name,
-            path::key("camber", key),
-            format!("the unknown name \"{name}\""),
-            format!("one of {}", lookup::listed(names)),
-        ));
-    }
-    found
-}
+use shape::Line;
 
 /// One ordinate of a camber.
 #[derive(Clone, Copy, Debug, PartialEq)]
@@ -98,68 +29,170 @@ pub struct Ordinate {
 }
 
 /// The camber to build.
-#[derive(Clone, Debug, PartialEq)]
+#[derive(Clone, Debug)]
 pub struct Camber {
+    shape: Shape,
     target: Length,
     rise: Length,
     chord: (Length, Length),
     ordinates: Vec<Ordinate>,
+    line: Line,
 }
-
-/// More divisions than this are a slip of the pen, not a shop drawing.
-const MOST_DIVISIONS: u32 = 1000;
 
 impl Response {
     /// The camber for a plan.
     ///
     /// # Errors
     /// All of: an unknown combination or support, a chord that does not run from left to right, a
-    /// fraction outside 0 to 2, a step that is not positive, no division or more than 1000.
+    /// fraction outside 0 to 2, a step that is not positive, a least rise below zero, no division
+    /// or more than 1000.
     pub fn camber(&self, plan: &CamberPlan) -> Result<Camber> {
         let supports = self.member().supports();
         Error::check(plan.problems(supports, self.member().combinations()))?;
         let end = |name: &str| supports.iter().find(|s| s.name() == name).map(Support::at);
         let (from, to) = (end(&plan.from), end(&plan.to));
         let (from, to) = (from.expect("checked above"), to.expect("checked above"));
-        let line = self.deflection(&plan.combination, plan.time)?;
-        // The chord's ends are supports, whose deflection is zero.
-        let sag = line.value(from + (to - from) / 2.0)?;
-        let target = sag * plan.fraction;
+        let line = self.deflection_line(&plan.combination, plan.time)?;
+        let chord = (from.si(), (to - from).si());
+        let target = target(plan, &line, chord);
         let rise = plan.rounding.apply(target, plan.step);
+        let rise = if rise.abs() < plan.least {
+            Length::ZERO
+        } else {
+            rise
+        };
+        let line = built(plan.shape, line, chord, rise.si());
         let ordinates = (0..=plan.divisions)
             .map(|i| {
                 let share = f64::from(i) / f64::from(plan.divisions);
+                let station = (to - from) * share;
+                let place = if i == plan.divisions {
+                    to
+                } else {
+                    from + station
+                };
                 Ordinate {
-                    station: (to - from) * share,
-                    ordinate: parabola(rise, share),
+                    station,
+                    ordinate: Length::from_si(line.height(place.si())),
                 }
             })
             .collect();
         Ok(Camber {
+            shape: plan.shape,
             target,
             rise,
             chord: (from, to),
             ordinates,
+            line,
         })
+    }
+
+    /// The line that remains after the camber: deflection - camber, positive where the member
+    /// lies below the straight line, negative where it stays crowned.
+    ///
+    /// # Errors
+    /// [`ErrorKind::Lookup`] if there is no such combination.
+    pub fn remaining(
+        &self,
+        combination: &str,
+        time: Time,
+        camber: &Camber,
+    ) -> Result<Field<Length>> {
+        let mut line = self.deflection_line(combination, time)?;
+        line.add(camber.line(line.stations()).iter(), -1.0);
+        Ok(Field::new(line))
     }
 }
 
-/// The parabola of a rise c over a chord, at a share s of its length: 4 c s (1 - s).
-fn parabola(rise: Length, share: f64) -> Length {
-    rise * (4.0 * share * (1.0 - share))
+/// The rise before rounding.
+fn target(plan: &CamberPlan, line: &Piecewise, (from, length): (f64, f64)) -> Length {
+    let middle = line
+        .sides(from + length / 2.0)
+        .map_or(0.0, |(_, right)| right);
+    let through_middle = middle * plan.fraction;
+    let rise = match plan.shape {
+        Shape::Parabola | Shape::Mirror | Shape::ArcThroughMiddle => through_middle,
+        Shape::ArcLeastGap => least_gap(plan.fraction, line, (from, length)),
+    };
+    Length::from_si(rise)
+}
+
+/// The rise of the arc whose greatest gap to the factored deflection line is least, by golden
+/// section: the gap at each place grows with the distance of the rise from the one that fits
+/// there, so that its greatest has one minimum.
+fn least_gap(fraction: f64, line: &Piecewise, (from, length): (f64, f64)) -> f64 {
+    const GOLDEN: f64 = 0.618_033_988_749_894_8;
+    let stretch = line.between(from, from + length);
+    let gap = |rise: f64| {
+        let arc = Line::Arc { from, length, rise };
+        let mut gap = stretch.zeroed();
+        gap.add(stretch.pieces(), fraction);
+        gap.add(arc.polynomials(stretch.stations()).iter(), -1.0);
+        gap.greatest().value.abs()
+    };
+    let size = stretch.greatest().value.abs() * fraction * 2.0;
+    let (mut low, mut high) = (-size, size);
+    let (mut a, mut b) = (high - GOLDEN * (high - low), low + GOLDEN * (high - low));
+    let (mut gap_a, mut gap_b) = (gap(a), gap(b));
+    // Each step keeps 0.618 of the interval: eighty leave less than 1e-16 of it.
+    for _ in 0..80 {
+        if gap_a <= gap_b {
+            (high, b, gap_b) = (b, a, gap_a);
+            a = high - GOLDEN * (high - low);
+            gap_a = gap(a);
+        } else {
+            (low, a, gap_a) = (a, b, gap_b);
+            b = low + GOLDEN * (high - low);
+            gap_b = gap(b);
+        }
+    }
+    f64::midpoint(low, high)
+}
+
+/// The line of a shape with its rounded rise.
+fn built(shape: Shape, line: Piecewise, (from, length): (f64, f64), rise: f64) -> Line {
+    match shape {
+        Shape::Parabola => Line::Parabola { from, length, rise },
+        Shape::ArcThroughMiddle | Shape::ArcLeastGap => Line::Arc { from, length, rise },
+        Shape::Mirror => {
+            let middle = line
+                .sides(from + length / 2.0)
+                .map_or(0.0, |(_, right)| right);
+            let factor = if middle == 0.0 { 0.0 } else { rise / middle };
+            Line::Mirror { line, factor }
+        }
+    }
 }
 
 impl Camber {
-    /// The deflection to be built in before rounding: fraction x deflection at the chord's middle.
+    /// The shape.
+    #[must_use]
+    pub const fn shape(&self) -> Shape {
+        self.shape
+    }
+
+    /// The rise before rounding: fraction x deflection at the chord's middle, or the best fit.
     #[must_use]
     pub const fn target(&self) -> Length {
         self.target
     }
 
-    /// The rise at the middle of the chord, rounded; positive upward.
+    /// The rise at the middle of the chord, rounded; positive upward; zero where it would be less
+    /// than the least worth building.
     #[must_use]
     pub const fn rise(&self) -> Length {
         self.rise
+    }
+
+    /// The radius of an arc, (l^2/4 + c^2)/(2 c); `None` for other shapes and for no rise.
+    #[must_use]
+    pub fn radius(&self) -> Option<Length> {
+        match self.line {
+            Line::Arc { length, rise, .. } if rise != 0.0 => {
+                Some(Length::from_si(shape::radius(length, rise)))
+            }
+            Line::Arc { .. } | Line::Parabola { .. } | Line::Mirror { .. } => None,
+        }
     }
 
     /// The places of the chord's ends, from the left end of the member.
@@ -189,6 +222,11 @@ impl Camber {
             )
             .into());
         }
-        Ok(parabola(self.rise, (at - from) / (to - from)))
+        Ok(Length::from_si(self.line.height(at.si())))
+    }
+
+    /// The camber line as polynomials over the pieces between stations.
+    pub(crate) fn line(&self, stations: &[f64]) -> Vec<Coefficients> {
+        self.line.polynomials(stations)
     }
 }

@@ -59,12 +59,13 @@ impl<Q: Quantity> Field<Q> {
     /// [`ErrorKind::Position`] if the place is not on the member.
     pub fn sides(&self, at: Length) -> Result<Sides<Q>> {
         let Some((left, right)) = self.line.sides(at.si()) else {
-            let end = Length::from_si(self.line.stations()[self.line.stations().len() - 1]);
+            let stations = self.line.stations();
+            let [start, end] = [stations[0], stations[stations.len() - 1]].map(Length::from_si);
             return Err(Problem::new(
                 ErrorKind::Position,
                 "at",
                 at.to_string(),
-                format!("a place on the member, from 0 m to {end}"),
+                format!("a place on the line, from {start} to {end}"),
             )
             .into());
         };

@@ -55,6 +55,16 @@ impl Piecewise {
         }
     }
 
+    /// The same field over the pieces between two stations only.
+    pub(crate) fn between(&self, from: f64, to: f64) -> Self {
+        let first = self.stations.partition_point(|&x| x < from);
+        let last = self.stations.partition_point(|&x| x < to);
+        Self {
+            stations: Arc::from(&self.stations[first..=last]),
+            pieces: self.pieces[first..last].to_vec(),
+        }
+    }
+
     /// The polynomials, one per piece.
     pub(crate) fn pieces(&self) -> &[Coefficients] {
         &self.pieces
@@ -163,6 +173,20 @@ mod tests {
         assert_eq!(field.sides(0.5), Some((0.25, 0.25)));
         assert_eq!(field.sides(3.1), None);
         assert_eq!(field.sides(f64::NAN), None);
+    }
+
+    #[test]
+    fn a_stretch_keeps_its_places() {
+        let right = two_pieces().between(1.0, 3.0);
+        assert_eq!(
+            right.maximum(),
+            Peak {
+                value: 5.0,
+                at: 1.0
+            }
+        );
+        assert_eq!(right.sides(0.5), None);
+        assert_eq!(two_pieces().between(0.0, 1.0).greatest().value, 0.25);
     }
 
     #[test]

@@ -41,12 +41,31 @@ pub struct OwnCombination {
     pub is_ultimate: bool,
 }
 
+/// The kind of a combination.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
+pub enum CombinationKind {
+    /// Permanent actions only.
+    Permanent,
+    /// EN 1990:2002 eq. 6.16b.
+    QuasiPermanent,
+    /// EN 1990:2002 eq. 6.14b.
+    Characteristic,
+    /// EN 1990:2002 eq. 6.15b.
+    Frequent,
+    /// EN 1990:2002 eq. 6.10; design strengths are compared under it.
+    Fundamental,
+    /// A combination of one's own that looks at deflections.
+    Own,
+    /// A combination of one's own under which design strengths are compared.
+    OwnUltimate,
+}
+
 /// A sum of factored actions.
 #[derive(Clone, Debug, PartialEq)]
 pub struct Combination {
     name: String,
     factors: Vec<f64>,
-    is_ultimate: bool,
+    kind: CombinationKind,
 }
 
 impl Combination {
@@ -63,10 +82,19 @@ impl Combination {
         &self.factors
     }
 
-    /// Whether design strengths are compared under this combination (the fundamental one).
+    /// The kind.
+    #[must_use]
+    pub const fn kind(&self) -> CombinationKind {
+        self.kind
+    }
+
+    /// Whether design strengths are compared under this combination.
     #[must_use]
     pub const fn is_ultimate(&self) -> bool {
-        self.is_ultimate
+        matches!(
+            self.kind,
+            CombinationKind::Fundamental | CombinationKind::OwnUltimate
+        )
     }
 }
 
@@ -74,7 +102,7 @@ impl Combination {
 #[derive(Clone, Copy)]
 struct Recipe {
     name: &'static str,
-    is_ultimate: bool,
+    kind: CombinationKind,
     permanent: fn(&PartialFactors, Effect) -> f64,
     leading: fn(&PartialFactors, &Action) -> f64,
     beside: fn(&PartialFactors, &Action) -> f64,
@@ -86,7 +114,7 @@ const RECIPES: [Recipe; 3] = [
     // Characteristic: sum of G + leading Q + sum of psi_0 Q.
     Recipe {
         name: "characteristic",
-        is_ultimate: false,
+        kind: CombinationKind::Characteristic,
         permanent: |_, _| 1.0,
         leading: |_, _| 1.0,
         beside: |_, action| action.psi().psi_0,
@@ -94,7 +122,7 @@ const RECIPES: [Recipe; 3] = [
     // Frequent: sum of G + psi_1 leading Q + sum of psi_2 Q.
     Recipe {
         name: "frequent",
-        is_ultimate: false,
+        kind: CombinationKind::Frequent,
         permanent: |_, _| 1.0,
         leading: |_, action| action.psi().psi_1,
         beside: |_, action| action.psi().psi_2,
@@ -102,7 +130,7 @@ const RECIPES: [Recipe; 3] = [
     // Fundamental: gamma_G sum of G + gamma_Q leading Q + gamma_Q sum of psi_0 Q.
     Recipe {
         name: "fundamental",
-        is_ultimate: true,
+        kind: CombinationKind::Fundamental,
         permanent: |factors, effect| match effect {
             Effect::Unfavourable => factors.permanent,
             Effect::Favourable => factors.permanent_favourable,
@@ -119,17 +147,25 @@ pub(crate) fn all(
     factors: &PartialFactors,
     own: &[OwnCombination],
 ) -> Vec<Combination> {
-    let plain = |name: &str, factor: fn(&Action) -> f64| Combination {
+    let plain = |name: &str, kind, factor: fn(&Action) -> f64| Combination {
         name: name.into(),
         factors: actions.iter().map(factor).collect(),
-        is_ultimate: false,
+        kind,
     };
     let mut combinations = vec![
-        plain("permanent", |action| match action.kind() {
-            ActionKind::Permanent => 1.0,
-            ActionKind::Variable(_) => 0.0,
-        }),
-        plain("quasi-permanent", Action::quasi_permanent),
+        plain(
+            "permanent",
+            CombinationKind::Permanent,
+            |action| match action.kind() {
+                ActionKind::Permanent => 1.0,
+                ActionKind::Variable(_) => 0.0,
+            },
+        ),
+        plain(
+            "quasi-permanent",
+            CombinationKind::QuasiPermanent,
+            Action::quasi_permanent,
+        ),
     ];
     for recipe in RECIPES {
         combinations.extend(led(actions, factors, recipe));
@@ -144,7 +180,11 @@ pub(crate) fn all(
                     given.map_or(0.0, |(_, factor)| *factor)
                 })
                 .collect(),
-            is_ultimate: own.is_ultimate,
+            kind: if own.is_ultimate {
+                CombinationKind::OwnUltimate
+            } else {
+                CombinationKind::Own
+            },
         }
     }));
     combinations
@@ -169,7 +209,7 @@ fn led(actions: &[Action], factors: &PartialFactors, recipe: Recipe) -> Vec<Comb
         Combination {
             name,
             factors: actions.iter().map(factor).collect(),
-            is_ultimate: recipe.is_ultimate,
+            kind: recipe.kind,
         }
     };
     match leaders.as_slice() {

@@ -8,13 +8,15 @@ mod layout;
 mod load;
 mod load_case;
 mod plan;
+mod span;
 mod support;
 
 pub use action::{Action, ActionKind, Effect};
 pub use category::{Category, CombinationFactors};
-pub use combination::{Combination, OwnCombination, PartialFactors};
+pub use combination::{Combination, CombinationKind, OwnCombination, PartialFactors};
 pub use load::Load;
 pub use plan::MemberPlan;
+pub use span::Span;
 pub use support::{Support, SupportKind};
 
 #[cfg(feature = "document")]
@@ -25,6 +27,7 @@ pub(crate) use layout::SAME_PLACE;
 pub(crate) use load_case::load_case;
 
 use crate::error::Result;
+use crate::lookup;
 use crate::response::Response;
 use crate::section::{Section, Stiffness};
 use crate::solve::beam::Beam;
@@ -45,6 +48,7 @@ struct Data {
     plan: MemberPlan,
     combinations: Vec<Combination>,
     states: [MemberState; 2],
+    spans: Vec<Span>,
     notes: Vec<String>,
 }
 
@@ -97,7 +101,9 @@ impl Member {
         let [initial, end] = states;
         let combinations =
             combination::all(plan.actions(), plan.factors(), plan.own_combinations());
+        let spans = span::all(plan.length(), plan.supports());
         let data = Data {
+            spans,
             combinations,
             states: [initial?, end?],
             notes: layout.notes(),
@@ -142,6 +148,27 @@ impl Member {
     #[must_use]
     pub fn partial_factors(&self) -> &PartialFactors {
         self.data.plan.factors()
+    }
+
+    /// The spans and overhangs, from left to right.
+    #[must_use]
+    pub fn spans(&self) -> &[Span] {
+        &self.data.spans
+    }
+
+    /// The span of a name.
+    ///
+    /// # Errors
+    /// [`crate::ErrorKind::Lookup`] if there is none.
+    pub fn span(&self, name: &str) -> Result<&Span> {
+        let spans = self.spans();
+        spans
+            .iter()
+            .find(|span| span.name() == name)
+            .ok_or_else(|| {
+                let names: Vec<_> = spans.iter().map(Span::name).collect();
+                lookup::unknown("span", name, &names).into()
+            })
     }
 
     /// What was noticed while the member was laid out: for example stations that were merged.

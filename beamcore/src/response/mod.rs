@@ -1,6 +1,11 @@
 //! The response of a member: deflection, slope, shear force, moment and reactions along x.
 
+mod components;
+mod limits;
 mod share;
+
+pub use components::Component;
+pub use limits::{Allowed, Limit, LimitCheck};
 
 use crate::error::{Error, Result};
 use crate::field::{Field, Piecewise};
@@ -172,6 +177,13 @@ impl Response {
             lines[1].add(end.fields.iter().map(&of), share.effective);
         }
         Ok(lines)
+    }
+
+    /// The deflection line under a combination.
+    pub(crate) fn deflection_line(&self, combination: &str, time: Time) -> Result<Piecewise> {
+        let [mut line, effective] = self.parted(combination, time, |piece| &piece.deflection)?;
+        line.add(effective.pieces(), 1.0);
+        Ok(line)
     }
 
     /// The moment in its two shares, from which stresses follow.

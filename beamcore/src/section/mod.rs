@@ -79,6 +79,18 @@ impl Section {
         })
     }
 
+    /// The section of some of the parts alone, each where it stands in the whole section.
+    ///
+    /// # Errors
+    /// As [`Section::of`].
+    pub fn only(&self, names: &[String]) -> Result<Self> {
+        let kept = self.parts.iter().zip(&self.placed);
+        let kept = kept.filter(|(part, _)| names.iter().any(|name| name == part.name()));
+        Self::of(
+            kept.map(|(part, placed)| part.clone().at(placed.centroid_y(), placed.centroid_z())),
+        )
+    }
+
     /// The parts as given.
     #[must_use]
     pub fn parts(&self) -> &[Part] {

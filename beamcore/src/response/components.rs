@@ -1,0 +1,107 @@
+//! The parts of a deflection by EN 1990:2002 A1.4.3, and their limits.
+
+use super::Response;
+use crate::camber::Camber;
+use crate::error::Result;
+use crate::field::{Field, Piecewise};
+use crate::time::Time;
+use crate::units::Length;
+
+/// A component of the deflection of a span.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
+pub enum Component {
+    /// w_inst: characteristic combination, initial.
+    Instant,
+    /// w_1: permanent actions, initial.
+    Permanent,
+    /// w_2: what creep adds under permanent actions only.
+    Creep,
+    /// w_3: what variable actions add, with the creep under their quasi-permanent part.
+    Variable,
+    /// w_tot = w_1 + w_2 + w_3.
+    Total,
+    /// w_max = w_tot - w_c: what is left after the camber w_c.
+    Remaining,
+}
+
+impl Component {
+    /// All components, in the order of EN 1990.
+    pub const ALL: [Self; 6] = [
+        Self::Instant,
+        Self::Permanent,
+        Self::Creep,
+        Self::Variable,
+        Self::Total,
+        Self::Remaining,
+    ];
+
+    /// The symbol used in documents, for example `w_tot`.
+    #[must_use]
+    pub const fn symbol(self) -> &'static str {
+        match self {
+            Self::Instant => "w_inst",
+            Self::Permanent => "w_1",
+            Self::Creep => "w_2",
+            Self::Variable => "w_3",
+            Self::Total => "w_tot",
+            Self::Remaining => "w_max",
+        }
+    }
+}
+
+impl Response {
+    /// The line of a component along a span, under a characteristic combination (or one of one's
+    /// own), after the given camber.
+    ///
+    /// Source: EN 1990:2002 A1.4.3, from memory: w_2 is creep under permanent load only; creep under
+    /// psi_2 Q belongs to w_3.
+    ///
+    /// # Errors
+    /// [`crate::ErrorKind::Lookup`] if there is no such combination or span.
+    pub fn deflection_component(
+        &self,
+        component: Component,
+        combination: &str,
+        span: &str,
+        camber: Option<&Camber>,
+    ) -> Result<Field<Length>> {
+        let line = |name: &str, time: Time| self.deflection_line(name, time);
+        let mut sum = match component {
+            Component::Instant => line(combination, Time::Initial)?,
+            Component::Permanent => line("permanent", Time::Initial)?,
+            Component::Creep => {
+                let mut creep = line("permanent", Time::Final)?;
+                creep.add(line("permanent", Time::Initial)?.pieces(), -1.0);
+                creep
+            }
+            Component::Variable => {
+                let mut variable = line(combination, Time::Final)?;
+                variable.add(line("permanent", Time::Final)?.pieces(), -1.0);
+                variable
+            }
+            Component::Total | Component::Remaining => line(combination, Time::Final)?,
+        };
+        if let (Component::Remaining, Some(camber)) = (component, camber) {
+            sum.add(camber.line(sum.stations()).iter(), -1.0);
+        }
+        let span = self.member().span(span)?;
+        Ok(Field::new(sum.between(span.from().si(), span.to().si())))
+    }
+
+    /// The deflection of one span under a combination: between two supports from the chord through
+    /// them, of an overhang from its support.
+    ///
+    /// # Errors
+    /// [`crate::ErrorKind::Lookup`] if there is no such combination or span.
+    pub fn span_deflection(
+        &self,
+        combination: &str,
+        time: Time,
+        span: &str,
+    ) -> Result<Field<Length>> {
+        // The supports do not move, so that every chord lies at zero.
+        let span = self.member().span(span)?;
+        let line: Piecewise = self.deflection_line(combination, time)?;
+        Ok(Field::new(line.between(span.from().si(), span.to().si())))
+    }
+}
