@@ -1,9 +1,10 @@
 //! The reading to expect when a cambered member is measured in the shop.
 
 use super::Camber;
-use crate::error::{ErrorKind, Problem, Result};
+use crate::error::{Error, ErrorKind, Problem, Result};
 use crate::lookup;
-use crate::member::{Action, Member, Support};
+use crate::member::{Action, Member, SAME_PLACE, Support};
+use crate::path;
 use crate::response::Response;
 use crate::section::{PlacedPart, Section};
 use crate::time::Time;
@@ -31,6 +32,62 @@ pub struct Reading {
     pub standing: Length,
 }
 
+impl Trestles {
+    /// Everything that is wrong with the trestles for a member of this section and length.
+    pub(crate) fn problems(&self, section: &Section, length: Length) -> Vec<Problem> {
+        let mut problems = Vec::new();
+        let base = "camber.trestles";
+        for (key, place) in [("left", self.left), ("right", self.right)] {
+            if !(place >= Length::ZERO && place <= length) {
+                problems.push(Problem::new(
+                    ErrorKind::Position,
+                    path::key(base, key),
+                    place.to_string(),
+                    format!("a place on the member, from 0 m to {length}"),
+                ));
+            }
+        }
+        if problems.is_empty() && self.right - self.left <= length * SAME_PLACE {
+            problems.push(Problem::new(
+                ErrorKind::Position,
+                path::key(base, "right"),
+                self.right.to_string(),
+                format!("a place to the right of the left trestle at {}", self.left),
+            ));
+        }
+        let parts = path::key(base, "parts");
+        if self.parts.is_empty() {
+            problems.push(Problem::new(
+                ErrorKind::Missing,
+                &parts,
+                "no parts",
+                "the parts that are there when the camber is measured",
+            ));
+        }
+        let known: Vec<_> = section.placed().iter().map(PlacedPart::name).collect();
+        for name in &self.parts {
+            let Some(part) = section.placed().iter().find(|part| part.name() == name) else {
+                problems.push(Problem::new(
+                    ErrorKind::Name,
+                    &parts,
+                    format!("the unknown part \"{name}\""),
+                    format!("one of {}", lookup::listed(&known)),
+                ));
+                continue;
+            };
+            if part.line_mass().is_none() {
+                problems.push(Problem::new(
+                    ErrorKind::Missing,
+                    path::key(&path::named("materials", part.material().name()), "density"),
+                    "no density",
+                    format!("a density, since \"{name}\" stands on the trestles"),
+                ));
+            }
+        }
+        problems
+    }
+}
+
 impl Response {
     /// The readings to expect at the stations of a camber: lying, and standing on two trestles
     /// with the parts present, their own weight and short-term moduli.
@@ -42,8 +99,10 @@ impl Response {
     /// All of: a part that is not there, no parts, a part without density, trestles outside the
     /// member or at one place.
     pub fn readings(&self, camber: &Camber, trestles: &Trestles) -> Result<Vec<Reading>> {
-        let section = present(self.member().section(), &trestles.parts)?;
-        let standing = Member::of_length(section, self.member().length())
+        let (section, length) = (self.member().section(), self.member().length());
+        Error::check(trestles.problems(section, length))?;
+        let section = section.only(&trestles.parts)?;
+        let standing = Member::of_length(section, length)
             .support(Support::pin("left trestle", trestles.left))
             .support(Support::roller("right trestle", trestles.right))
             .action(Action::permanent("own weight").self_weight())
@@ -67,20 +126,4 @@ impl Response {
             })
             .collect()
     }
-}
-
-/// The section of the parts that are present, at the places they have in the whole section.
-fn present(section: &Section, names: &[String]) -> Result<Section> {
-    let known: Vec<_> = section.placed().iter().map(PlacedPart::name).collect();
-    let unknown = names.iter().find(|name| !known.contains(&name.as_str()));
-    if let Some(name) = unknown {
-        return Err(Problem::new(
-            ErrorKind::Name,
-            "camber.trestles.parts",
-            format!("the unknown part \"{name}\""),
-            format!("one of {}", lookup::listed(&known)),
-        )
-        .into());
-    }
-    section.only(names)
 }

@@ -35,6 +35,17 @@ impl Shape {
             Self::ArcLeastGap => "arc_least_gap",
         }
     }
+
+    /// The shape in words.
+    #[must_use]
+    pub const fn described(self) -> &'static str {
+        match self {
+            Self::Parabola => "a parabola with the rise at the middle of the chord",
+            Self::Mirror => "the mirror image of the deflection line",
+            Self::ArcThroughMiddle => "a circular arc with the rise at the middle of the chord",
+            Self::ArcLeastGap => "the circular arc with the least greatest gap",
+        }
+    }
 }
 
 /// A camber line: heights above the chord, positive upward, in m.

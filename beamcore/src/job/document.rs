@@ -1,7 +1,9 @@
 //! The job document as it is written: the only types, with those of the outcome, that know serde.
 
+use super::document_action::{ActionDocument, CombinationDocument, PartialFactorsDocument};
+use super::document_camber::{CamberDocument, LimitDocument};
 use super::written::Written;
-use crate::units::{Density, Duration, Force, Length, LineLoad, Modulus, Stress};
+use crate::units::{Density, Duration, Length, Modulus, Stress};
 use schemars::JsonSchema;
 use serde::{Deserialize, Serialize};
 use std::collections::BTreeMap;
@@ -16,6 +18,9 @@ pub(crate) struct JobDocument {
     pub(crate) mark: String,
     /// What the member is, in a few words.
     pub(crate) title: String,
+    /// How many of them are made; without it, one.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(crate) quantity: Option<u32>,
     /// The materials by name.
     pub(crate) materials: BTreeMap<String, MaterialDocument>,
     /// The section.
@@ -24,6 +29,15 @@ pub(crate) struct JobDocument {
     pub(crate) member: MemberDocument,
     /// The actions with their loads.
     pub(crate) actions: Vec<ActionDocument>,
+    /// Other partial factors than the recommended ones.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(crate) partial_factors: Option<PartialFactorsDocument>,
+    /// Combinations of one's own, beside those of EN 1990.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(crate) combinations: Vec<CombinationDocument>,
+    /// Limits of the deflection.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(crate) limits: Vec<LimitDocument>,
     /// The camber to be worked out, if any.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(crate) camber: Option<CamberDocument>,
@@ -195,101 +209,4 @@ pub(crate) enum SupportKindDocument {
     Pin,
     Roller,
     Fixed,
-}
-
-/// An action.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(crate) struct ActionDocument {
-    /// The name of the action.
-    pub(crate) name: String,
-    /// Whether it is permanent or variable.
-    pub(crate) kind: ActionKindDocument,
-    /// The loads.
-    pub(crate) loads: Vec<LoadDocument>,
-}
-
-/// Whether an action always acts.
-#[derive(Clone, Copy, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(rename_all = "snake_case", deny_unknown_fields)]
-pub(crate) enum ActionKindDocument {
-    /// Acts from the first day to the last.
-    Permanent,
-    /// Comes and goes.
-    Variable {
-        /// The factor beside another leading action.
-        psi_0: f64,
-        /// The factor of the frequent value.
-        psi_1: f64,
-        /// The factor of the quasi-permanent value.
-        psi_2: f64,
-    },
-}
-
-/// A load, positive downward.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(rename_all = "snake_case", deny_unknown_fields)]
-pub(crate) enum LoadDocument {
-    /// The weight of the section.
-    SelfWeight,
-    /// A line load over the whole member.
-    Uniform {
-        /// The load per length.
-        load: Written<LineLoad>,
-    },
-    /// A line load over a stretch.
-    Partial {
-        /// The load per length.
-        load: Written<LineLoad>,
-        /// The left end of the stretch.
-        from: Written<Length>,
-        /// The right end of the stretch.
-        to: Written<Length>,
-    },
-    /// A point load.
-    Point {
-        /// The force.
-        load: Written<Force>,
-        /// The place.
-        at: Written<Length>,
-    },
-}
-
-/// The camber to be worked out.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(crate) struct CamberDocument {
-    /// The combination whose deflection is built against.
-    pub(crate) combination: String,
-    /// The time of that deflection.
-    pub(crate) time: TimeDocument,
-    /// The share of the deflection that is built in.
-    pub(crate) fraction: f64,
-    /// The support at the left end of the chord.
-    pub(crate) from: String,
-    /// The support at the right end of the chord.
-    pub(crate) to: String,
-    /// The step to which the rise is rounded.
-    pub(crate) step: Written<Length>,
-    /// The direction of rounding.
-    pub(crate) rounding: RoundingDocument,
-    /// The number of equal divisions of the chord.
-    pub(crate) divisions: u32,
-}
-
-/// A time.
-#[derive(Clone, Copy, Debug, PartialEq, Eq, Serialize, Deserialize, JsonSchema)]
-#[serde(rename_all = "snake_case")]
-pub(crate) enum TimeDocument {
-    Initial,
-    Final,
-}
-
-/// A direction of rounding.
-#[derive(Clone, Copy, Debug, PartialEq, Eq, Serialize, Deserialize, JsonSchema)]
-#[serde(rename_all = "snake_case")]
-pub(crate) enum RoundingDocument {
-    Nearest,
-    Down,
-    Up,
 }

@@ -4,25 +4,31 @@
 //! the thing they belong to unknown (`None`), so that all other mistakes can still be found.
 
 use super::document::{
-    ActionDocument, ActionKindDocument, CamberDocument, JobDocument, LoadDocument, OutlineDocument,
-    PartDocument, PlaceDocument, RoundingDocument, SupportDocument, SupportKindDocument,
-    TimeDocument,
+    JobDocument, OutlineDocument, PartDocument, PlaceDocument, SupportDocument, SupportKindDocument,
 };
-use super::lower_material;
-use crate::camber::{CamberPlan, Rounding};
+use super::{lower_action, lower_camber, lower_material};
+use crate::camber::{CamberPlan, Trestles};
 use crate::error::{Error, ErrorKind, Problem};
 use crate::lookup;
 use crate::material::Material;
-use crate::member::{
-    self, Action, ActionKind, CombinationFactors, Known, Load, Member, Support, SupportKind,
-};
+use crate::member::{self, Known, Member, Support, SupportKind};
 use crate::path;
+use crate::response::Limit;
 use crate::section::{Part, Section, Side, rectangle};
-use crate::time::Time;
 
-/// The member and the camber wish of a document, or all mistakes of meaning in it.
-pub(super) fn lower(document: &JobDocument) -> Result<(Member, Option<CamberPlan>), Vec<Problem>> {
+/// What a document asks for, in the core's own types.
+#[derive(Clone, Debug)]
+pub(super) struct Lowered {
+    pub(super) member: Member,
+    pub(super) camber: Option<CamberPlan>,
+    pub(super) trestles: Option<Trestles>,
+    pub(super) limits: Vec<Limit>,
+}
+
+/// The core's own types of a document, or all mistakes of meaning in it.
+pub(super) fn lower(document: &JobDocument) -> Result<Lowered, Vec<Problem>> {
     let mut problems = Vec::new();
+    check_quantity(&mut problems, document.quantity);
     let materials = lower_material::all(&document.materials, &mut problems);
     let section = section(document, &materials, &mut problems);
     let length = document.member.length.value();
@@ -32,7 +38,7 @@ pub(super) fn lower(document: &JobDocument) -> Result<(Member, Option<CamberPlan
         .iter()
         .filter_map(support)
         .collect();
-    let actions: Vec<_> = document.actions.iter().filter_map(action).collect();
+    let actions = lower_action::actions(&document.actions, &mut problems);
     let known_supports = Known {
         entries: &supports,
         is_complete: supports.len() == document.member.supports.len(),
@@ -48,11 +54,27 @@ pub(super) fn lower(document: &JobDocument) -> Result<(Member, Option<CamberPlan
         &known_supports,
         &known_actions,
     ));
-    let camber = document.camber.as_ref().map(camber);
-    if let Some(Some(plan)) = &camber
-        && all_known
-    {
-        problems.extend(plan.problems(&supports, &member::combinations_of(&actions)));
+    let factors = lower_action::partial_factors(document.partial_factors.as_ref());
+    let own = lower_action::combinations(&document.combinations);
+    let camber = document.camber.as_ref().map(lower_camber::plan);
+    let trestles = document.camber.as_ref().and_then(lower_camber::trestles);
+    let limits = lower_camber::limits(&document.limits, &mut problems);
+    if all_known {
+        problems.extend(member::combination_problems(&actions, &factors, &own));
+        let combinations = member::combinations_of(&actions, &factors, &own);
+        if let Some(Some(plan)) = &camber {
+            problems.extend(plan.problems(&supports, &combinations));
+        }
+        if let (Some(length), false) = (length, supports.is_empty()) {
+            let spans = member::spans_of(length, &supports);
+            let names: Vec<_> = spans.iter().map(member::Span::name).collect();
+            for (i, limit) in limits.iter().enumerate() {
+                problems.extend(limit.problems(i, &names, &combinations));
+            }
+        }
+    }
+    if let (Some(Some(trestles)), Some(section), Some(length)) = (&trestles, &section, length) {
+        problems.extend(trestles.problems(section, length));
     }
     if !problems.is_empty() || !all_known {
         return Err(problems);
@@ -61,11 +83,28 @@ pub(super) fn lower(document: &JobDocument) -> Result<(Member, Option<CamberPlan
     let (Some(section), Some(length)) = (section, length) else {
         return Err(problems);
     };
-    let plan = Member::of_length(section, length);
+    let plan = Member::of_length(section, length).partial_factors(factors);
     let plan = supports.into_iter().fold(plan, member::MemberPlan::support);
     let plan = actions.into_iter().fold(plan, member::MemberPlan::action);
+    let plan = own.into_iter().fold(plan, member::MemberPlan::combination);
     let member = plan.check().map_err(into_problems)?;
-    Ok((member, camber.flatten()))
+    Ok(Lowered {
+        member,
+        camber: camber.flatten(),
+        trestles: trestles.flatten(),
+        limits,
+    })
+}
+
+fn check_quantity(problems: &mut Vec<Problem>, quantity: Option<u32>) {
+    if quantity == Some(0) {
+        problems.push(Problem::new(
+            ErrorKind::Value,
+            "quantity",
+            "0",
+            "a number from 1",
+        ));
+    }
 }
 
 fn into_problems(error: Error) -> Vec<Problem> {
@@ -138,58 +177,4 @@ fn support(support: &SupportDocument) -> Option<Support> {
         SupportKindDocument::Fixed => SupportKind::Fixed,
     };
     Some(Support::new(&support.name, kind, support.at.value()?))
-}
-
-fn action(action: &ActionDocument) -> Option<Action> {
-    let kind = match action.kind {
-        ActionKindDocument::Permanent => ActionKind::Permanent,
-        ActionKindDocument::Variable {
-            psi_0,
-            psi_1,
-            psi_2,
-        } => ActionKind::Variable(CombinationFactors {
-            psi_0,
-            psi_1,
-            psi_2,
-        }),
-    };
-    let mut lowered = Action::new(&action.name, kind);
-    for load in &action.loads {
-        lowered = lowered.load(match load {
-            LoadDocument::SelfWeight => Load::SelfWeight,
-            LoadDocument::Uniform { load } => Load::Uniform {
-                load: load.value()?,
-            },
-            LoadDocument::Partial { load, from, to } => Load::Partial {
-                load: load.value()?,
-                from: from.value()?,
-                to: to.value()?,
-            },
-            LoadDocument::Point { load, at } => Load::Point {
-                load: load.value()?,
-                at: at.value()?,
-            },
-        });
-    }
-    Some(lowered)
-}
-
-fn camber(camber: &CamberDocument) -> Option<CamberPlan> {
-    Some(CamberPlan {
-        combination: camber.combination.clone(),
-        time: match camber.time {
-            TimeDocument::Initial => Time::Initial,
-            TimeDocument::Final => Time::Final,
-        },
-        fraction: camber.fraction,
-        from: camber.from.clone(),
-        to: camber.to.clone(),
-        step: camber.step.value()?,
-        rounding: match camber.rounding {
-            RoundingDocument::Nearest => Rounding::Nearest,
-            RoundingDocument::Down => Rounding::Down,
-            RoundingDocument::Up => Rounding::Up,
-        },
-        divisions: camber.divisions,
-    })
 }

@@ -36,7 +36,11 @@
 
 mod described;
 mod document;
+mod document_action;
+mod document_camber;
 mod lower;
+mod lower_action;
+mod lower_camber;
 mod lower_material;
 mod reader;
 mod written;
@@ -46,10 +50,12 @@ pub use reader::Format;
 pub(crate) use document::JobDocument;
 pub(crate) use reader::{Step, steps};
 
-use crate::camber::CamberPlan;
+use crate::camber::{CamberPlan, Trestles};
 use crate::error::{Error, ErrorKind, Problem, Result};
 use crate::member::Member;
 use crate::outcome::Outcome;
+use crate::response::Limit;
+use lower::Lowered;
 use reader::{Node, NodeValue};
 use std::path::Path;
 use std::sync::LazyLock;
@@ -65,8 +71,7 @@ static SCHEMA: LazyLock<serde_json::Value> =
 #[derive(Clone, Debug)]
 pub struct Job {
     document: JobDocument,
-    member: Member,
-    camber: Option<CamberPlan>,
+    lowered: Lowered,
 }
 
 impl Job {
@@ -94,11 +99,7 @@ impl Job {
             )
         })?;
         match lower::lower(&document) {
-            Ok((member, camber)) if problems.is_empty() => Ok(Self {
-                document,
-                member,
-                camber,
-            }),
+            Ok(lowered) if problems.is_empty() => Ok(Self { document, lowered }),
             Ok(_) => Err(sorted(problems)),
             Err(more) => {
                 problems.extend(more.into_iter().map(|problem| with_line(problem, &node)));
@@ -143,13 +144,25 @@ impl Job {
     /// The member that the job describes.
     #[must_use]
     pub const fn member(&self) -> &Member {
-        &self.member
+        &self.lowered.member
     }
 
     /// The camber that the job asks for.
     #[must_use]
     pub const fn camber(&self) -> Option<&CamberPlan> {
-        self.camber.as_ref()
+        self.lowered.camber.as_ref()
+    }
+
+    /// How the member stands when its camber is measured, if the job says so.
+    #[must_use]
+    pub const fn trestles(&self) -> Option<&Trestles> {
+        self.lowered.trestles.as_ref()
+    }
+
+    /// The limits of the deflection.
+    #[must_use]
+    pub fn limits(&self) -> &[Limit] {
+        &self.lowered.limits
     }
 
     /// Solves the job.

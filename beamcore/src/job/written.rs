@@ -1,7 +1,9 @@
 //! Quantities as they stand in a document: a text with a number and a unit.
 
 use crate::error::Problem;
-use crate::units::{Density, Duration, Force, Length, LineLoad, Modulus, Quantity, Stress};
+use crate::units::{
+    AreaLoad, Density, Duration, Force, Length, LineLoad, Modulus, Moment, Quantity, Stress,
+};
 use schemars::{JsonSchema, Schema, SchemaGenerator};
 use serde::{Deserialize, Serialize};
 use std::borrow::Cow;
@@ -62,6 +64,8 @@ pub(super) fn problem(name: &str, text: &str, path: &str) -> Option<Problem> {
         ),
         (Force::NAME, of::<Force>),
         (LineLoad::NAME, of::<LineLoad>),
+        (AreaLoad::NAME, of::<AreaLoad>),
+        (Moment::NAME, of::<Moment>),
         (Stress::NAME, of::<Stress>),
         (Modulus::NAME, of::<Modulus>),
         (Density::NAME, of::<Density>),

@@ -25,6 +25,8 @@ pub(crate) use checks::{Known, problems_of};
 pub(crate) use combination::{all as combinations_of, problems as combination_problems};
 pub(crate) use layout::SAME_PLACE;
 pub(crate) use load_case::load_case;
+#[cfg(feature = "document")]
+pub(crate) use span::all as spans_of;
 
 use crate::error::Result;
 use crate::lookup;

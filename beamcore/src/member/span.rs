@@ -45,7 +45,7 @@ impl Span {
 }
 
 /// The spans from left to right.
-pub(super) fn all(length: Length, supports: &[Support]) -> Vec<Span> {
+pub(crate) fn all(length: Length, supports: &[Support]) -> Vec<Span> {
     let mut sorted: Vec<_> = supports.iter().collect();
     sorted.sort_by(|a, b| a.at().si().total_cmp(&b.at().si()));
     let mut spans = Vec::new();

@@ -1,18 +1,17 @@
 //! From the solved member to the outcome document.
 
 use super::document::{
-    AccuracyOutcome, CamberOutcome, CombinationOutcome, FactorOutcome, FibreOutcome,
-    MaterialOutcome, MemberOutcome, OrdinateOutcome, OutcomeDocument, PartOutcome,
-    PartStiffnessOutcome, ReactionOutcome, ResultsOutcome, SectionOutcome, StiffnessOutcome,
-    StressOutcome, TransformedOutcome, TransformedPartOutcome, TransformedStateOutcome,
-    UtilisationOutcome,
+    AccuracyOutcome, CombinationOutcome, FactorOutcome, FibreOutcome, MaterialOutcome,
+    MemberOutcome, OutcomeDocument, PartOutcome, PartStiffnessOutcome, ReactionOutcome,
+    ResultsOutcome, SectionOutcome, StiffnessOutcome, StressOutcome, TransformedOutcome,
+    TransformedPartOutcome, TransformedStateOutcome, UtilisationOutcome,
 };
-use super::notes;
-use crate::camber::Camber;
+use super::document_deflection::{SpanDeflectionOutcome, SpanOutcome};
+use super::{build_deflection, notes};
 use crate::error::Result;
 use crate::job::Job;
 use crate::material::Material;
-use crate::member::{Combination, Member};
+use crate::member::{Combination, Member, Span};
 use crate::response::Response;
 use crate::section::{PlacedPart, Section};
 use crate::stress::StressExtreme;
@@ -32,18 +31,17 @@ pub(super) fn outcome(job: &Job) -> Result<OutcomeDocument> {
         outcome_version: super::VERSION,
         beamcore: crate::VERSION.into(),
         job: job.document().clone(),
-        rules: notes::rules(),
+        rules: notes::rules(member),
         materials: materials(member.section()),
-        section: section(member.section())?,
-        member: MemberOutcome {
-            length_m: member.length().to_m(),
-            mass_kg: member
-                .section()
-                .line_mass()
-                .map(|mass| (mass * member.length()).to_kg()),
-        },
+        section: section(member)?,
+        member: member_outcome(job),
         combinations: combinations?,
-        camber: camber.as_ref().map(camber_outcome),
+        components: build_deflection::components(&response, camber.as_ref())?,
+        limits: build_deflection::limits(&response, job.limits(), camber.as_ref())?,
+        camber: camber
+            .as_ref()
+            .map(|camber| build_deflection::camber(&response, camber, job.trestles()))
+            .transpose()?,
         accuracy: AccuracyOutcome {
             residual: response.residual(),
         },
@@ -53,6 +51,25 @@ pub(super) fn outcome(job: &Job) -> Result<OutcomeDocument> {
     };
     document.warnings = notes::warnings(member, &document);
     Ok(document)
+}
+
+fn member_outcome(job: &Job) -> MemberOutcome {
+    let member = job.member();
+    let span = |span: &Span| SpanOutcome {
+        name: span.name().into(),
+        from_m: span.from().to_m(),
+        to_m: span.to().to_m(),
+        cantilever: span.is_cantilever(),
+    };
+    MemberOutcome {
+        length_m: member.length().to_m(),
+        quantity: job.document().quantity.unwrap_or(1),
+        spans: member.spans().iter().map(span).collect(),
+        mass_kg: member
+            .section()
+            .line_mass()
+            .map(|mass| (mass * member.length()).to_kg()),
+    }
 }
 
 /// Each material once, in the order of the parts.
@@ -83,7 +100,8 @@ fn materials(section: &Section) -> Vec<MaterialOutcome> {
     distinct(section).into_iter().map(outcome).collect()
 }
 
-fn section(section: &Section) -> Result<SectionOutcome> {
+fn section(member: &Member) -> Result<SectionOutcome> {
+    let section = member.section();
     let transformed = distinct(section).into_iter().map(|material| {
         let name = material.name();
         Ok(TransformedOutcome {
@@ -99,7 +117,7 @@ fn section(section: &Section) -> Result<SectionOutcome> {
             .placed()
             .iter()
             .enumerate()
-            .map(|(i, p)| part(section, p, i))
+            .map(|(i, p)| part(member, p, i))
             .collect(),
         transformed: transformed.collect::<Result<_>>()?,
     })
@@ -117,7 +135,8 @@ fn stiffness(section: &Section, time: Time) -> StiffnessOutcome {
     }
 }
 
-fn part(section: &Section, part: &PlacedPart, index: usize) -> PartOutcome {
+fn part(member: &Member, part: &PlacedPart, index: usize) -> PartOutcome {
+    let section = member.section();
     let state = |time| {
         let stiffness = section.stiffness(time);
         PartStiffnessOutcome {
@@ -134,6 +153,9 @@ fn part(section: &Section, part: &PlacedPart, index: usize) -> PartOutcome {
         top_m: part.top().to_m(),
         area_m2: part.area().to_m2(),
         line_mass_kg_per_m: part.line_mass().map(|mass| mass.to_kg_per_m()),
+        mass_kg: part
+            .line_mass()
+            .map(|mass| (mass * member.length()).to_kg()),
         initial: state(Time::Initial),
         end: state(Time::Final),
     }
@@ -190,8 +212,16 @@ fn results(response: &Response, combination: &Combination, time: Time) -> Result
         .placed()
         .iter()
         .map(|part| stress(response, combination, time, part.name()));
+    let spans = member.spans().iter().map(|span| {
+        let line = response.span_deflection(name, time, span.name())?;
+        Ok(SpanDeflectionOutcome {
+            name: span.name().into(),
+            deflection: (&line).into(),
+        })
+    });
     Ok(ResultsOutcome {
         deflection: (&response.deflection(name, time)?).into(),
+        spans: spans.collect::<Result<_>>()?,
         slope: (&response.slope(name, time)?).into(),
         shear: (&response.shear(name, time)?).into(),
         moment: (&response.moment(name, time)?).into(),
@@ -227,22 +257,4 @@ fn stress(
             at_m: u.at.to_m(),
         }),
     })
-}
-
-fn camber_outcome(camber: &Camber) -> CamberOutcome {
-    CamberOutcome {
-        shape: "parabola".into(),
-        target_m: camber.target().to_m(),
-        rise_m: camber.rise().to_m(),
-        chord_from_m: camber.chord().0.to_m(),
-        chord_to_m: camber.chord().1.to_m(),
-        ordinates: camber
-            .ordinates()
-            .iter()
-            .map(|ordinate| OrdinateOutcome {
-                station_m: ordinate.station.to_m(),
-                ordinate_m: ordinate.ordinate.to_m(),
-            })
-            .collect(),
-    }
 }

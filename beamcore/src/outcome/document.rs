@@ -5,6 +5,9 @@
     reason = "the units in the names keep their case: N is not n"
 )]
 
+use super::document_deflection::{
+    CamberOutcome, ComponentsOutcome, LimitOutcome, SpanDeflectionOutcome, SpanOutcome,
+};
 use super::extremes::{AngleExtremes, ForceExtremes, LengthExtremes, MomentExtremes};
 use crate::job::JobDocument;
 use schemars::JsonSchema;
@@ -30,6 +33,10 @@ pub(crate) struct OutcomeDocument {
     pub(super) member: MemberOutcome,
     /// The results under each combination.
     pub(super) combinations: Vec<CombinationOutcome>,
+    /// The components of the deflection by EN 1990 A1.4.3, under each characteristic combination.
+    pub(super) components: Vec<ComponentsOutcome>,
+    /// The limits of the deflection, compared with the results.
+    pub(super) limits: Vec<LimitOutcome>,
     /// The camber, if it was asked for.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(super) camber: Option<CamberOutcome>,
@@ -95,6 +102,9 @@ pub(super) struct PartOutcome {
     pub(super) area_m2: f64,
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(super) line_mass_kg_per_m: Option<f64>,
+    /// The mass of the part in one member.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(super) mass_kg: Option<f64>,
     pub(super) initial: PartStiffnessOutcome,
     #[serde(rename = "final")]
     pub(super) end: PartStiffnessOutcome,
@@ -146,6 +156,10 @@ pub(super) struct TransformedPartOutcome {
 #[serde(deny_unknown_fields)]
 pub(super) struct MemberOutcome {
     pub(super) length_m: f64,
+    /// How many are made.
+    pub(super) quantity: u32,
+    pub(super) spans: Vec<SpanOutcome>,
+    /// The mass of one.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(super) mass_kg: Option<f64>,
 }
@@ -175,6 +189,8 @@ pub(super) struct FactorOutcome {
 #[serde(deny_unknown_fields)]
 pub(super) struct ResultsOutcome {
     pub(super) deflection: LengthExtremes,
+    /// The deflection of each span from its own chord.
+    pub(super) spans: Vec<SpanDeflectionOutcome>,
     pub(super) slope: AngleExtremes,
     pub(super) shear: ForceExtremes,
     pub(super) moment: MomentExtremes,
@@ -224,31 +240,6 @@ pub(super) struct FibreOutcome {
 pub(super) struct UtilisationOutcome {
     pub(super) value: f64,
     pub(super) at_m: f64,
-}
-
-/// The camber to build.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(super) struct CamberOutcome {
-    /// The shape: a parabola.
-    pub(super) shape: String,
-    /// Before rounding.
-    pub(super) target_m: f64,
-    /// At the middle of the chord.
-    pub(super) rise_m: f64,
-    pub(super) chord_from_m: f64,
-    pub(super) chord_to_m: f64,
-    pub(super) ordinates: Vec<OrdinateOutcome>,
-}
-
-/// One ordinate.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(super) struct OrdinateOutcome {
-    /// From the left end of the chord.
-    pub(super) station_m: f64,
-    /// Above the chord.
-    pub(super) ordinate_m: f64,
 }
 
 /// How exact the solution is.

@@ -33,16 +33,21 @@ macro_rules! extremes {
             pub(super) at_m: f64,
         }
 
-        impl<Q: Quantity> From<&Field<Q>> for $extremes {
-            fn from(field: &Field<Q>) -> Self {
-                let extreme = |found: Extreme<Q>| $extreme {
+        impl<Q: Quantity> From<Extreme<Q>> for $extreme {
+            fn from(found: Extreme<Q>) -> Self {
+                Self {
                     $value: found.value.si(),
                     at_m: found.at.si(),
-                };
+                }
+            }
+        }
+
+        impl<Q: Quantity> From<&Field<Q>> for $extremes {
+            fn from(field: &Field<Q>) -> Self {
                 Self {
-                    greatest: extreme(field.greatest()),
-                    maximum: extreme(field.maximum()),
-                    minimum: extreme(field.minimum()),
+                    greatest: field.greatest().into(),
+                    maximum: field.maximum().into(),
+                    minimum: field.minimum().into(),
                 }
             }
         }

@@ -1,7 +1,9 @@
 //! The outcome: all results of a job as one document, addressed by path.
 
 mod build;
+mod build_deflection;
 mod document;
+mod document_deflection;
 mod extremes;
 mod figure;
 mod notes;

@@ -4,19 +4,30 @@ use super::build::distinct;
 use super::document::{CombinationOutcome, OutcomeDocument};
 use crate::constants::GRAVITY;
 use crate::job::Job;
-use crate::member::{ActionKind, GAMMA_PERMANENT, GAMMA_VARIABLE, Load, Member, SupportKind};
+use crate::member::{ActionKind, Load, Member, PartialFactors, SupportKind};
 use crate::time::Time;
 
 /// The rules that the results rest on.
-pub(super) fn rules() -> Vec<String> {
+pub(super) fn rules(member: &Member) -> Vec<String> {
+    let factors = member.partial_factors();
+    let origin = if *factors == PartialFactors::default() {
+        "EN 1990:2002 Table A1.2(B), recommended values (from memory)"
+    } else {
+        "as given, instead of the recommended ones"
+    };
     vec![
-        "Combinations: EN 1990:2002 6.4.3.2 eq. 6.10 and 6.5.3 (from memory)".into(),
+        "Combinations: EN 1990:2002 6.4.3.2 eq. 6.10 and 6.5.3, each unfavourable variable action \
+         leading in turn (from memory)"
+            .into(),
         format!(
-            "Partial factors: {GAMMA_PERMANENT} permanent, {GAMMA_VARIABLE} variable, \
-             EN 1990:2002 Table A1.2(B), recommended values (from memory)"
+            "Partial factors: {} permanent, {} permanent and favourable, {} variable, {origin}",
+            factors.permanent, factors.permanent_favourable, factors.variable
         ),
         "Final state: (combination - quasi-permanent share) with E, plus the quasi-permanent \
          share with E/(1 + creep factor) of each material"
+            .into(),
+        "Components of the deflection: EN 1990:2002 A1.4.3 (from memory); creep under psi_2 Q \
+         belongs to w_3"
             .into(),
     ]
 }
@@ -62,8 +73,9 @@ pub(super) fn assumptions(job: &Job) -> Vec<String> {
     }
     if let Some(plan) = job.camber() {
         notes.push(format!(
-            "Camber: a parabola whose rise is {} of the deflection at the middle of the chord, \
-             {}, {}, rounded ({}) to {}",
+            "Camber: {} for {} of the deflection, {}, {}, rounded ({}) to {}; beyond the chord \
+             the member goes on along its line",
+            plan.shape.described(),
             plan.fraction,
             plan.combination,
             plan.time,

@@ -1,0 +1,137 @@
+//! Actions, loads and combinations as they are written.
+
+use super::written::Written;
+use crate::units::{AreaLoad, Force, Length, LineLoad, Moment};
+use schemars::JsonSchema;
+use serde::{Deserialize, Serialize};
+use std::collections::BTreeMap;
+
+/// An action.
+#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
+#[serde(deny_unknown_fields)]
+pub(crate) struct ActionDocument {
+    /// The name of the action.
+    pub(crate) name: String,
+    /// Whether it is permanent or variable.
+    pub(crate) kind: ActionKindDocument,
+    /// Whether the action relieves what is being checked; without it, it does not.
+    #[serde(default, skip_serializing_if = "is_false")]
+    pub(crate) favourable: bool,
+    /// The loads.
+    pub(crate) loads: Vec<LoadDocument>,
+}
+
+/// Whether an action always acts.
+#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
+#[serde(rename_all = "snake_case", deny_unknown_fields)]
+pub(crate) enum ActionKindDocument {
+    /// Acts from the first day to the last.
+    Permanent,
+    /// Comes and goes.
+    Variable {
+        /// The category of EN 1990 Table A1.1, which gives the factors.
+        #[serde(default, skip_serializing_if = "Option::is_none")]
+        category: Option<String>,
+        /// The factor beside another leading action.
+        #[serde(default, skip_serializing_if = "Option::is_none")]
+        psi_0: Option<f64>,
+        /// The factor of the frequent value.
+        #[serde(default, skip_serializing_if = "Option::is_none")]
+        psi_1: Option<f64>,
+        /// The factor of the quasi-permanent value.
+        #[serde(default, skip_serializing_if = "Option::is_none")]
+        psi_2: Option<f64>,
+    },
+}
+
+/// A load, positive downward.
+#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
+#[serde(rename_all = "snake_case", deny_unknown_fields)]
+pub(crate) enum LoadDocument {
+    /// The weight of the section.
+    SelfWeight,
+    /// A line load over the whole member.
+    Uniform {
+        /// The load per length.
+        load: Written<LineLoad>,
+    },
+    /// A line load over a stretch.
+    Partial {
+        /// The load per length.
+        load: Written<LineLoad>,
+        /// The left end of the stretch.
+        from: Written<Length>,
+        /// The right end of the stretch.
+        to: Written<Length>,
+    },
+    /// A line load over a stretch that changes linearly.
+    Trapezoidal {
+        /// The load per length at the left end of the stretch.
+        load_from: Written<LineLoad>,
+        /// The load per length at its right end.
+        load_to: Written<LineLoad>,
+        /// The left end of the stretch.
+        from: Written<Length>,
+        /// The right end of the stretch.
+        to: Written<Length>,
+    },
+    /// A load per area of floor.
+    Area {
+        /// The load per area.
+        load: Written<AreaLoad>,
+        /// The width of floor that the member carries.
+        tributary_width: Written<Length>,
+        /// The left end of the stretch; without it, the whole member.
+        #[serde(default, skip_serializing_if = "Option::is_none")]
+        from: Option<Written<Length>>,
+        /// The right end of the stretch.
+        #[serde(default, skip_serializing_if = "Option::is_none")]
+        to: Option<Written<Length>>,
+    },
+    /// A point load.
+    Point {
+        /// The force.
+        load: Written<Force>,
+        /// The place.
+        at: Written<Length>,
+    },
+    /// A couple, positive clockwise.
+    Couple {
+        /// The couple.
+        couple: Written<Moment>,
+        /// The place.
+        at: Written<Length>,
+    },
+}
+
+/// The partial factors of the fundamental combination.
+#[derive(Clone, Copy, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
+#[serde(deny_unknown_fields)]
+pub(crate) struct PartialFactorsDocument {
+    /// The factor of unfavourable permanent actions.
+    pub(crate) permanent: f64,
+    /// The factor of favourable permanent actions.
+    pub(crate) permanent_favourable: f64,
+    /// The factor of unfavourable variable actions.
+    pub(crate) variable: f64,
+}
+
+/// A combination of one's own.
+#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
+#[serde(deny_unknown_fields)]
+pub(crate) struct CombinationDocument {
+    /// The name of the combination.
+    pub(crate) name: String,
+    /// The factor of each action that takes part.
+    pub(crate) factors: BTreeMap<String, f64>,
+    /// Whether design strengths are compared under it.
+    pub(crate) ultimate: bool,
+}
+
+#[expect(
+    clippy::trivially_copy_pass_by_ref,
+    reason = "serde asks for this form"
+)]
+const fn is_false(value: &bool) -> bool {
+    !*value
+}
