@@ -9,6 +9,7 @@ mod figure;
 mod notes;
 mod page;
 mod summary;
+mod summary_deflection;
 
 use crate::error::{ErrorKind, Problem, Result};
 use crate::job::{Job, Step, steps};

@@ -4,6 +4,7 @@ use super::document::{OutcomeDocument, ResultsOutcome};
 use super::figure::figure;
 use super::notes::each;
 use super::page::Page;
+use super::summary_deflection as deflection;
 use crate::time::Time;
 
 /// The summary of an outcome.
@@ -16,11 +17,13 @@ pub(super) fn text(outcome: &OutcomeDocument) -> String {
     ));
     governing(&mut page, outcome);
     description(&mut page, outcome);
-    deflections(&mut page, outcome);
+    deflection::greatest(&mut page, outcome);
+    deflection::components(&mut page, outcome);
+    deflection::limits(&mut page, outcome);
     stresses(&mut page, outcome);
     strengths(&mut page, outcome);
     reactions(&mut page, outcome);
-    camber(&mut page, outcome);
+    deflection::camber(&mut page, outcome);
     page.list("ASSUMED", &outcome.assumptions);
     page.list("RULES", &outcome.rules);
     page.list("LOOK AT", &outcome.warnings);
@@ -62,6 +65,25 @@ fn governing(page: &mut Page, outcome: &OutcomeDocument) {
         }
         None => page.line("Strength: no design strengths were given, none was checked"),
     }
+    let worst = outcome
+        .limits
+        .iter()
+        .max_by(|a, b| a.utilisation.total_cmp(&b.utilisation));
+    if let Some(limit) = worst {
+        let verdict = if limit.utilisation > 1.0 {
+            "LIMIT NOT KEPT"
+        } else {
+            "within the limit"
+        };
+        page.line(&format!(
+            "Deflection {} of \"{}\" {} mm of {} mm allowed, used to {}: {verdict}",
+            limit.component,
+            limit.span,
+            figure(limit.value_m * 1e3, 1),
+            figure(limit.allowed_m * 1e3, 1),
+            figure(limit.utilisation, 2)
+        ));
+    }
     for (combination, time, results) in each(outcome) {
         if combination.name == "quasi-permanent" && time == Time::Final {
             let greatest = &results.deflection.greatest;
@@ -80,7 +102,14 @@ fn description(page: &mut Page, outcome: &OutcomeDocument) {
     let mass = member
         .mass_kg
         .map_or_else(String::new, |mass| format!(", {} kg", figure(mass, 0)));
-    page.line(&format!("Length {} m{mass}", figure(member.length_m, 3)));
+    let count = match member.quantity {
+        1 => String::new(),
+        many => format!(", {many} of them"),
+    };
+    page.line(&format!(
+        "Length {} m{mass}{count}",
+        figure(member.length_m, 3)
+    ));
     for support in &outcome.job.member.supports {
         page.line(&format!(
             "Support \"{}\": {}",
@@ -127,30 +156,12 @@ fn description(page: &mut Page, outcome: &OutcomeDocument) {
     }
 }
 
-fn deflections(page: &mut Page, outcome: &OutcomeDocument) {
-    page.heading("GREATEST DEFLECTION (downward positive)");
-    page.line("Combination                           instant             final");
-    for combination in &outcome.combinations {
-        let cell = |results: &ResultsOutcome| {
-            let greatest = &results.deflection.greatest;
-            let (value, at) = (figure(greatest.value_m * 1e3, 1), figure(greatest.at_m, 2));
-            format!("{value:>7} mm at {at} m")
-        };
-        page.line(&format!(
-            "{:<30} {:>20} {:>20}",
-            short_to(&combination.name, 30),
-            cell(&combination.initial),
-            cell(&combination.end)
-        ));
-    }
-}
-
 fn stresses(page: &mut Page, outcome: &OutcomeDocument) {
     page.heading("GREATEST NORMAL STRESS, N/mm2 (tension positive)");
     page.line("Part              Combination, time            Tension  Compression  Used");
     for name in outcome.section.parts.iter().map(|part| &part.name) {
         for (combination, time, results) in each(outcome) {
-            if combination.name == "permanent" {
+            if matches!(combination.name.as_str(), "permanent" | "frequent") {
                 continue;
             }
             let Some(stress) = results.stresses.iter().find(|stress| stress.name == *name) else {
@@ -221,40 +232,12 @@ fn reactions(page: &mut Page, outcome: &OutcomeDocument) {
     }
 }
 
-fn camber(page: &mut Page, outcome: &OutcomeDocument) {
-    let Some(camber) = &outcome.camber else {
-        return;
-    };
-    page.heading("CAMBER TO BUILD IN");
-    page.line(&format!(
-        "Rise {} mm at the middle of the chord (wanted {} mm), {}",
-        figure(camber.rise_m * 1e3, 1),
-        figure(camber.target_m * 1e3, 1),
-        camber.shape
-    ));
-    page.line(&format!(
-        "Chord from {} m to {} m of the member; ordinates upward from the chord,",
-        figure(camber.chord_from_m, 3),
-        figure(camber.chord_to_m, 3)
-    ));
-    page.line("member unloaded, as when it lies on its side");
-    page.blank();
-    page.line("Station from the left end of the chord, m      Ordinate, mm");
-    for ordinate in &camber.ordinates {
-        page.line(&format!(
-            "{:>20} {:>36}",
-            figure(ordinate.station_m, 3),
-            figure(ordinate.ordinate_m * 1e3, 1)
-        ));
-    }
-}
-
 fn short(name: &str) -> String {
     short_to(name, 17)
 }
 
 /// A name cut to a width, with a mark where it was cut.
-fn short_to(name: &str, width: usize) -> String {
+pub(super) fn short_to(name: &str, width: usize) -> String {
     if name.chars().count() <= width {
         return name.into();
     }
