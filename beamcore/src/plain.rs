@@ -115,8 +115,8 @@ pub fn simple_span_uniform_deflection(
     check::finite(&mut problems, load, "load_N_per_m");
     Error::check(problems)?;
     let case = LoadCase {
-        line: vec![load_N_per_m],
-        point: vec![0.0; 2],
+        line: vec![[load_N_per_m; 2]],
+        ..LoadCase::none(2)
     };
     greatest_deflection(vec![0.0, span_m], bending_stiffness_Nm2, &case)
 }
@@ -154,8 +154,11 @@ pub fn simple_span_point_deflection(
     } else {
         (vec![0.0, at_m, span_m], vec![0.0, load_N, 0.0])
     };
-    let line = vec![0.0; stations.len() - 1];
-    greatest_deflection(stations, bending_stiffness_Nm2, &LoadCase { line, point })
+    let case = LoadCase {
+        point,
+        ..LoadCase::none(stations.len())
+    };
+    greatest_deflection(stations, bending_stiffness_Nm2, &case)
 }
 
 fn span_problems(span_m: f64, bending_stiffness_Nm2: f64) -> Vec<Problem> {
