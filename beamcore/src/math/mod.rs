@@ -7,7 +7,6 @@
 pub(crate) mod polynomial;
 
 /// e to the power `x`.
-#[cfg(test)]
 pub(crate) fn exp(x: f64) -> f64 {
     libm::exp(x)
 }

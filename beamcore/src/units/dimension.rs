@@ -39,6 +39,14 @@ impl Dimension {
         }
     }
 
+    /// The same dimension with this power of temperature.
+    pub(super) const fn with_temperature(self, temperature: i8) -> Self {
+        Self {
+            temperature,
+            ..self
+        }
+    }
+
     /// The dimension of a product, or `None` if a power leaves -128 to 127.
     #[must_use]
     pub fn times(self, other: Self) -> Option<Self> {

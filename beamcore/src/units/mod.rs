@@ -64,6 +64,6 @@ pub use number::Number;
 pub use quantity::{
     Angle, Area, AreaLoad, AxialStiffness, BendingStiffness, Curvature, Density, Duration,
     FirstMoment, Force, Length, LineLoad, LineMass, Mass, Modulus, Moment, Quantity, SecondMoment,
-    Strain, Stress, table,
+    Strain, Stress, ThermalExpansion, table,
 };
 pub use unit::{TypeRow, Unit};

@@ -12,7 +12,7 @@ mod sealed {
 macro_rules! numbers {
     ($(
         $(#[$doc:meta])*
-        $Name:ident $noun:literal [$mass:expr, $length:expr, $time:expr]
+        $Name:ident $noun:literal [$mass:expr, $length:expr, $time:expr $(, $temperature:expr)?]
         prints [$($print:literal),+] {
             $($symbol:literal ($num:expr, $den:expr) $from:ident $to:ident $($literal:ident)?;)+
         }

@@ -63,7 +63,7 @@ pub trait Quantity:
 macro_rules! types {
     ($(
         $(#[$doc:meta])*
-        $Name:ident $noun:literal [$mass:expr, $length:expr, $time:expr]
+        $Name:ident $noun:literal [$mass:expr, $length:expr, $time:expr $(, $temperature:expr)?]
         prints [$($print:literal),+] {
             $($symbol:literal ($num:expr, $den:expr) $from:ident $to:ident $($literal:ident)?;)+
         }
@@ -79,7 +79,8 @@ macro_rules! types {
             impl Quantity for $Name {
                 const NAME: &'static str = stringify!($Name);
                 const NOUN: &'static str = $noun;
-                const DIMENSION: Dimension = Dimension::mechanical($mass, $length, $time);
+                const DIMENSION: Dimension = Dimension::mechanical($mass, $length, $time)
+                    $(.with_temperature($temperature))?;
                 const UNITS: &'static [Unit] = &[$(Unit {
                     symbol: $symbol,
                     name: stringify!($from).split_at("from_".len()).1,

@@ -2,7 +2,8 @@
 //!
 //! A row is `"symbol" (num, den) constructor getter literal;` with `si = x * num / den`, the
 //! fraction in lowest terms, so that a unit built from others has the same bits. A row without a
-//! literal shares its symbol with another type, which has the number literal.
+//! literal shares its symbol with another type, which has the number literal. The powers in brackets
+//! are those of mass, length, time and, where there is one, temperature.
 //!
 //! Exact by definition: inch = 25.4 mm and foot = 12 inches (so in = 127/5000 m, ft = 381/1250 m);
 //! pound = 0.45359237 kg; pound-force = 0.45359237 * 9.80665 N = 8896443230521/2e12 N; kip = 1000
@@ -135,6 +136,10 @@ macro_rules! with_table {
                 "rad" (1.0, 1.0) from_rad to_rad rad;
                 "mrad" (1.0, 1000.0) from_mrad to_mrad mrad;
                 "deg" (std::f64::consts::PI, 180.0) from_deg to_deg deg;
+            }
+            /// A thermal expansion, alpha, strain per degree of warming.
+            ThermalExpansion "thermal expansion" [0, 0, 0, -1] prints ["/K"] {
+                "/K" (1.0, 1.0) from_per_K to_per_K per_K;
             }
             /// A mass.
             Mass "mass" [1, 0, 0] prints ["kg"] {

@@ -87,7 +87,9 @@ mod conversion {
                 .fold(AnyUnit::ONE, |unit, f| unit.times(factor(f)).unwrap())
         };
         let mut composites = 0;
-        for (row, unit) in all_units().filter(|(_, unit)| unit.symbol != "1") {
+        // The kelvin alone is no unit of the table, so that "/K" has no parts to be built from.
+        let built_up = |(_, unit): &(_, &Unit)| !["1", "/K"].contains(&unit.symbol);
+        for (row, unit) in all_units().filter(built_up) {
             let (above, below) = unit.symbol.split_once('/').unwrap_or((unit.symbol, ""));
             let built = side(above).per(side(below)).unwrap();
             assert_eq!(
@@ -106,6 +108,29 @@ mod conversion {
             composites += usize::from(!unit.symbol.chars().all(char::is_alphabetic));
         }
         assert!(composites > 30, "{composites}");
+    }
+
+    #[test]
+    fn thermal_expansion_is_per_kelvin() {
+        let per_kelvin = Dimension {
+            mass: 0,
+            length: 0,
+            time: 0,
+            temperature: -1,
+        };
+        assert_eq!(ThermalExpansion::DIMENSION, per_kelvin);
+        assert_eq!("12e-6 /K".parse::<ThermalExpansion>(), Ok(12e-6.per_K()));
+        assert_eq!("12e-6 1/K".parse::<ThermalExpansion>(), Ok(12e-6.per_K()));
+        assert_eq!(12e-6.per_K().to_string(), "1.2e-5 /K");
+        assert_eq!(
+            "12e-6".parse::<ThermalExpansion>().unwrap_err().to_string(),
+            "thermal expansion: found \"12e-6\" without a unit; expected a thermal expansion with \
+             one of the units /K, for example \"12e-6 /K\""
+        );
+        assert_eq!(
+            "12e-6 /m".parse::<ThermalExpansion>().unwrap_err().kind(),
+            ErrorKind::Unit
+        );
     }
 
     #[test]
