@@ -1,6 +1,9 @@
-//! Creep of concrete by EN 1992-1-1:2004 Annex B.
+//! Creep, shrinkage and modulus of concrete by EN 1992-1-1:2004; here its creep, Annex B.
 //!
 //! The formulas bear hidden units: strengths are in MPa, sizes in mm, ages in days.
+
+pub use super::concrete_modulus::{mean_modulus, modulus_at_age, strength_share};
+pub use super::shrinkage::ConcreteShrinkage;
 
 use crate::check;
 use crate::error::{Error, ErrorKind, Problem, Result};
@@ -115,24 +118,38 @@ impl ConcreteCreep {
         check::positive(&mut problems, self.mean_strength, "mean_strength");
         check::positive(&mut problems, self.notional_size, "notional_size");
         check::positive(&mut problems, self.age_at_loading, "age_at_loading");
-        let humidity = self.relative_humidity_percent;
-        if !(2.0..=100.0).contains(&humidity) {
-            problems.push(Problem::new(
-                ErrorKind::Value,
-                "relative_humidity_percent",
-                humidity.to_string(),
-                "the relative humidity in percent, from 2 to 100, for example 50",
-            ));
-        }
-        if !(self.age_at_end.is_finite() && self.age_at_end >= self.age_at_loading) {
-            problems.push(Problem::new(
-                ErrorKind::Value,
-                "age_at_end",
-                self.age_at_end.to_string(),
-                "an age not less than the age at loading",
-            ));
-        }
+        check_humidity(&mut problems, self.relative_humidity_percent);
+        check_end(
+            &mut problems,
+            self.age_at_end,
+            self.age_at_loading,
+            "loading",
+        );
         problems
+    }
+}
+
+/// A problem unless the relative humidity is a possible one in percent; a share is none.
+pub(super) fn check_humidity(problems: &mut Vec<Problem>, percent: f64) {
+    if !(2.0..=100.0).contains(&percent) {
+        problems.push(Problem::new(
+            ErrorKind::Value,
+            "relative_humidity_percent",
+            percent.to_string(),
+            "the relative humidity in percent, from 2 to 100, for example 50",
+        ));
+    }
+}
+
+/// A problem unless the age at the end is finite and not less than that at the `start`.
+pub(super) fn check_end(problems: &mut Vec<Problem>, end: Duration, start: Duration, name: &str) {
+    if !(end.is_finite() && end >= start) {
+        problems.push(Problem::new(
+            ErrorKind::Value,
+            "age_at_end",
+            end.to_string(),
+            format!("an age not less than the age at {name}"),
+        ));
     }
 }
 

@@ -2,7 +2,9 @@
 
 mod classes;
 pub mod concrete;
+mod concrete_modulus;
 mod creep;
+mod shrinkage;
 mod strength;
 
 pub use classes::{concrete, steel, timber};
