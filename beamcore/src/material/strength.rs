@@ -1,4 +1,4 @@
-//! Design strengths: inputs, decided by the engineer's code, never computed here.
+//! Design strengths: given, or made of characteristic ones by factors that the engineer chooses.
 
 use crate::check;
 use crate::error::Problem;
