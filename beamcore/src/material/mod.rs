@@ -16,6 +16,8 @@ mod creep;
 mod design;
 mod factors;
 mod given;
+#[cfg(test)]
+mod relations;
 mod shrinkage;
 mod strength;
 #[cfg(test)]
