@@ -278,7 +278,7 @@ fn names_of_classes_that_are_not_there() {
     says(
         &beamcore::material::steel("S276").unwrap_err(),
         ErrorKind::Name,
-        "class: found the unknown steel class \"S276\"; expected one of the steel classes S235, S275, S355",
+        "class: found the unknown steel class \"S276\"; expected one of the steel classes S235, S275, S355, S420, S420N, S420M, S450, S460, S460N, S460M",
     );
     assert_eq!(
         timber("c24", ServiceClass::One).unwrap_err().kind(),
