@@ -2,7 +2,7 @@
 
 use super::line;
 use beamcore::Result;
-use beamcore::camber::{CamberPlan, Rounding};
+use beamcore::camber::{CamberPlan, Rounding, Shape};
 use beamcore::material::concrete::{Cement, ConcreteCreep};
 use beamcore::material::{Creep, Material, ServiceClass, concrete, steel, timber};
 use beamcore::member::{Action, CombinationFactors, Member, Support};
@@ -11,6 +11,9 @@ use beamcore::section::{Part, Section, rectangle};
 use beamcore::time::Time;
 use beamcore::units::{Length, Number};
 
+#[path = "typed_roof_beam.rs"]
+mod roof_beam;
+
 /// All typed cases, answered.
 pub fn answers() -> Result<String> {
     let mut text = fields("flitch", &flitch()?.solve())?;
@@ -18,6 +21,7 @@ pub fn answers() -> Result<String> {
     let response = slab_strip()?.solve();
     text += &fields("slab-strip", &response)?;
     text += &camber("slab-strip", &response)?;
+    text += &roof_beam::answers()?;
     Ok(text)
 }
 
@@ -94,6 +98,7 @@ fn slab_strip() -> Result<Member> {
 
 fn camber(case: &str, response: &Response) -> Result<String> {
     let camber = response.camber(&CamberPlan {
+        shape: Shape::Parabola,
         combination: "quasi-permanent".into(),
         time: Time::Final,
         fraction: 1.0,
@@ -101,6 +106,7 @@ fn camber(case: &str, response: &Response) -> Result<String> {
         to: "right".into(),
         step: 1.mm(),
         rounding: Rounding::Nearest,
+        least: Length::ZERO,
         divisions: 6,
     })?;
     let mut text = line(case, "camber.target_m", camber.target().to_m());
