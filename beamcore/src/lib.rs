@@ -41,6 +41,7 @@ mod math;
 pub mod member;
 #[cfg(feature = "document")]
 pub mod outcome;
+pub mod outline;
 mod path;
 pub mod plain;
 pub mod response;
