@@ -38,6 +38,8 @@ mod shape;
 mod shape_problems;
 mod shape_region;
 mod shape_values;
+#[cfg(test)]
+mod tests;
 
 pub use contact::touches;
 pub use contour::Contour;
