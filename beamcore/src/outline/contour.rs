@@ -29,11 +29,11 @@ impl Contour {
     /// A loop of the given edges, each of which begins exactly where the one before ends.
     ///
     /// # Errors
-    /// [`ErrorKind::Geometry`](crate::ErrorKind::Geometry), under the path `edges[i]`, i counted from 0: a loop of fewer than
-    /// two edges, an edge that does not begin where the one before ends, an edge without length
-    /// (below 1e-9 of the loop's size), an arc whose centre is not as far from one end as from the
-    /// other (to 1e-9 of the radius). [`ErrorKind::Value`](crate::ErrorKind::Value): a
-    /// coordinate that is not finite.
+    /// [`ErrorKind::Geometry`](crate::ErrorKind::Geometry), under the path `edges[i]`, i counted
+    /// from 0: a loop of fewer than two edges, an edge that does not begin where the one before
+    /// ends, an edge without length (below 1e-9 of the loop's size), an arc whose centre is not as
+    /// far from one end as from the other (to 1e-9 of the radius).
+    /// [`ErrorKind::Value`](crate::ErrorKind::Value): a coordinate that is not finite.
     pub fn closed(edges: Vec<Edge>) -> Result<Self> {
         Error::check(contour_problems::problems(&edges))?;
         Ok(Self { edges })

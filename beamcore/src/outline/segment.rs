@@ -28,9 +28,9 @@ pub(super) struct SegmentMoments {
 /// Arcs with h/r up to this limit are integrated without the closed form, which cancels there.
 const FLAT: f64 = 0.25;
 
-/// Positive nodes and weights of the Gauss-Legendre rule of 10 points on (-1, 1). Source: Abramowitz
-/// and Stegun, Handbook of Mathematical Functions, table 25.4 (from memory); computed here from the
-/// roots of the Legendre polynomial with 50 digits.
+/// Positive nodes and weights of the Gauss-Legendre rule of 10 points on (-1, 1), computed from the
+/// roots of the Legendre polynomial with 50 digits. Source: Abramowitz and Stegun, Handbook of
+/// Mathematical Functions, table 25.4 (from memory).
 const GAUSS: [(f64, f64); 5] = [
     (0.148_874_338_981_631_22, 0.295_524_224_714_752_87),
     (0.433_395_394_129_247_2, 0.269_266_719_309_996_35),

@@ -121,8 +121,8 @@ fn arcs_of_any_angle_add_up() {
     }
 }
 
-/// Sectors of more than half a disc, r^2 times half their angle, wherever they begin: the arc passes
-/// the top and the bottom of its circle in either order.
+/// Sectors of more than half a disc, r^2 times half their angle, wherever they begin: the arc
+/// passes the top and the bottom of its circle in either order.
 #[test]
 fn great_sectors_overlap_as_they_should() {
     let degrees = [
@@ -176,7 +176,8 @@ fn flat_and_closed_forms_agree() {
     }
 }
 
-/// A very flat arc over a chord of 2 h is a parabola of the rise s = h^2/(2 r), to the order (h/r)^2.
+/// A very flat arc over a chord of 2 h is a parabola of the rise s = h^2/(2 r), to the order
+/// (h/r)^2.
 #[test]
 fn a_very_flat_arc_keeps_its_digits() {
     let (h, r) = (0.05_f64, 5000.0_f64);

@@ -1,8 +1,8 @@
 //! Polygons with holes against exact rationals.
 //!
-//! The expected values were worked out by a separate script in exact fractions: sums over the edges of
-//! (y_i z_j - y_j z_i) times the known polynomials, holes subtracted, moved to the centroid. They
-//! stand here as numerator and denominator, in mm.
+//! The expected values were worked out by a separate script in exact fractions: sums over the edges
+//! of (y_i z_j - y_j z_i) times the known polynomials, holes subtracted, moved to the centroid.
+//! They stand here as numerator and denominator, in mm.
 
 use super::*;
 

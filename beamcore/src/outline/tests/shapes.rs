@@ -223,8 +223,8 @@ fn impossible_sizes_are_told() {
         (
             disc(Length::from_m(1e90)),
             &[
-                "o.disc: found a size of 1e90 m by 1e90 m; expected sizes with which area and second \
-               moments are ordinary numbers greater than zero",
+                "o.disc: found a size of 1e90 m by 1e90 m; expected sizes with which area and \
+               second moments are ordinary numbers greater than zero",
             ],
         ),
     ];
