@@ -1,6 +1,6 @@
 //! Supports and actions of a job in words, as they were written.
 
-use super::document::{StrengthDocument, SupportDocument, SupportKindDocument};
+use super::document::{SupportDocument, SupportKindDocument};
 use super::document_action::{ActionDocument, ActionKindDocument, LoadDocument};
 
 impl SupportDocument {
@@ -86,25 +86,6 @@ impl LoadDocument {
             }
             Self::Point { load, at } => format!("{} at {}", load.text(), at.text()),
             Self::Couple { couple, at } => format!("couple {} at {}", couple.text(), at.text()),
-        }
-    }
-}
-
-impl StrengthDocument {
-    /// For example `yield 275 MPa`.
-    pub(crate) fn described(&self) -> String {
-        match self {
-            Self::Timber {
-                bending,
-                tension,
-                compression,
-            } => format!(
-                "bending {}, tension {}, compression {}",
-                bending.text(),
-                tension.text(),
-                compression.text()
-            ),
-            Self::Metal { yield_stress } => format!("yield {}", yield_stress.text()),
         }
     }
 }

@@ -2,8 +2,9 @@
 
 use super::document_action::{ActionDocument, CombinationDocument, PartialFactorsDocument};
 use super::document_camber::{CamberDocument, LimitDocument};
+use super::document_material::MaterialDocument;
 use super::written::Written;
-use crate::units::{Density, Duration, Length, Modulus, Stress};
+use crate::units::Length;
 use schemars::JsonSchema;
 use serde::{Deserialize, Serialize};
 use std::collections::BTreeMap;
@@ -41,86 +42,6 @@ pub(crate) struct JobDocument {
     /// The camber to be worked out, if any.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(crate) camber: Option<CamberDocument>,
-}
-
-/// A material: by strength class (`timber`, `steel` or `concrete`) or by its values (`modulus`).
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(crate) struct MaterialDocument {
-    /// A strength class of timber, for example "C24".
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(crate) timber: Option<String>,
-    /// A strength class of steel, for example "S275".
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(crate) steel: Option<String>,
-    /// A strength class of concrete, for example "C30/37".
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(crate) concrete: Option<String>,
-    /// The modulus of elasticity of a material given by its values.
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(crate) modulus: Option<Written<Modulus>>,
-    /// The service class of timber: 1, 2 or 3.
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(crate) service_class: Option<i64>,
-    /// The creep factor: k_def, phi, or 0 for what does not creep.
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(crate) creep_factor: Option<f64>,
-    /// What the creep of concrete depends on, by EN 1992-1-1 Annex B.
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(crate) concrete_creep: Option<ConcreteCreepDocument>,
-    /// The mean density, for the self-weight.
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(crate) density: Option<Written<Density>>,
-    /// The design strengths.
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(crate) design_strength: Option<StrengthDocument>,
-}
-
-/// What the creep of concrete depends on.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(crate) struct ConcreteCreepDocument {
-    /// The mean compressive strength at 28 days.
-    pub(crate) mean_strength: Written<Stress>,
-    /// The relative humidity in percent.
-    pub(crate) relative_humidity_percent: f64,
-    /// The notional size 2 A/u.
-    pub(crate) notional_size: Written<Length>,
-    /// The age at which the load comes on.
-    pub(crate) age_at_loading: Written<Duration>,
-    /// The age at the end of the life.
-    pub(crate) age_at_end: Written<Duration>,
-    /// The hardening class of the cement.
-    pub(crate) cement: CementDocument,
-}
-
-/// The hardening class of a cement.
-#[derive(Clone, Copy, Debug, PartialEq, Eq, Serialize, Deserialize, JsonSchema)]
-pub(crate) enum CementDocument {
-    S,
-    N,
-    R,
-}
-
-/// Design strengths and the rule by which stresses are compared to them.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(rename_all = "snake_case", deny_unknown_fields)]
-pub(crate) enum StrengthDocument {
-    /// Design strengths of timber.
-    Timber {
-        /// The design bending strength.
-        bending: Written<Stress>,
-        /// The design tension strength along the grain.
-        tension: Written<Stress>,
-        /// The design compression strength along the grain.
-        compression: Written<Stress>,
-    },
-    /// The design strength of a metal.
-    Metal {
-        /// The design yield strength.
-        #[serde(rename = "yield")]
-        yield_stress: Written<Stress>,
-    },
 }
 
 /// The section.

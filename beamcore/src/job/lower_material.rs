@@ -1,9 +1,15 @@
 //! Materials of the document: by strength class or by values, never half of each.
 
-use super::document::{CementDocument, ConcreteCreepDocument, MaterialDocument, StrengthDocument};
+use super::document_material::{
+    CementDocument, CharacteristicDocument, ConcreteCreepDocument, FactorsDocument,
+    MaterialDocument, StrengthDocument,
+};
 use crate::error::{ErrorKind, Problem};
 use crate::material::concrete::{Cement, ConcreteCreep};
-use crate::material::{self, Creep, DesignStrength, Material, ServiceClass};
+use crate::material::{
+    self, CharacteristicStrength, Creep, DesignFactors, DesignStrength, Material, MetalStrength,
+    ServiceClass, TimberFactors, TimberStrength,
+};
 use crate::path;
 use std::collections::BTreeMap;
 
@@ -37,18 +43,19 @@ struct Lowering<'a> {
 impl Lowering<'_> {
     fn material(mut self) -> Option<Material> {
         let document = self.document;
-        let given = [
+        let classes = [
             ("timber", document.timber.is_some()),
             ("steel", document.steel.is_some()),
+            ("aluminium", document.aluminium.is_some()),
             ("concrete", document.concrete.is_some()),
-            ("modulus", document.modulus.is_some()),
         ];
-        let given: Vec<_> = given.iter().filter(|g| g.1).map(|g| g.0).collect();
+        let given: Vec<_> = classes.iter().filter(|g| g.1).map(|g| g.0).collect();
         let material = match given.as_slice() {
             ["timber"] => self.timber(),
             ["steel"] => self.steel(),
+            ["aluminium"] => self.aluminium(),
             ["concrete"] => self.concrete(),
-            ["modulus"] => self.own(),
+            [] if document.modulus.is_some() => self.own(),
             other => {
                 let found = if other.is_empty() {
                     "none".into()
@@ -58,25 +65,57 @@ impl Lowering<'_> {
                 self.problem(
                     ErrorKind::Missing,
                     "",
-                    format!("{found} of the keys timber, steel, concrete, modulus"),
-                    "exactly one of them",
+                    format!("{found} of the keys timber, steel, aluminium, concrete, modulus"),
+                    "one strength class, or a modulus",
                 );
                 return None;
             }
         }?;
         let material = material.named(self.name);
-        let material = match &document.density {
-            Some(density) => material.density(density.value()?),
-            None => material,
+        // Beside a class, the modulus and the creep factor override those of the class.
+        let is_class = !given.is_empty();
+        let material = match &document.modulus {
+            Some(modulus) if is_class => material.modulus_override(modulus.value()?),
+            _ => material,
         };
-        Some(match &document.design_strength {
-            Some(strength) => material.design_strength(self.strength(strength)?),
-            None => material,
-        })
+        let material = match document.creep_factor {
+            Some(factor) if is_class && document.concrete.is_none() => {
+                material.creep_override(Creep::factor(factor))
+            }
+            _ => material,
+        };
+        self.values(material)
+    }
+
+    /// The values that may stand beside any kind of material.
+    fn values(&self, mut material: Material) -> Option<Material> {
+        let document = self.document;
+        if let Some(density) = &document.density {
+            material = material.density(density.value()?);
+        }
+        if let Some(modulus) = &document.shear_modulus {
+            material = material.shear_modulus(modulus.value()?);
+        }
+        if let Some(ratio) = document.poisson_ratio {
+            material = material.poisson_ratio(ratio);
+        }
+        if let Some(expansion) = &document.thermal_expansion {
+            material = material.thermal_expansion(expansion.value()?);
+        }
+        if let Some(strength) = &document.characteristic_strength {
+            material = material.characteristic_strength(characteristic(strength)?);
+        }
+        if let Some(factors) = &document.design_factors {
+            material = material.design_factors(self::factors(factors));
+        }
+        if let Some(strength) = &document.design_strength {
+            material = material.design_strength(design(strength)?);
+        }
+        Some(material)
     }
 
     fn timber(&mut self) -> Option<Material> {
-        self.only("timber", &["service_class", "density"]);
+        self.only("timber", &["service_class"]);
         let Some(number) = self.document.service_class else {
             self.problem(
                 ErrorKind::Missing,
@@ -95,13 +134,35 @@ impl Lowering<'_> {
     }
 
     fn steel(&mut self) -> Option<Material> {
-        self.only("steel", &["density"]);
+        self.only("steel", &["thickness"]);
         let class = self.document.steel.as_deref()?;
-        self.tried("steel", material::steel(class))
+        match &self.document.thickness {
+            None => self.tried("steel", material::steel(class)),
+            Some(thickness) => {
+                let thickness = thickness.value()?;
+                self.tried("steel", material::steel_of_thickness(class, thickness))
+            }
+        }
+    }
+
+    fn aluminium(&mut self) -> Option<Material> {
+        self.only("aluminium", &["thickness"]);
+        let class = self.document.aluminium.as_deref()?;
+        let Some(thickness) = &self.document.thickness else {
+            self.problem(
+                ErrorKind::Missing,
+                "thickness",
+                "no thickness",
+                "the thickness, on which the strength of aluminium depends",
+            );
+            return None;
+        };
+        let thickness = thickness.value()?;
+        self.tried("aluminium", material::aluminium(class, thickness))
     }
 
     fn concrete(&mut self) -> Option<Material> {
-        self.only("concrete", &["creep_factor", "concrete_creep", "density"]);
+        self.only("concrete", &["concrete_creep"]);
         let class = self.document.concrete.as_deref()?;
         let creep = match (self.document.creep_factor, &self.document.concrete_creep) {
             (Some(factor), None) => Some(Creep::factor(factor)),
@@ -123,7 +184,7 @@ impl Lowering<'_> {
     }
 
     fn own(&mut self) -> Option<Material> {
-        self.only("modulus", &["creep_factor", "density"]);
+        self.only("modulus", &[]);
         let Some(factor) = self.document.creep_factor else {
             self.problem(
                 ErrorKind::Missing,
@@ -162,31 +223,13 @@ impl Lowering<'_> {
         }
     }
 
-    fn strength(&mut self, strength: &StrengthDocument) -> Option<DesignStrength> {
-        Some(match strength {
-            StrengthDocument::Timber {
-                bending,
-                tension,
-                compression,
-            } => DesignStrength::Timber {
-                bending: bending.value()?,
-                tension: tension.value()?,
-                compression: compression.value()?,
-            },
-            StrengthDocument::Metal { yield_stress } => DesignStrength::Metal {
-                yield_stress: yield_stress.value()?,
-            },
-        })
-    }
-
     /// A problem for each key that has no meaning beside the one that says what the material is.
     fn only(&mut self, kind: &str, allowed: &[&str]) {
         let document = self.document;
         let given = [
             ("service_class", document.service_class.is_some()),
-            ("creep_factor", document.creep_factor.is_some()),
             ("concrete_creep", document.concrete_creep.is_some()),
-            ("density", document.density.is_some()),
+            ("thickness", document.thickness.is_some()),
         ];
         for (key, _) in given
             .iter()
@@ -196,7 +239,10 @@ impl Lowering<'_> {
                 ErrorKind::Key,
                 key,
                 format!("the key {key}, which has no meaning beside {kind}"),
-                format!("beside {kind} only {}, design_strength", allowed.join(", ")),
+                match allowed {
+                    [] => format!("only what belongs to a material by its {kind}"),
+                    allowed => format!("beside {kind}, {}", allowed.join(", ")),
+                },
             );
         }
     }
@@ -228,4 +274,56 @@ impl Lowering<'_> {
         };
         self.problems.push(Problem::new(kind, at, found, expected));
     }
+}
+
+fn characteristic(strength: &CharacteristicDocument) -> Option<CharacteristicStrength> {
+    Some(match strength {
+        CharacteristicDocument::Timber {
+            bending,
+            tension,
+            compression,
+            shear,
+        } => CharacteristicStrength::Timber(TimberStrength::new(
+            bending.value()?,
+            tension.value()?,
+            compression.value()?,
+            shear.value()?,
+        )),
+        CharacteristicDocument::Metal { yield_stress } => {
+            CharacteristicStrength::Metal(MetalStrength::new(yield_stress.value()?))
+        }
+    })
+}
+
+fn factors(factors: &FactorsDocument) -> DesignFactors {
+    match *factors {
+        FactorsDocument::Timber {
+            k_mod,
+            gamma_m,
+            k_h,
+            k_sys,
+        } => {
+            let factors = TimberFactors::new(k_mod, gamma_m);
+            let factors = k_h.map_or(factors, |k_h| factors.size(k_h));
+            DesignFactors::Timber(k_sys.map_or(factors, |k_sys| factors.sharing(k_sys)))
+        }
+        FactorsDocument::Metal { gamma_m } => DesignFactors::metal(gamma_m),
+    }
+}
+
+fn design(strength: &StrengthDocument) -> Option<DesignStrength> {
+    Some(match strength {
+        StrengthDocument::Timber {
+            bending,
+            tension,
+            compression,
+        } => DesignStrength::Timber {
+            bending: bending.value()?,
+            tension: tension.value()?,
+            compression: compression.value()?,
+        },
+        StrengthDocument::Metal { yield_stress } => DesignStrength::Metal {
+            yield_stress: yield_stress.value()?,
+        },
+    })
 }

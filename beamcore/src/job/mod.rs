@@ -38,6 +38,7 @@ mod described;
 mod document;
 mod document_action;
 mod document_camber;
+mod document_material;
 mod lower;
 mod lower_action;
 mod lower_camber;

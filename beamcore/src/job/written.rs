@@ -3,6 +3,7 @@
 use crate::error::Problem;
 use crate::units::{
     AreaLoad, Density, Duration, Force, Length, LineLoad, Modulus, Moment, Quantity, Stress,
+    ThermalExpansion,
 };
 use schemars::{JsonSchema, Schema, SchemaGenerator};
 use serde::{Deserialize, Serialize};
@@ -70,6 +71,7 @@ pub(super) fn problem(name: &str, text: &str, path: &str) -> Option<Problem> {
         (Modulus::NAME, of::<Modulus>),
         (Density::NAME, of::<Density>),
         (Duration::NAME, of::<Duration>),
+        (ThermalExpansion::NAME, of::<ThermalExpansion>),
     ]
     .into_iter()
     .find_map(|(type_name, check)| (type_name == name).then_some(check));

@@ -8,6 +8,7 @@ mod layout;
 mod load;
 mod load_case;
 mod plan;
+mod plausible;
 mod span;
 mod support;
 
@@ -108,7 +109,11 @@ impl Member {
             spans,
             combinations,
             states: [initial?, end?],
-            notes: layout.notes(),
+            notes: layout
+                .notes()
+                .into_iter()
+                .chain(plausible::notes(&plan))
+                .collect(),
             plan,
         };
         Ok(Self {
@@ -173,7 +178,8 @@ impl Member {
             })
     }
 
-    /// What was noticed while the member was laid out: for example stations that were merged.
+    /// What was noticed while the member was laid out: stations that were merged, values far out
+    /// of the usual range.
     #[must_use]
     pub fn notes(&self) -> &[String] {
         &self.data.notes

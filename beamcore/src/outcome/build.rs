@@ -3,14 +3,14 @@
 use super::document::{
     AccuracyOutcome, CombinationOutcome, FactorOutcome, FibreOutcome, MaterialOutcome,
     MemberOutcome, OutcomeDocument, PartOutcome, PartStiffnessOutcome, ReactionOutcome,
-    ResultsOutcome, SectionOutcome, StiffnessOutcome, StressOutcome, TransformedOutcome,
-    TransformedPartOutcome, TransformedStateOutcome, UtilisationOutcome,
+    ResultsOutcome, SectionOutcome, StiffnessOutcome, StrengthOutcome, StressOutcome,
+    TransformedOutcome, TransformedPartOutcome, TransformedStateOutcome, UtilisationOutcome,
 };
 use super::document_deflection::{SpanDeflectionOutcome, SpanOutcome};
 use super::{build_deflection, notes};
 use crate::error::Result;
 use crate::job::Job;
-use crate::material::Material;
+use crate::material::{DesignStrength, Material};
 use crate::member::{Combination, Member, Span};
 use crate::response::Response;
 use crate::section::{PlacedPart, Section};
@@ -93,11 +93,32 @@ fn materials(section: &Section) -> Vec<MaterialOutcome> {
         modulus_Pa: material.modulus().to_Pa(),
         creep_factor: material.creep().value(),
         creep_basis: material.creep().basis().into(),
+        shear_modulus_Pa: material.mean_shear_modulus().map(|modulus| modulus.to_Pa()),
+        thermal_expansion_per_K: material.expansion().map(|alpha| alpha.to_per_K()),
+        design_strength: material.strength().map(strength),
+        overrides: material.overrides().to_vec(),
         density_kg_per_m3: material
             .mean_density()
             .map(|density| density.to_kg_per_m3()),
     };
     distinct(section).into_iter().map(outcome).collect()
+}
+
+fn strength(strength: &DesignStrength) -> StrengthOutcome {
+    match *strength {
+        DesignStrength::Timber {
+            bending,
+            tension,
+            compression,
+        } => StrengthOutcome::Timber {
+            bending_Pa: bending.to_Pa(),
+            tension_Pa: tension.to_Pa(),
+            compression_Pa: compression.to_Pa(),
+        },
+        DesignStrength::Metal { yield_stress } => StrengthOutcome::Metal {
+            yield_Pa: yield_stress.to_Pa(),
+        },
+    }
 }
 
 fn section(member: &Member) -> Result<SectionOutcome> {

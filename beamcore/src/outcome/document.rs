@@ -62,7 +62,31 @@ pub(super) struct MaterialOutcome {
     /// Where the creep factor comes from.
     pub(super) creep_basis: String,
     #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(super) shear_modulus_Pa: Option<f64>,
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(super) thermal_expansion_per_K: Option<f64>,
+    /// The design strengths with which stresses were compared.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(super) design_strength: Option<StrengthOutcome>,
+    /// The values of the class that were overridden.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(super) overrides: Vec<String>,
+    #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(super) density_kg_per_m3: Option<f64>,
+}
+
+/// Design strengths.
+#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
+#[serde(rename_all = "snake_case", deny_unknown_fields)]
+pub(super) enum StrengthOutcome {
+    Timber {
+        bending_Pa: f64,
+        tension_Pa: f64,
+        compression_Pa: f64,
+    },
+    Metal {
+        yield_Pa: f64,
+    },
 }
 
 /// The section with its stiffness at both times.

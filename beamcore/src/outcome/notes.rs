@@ -142,6 +142,11 @@ pub(super) fn warnings(member: &Member, document: &OutcomeDocument) -> Vec<Strin
             ));
         }
     }
+    for material in distinct(member.section()) {
+        for text in material.overrides() {
+            notes.push(format!("Overridden in \"{}\": {text}", material.name()));
+        }
+    }
     notes.extend(member.section().notes().iter().cloned());
     notes.extend(member.notes().iter().cloned());
     notes

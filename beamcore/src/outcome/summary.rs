@@ -1,6 +1,11 @@
 //! The outcome as a plain text of 80 columns, the governing results first.
 
-use super::document::{OutcomeDocument, ResultsOutcome};
+#![allow(
+    non_snake_case,
+    reason = "the units in the names keep their case: N is not n"
+)]
+
+use super::document::{OutcomeDocument, ResultsOutcome, StrengthOutcome};
 use super::figure::figure;
 use super::notes::each;
 use super::page::Page;
@@ -182,15 +187,30 @@ fn stresses(page: &mut Page, outcome: &OutcomeDocument) {
     }
 }
 
-/// The design strengths that the stresses were compared with, as they were given.
+/// The design strengths that the stresses were compared with.
 fn strengths(page: &mut Page, outcome: &OutcomeDocument) {
-    for (name, material) in &outcome.job.materials {
-        if let Some(strength) = &material.design_strength {
-            page.line(&format!(
-                "Design strength of \"{name}\": {}",
-                strength.described()
-            ));
-        }
+    for material in &outcome.materials {
+        let Some(strength) = &material.design_strength else {
+            continue;
+        };
+        let mpa = |value: f64| figure(value / 1e6, 2);
+        let values = match strength {
+            StrengthOutcome::Timber {
+                bending_Pa,
+                tension_Pa,
+                compression_Pa,
+            } => format!(
+                "bending {}, tension {}, compression {}",
+                mpa(*bending_Pa),
+                mpa(*tension_Pa),
+                mpa(*compression_Pa)
+            ),
+            StrengthOutcome::Metal { yield_Pa } => format!("yield {}", mpa(*yield_Pa)),
+        };
+        page.line(&format!(
+            "Design strength of \"{}\": {values} N/mm2",
+            material.name
+        ));
     }
 }
 
