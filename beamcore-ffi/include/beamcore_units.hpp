@@ -276,6 +276,48 @@ private:
     double si_;
 };
 
+// Area load: one double in the SI unit N/m2.
+class AreaLoad {
+public:
+    static constexpr AreaLoad from_si(double si) { return AreaLoad(si); }
+    constexpr double si() const { return si_; }
+
+    // The unit N/m2.
+    static constexpr AreaLoad from_N_per_m2(double x) { return AreaLoad(x * 1.0 / 1.0); }
+    constexpr double to_N_per_m2() const { return si_ * 1.0 / 1.0; }
+
+    // The unit kN/m2.
+    static constexpr AreaLoad from_kN_per_m2(double x) { return AreaLoad(x * 1000.0 / 1.0); }
+    constexpr double to_kN_per_m2() const { return si_ * 1.0 / 1000.0; }
+
+    // The unit psf.
+    static constexpr AreaLoad from_psf(double x) { return AreaLoad(x * 8896443230521.0 / 185806080000.0); }
+    constexpr double to_psf() const { return si_ * 185806080000.0 / 8896443230521.0; }
+
+    // The unit lbf/ft2.
+    static constexpr AreaLoad from_lbf_per_ft2(double x) { return AreaLoad(x * 8896443230521.0 / 185806080000.0); }
+    constexpr double to_lbf_per_ft2() const { return si_ * 185806080000.0 / 8896443230521.0; }
+
+    friend constexpr bool operator==(AreaLoad a, AreaLoad b) { return a.si_ == b.si_; }
+    friend constexpr bool operator!=(AreaLoad a, AreaLoad b) { return a.si_ != b.si_; }
+    friend constexpr bool operator<(AreaLoad a, AreaLoad b) { return a.si_ < b.si_; }
+    friend constexpr bool operator<=(AreaLoad a, AreaLoad b) { return a.si_ <= b.si_; }
+    friend constexpr bool operator>(AreaLoad a, AreaLoad b) { return a.si_ > b.si_; }
+    friend constexpr bool operator>=(AreaLoad a, AreaLoad b) { return a.si_ >= b.si_; }
+
+    friend constexpr AreaLoad operator+(AreaLoad a, AreaLoad b) { return AreaLoad(a.si_ + b.si_); }
+    friend constexpr AreaLoad operator-(AreaLoad a, AreaLoad b) { return AreaLoad(a.si_ - b.si_); }
+    friend constexpr AreaLoad operator-(AreaLoad a) { return AreaLoad(-a.si_); }
+    friend constexpr AreaLoad operator*(AreaLoad a, double x) { return AreaLoad(a.si_ * x); }
+    friend constexpr AreaLoad operator*(double x, AreaLoad a) { return AreaLoad(x * a.si_); }
+    friend constexpr AreaLoad operator/(AreaLoad a, double x) { return AreaLoad(a.si_ / x); }
+    friend constexpr double operator/(AreaLoad a, AreaLoad b) { return a.si_ / b.si_; }
+
+private:
+    explicit constexpr AreaLoad(double si) : si_(si) {}
+    double si_;
+};
+
 // Moment: one double in the SI unit N m.
 class Moment {
 public:
@@ -658,6 +700,36 @@ private:
     double si_;
 };
 
+// Thermal expansion: one double in the SI unit /K.
+class ThermalExpansion {
+public:
+    static constexpr ThermalExpansion from_si(double si) { return ThermalExpansion(si); }
+    constexpr double si() const { return si_; }
+
+    // The unit /K.
+    static constexpr ThermalExpansion from_per_K(double x) { return ThermalExpansion(x * 1.0 / 1.0); }
+    constexpr double to_per_K() const { return si_ * 1.0 / 1.0; }
+
+    friend constexpr bool operator==(ThermalExpansion a, ThermalExpansion b) { return a.si_ == b.si_; }
+    friend constexpr bool operator!=(ThermalExpansion a, ThermalExpansion b) { return a.si_ != b.si_; }
+    friend constexpr bool operator<(ThermalExpansion a, ThermalExpansion b) { return a.si_ < b.si_; }
+    friend constexpr bool operator<=(ThermalExpansion a, ThermalExpansion b) { return a.si_ <= b.si_; }
+    friend constexpr bool operator>(ThermalExpansion a, ThermalExpansion b) { return a.si_ > b.si_; }
+    friend constexpr bool operator>=(ThermalExpansion a, ThermalExpansion b) { return a.si_ >= b.si_; }
+
+    friend constexpr ThermalExpansion operator+(ThermalExpansion a, ThermalExpansion b) { return ThermalExpansion(a.si_ + b.si_); }
+    friend constexpr ThermalExpansion operator-(ThermalExpansion a, ThermalExpansion b) { return ThermalExpansion(a.si_ - b.si_); }
+    friend constexpr ThermalExpansion operator-(ThermalExpansion a) { return ThermalExpansion(-a.si_); }
+    friend constexpr ThermalExpansion operator*(ThermalExpansion a, double x) { return ThermalExpansion(a.si_ * x); }
+    friend constexpr ThermalExpansion operator*(double x, ThermalExpansion a) { return ThermalExpansion(x * a.si_); }
+    friend constexpr ThermalExpansion operator/(ThermalExpansion a, double x) { return ThermalExpansion(a.si_ / x); }
+    friend constexpr double operator/(ThermalExpansion a, ThermalExpansion b) { return a.si_ / b.si_; }
+
+private:
+    explicit constexpr ThermalExpansion(double si) : si_(si) {}
+    double si_;
+};
+
 // Mass: one double in the SI unit kg.
 class Mass {
 public:
@@ -791,6 +863,10 @@ constexpr Force operator*(LineLoad a, Length b) { return Force::from_si(a.si() *
 constexpr LineLoad operator/(Force a, Length b) { return LineLoad::from_si(a.si() / b.si()); }
 constexpr Force operator*(Length a, LineLoad b) { return Force::from_si(a.si() * b.si()); }
 constexpr Length operator/(Force a, LineLoad b) { return Length::from_si(a.si() / b.si()); }
+constexpr LineLoad operator*(AreaLoad a, Length b) { return LineLoad::from_si(a.si() * b.si()); }
+constexpr AreaLoad operator/(LineLoad a, Length b) { return AreaLoad::from_si(a.si() / b.si()); }
+constexpr LineLoad operator*(Length a, AreaLoad b) { return LineLoad::from_si(a.si() * b.si()); }
+constexpr Length operator/(LineLoad a, AreaLoad b) { return Length::from_si(a.si() / b.si()); }
 constexpr Stress operator*(Modulus a, Strain b) { return Stress::from_si(a.si() * b.si()); }
 constexpr Modulus operator/(Stress a, Strain b) { return Modulus::from_si(a.si() / b.si()); }
 constexpr Stress operator*(Strain a, Modulus b) { return Stress::from_si(a.si() * b.si()); }
@@ -888,6 +964,14 @@ constexpr LineLoad operator""_lbf_per_ft(long double x) { return LineLoad::from_
 constexpr LineLoad operator""_lbf_per_ft(unsigned long long x) { return LineLoad::from_lbf_per_ft(static_cast<double>(x)); }
 constexpr LineLoad operator""_kip_per_ft(long double x) { return LineLoad::from_kip_per_ft(static_cast<double>(x)); }
 constexpr LineLoad operator""_kip_per_ft(unsigned long long x) { return LineLoad::from_kip_per_ft(static_cast<double>(x)); }
+constexpr AreaLoad operator""_N_per_m2(long double x) { return AreaLoad::from_N_per_m2(static_cast<double>(x)); }
+constexpr AreaLoad operator""_N_per_m2(unsigned long long x) { return AreaLoad::from_N_per_m2(static_cast<double>(x)); }
+constexpr AreaLoad operator""_kN_per_m2(long double x) { return AreaLoad::from_kN_per_m2(static_cast<double>(x)); }
+constexpr AreaLoad operator""_kN_per_m2(unsigned long long x) { return AreaLoad::from_kN_per_m2(static_cast<double>(x)); }
+constexpr AreaLoad operator""_psf(long double x) { return AreaLoad::from_psf(static_cast<double>(x)); }
+constexpr AreaLoad operator""_psf(unsigned long long x) { return AreaLoad::from_psf(static_cast<double>(x)); }
+constexpr AreaLoad operator""_lbf_per_ft2(long double x) { return AreaLoad::from_lbf_per_ft2(static_cast<double>(x)); }
+constexpr AreaLoad operator""_lbf_per_ft2(unsigned long long x) { return AreaLoad::from_lbf_per_ft2(static_cast<double>(x)); }
 constexpr Moment operator""_N_m(long double x) { return Moment::from_N_m(static_cast<double>(x)); }
 constexpr Moment operator""_N_m(unsigned long long x) { return Moment::from_N_m(static_cast<double>(x)); }
 constexpr Moment operator""_kN_m(long double x) { return Moment::from_kN_m(static_cast<double>(x)); }
@@ -942,6 +1026,8 @@ constexpr Angle operator""_mrad(long double x) { return Angle::from_mrad(static_
 constexpr Angle operator""_mrad(unsigned long long x) { return Angle::from_mrad(static_cast<double>(x)); }
 constexpr Angle operator""_deg(long double x) { return Angle::from_deg(static_cast<double>(x)); }
 constexpr Angle operator""_deg(unsigned long long x) { return Angle::from_deg(static_cast<double>(x)); }
+constexpr ThermalExpansion operator""_per_K(long double x) { return ThermalExpansion::from_per_K(static_cast<double>(x)); }
+constexpr ThermalExpansion operator""_per_K(unsigned long long x) { return ThermalExpansion::from_per_K(static_cast<double>(x)); }
 constexpr Mass operator""_kg(long double x) { return Mass::from_kg(static_cast<double>(x)); }
 constexpr Mass operator""_kg(unsigned long long x) { return Mass::from_kg(static_cast<double>(x)); }
 constexpr Mass operator""_t(long double x) { return Mass::from_t(static_cast<double>(x)); }
