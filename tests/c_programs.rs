@@ -150,6 +150,8 @@ fn the_test_programs_in_c_pass() {
     for name in [
         "sections",
         "members",
+        "plans",
+        "limits",
         "documents",
         "errors",
         "misuse",

@@ -18,9 +18,10 @@
  *
  * BAD ARGUMENTS. NULL where a pointer is needed, text that is not UTF-8, NaN, infinity, counts
  * below zero and unknown constants are answered with a status. Choices are int32_t constants
- * (BC_TIME_...); they start at 1, so that a forgotten 0 is an error. An empty list (count 0, its
- * pointer may then be NULL) is judged as what it means: a member without supports is
- * BC_ERROR_MISSING.
+ * (BC_TIME_...); they start at 1, so that a forgotten 0 is an error. A yes or no (is_...) is 1 or
+ * 0. An empty list (count 0, its pointer may then be NULL) is judged as what it means: a member
+ * without supports is BC_ERROR_MISSING. The only handle that may be NULL is a camber where a
+ * function says so.
  *
  * OWNERSHIP. A handle (bc_part * and its like) that a function gives out is the caller's, who frees
  * it once with the free function of its type; freeing NULL does nothing. Handles never change:
@@ -37,12 +38,12 @@
  * as it is). To ask for the length, pass NULL with capacity 0.
  *
  * UNITS. All numbers are SI; the unit stands at the end of a parameter's name: width_m, load_N,
- * load_N_per_m, modulus_Pa, moment_Nm, stiffness_Nm2, second_moment_m4, age_s.
+ * load_N_per_m, load_N_per_m2, modulus_Pa, moment_Nm, stiffness_Nm2, second_moment_m4, age_s.
  *
  * SIGNS. x runs left to right, z up; a section is drawn as seen against x, with y to the right.
- * Deflection and loads are positive downward, the slope is dw/dx, the shear force V = dM/dx, a
- * positive (sagging) moment stretches the bottom, tension is positive, forces of supports are
- * positive upward.
+ * Deflection and loads are positive downward, couples clockwise, the slope is dw/dx, the shear
+ * force V = dM/dx, a positive (sagging) moment stretches the bottom, tension is positive, forces of
+ * supports, cambers and readings are positive upward.
  *
  * PANICS. A fault inside the library is caught and reported as BC_ERROR_PANIC; the caller is never
  * aborted by it.
@@ -217,14 +218,108 @@
 // Format of a document: JSON, for documents that are written by programs.
 #define BC_FORMAT_JSON 2
 
+// Category A: homes.
+#define BC_CATEGORY_DOMESTIC 1
+
+// Category B: offices.
+#define BC_CATEGORY_OFFICE 2
+
+// Category C: where people gather.
+#define BC_CATEGORY_CONGREGATION 3
+
+// Category D: shops.
+#define BC_CATEGORY_SHOPPING 4
+
+// Category E: storage.
+#define BC_CATEGORY_STORAGE 5
+
+// Category F: traffic of vehicles up to 30 kN.
+#define BC_CATEGORY_LIGHT_TRAFFIC 6
+
+// Category G: traffic of vehicles from 30 kN to 160 kN.
+#define BC_CATEGORY_HEAVY_TRAFFIC 7
+
+// Category H: roofs that are only walked on for upkeep.
+#define BC_CATEGORY_ROOF 8
+
+// Category: snow at 1000 m above the sea or lower.
+#define BC_CATEGORY_SNOW 9
+
+// Category: snow above 1000 m, and everywhere in Finland, Iceland, Norway, Sweden.
+#define BC_CATEGORY_SNOW_HIGH 10
+
+// Category: wind.
+#define BC_CATEGORY_WIND 11
+
+// Category: temperature, not fire.
+#define BC_CATEGORY_TEMPERATURE 12
+
+// Combination: permanent actions only.
+#define BC_COMBINATION_PERMANENT 1
+
+// Combination: quasi-permanent, EN 1990:2002 eq. 6.16b.
+#define BC_COMBINATION_QUASI_PERMANENT 2
+
+// Combination: characteristic, EN 1990:2002 eq. 6.14b.
+#define BC_COMBINATION_CHARACTERISTIC 3
+
+// Combination: frequent, EN 1990:2002 eq. 6.15b.
+#define BC_COMBINATION_FREQUENT 4
+
+// Combination: fundamental, EN 1990:2002 eq. 6.10; design strengths are compared under it.
+#define BC_COMBINATION_FUNDAMENTAL 5
+
+// Combination of one's own that looks at deflections.
+#define BC_COMBINATION_OWN 6
+
+// Combination of one's own under which design strengths are compared.
+#define BC_COMBINATION_OWN_ULTIMATE 7
+
+// Component of the deflection, w_inst: characteristic combination, initial.
+#define BC_COMPONENT_INSTANT 1
+
+// Component of the deflection, w_1: permanent actions, initial.
+#define BC_COMPONENT_PERMANENT 2
+
+// Component of the deflection, w_2: what creep adds under permanent actions only.
+#define BC_COMPONENT_CREEP 3
+
+// Component of the deflection, w_3: what variable actions add, with the creep under their
+// quasi-permanent part.
+#define BC_COMPONENT_VARIABLE 4
+
+// Component of the deflection, w_tot = w_1 + w_2 + w_3.
+#define BC_COMPONENT_TOTAL 5
+
+// Component of the deflection, w_max = w_tot - w_c: what is left after the camber w_c.
+#define BC_COMPONENT_REMAINING 6
+
+// Shape of a camber: a parabola with the rise of the deflection line at the middle of the chord.
+#define BC_SHAPE_PARABOLA 1
+
+// Shape of a camber: the mirror image of the deflection line, scaled to the rounded rise.
+#define BC_SHAPE_MIRROR 2
+
+// Shape of a camber: a circular arc with the rise of the deflection line at the middle.
+#define BC_SHAPE_ARC_THROUGH_MIDDLE 3
+
+// Shape of a camber: the circular arc whose greatest gap to the deflection line is least.
+#define BC_SHAPE_ARC_LEAST_GAP 4
+
 // An action: loads that act together, from one cause.
 typedef struct bc_action bc_action;
 
 // A camber: a rise over a chord between two supports, with its ordinates.
 typedef struct bc_camber bc_camber;
 
+// Checks: limits compared with the results of a member.
+typedef struct bc_checks bc_checks;
+
 // A job: all inputs of a calculation as one document, read and found without fault.
 typedef struct bc_job bc_job;
+
+// A limit of a component of the deflection.
+typedef struct bc_limit bc_limit;
 
 // A material: elastic values, density, creep and design strengths of one stuff.
 typedef struct bc_material bc_material;
@@ -237,6 +332,12 @@ typedef struct bc_outcome bc_outcome;
 
 // A part: one piece of one material, with a name that addresses its results.
 typedef struct bc_part bc_part;
+
+// A plan of a member: everything given, nothing checked yet. bc_plan_check makes a member of it.
+typedef struct bc_plan bc_plan;
+
+// Readings: what a tape shows at the stations of a camber when the member is measured.
+typedef struct bc_readings bc_readings;
 
 // A response: the solved member.
 typedef struct bc_response bc_response;
@@ -472,6 +573,17 @@ int32_t bc_section_transformed_stress(const bc_section *section,
                                       double moment_Nm,
                                       double *stress_Pa_out);
 
+// The category (BC_CATEGORY_...) of a word of documents: "A" to "H", "snow", "snow_high", "wind"
+// or "temperature".
+int32_t bc_category_of_name(const char *name, int32_t *category_out);
+
+// The recommended combination factors of a category (BC_CATEGORY_...), EN 1990:2002 Table A1.1:
+// psi_0 beside another variable action, psi_1 frequent, psi_2 quasi-permanent.
+int32_t bc_category_factors(int32_t category,
+                            double *psi_0_out,
+                            double *psi_1_out,
+                            double *psi_2_out);
+
 // A permanent action, without loads yet.
 int32_t bc_action_permanent(const char *name, bc_action **action_out);
 
@@ -481,6 +593,14 @@ int32_t bc_action_variable(const char *name,
                            double psi_1,
                            double psi_2,
                            bc_action **action_out);
+
+// A variable action of a category (BC_CATEGORY_...), with the recommended combination factors of
+// the category, without loads yet.
+int32_t bc_action_variable_of_category(const char *name, int32_t category, bc_action **action_out);
+
+// The same action, known to relieve what is being checked: a permanent action gets its smaller
+// partial factor, a variable one is left out. Without this, an action is taken as unfavourable.
+int32_t bc_action_favourable(const bc_action *action, bc_action **action_out);
 
 // The same action with the weight of the section, over the whole member.
 int32_t bc_action_with_self_weight(const bc_action *action, bc_action **action_out);
@@ -503,6 +623,39 @@ int32_t bc_action_with_point(const bc_action *action,
                              double at_m,
                              bc_action **action_out);
 
+// The same action with a line load that changes linearly between two places, positive downward;
+// a triangular load where one of its ends is zero.
+int32_t bc_action_with_trapezoidal(const bc_action *action,
+                                   double load_from_N_per_m,
+                                   double load_to_N_per_m,
+                                   double from_m,
+                                   double to_m,
+                                   bc_action **action_out);
+
+// The same action with a load per area of floor or roof over the whole member, positive downward:
+// line load = load x tributary width.
+int32_t bc_action_with_area(const bc_action *action,
+                            double load_N_per_m2,
+                            double tributary_width_m,
+                            bc_action **action_out);
+
+// The same action with a load per area of floor or roof between two places, positive downward.
+int32_t bc_action_with_partial_area(const bc_action *action,
+                                    double load_N_per_m2,
+                                    double tributary_width_m,
+                                    double from_m,
+                                    double to_m,
+                                    bc_action **action_out);
+
+// The same action with a couple, positive clockwise with x to the right and z up.
+int32_t bc_action_with_couple(const bc_action *action,
+                              double couple_Nm,
+                              double at_m,
+                              bc_action **action_out);
+
+// Whether an action is favourable (1) or not (0).
+int32_t bc_action_is_favourable(const bc_action *action, int32_t *is_favourable_out);
+
 // The name of an action.
 int32_t bc_action_name(const bc_action *action,
                        char *buffer,
@@ -512,8 +665,51 @@ int32_t bc_action_name(const bc_action *action,
 // Frees an action; NULL is allowed.
 void bc_action_free(bc_action *action);
 
+// A plan of a member of the given length, without supports yet.
+int32_t bc_plan_of_length(const bc_section *section, double length_m, bc_plan **plan_out);
+
+// A plan of a member on two supports at its ends: a pin "left" and a roller "right".
+int32_t bc_plan_simple_span(const bc_section *section, double span_m, bc_plan **plan_out);
+
+// The same plan with one more support: a name, a kind (BC_SUPPORT_...) and a place from the left
+// end.
+int32_t bc_plan_with_support(const bc_plan *plan,
+                             const char *name,
+                             int32_t support_kind,
+                             double at_m,
+                             bc_plan **plan_out);
+
+// The same plan with one more action.
+int32_t bc_plan_with_action(const bc_plan *plan, const bc_action *action, bc_plan **plan_out);
+
+// The same plan with other partial factors for the fundamental combination than the recommended
+// ones: of permanent actions that are unfavourable and favourable, and of variable actions.
+int32_t bc_plan_with_partial_factors(const bc_plan *plan,
+                                     double permanent,
+                                     double permanent_favourable,
+                                     double variable,
+                                     bc_plan **plan_out);
+
+// The same plan with one more combination, of one's own: the names of actions and their factors
+// (two lists of one length; an action that is not named has the factor 0), and whether design
+// strengths are compared under it (1) or not (0).
+int32_t bc_plan_with_combination(const bc_plan *plan,
+                                 const char *name,
+                                 const char *const *action_names,
+                                 const double *factors,
+                                 int32_t factor_count,
+                                 int32_t is_ultimate,
+                                 bc_plan **plan_out);
+
+// Checks a plan and makes the member; all that is wrong is reported at once.
+int32_t bc_plan_check(const bc_plan *plan, bc_member **member_out);
+
+// Frees a plan; NULL is allowed.
+void bc_plan_free(bc_plan *plan);
+
 // A member of the given length. Each support has a name, a kind (BC_SUPPORT_...) and a place
 // from the left end; the three lists are of one length. All that is wrong is reported at once.
+// Partial factors and combinations of one's own need a plan (bc_plan_of_length).
 int32_t bc_member_new(const bc_section *section,
                       double length_m,
                       const char *const *support_names,
@@ -559,6 +755,30 @@ int32_t bc_member_note(const bc_member *member,
 
 // Frees a member; NULL is allowed.
 void bc_member_free(bc_member *member);
+
+// The kind (BC_COMBINATION_...) of a combination. Combinations are counted from 0.
+int32_t bc_member_combination_kind(const bc_member *member, int32_t index, int32_t *kind_out);
+
+// Whether design strengths are compared under a combination (1) or not (0).
+int32_t bc_member_combination_is_ultimate(const bc_member *member,
+                                          int32_t index,
+                                          int32_t *is_ultimate_out);
+
+// The number of actions of a member, which is the number of factors of each combination.
+int32_t bc_member_action_count(const bc_member *member, int32_t *count_out);
+
+// The factor of an action in a combination. Both are counted from 0, actions in the order given.
+int32_t bc_member_combination_factor(const bc_member *member,
+                                     int32_t index,
+                                     int32_t action_index,
+                                     double *factor_out);
+
+// The partial factors of the fundamental combination: of permanent actions that are unfavourable
+// and favourable, and of variable actions.
+int32_t bc_member_partial_factors(const bc_member *member,
+                                  double *permanent_out,
+                                  double *permanent_favourable_out,
+                                  double *variable_out);
 
 // An extreme (BC_EXTREME_...) of a field (BC_FIELD_...) and its place, found from the roots of
 // the field; the leftmost of equals. The value is in the SI unit of the field.
@@ -637,10 +857,73 @@ int32_t bc_response_utilisation(const bc_response *response,
                                 double *value_out,
                                 double *at_m_out);
 
-// The camber against the deflection of a combination at a time: fraction (1 is all of it) of the
-// deflection at the middle of the chord from one support to another, rounded (BC_ROUNDING_...)
-// to whole steps, with ordinates at the ends of equal divisions of the chord.
+// The number of spans of a member: between neighbouring supports, and the overhangs.
+int32_t bc_member_span_count(const bc_member *member, int32_t *count_out);
+
+// The name of a span, by which results are addressed: "A to B" between the supports A and B,
+// "before A" and "beyond B" for overhangs. Spans are counted from 0, from the left.
+int32_t bc_member_span_name(const bc_member *member,
+                            int32_t index,
+                            char *buffer,
+                            int64_t capacity,
+                            int64_t *length_out);
+
+// The ends of a span from the left end of the member, and whether one of them is free (1) or both
+// are supported (0).
+int32_t bc_member_span(const bc_member *member,
+                       const char *span,
+                       double *from_m_out,
+                       double *to_m_out,
+                       int32_t *is_cantilever_out);
+
+// An extreme (BC_EXTREME_...) of the deflection of one span, positive downward, and its place:
+// between two supports from the chord through them, of an overhang from its support.
+int32_t bc_response_span_extreme(const bc_response *response,
+                                 const char *combination,
+                                 int32_t time,
+                                 const char *span,
+                                 int32_t extreme,
+                                 double *value_m_out,
+                                 double *at_m_out);
+
+// The deflections of one span at count places, from the left end of the member.
+int32_t bc_response_span_values(const bc_response *response,
+                                const char *combination,
+                                int32_t time,
+                                const char *span,
+                                const double *x_m,
+                                int32_t count,
+                                double *values_m_out);
+
+// An extreme (BC_EXTREME_...) of a component (BC_COMPONENT_...) of the deflection of a span and
+// its place, under a characteristic combination or one of one's own; the camber counts for
+// BC_COMPONENT_REMAINING, and is NULL where there is none.
+int32_t bc_response_component_extreme(const bc_response *response,
+                                      int32_t component,
+                                      const char *combination,
+                                      const char *span,
+                                      const bc_camber *camber,
+                                      int32_t extreme,
+                                      double *value_m_out,
+                                      double *at_m_out);
+
+// The values of a component of the deflection of a span at count places, from the left end of the
+// member; parameters as for bc_response_component_extreme.
+int32_t bc_response_component_values(const bc_response *response,
+                                     int32_t component,
+                                     const char *combination,
+                                     const char *span,
+                                     const bc_camber *camber,
+                                     const double *x_m,
+                                     int32_t count,
+                                     double *values_m_out);
+
+// The camber of a shape (BC_SHAPE_...) against the deflection of a combination at a time: fraction
+// (1 is all of it) of the deflection over the chord from one support to another, its rise rounded
+// (BC_ROUNDING_...) to whole steps and made zero where it is less than least_m, with ordinates at
+// the ends of equal divisions of the chord.
 int32_t bc_camber_new(const bc_response *response,
+                      int32_t shape,
                       const char *combination,
                       int32_t time,
                       double fraction,
@@ -648,13 +931,22 @@ int32_t bc_camber_new(const bc_response *response,
                       const char *to_support,
                       double step_m,
                       int32_t rounding,
+                      double least_m,
                       int32_t divisions,
                       bc_camber **camber_out);
 
-// The deflection to be built in, before rounding.
+// The shape (BC_SHAPE_...) of a camber.
+int32_t bc_camber_shape(const bc_camber *camber, int32_t *shape_out);
+
+// The radius of an arc, negative where it hangs. For other shapes and for no rise, has_value_out
+// is 0 and the radius is left as it is.
+int32_t bc_camber_radius(const bc_camber *camber, int32_t *has_value_out, double *radius_m_out);
+
+// The rise before rounding: of the deflection at the middle of the chord, or of the best arc.
 int32_t bc_camber_target(const bc_camber *camber, double *target_m_out);
 
-// The rise at the middle of the chord, rounded; positive upward.
+// The rise at the middle of the chord, rounded; positive upward; zero where it would be less than
+// the least worth building.
 int32_t bc_camber_rise(const bc_camber *camber, double *rise_m_out);
 
 // The places of the chord's ends, from the left end of the member.
@@ -675,6 +967,110 @@ int32_t bc_camber_ordinate_at(const bc_camber *camber, double at_m, double *ordi
 
 // Frees a camber; NULL is allowed.
 void bc_camber_free(bc_camber *camber);
+
+// An extreme (BC_EXTREME_...) of the line that remains after a camber and its place: deflection
+// less camber, positive below the straight line.
+int32_t bc_response_remaining_extreme(const bc_response *response,
+                                      const char *combination,
+                                      int32_t time,
+                                      const bc_camber *camber,
+                                      int32_t extreme,
+                                      double *value_m_out,
+                                      double *at_m_out);
+
+// The heights of the line that remains after a camber at count places, positive below the
+// straight line.
+int32_t bc_response_remaining_values(const bc_response *response,
+                                     const char *combination,
+                                     int32_t time,
+                                     const bc_camber *camber,
+                                     const double *x_m,
+                                     int32_t count,
+                                     double *values_m_out);
+
+// The readings to expect at the stations of a camber, with the named parts there, lying and
+// standing on two trestles, whose places are given from the left end of the member.
+int32_t bc_response_readings(const bc_response *response,
+                             const bc_camber *camber,
+                             double left_trestle_m,
+                             double right_trestle_m,
+                             const char *const *part_names,
+                             int32_t part_count,
+                             bc_readings **readings_out);
+
+// The number of readings, one for each ordinate of the camber.
+int32_t bc_readings_count(const bc_readings *readings, int32_t *count_out);
+
+// A reading, from the chord through the ends of the design chord, positive upward: its distance
+// from the left end of the chord, the height with the member lying on its side, and the height
+// with the member standing on the trestles. Readings are counted from 0, from the left.
+int32_t bc_readings_reading(const bc_readings *readings,
+                            int32_t index,
+                            double *station_m_out,
+                            double *lying_m_out,
+                            double *standing_m_out);
+
+// Frees readings; NULL is allowed.
+void bc_readings_free(bc_readings *readings);
+
+// A limit of a component (BC_COMPONENT_...): the length of each span over a number, under every
+// characteristic combination. The length of an overhang is its own.
+int32_t bc_limit_span_over(int32_t component, double number, bc_limit **limit_out);
+
+// A limit of a component (BC_COMPONENT_...): a length, whatever the span, under every
+// characteristic combination.
+int32_t bc_limit_value(int32_t component, double value_m, bc_limit **limit_out);
+
+// The same limit for one span only.
+int32_t bc_limit_in_span(const bc_limit *limit, const char *span, bc_limit **limit_out);
+
+// The same limit under one combination only.
+int32_t bc_limit_under(const bc_limit *limit, const char *combination, bc_limit **limit_out);
+
+// Frees a limit; NULL is allowed.
+void bc_limit_free(bc_limit *limit);
+
+// Compares limits with the results, one check per limit and span, each under the combination that
+// uses it most. The camber counts for BC_COMPONENT_REMAINING, and is NULL where there is none.
+int32_t bc_response_check_limits(const bc_response *response,
+                                 const bc_limit *const *limits,
+                                 int32_t limit_count,
+                                 const bc_camber *camber,
+                                 bc_checks **checks_out);
+
+// The number of checks.
+int32_t bc_checks_count(const bc_checks *checks, int32_t *count_out);
+
+// The component (BC_COMPONENT_...) of a check. Checks are counted from 0, limit by limit and
+// within each from the left.
+int32_t bc_checks_component(const bc_checks *checks, int32_t index, int32_t *component_out);
+
+// The name of the span of a check.
+int32_t bc_checks_span(const bc_checks *checks,
+                       int32_t index,
+                       char *buffer,
+                       int64_t capacity,
+                       int64_t *length_out);
+
+// The name of the combination of a check: the one that gives the greatest value.
+int32_t bc_checks_combination(const bc_checks *checks,
+                              int32_t index,
+                              char *buffer,
+                              int64_t capacity,
+                              int64_t *length_out);
+
+// The numbers of a check: the value of greatest magnitude of the component with its sign, its
+// place, the allowed magnitude, and the utilisation |value| / allowed; above 1 the limit is not
+// kept.
+int32_t bc_checks_values(const bc_checks *checks,
+                         int32_t index,
+                         double *value_m_out,
+                         double *at_m_out,
+                         double *allowed_m_out,
+                         double *utilisation_out);
+
+// Frees checks; NULL is allowed.
+void bc_checks_free(bc_checks *checks);
 
 // Reads a job from a text in TOML or JSON (BC_FORMAT_...). All that is wrong is reported at once.
 int32_t bc_job_read(const char *document, int32_t format, bc_job **job_out);

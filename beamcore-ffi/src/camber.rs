@@ -1,6 +1,7 @@
 //! Camber: the rise to build in and its ordinates.
 
 use crate::choice;
+use crate::choice_member;
 use crate::fault::Fault;
 use crate::guard;
 use crate::handle::{self, Slot};
@@ -13,12 +14,14 @@ use std::ffi::c_char;
 /// A camber: a rise over a chord between two supports, with its ordinates.
 pub struct BcCamber(pub(crate) Camber);
 
-/// The camber against the deflection of a combination at a time: fraction (1 is all of it) of the
-/// deflection at the middle of the chord from one support to another, rounded (BC_ROUNDING_...)
-/// to whole steps, with ordinates at the ends of equal divisions of the chord.
+/// The camber of a shape (BC_SHAPE_...) against the deflection of a combination at a time: fraction
+/// (1 is all of it) of the deflection over the chord from one support to another, its rise rounded
+/// (BC_ROUNDING_...) to whole steps and made zero where it is less than least_m, with ordinates at
+/// the ends of equal divisions of the chord.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn bc_camber_new(
     response: *const BcResponse,
+    shape: i32,
     combination: *const c_char,
     time: i32,
     fraction: f64,
@@ -26,6 +29,7 @@ pub unsafe extern "C" fn bc_camber_new(
     to_support: *const c_char,
     step_m: f64,
     rounding: i32,
+    least_m: f64,
     divisions: i32,
     camber_out: *mut *mut BcCamber,
 ) -> i32 {
@@ -43,6 +47,7 @@ pub unsafe extern "C" fn bc_camber_new(
         let divisions = u32::try_from(divisions)
             .map_err(|_| Fault::count("divisions", i64::from(divisions), "a count above zero"))?;
         let plan = CamberPlan {
+            shape: choice_member::shape(shape)?,
             combination: combination.to_owned(),
             time: choice::time(time)?,
             fraction,
@@ -50,6 +55,7 @@ pub unsafe extern "C" fn bc_camber_new(
             to: to.to_owned(),
             step: Length::from_m(step_m),
             rounding: choice::rounding(rounding)?,
+            least: Length::from_m(least_m),
             divisions,
         };
         out.give(BcCamber(response.0.camber(&plan)?));
@@ -57,7 +63,49 @@ pub unsafe extern "C" fn bc_camber_new(
     })
 }
 
-/// The deflection to be built in, before rounding.
+/// The shape (BC_SHAPE_...) of a camber.
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn bc_camber_shape(camber: *const BcCamber, shape_out: *mut i32) -> i32 {
+    guard::status(|| {
+        // SAFETY: the caller keeps the header's contract for these pointers.
+        let (camber, out) = unsafe {
+            (
+                handle::shared(camber, "camber")?,
+                Slot::new(shape_out, "shape_out")?,
+            )
+        };
+        out.put(choice_member::shape_number(camber.0.shape()));
+        Ok(())
+    })
+}
+
+/// The radius of an arc, negative where it hangs. For other shapes and for no rise, has_value_out
+/// is 0 and the radius is left as it is.
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn bc_camber_radius(
+    camber: *const BcCamber,
+    has_value_out: *mut i32,
+    radius_m_out: *mut f64,
+) -> i32 {
+    guard::status(|| {
+        // SAFETY: the caller keeps the header's contract for these pointers.
+        let (camber, has_out, out) = unsafe {
+            (
+                handle::shared(camber, "camber")?,
+                Slot::new(has_value_out, "has_value_out")?,
+                Slot::new(radius_m_out, "radius_m_out")?,
+            )
+        };
+        let radius = camber.0.radius();
+        has_out.put(i32::from(radius.is_some()));
+        if let Some(radius) = radius {
+            out.put(radius.si());
+        }
+        Ok(())
+    })
+}
+
+/// The rise before rounding: of the deflection at the middle of the chord, or of the best arc.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn bc_camber_target(camber: *const BcCamber, target_m_out: *mut f64) -> i32 {
     guard::status(|| {
@@ -73,7 +121,8 @@ pub unsafe extern "C" fn bc_camber_target(camber: *const BcCamber, target_m_out:
     })
 }
 
-/// The rise at the middle of the chord, rounded; positive upward.
+/// The rise at the middle of the chord, rounded; positive upward; zero where it would be less than
+/// the least worth building.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn bc_camber_rise(camber: *const BcCamber, rise_m_out: *mut f64) -> i32 {
     guard::status(|| {

@@ -120,6 +120,15 @@ pub(crate) enum StressSign {
     Compression,
 }
 
+/// A yes or no, which crosses as 1 or 0.
+pub(crate) fn yes(number: i32, parameter: &str) -> Result<bool, Fault> {
+    match number {
+        0 => Ok(false),
+        1 => Ok(true),
+        _ => Err(Fault::choice(parameter, number, "0, 1")),
+    }
+}
+
 /// One choice: its parameter, the constants in words, and what each constant stands for.
 ///
 /// The numbers come from a match over all variants, so that a new variant of the core does not
@@ -141,6 +150,7 @@ macro_rules! choice {
         }
     };
 }
+pub(crate) use choice;
 
 choice!(
     time,
@@ -176,7 +186,7 @@ choice!(
     support,
     support_number,
     SupportKind,
-    "support_kinds",
+    "support_kind",
     "BC_SUPPORT_PIN, BC_SUPPORT_ROLLER, BC_SUPPORT_FIXED",
     Pin = BC_SUPPORT_PIN,
     Roller = BC_SUPPORT_ROLLER,

@@ -26,6 +26,8 @@ pub mod error;
 
 pub mod choice;
 
+pub mod choice_member;
+
 pub mod material;
 
 pub mod part;
@@ -34,15 +36,29 @@ pub mod section;
 
 pub mod transformed;
 
+pub mod category;
+
 pub mod action;
 
+pub mod plan;
+
 pub mod member;
+
+pub mod combination;
 
 pub mod response;
 
 pub mod stress;
 
+pub mod span;
+
 pub mod camber;
+
+pub mod reading;
+
+pub mod limit;
+
+pub mod limit_check;
 
 pub mod job;
 
@@ -56,5 +72,7 @@ const _: () = {
     const fn shared_between_threads<T: Send + Sync>() {}
     shared_between_threads::<(material::BcMaterial, part::BcPart, section::BcSection)>();
     shared_between_threads::<(action::BcAction, member::BcMember, response::BcResponse)>();
+    shared_between_threads::<(plan::BcPlan, reading::BcReadings)>();
+    shared_between_threads::<(limit::BcLimit, limit_check::BcChecks)>();
     shared_between_threads::<(camber::BcCamber, job::BcJob, outcome::BcOutcome)>();
 };

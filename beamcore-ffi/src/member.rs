@@ -17,6 +17,7 @@ pub struct BcMember(pub(crate) Member);
 
 /// A member of the given length. Each support has a name, a kind (BC_SUPPORT_...) and a place
 /// from the left end; the three lists are of one length. All that is wrong is reported at once.
+/// Partial factors and combinations of one's own need a plan (bc_plan_of_length).
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn bc_member_new(
     section: *const BcSection,

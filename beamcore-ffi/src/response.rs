@@ -1,6 +1,6 @@
 //! Responses: fields along a member, their extremes, and reactions.
 
-use crate::choice::{self, ExtremeName, FieldName, PlaceSide};
+use crate::choice::{self, BC_SIDE_RIGHT, ExtremeName, FieldName, PlaceSide};
 use crate::fault::Fault;
 use crate::guard;
 use crate::handle::{self, Slot, Slots};
@@ -84,6 +84,43 @@ pub(crate) unsafe fn write_values(
     let field = field()?;
     let values: Result<Vec<_>, _> = places.iter().map(|x| field.value(*x, side)).collect();
     out.put(&values?);
+    Ok(())
+}
+
+/// The values of a line that does not jump, at places of the caller, all of them or none.
+///
+/// # Safety
+/// `x_m` is NULL or points to `count` numbers, `values_m_out` is NULL or has room for as many.
+pub(crate) unsafe fn write_line(
+    field: Box<dyn PlainField>,
+    x_m: *const f64,
+    count: i32,
+    values_m_out: *mut f64,
+) -> Result<(), Fault> {
+    // SAFETY: by this function's own contract.
+    unsafe { write_values(|| Ok(field), BC_SIDE_RIGHT, x_m, count, values_m_out) }
+}
+
+/// An extreme of a line of deflections and its place.
+///
+/// # Safety
+/// Each place for a result is NULL or may be written to.
+pub(crate) unsafe fn write_extreme(
+    field: &dyn PlainField,
+    extreme: i32,
+    value_m_out: *mut f64,
+    at_m_out: *mut f64,
+) -> Result<(), Fault> {
+    // SAFETY: by this function's own contract.
+    let (value_out, at_out) = unsafe {
+        (
+            Slot::new(value_m_out, "value_m_out")?,
+            Slot::new(at_m_out, "at_m_out")?,
+        )
+    };
+    let (value, at) = field.extreme(choice::extreme(extreme)?);
+    value_out.put(value);
+    at_out.put(at);
     Ok(())
 }
 

@@ -1,7 +1,7 @@
 //! Texts of the caller, in and out.
 
 use crate::fault::Fault;
-use crate::handle::Slot;
+use crate::handle::{self, Slot};
 use std::ffi::{CStr, c_char};
 
 /// A text that ends with a NUL.
@@ -16,6 +16,25 @@ pub(crate) unsafe fn read<'a>(pointer: *const c_char, parameter: &str) -> Result
     let text = unsafe { CStr::from_ptr(pointer) };
     text.to_str()
         .map_err(|error| Fault::utf8(parameter, error.valid_up_to()))
+}
+
+/// A list of texts that end with a NUL each.
+///
+/// # Safety
+/// The pointer is NULL or points to `count` pointers as [`read`] takes them.
+pub(crate) unsafe fn list(
+    pointer: *const *const c_char,
+    count: i32,
+    parameter: &str,
+) -> Result<Vec<String>, Fault> {
+    // SAFETY: by this function's own contract.
+    let pointers = unsafe { handle::list(pointer, count, parameter)? };
+    let text = |(index, pointer): (usize, &*const c_char)| {
+        // SAFETY: by this function's own contract.
+        let text = unsafe { read(*pointer, &format!("{parameter}[{index}]"))? };
+        Ok(text.to_owned())
+    };
+    pointers.iter().enumerate().map(text).collect()
 }
 
 /// The caller's buffer for a text.

@@ -220,8 +220,8 @@ static void put_camber(const struct golden *g) {
     double target, rise, station, ordinate;
     int32_t count;
     char path[100];
-    must(bc_camber_new(g->response, "quasi-permanent", BC_TIME_FINAL, 1.0, "left", "right", 0.001,
-                       BC_ROUNDING_NEAREST, 6, &camber));
+    must(bc_camber_new(g->response, BC_SHAPE_PARABOLA, "quasi-permanent", BC_TIME_FINAL, 1.0,
+                       "left", "right", 0.001, BC_ROUNDING_NEAREST, 0.0, 6, &camber));
     must(bc_camber_target(camber, &target));
     must(bc_camber_rise(camber, &rise));
     must(bc_camber_ordinate_count(camber, &count));

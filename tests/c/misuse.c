@@ -34,6 +34,11 @@ static void null_pointers(void) {
     bc_action *q = NULL;
     bc_member *g = NULL;
     bc_response *r = NULL;
+    bc_plan *plan = NULL;
+    bc_readings *readings = NULL;
+    bc_checks *checks = NULL;
+    bc_limit *limit = NULL;
+    const bc_limit *limits[] = {NULL};
     const bc_part *holes[] = {joist, NULL};
     const bc_action *actions[] = {NULL};
     const char *names[] = {"left", NULL};
@@ -56,6 +61,17 @@ static void null_pointers(void) {
     IS_NULL(bc_member_new(section, 4.0, names, kinds, at, 2, NULL, 0, &g), "support_names[1]");
     IS_NULL(bc_member_new(section, 4.0, names, NULL, at, 2, NULL, 0, &g), "support_kinds");
     IS_NULL(bc_member_solve(NULL, &r), "member");
+    IS_NULL(bc_plan_of_length(NULL, 4.0, &plan), "section");
+    IS_NULL(bc_plan_with_action(NULL, load, &plan), "plan");
+    IS_NULL(bc_plan_check(NULL, &g), "plan");
+    IS_NULL(bc_action_with_couple(load, 1e3, 1.0, NULL), "action_out");
+    IS_NULL(bc_response_remaining_extreme(response, "permanent", BC_TIME_FINAL, NULL, 1, &a, &b),
+            "camber");
+    IS_NULL(bc_response_readings(response, NULL, 0.0, 4.0, NULL, 0, &readings), "camber");
+    IS_NULL(bc_response_check_limits(response, limits, 1, NULL, &checks), "limits[0]");
+    IS_NULL(bc_limit_under(NULL, "permanent", &limit), "limit");
+    IS_NULL(bc_category_of_name(NULL, &n), "name");
+    CHECK(plan == NULL && readings == NULL && checks == NULL && limit == NULL);
     IS_NULL(bc_response_extreme(response, BC_FIELD_SHEAR, NULL, BC_TIME_FINAL, BC_EXTREME_MINIMUM,
                                 &a, &b),
             "combination");
@@ -80,7 +96,11 @@ static void choices(void) {
     bc_part *p = NULL;
     bc_member *g = NULL;
     bc_camber *k = NULL;
+    bc_action *q = NULL;
+    bc_limit *w = NULL;
+    bc_plan *plan, *made = NULL;
     bc_job *j = NULL;
+    DONE(bc_plan_simple_span(section, 4.0, &plan));
     const char *names[] = {"left"};
     const int32_t kinds[] = {4};
     const double at[] = {0.0};
@@ -88,14 +108,27 @@ static void choices(void) {
     NO_CHOICE(bc_material_modulus(c24, 0, &a), "time");
     NO_CHOICE(bc_material_concrete_with_creep("C30/37", 38e6, 50, 0.1, 1e6, 1e9, -1, &m), "cement");
     NO_CHOICE(bc_part_beside(joist, 5, "other", &p), "place");
-    NO_CHOICE(bc_member_new(section, 4.0, names, kinds, at, 1, NULL, 0, &g), "support_kinds");
+    NO_CHOICE(bc_member_new(section, 4.0, names, kinds, at, 1, NULL, 0, &g), "support_kind");
     NO_CHOICE(bc_response_extreme(response, 0, pm, BC_TIME_FINAL, 1, &a, &b), "field");
     NO_CHOICE(bc_response_extreme(response, 1, pm, 3, 1, &a, &b), "time");
     NO_CHOICE(bc_response_extreme(response, 1, pm, 1, INT32_MIN, &a, &b), "extreme");
     NO_CHOICE(bc_response_values(response, 1, pm, 1, 3, at, 1, &a), "side");
     NO_CHOICE(bc_response_stress(response, pm, 1, "joist", 0, &a, &b, &c), "sign");
     NO_CHOICE(bc_response_stress_values(response, pm, 1, "joist", 0, 1, at, 1, &a), "fibre");
-    NO_CHOICE(bc_camber_new(response, pm, 1, 1.0, "left", "right", 0.001, 0, 4, &k), "rounding");
+    NO_CHOICE(bc_camber_new(response, 1, pm, 1, 1.0, "left", "right", 0.001, 0, 0, 4, &k),
+              "rounding");
+    NO_CHOICE(bc_camber_new(response, 0, pm, 1, 1.0, "left", "right", 0.001, 1, 0, 4, &k),
+              "shape");
+    NO_CHOICE(bc_category_factors(0, &a, &b, &c), "category");
+    NO_CHOICE(bc_action_variable_of_category("snow", 13, &q), "category");
+    NO_CHOICE(bc_limit_value(7, 0.01, &w), "component");
+    NO_CHOICE(bc_response_component_extreme(response, 0, pm, "left to right", NULL, 1, &a, &b),
+              "component");
+    NO_CHOICE(bc_plan_with_support(plan, "left", 0, 0.0, &made), "support_kind");
+    NO_CHOICE(bc_plan_with_combination(plan, "own", NULL, NULL, 0, 2, &made), "is_ultimate");
+    bc_plan_free(plan);
+    CHECK(m == NULL && p == NULL && g == NULL && k == NULL && q == NULL && w == NULL);
+    CHECK(made == NULL);
     NO_CHOICE(bc_job_read("", 0, &j), "format");
 }
 
@@ -104,6 +137,7 @@ static void choices(void) {
 static void counts(void) {
     bc_section *s = NULL;
     bc_camber *k = NULL;
+    bc_checks *checks = NULL;
     char text[100];
     const bc_part *parts[] = {joist};
     const char *pm = "permanent";
@@ -112,9 +146,14 @@ static void counts(void) {
     NO_COUNT(bc_response_values(response, 1, pm, 1, 1, &a, -3, &b), "count of x_m");
     NO_COUNT(bc_response_station(response, 2, &a), "index");
     NO_COUNT(bc_member_combination_name(member, -1, text, 100, &length), "index");
-    NO_COUNT(bc_camber_new(response, pm, 1, 1.0, "left", "right", 0.001, 1, -4, &k), "divisions");
-    FAILS(bc_camber_new(response, pm, 1, 1.0, "left", "right", 0.001, 1, 0, &k), BC_ERROR_VALUE,
-          "camber.divisions");
+    NO_COUNT(bc_camber_new(response, 1, pm, 1, 1.0, "left", "right", 0.001, 1, 0, -4, &k),
+             "divisions");
+    FAILS(bc_camber_new(response, 1, pm, 1, 1.0, "left", "right", 0.001, 1, 0, 0, &k),
+          BC_ERROR_VALUE, "camber.divisions");
+    NO_COUNT(bc_member_span_name(member, 1, text, 100, &length), "index");
+    NO_COUNT(bc_member_combination_kind(member, -1, &n), "index");
+    NO_COUNT(bc_member_combination_factor(member, 0, 1, &a), "index");
+    NO_COUNT(bc_response_check_limits(response, NULL, -1, NULL, &checks), "count of limits");
     NO_COUNT(bc_version(text, -1, &length), "capacity");
     CHECK(bc_error_problem_kind(1, &n) == BC_ERROR_COUNT);
 }
@@ -161,6 +200,10 @@ static void free_in_any_order(void) {
     bc_member_free(NULL);
     bc_response_free(NULL);
     bc_camber_free(NULL);
+    bc_plan_free(NULL);
+    bc_limit_free(NULL);
+    bc_checks_free(NULL);
+    bc_readings_free(NULL);
     bc_job_free(NULL);
     bc_outcome_free(NULL);
 }
