@@ -8,11 +8,14 @@
 #ifndef BEAMCORE_HPP
 #define BEAMCORE_HPP
 
+#include "beamcore/action.hpp"
 #include "beamcore/camber.hpp"
 #include "beamcore/error.hpp"
 #include "beamcore/job.hpp"
+#include "beamcore/limit.hpp"
 #include "beamcore/material.hpp"
 #include "beamcore/member.hpp"
+#include "beamcore/reading.hpp"
 #include "beamcore/response.hpp"
 #include "beamcore/section.hpp"
 #include "beamcore_units.hpp"

@@ -81,6 +81,31 @@ static void classes() {
     }
 }
 
+static void loads_and_limits() {
+    CHECK(throws<InputError>([] { category_of_name("Z"); }, Kind::name, "category"));
+    CHECK(throws<UsageError>([] { variable("snow", static_cast<Category>(13)); }, Kind::choice,
+                             "category"));
+    const MemberPlan plan = Member::simple_span(Section{joist()}, 4_m)
+                                .action(permanent("floor").uniform(1_kN_per_m));
+    CHECK(throws<InputError>(
+        [&] { plan.combination({"own", {{"roof", 1.0}}, false}).check(); }, Kind::name,
+        "combinations[\"own\"].factors[\"roof\"]"));
+    CHECK(throws<LookupError>([&] { plan.check().span("right to left"); }, Kind::lookup, "span"));
+    const Response response = plan.check().solve();
+    CHECK(throws<InputError>(
+        [&] { response.check_limits({Limit::value(Component::instant, -20_mm)}); }, Kind::value,
+        "limits[0].value"));
+    CHECK(throws<LookupError>(
+        [&] { response.deflection_component(Component::total, "permanent", "x"); }, Kind::lookup,
+        "span"));
+    const Camber camber = response.camber({Shape::parabola, "permanent", Time::final, 1.0, "left",
+                                           "right", 1_mm, Rounding::nearest, 0_m, 4});
+    CHECK(throws<InputError>([&] { response.readings(camber, {0_m, 5_m, {"joist"}}); },
+                             Kind::position, "camber.trestles.right"));
+    CHECK(throws<LookupError>([&] { response.remaining("snow", Time::final, camber); },
+                              Kind::lookup, "combination"));
+}
+
 static void all_problems() {
     try {
         Job::read(JOB_HEAD "colour = 1\n" JOB_MATERIAL JOB_PART JOB_MEMBER JOB_ACTION("2 kN"),
@@ -111,6 +136,7 @@ static void a_long_message() {
 
 int main() {
     classes();
+    loads_and_limits();
     all_problems();
     a_long_message();
     return finish();

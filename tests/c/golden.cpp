@@ -152,8 +152,8 @@ static void slab_strip() {
             .check()
             .solve();
     put_all("slab-strip", section, response, {"joist", "slab"}, {"left", "right"});
-    const Camber camber = response.camber({"quasi-permanent", Time::final, 1.0, "left", "right",
-                                           1_mm, Rounding::nearest, 6});
+    const Camber camber = response.camber({Shape::parabola, "quasi-permanent", Time::final, 1.0,
+                                           "left", "right", 1_mm, Rounding::nearest, 0_m, 6});
     put("slab-strip", "camber.target_m", camber.target().to_m());
     put("slab-strip", "camber.rise_m", camber.rise().to_m());
     const auto ordinates = camber.ordinates();

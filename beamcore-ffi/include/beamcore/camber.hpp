@@ -13,8 +13,21 @@ enum class Rounding : std::int32_t {
     up = BC_ROUNDING_UP,
 };
 
+// The shape of a camber.
+enum class Shape : std::int32_t {
+    // A parabola whose rise at the middle of the chord is that of the deflection line there.
+    parabola = BC_SHAPE_PARABOLA,
+    // The mirror image of the deflection line, scaled to the rounded rise.
+    mirror = BC_SHAPE_MIRROR,
+    // A circular arc with the rise of the deflection line at the middle of the chord.
+    arc_through_middle = BC_SHAPE_ARC_THROUGH_MIDDLE,
+    // The circular arc whose greatest gap to the deflection line is least.
+    arc_least_gap = BC_SHAPE_ARC_LEAST_GAP,
+};
+
 // A wish for camber: which deflection to build against, how much of it, in which steps.
 struct CamberPlan {
+    Shape shape;
     std::string combination;
     Time time;
     // The share of the deflection that is built in; 1 is all of it.
@@ -25,6 +38,8 @@ struct CamberPlan {
     // The step to which the rise is rounded, and the direction.
     Length step;
     Rounding rounding;
+    // The least rise worth building; a smaller one becomes none.
+    Length least;
     // The number of equal divisions of the chord; ordinates are given at their ends.
     std::int32_t divisions;
 };
@@ -44,7 +59,20 @@ struct Chord {
 // The camber to build.
 class Camber {
 public:
-    // The deflection to be built in, before rounding.
+    Shape shape() const {
+        return static_cast<Shape>(
+            detail::count([&](std::int32_t *out) { return bc_camber_shape(get(), out); }));
+    }
+
+    // The radius of an arc, negative where it hangs; nothing for other shapes and for no rise.
+    std::optional<Length> radius() const {
+        std::int32_t has_value = 0;
+        double radius = 0.0;
+        detail::check(bc_camber_radius(get(), &has_value, &radius));
+        return has_value != 0 ? std::optional(Length::from_si(radius)) : std::nullopt;
+    }
+
+    // The rise before rounding.
     Length target() const { return length(bc_camber_target); }
     // The rise at the middle of the chord, rounded; positive upward.
     Length rise() const { return length(bc_camber_rise); }
@@ -93,14 +121,19 @@ private:
 
 inline Camber Response::camber(const CamberPlan &plan) const {
     return Camber(detail::make<bc_camber>(bc_camber_free, [&](bc_camber **out) {
-        return bc_camber_new(get(), detail::c_text(plan.combination, "combination"),
+        return bc_camber_new(get(), detail::code(plan.shape),
+                             detail::c_text(plan.combination, "combination"),
                              detail::code(plan.time), plan.fraction,
                              detail::c_text(plan.from, "from_support"),
                              detail::c_text(plan.to, "to_support"), plan.step.si(),
-                             detail::code(plan.rounding), plan.divisions, out);
+                             detail::code(plan.rounding), plan.least.si(), plan.divisions, out);
     }));
 }
 
 } // namespace beamcore
+
+#include "limit.hpp"
+#include "reading.hpp"
+#include "span.hpp"
 
 #endif // BEAMCORE_CAMBER_HPP

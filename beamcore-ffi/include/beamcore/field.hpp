@@ -58,18 +58,16 @@ private:
     Values values_;
 };
 
-// A field of a response, with its extremes.
+// A quantity along the member or a span of it, with its extremes.
 template <class Q> class Field : public Line<Q> {
 public:
-    Field(detail::Shared<bc_response> response, std::int32_t field, const std::string &combination,
-          Time time)
-        : Line<Q>([=](std::int32_t side, const double *x_m, std::int32_t count, double *out) {
-              return bc_response_values(response.get(), field, combination.c_str(),
-                                        detail::code(time), side, x_m, count, out);
-          }),
-          response_(response), field_(field), combination_(combination), time_(time) {
-        // Whether there is such a combination is said here, where its name is given.
-        detail::c_text(combination, "combination");
+    using Extremes =
+        std::function<std::int32_t(std::int32_t extreme, double *value_out, double *at_m_out)>;
+
+    // The field that two calls of the C ABI give.
+    Field(typename Line<Q>::Values values, Extremes extremes)
+        : Line<Q>(std::move(values)), extremes_(std::move(extremes)) {
+        // Whether there is such a field is said here, where its names are given.
         greatest();
     }
 
@@ -83,15 +81,11 @@ public:
 private:
     Extreme<Q> extreme(std::int32_t extreme) const {
         double value = 0.0, at = 0.0;
-        detail::check(bc_response_extreme(response_.get(), field_, combination_.c_str(),
-                                          detail::code(time_), extreme, &value, &at));
+        detail::check(extremes_(extreme, &value, &at));
         return Extreme<Q>{Q::from_si(value), Length::from_si(at)};
     }
 
-    detail::Shared<bc_response> response_;
-    std::int32_t field_;
-    std::string combination_;
-    Time time_;
+    Extremes extremes_;
 };
 
 } // namespace beamcore

@@ -1,77 +1,11 @@
-// Actions, supports and members.
+// Supports, spans, combinations and members.
 #ifndef BEAMCORE_MEMBER_HPP
 #define BEAMCORE_MEMBER_HPP
 
+#include "action.hpp"
 #include "section.hpp"
 
 namespace beamcore {
-
-// The factors by which a variable action enters combinations.
-struct CombinationFactors {
-    double psi_0;
-    double psi_1;
-    double psi_2;
-};
-
-// A named action: loads that act together, from one cause. Loads are positive downward.
-class Action {
-public:
-    // The same action with the weight of the section, over the whole member.
-    Action self_weight() const {
-        return made([&](bc_action **out) { return bc_action_with_self_weight(get(), out); });
-    }
-
-    // The same action with a line load over the whole member.
-    Action uniform(LineLoad load) const {
-        return made([&](bc_action **out) { return bc_action_with_uniform(get(), load.si(), out); });
-    }
-
-    // The same action with a line load between two places.
-    Action partial(LineLoad load, Length from, Length to) const {
-        return made([&](bc_action **out) {
-            return bc_action_with_partial(get(), load.si(), from.si(), to.si(), out);
-        });
-    }
-
-    // The same action with a point load.
-    Action point(Force load, Length at) const {
-        return made([&](bc_action **out) {
-            return bc_action_with_point(get(), load.si(), at.si(), out);
-        });
-    }
-
-    std::string name() const { return detail::name(get(), bc_action_name); }
-
-    // The handle of the C ABI; it lives as long as this object or a copy of it.
-    const bc_action *get() const { return handle_.get(); }
-
-private:
-    explicit Action(detail::Shared<bc_action> handle) : handle_(std::move(handle)) {}
-
-    template <class Call> static Action made(Call call) {
-        return Action(detail::make<bc_action>(bc_action_free, call));
-    }
-
-    friend Action permanent(const std::string &name);
-    friend Action variable(const std::string &name, CombinationFactors factors);
-
-    detail::Shared<bc_action> handle_;
-};
-
-// A permanent action, without loads yet.
-inline Action permanent(const std::string &name) {
-    return Action::made([&](bc_action **out) {
-        return bc_action_permanent(detail::c_text(name, "name"), out);
-    });
-}
-
-// A variable action with its combination factors, without loads yet.
-inline Action variable(const std::string &name, CombinationFactors factors) {
-    return Action::made([&](bc_action **out) {
-        return bc_action_variable(detail::c_text(name, "name"), factors.psi_0, factors.psi_1,
-                                  factors.psi_2, out);
-    });
-}
 
 // What a support holds.
 enum class SupportKind : std::int32_t {
@@ -98,15 +32,59 @@ struct Support {
     }
 };
 
+// A stretch of a member whose deflection is looked at on its own: between two supports, or an
+// overhang.
+struct Span {
+    // "A to B" between the supports A and B, "before A" and "beyond B" for overhangs.
+    std::string name;
+    Length from;
+    Length to;
+    // Whether one of its ends is free.
+    bool is_cantilever;
+
+    Length length() const { return to - from; }
+};
+
+// The partial factors of the fundamental combination.
+struct PartialFactors {
+    // Of permanent actions that are unfavourable.
+    double permanent;
+    // Of permanent actions that are favourable.
+    double permanent_favourable;
+    // Of variable actions that are unfavourable.
+    double variable;
+};
+
+// The kind of a combination (EN 1990:2002).
+enum class CombinationKind : std::int32_t {
+    permanent = BC_COMBINATION_PERMANENT,
+    quasi_permanent = BC_COMBINATION_QUASI_PERMANENT,
+    characteristic = BC_COMBINATION_CHARACTERISTIC,
+    frequent = BC_COMBINATION_FREQUENT,
+    fundamental = BC_COMBINATION_FUNDAMENTAL,
+    own = BC_COMBINATION_OWN,
+    own_ultimate = BC_COMBINATION_OWN_ULTIMATE,
+};
+
+// A sum of factored actions.
+struct Combination {
+    // The name by which results are addressed.
+    std::string name;
+    CombinationKind kind;
+    // Whether design strengths are compared under it.
+    bool is_ultimate;
+    // One factor per action, in the order of the actions of the member.
+    std::vector<double> factors;
+};
+
 class MemberPlan;
-class SimpleSpanPlan;
 class Response;
 
 // A member that has passed all checks and is ready to be solved.
 class Member {
 public:
     // A plan of a member on two supports at its ends: a pin "left" and a roller "right".
-    static SimpleSpanPlan simple_span(const Section &section, Length span);
+    static MemberPlan simple_span(const Section &section, Length span);
     // A plan of a member of the given length, without supports yet.
     static MemberPlan of_length(const Section &section, Length length);
 
@@ -118,9 +96,40 @@ public:
             detail::number([&](double *out) { return bc_member_length(get(), out); }));
     }
 
-    // The names of the combinations, by which results are addressed.
-    std::vector<std::string> combinations() const {
-        return detail::texts(get(), bc_member_combination_count, bc_member_combination_name);
+    // The combinations of the actions, each with its factors.
+    std::vector<Combination> combinations() const {
+        std::vector<Combination> list;
+        for (std::string &name :
+             detail::texts(get(), bc_member_combination_count, bc_member_combination_name)) {
+            list.push_back(combination(std::move(name), detail::size(list.size())));
+        }
+        return list;
+    }
+
+    // The partial factors of the fundamental combination.
+    PartialFactors partial_factors() const {
+        double permanent = 0.0, favourable = 0.0, variable = 0.0;
+        detail::check(bc_member_partial_factors(get(), &permanent, &favourable, &variable));
+        return PartialFactors{permanent, favourable, variable};
+    }
+
+    // The spans and overhangs, from left to right.
+    std::vector<Span> spans() const {
+        std::vector<Span> list;
+        for (const std::string &name :
+             detail::texts(get(), bc_member_span_count, bc_member_span_name)) {
+            list.push_back(span(name));
+        }
+        return list;
+    }
+
+    // The span of a name.
+    Span span(const std::string &name) const {
+        double from = 0.0, to = 0.0;
+        std::int32_t is_cantilever = 0;
+        detail::check(bc_member_span(get(), detail::c_text(name, "span"), &from, &to,
+                                     &is_cantilever));
+        return Span{name, Length::from_si(from), Length::from_si(to), is_cantilever != 0};
     }
 
     // What was noticed, for example places that were merged.
@@ -135,7 +144,24 @@ private:
     explicit Member(detail::Shared<bc_member> handle) : handle_(std::move(handle)) {}
 
     friend class MemberPlan;
-    friend class SimpleSpanPlan;
+
+    Combination combination(std::string name, std::int32_t index) const {
+        const auto number = [&](auto get_number) {
+            return detail::count(
+                [&](std::int32_t *out) { return get_number(get(), index, out); });
+        };
+        const std::int32_t actions = detail::count(
+            [&](std::int32_t *out) { return bc_member_action_count(get(), out); });
+        std::vector<double> factors;
+        for (std::int32_t action = 0; action < actions; ++action) {
+            factors.push_back(detail::number([&](double *out) {
+                return bc_member_combination_factor(get(), index, action, out);
+            }));
+        }
+        return Combination{std::move(name),
+                           static_cast<CombinationKind>(number(bc_member_combination_kind)),
+                           number(bc_member_combination_is_ultimate) != 0, std::move(factors)};
+    }
 
     detail::Shared<bc_member> handle_;
 };

@@ -6,96 +6,89 @@
 
 namespace beamcore {
 
-namespace detail {
-
-// The handles of actions, as a list for the C ABI.
-inline std::vector<const bc_action *> handles(const std::vector<Action> &actions) {
-    std::vector<const bc_action *> list;
-    for (const Action &action : actions) {
-        list.push_back(action.get());
-    }
-    return list;
-}
-
-} // namespace detail
-
-// A member on two supports at its ends, as it is being described.
-class SimpleSpanPlan {
-public:
-    SimpleSpanPlan(const Section &section, Length span) : section_(section), span_(span) {}
-
-    // The same plan with one more action.
-    SimpleSpanPlan action(const Action &action) const {
-        SimpleSpanPlan plan = *this;
-        plan.actions_.push_back(action);
-        return plan;
-    }
-
-    // Checks the plan; all that is wrong is reported at once.
-    Member check() const {
-        return Member(detail::make<bc_member>(bc_member_free, [&](bc_member **out) {
-            const auto actions = detail::handles(actions_);
-            return bc_member_simple_span(section_.get(), span_.si(), actions.data(),
-                                         detail::size(actions.size()), out);
-        }));
-    }
-
-private:
-    Section section_;
-    Length span_;
-    std::vector<Action> actions_;
+// A combination of one's own: a factor for each action that takes part.
+struct OwnCombination {
+    std::string name;
+    // Names of actions and their factors; an action that is not named has the factor 0.
+    std::vector<std::pair<std::string, double>> factors;
+    // Whether design strengths are compared under it.
+    bool is_ultimate;
 };
 
-// A member of any supports, as it is being described.
+// A member as it is being described.
 class MemberPlan {
 public:
-    MemberPlan(const Section &section, Length length) : section_(section), length_(length) {}
-
     // The same plan with one more support.
     MemberPlan support(const Support &support) const {
-        MemberPlan plan = *this;
-        plan.supports_.push_back(support);
-        return plan;
+        return made([&](bc_plan **out) {
+            return bc_plan_with_support(get(), detail::c_text(support.name, "name"),
+                                        detail::code(support.kind), support.at.si(), out);
+        });
     }
 
     // The same plan with one more action.
     MemberPlan action(const Action &action) const {
-        MemberPlan plan = *this;
-        plan.actions_.push_back(action);
-        return plan;
+        return made(
+            [&](bc_plan **out) { return bc_plan_with_action(get(), action.get(), out); });
+    }
+
+    // The same plan with other partial factors for the fundamental combination than the
+    // recommended ones.
+    MemberPlan partial_factors(PartialFactors factors) const {
+        return made([&](bc_plan **out) {
+            return bc_plan_with_partial_factors(get(), factors.permanent,
+                                                factors.permanent_favourable, factors.variable,
+                                                out);
+        });
+    }
+
+    // The same plan with one more combination, of one's own.
+    MemberPlan combination(const OwnCombination &combination) const {
+        std::vector<const char *> actions;
+        std::vector<double> factors;
+        for (const auto &[action, factor] : combination.factors) {
+            actions.push_back(detail::c_text(action, "action_names"));
+            factors.push_back(factor);
+        }
+        return made([&](bc_plan **out) {
+            return bc_plan_with_combination(get(), detail::c_text(combination.name, "name"),
+                                            actions.data(), factors.data(),
+                                            detail::size(actions.size()),
+                                            combination.is_ultimate ? 1 : 0, out);
+        });
     }
 
     // Checks the plan; all that is wrong is reported at once.
     Member check() const {
-        return Member(detail::make<bc_member>(bc_member_free, [&](bc_member **out) {
-            std::vector<const char *> names;
-            std::vector<std::int32_t> kinds;
-            std::vector<double> places;
-            for (const Support &support : supports_) {
-                names.push_back(detail::c_text(support.name, "support_names"));
-                kinds.push_back(detail::code(support.kind));
-                places.push_back(support.at.si());
-            }
-            const auto actions = detail::handles(actions_);
-            return bc_member_new(section_.get(), length_.si(), names.data(), kinds.data(),
-                                 places.data(), detail::size(names.size()), actions.data(),
-                                 detail::size(actions.size()), out);
-        }));
+        return Member(detail::make<bc_member>(
+            bc_member_free, [&](bc_member **out) { return bc_plan_check(get(), out); }));
     }
 
+    // The handle of the C ABI; it lives as long as this object or a copy of it.
+    const bc_plan *get() const { return handle_.get(); }
+
 private:
-    Section section_;
-    Length length_;
-    std::vector<Support> supports_;
-    std::vector<Action> actions_;
+    explicit MemberPlan(detail::Shared<bc_plan> handle) : handle_(std::move(handle)) {}
+
+    template <class Call> static MemberPlan made(Call call) {
+        return MemberPlan(detail::make<bc_plan>(bc_plan_free, call));
+    }
+
+    friend class Member;
+
+    detail::Shared<bc_plan> handle_;
 };
 
-inline SimpleSpanPlan Member::simple_span(const Section &section, Length span) {
-    return SimpleSpanPlan(section, span);
+inline MemberPlan Member::simple_span(const Section &section, Length span) {
+    return MemberPlan::made([&](bc_plan **out) {
+        return bc_plan_simple_span(section.get(), span.si(), out);
+    });
 }
 
 inline MemberPlan Member::of_length(const Section &section, Length length) {
-    return MemberPlan(section, length);
+    return MemberPlan::made([&](bc_plan **out) {
+        return bc_plan_of_length(section.get(), length.si(), out);
+    });
 }
 
 } // namespace beamcore

@@ -2,6 +2,7 @@
 #ifndef BEAMCORE_RESPONSE_HPP
 #define BEAMCORE_RESPONSE_HPP
 
+#include "component.hpp"
 #include "field.hpp"
 #include "member.hpp"
 #include "stress.hpp"
@@ -17,26 +18,42 @@ struct Reaction {
 
 class Camber;
 struct CamberPlan;
+class Limit;
+struct LimitCheck;
+struct Reading;
+struct Trestles;
 
 // The solved member: every field under every combination, at both times.
 class Response {
 public:
     // The deflection, positive downward.
     Field<Length> deflection(const std::string &combination, Time time) const {
-        return Field<Length>(handle_, BC_FIELD_DEFLECTION, combination, time);
+        return field<Length>(BC_FIELD_DEFLECTION, combination, time);
     }
     // The slope dw/dx.
     Field<Angle> slope(const std::string &combination, Time time) const {
-        return Field<Angle>(handle_, BC_FIELD_SLOPE, combination, time);
+        return field<Angle>(BC_FIELD_SLOPE, combination, time);
     }
     // The shear force V = dM/dx.
     Field<Force> shear(const std::string &combination, Time time) const {
-        return Field<Force>(handle_, BC_FIELD_SHEAR, combination, time);
+        return field<Force>(BC_FIELD_SHEAR, combination, time);
     }
     // The moment, positive where it stretches the bottom (sagging).
     Field<Moment> moment(const std::string &combination, Time time) const {
-        return Field<Moment>(handle_, BC_FIELD_MOMENT, combination, time);
+        return field<Moment>(BC_FIELD_MOMENT, combination, time);
     }
+
+    // The deflection of one span: between two supports from the chord through them, of an overhang
+    // from its support.
+    Field<Length> span_deflection(const std::string &combination, Time time,
+                                  const std::string &span) const;
+
+    // A component of the deflection of a span under a characteristic combination or one of one's
+    // own; the camber counts for Component::remaining.
+    Field<Length> deflection_component(Component component, const std::string &combination,
+                                       const std::string &span) const;
+    Field<Length> deflection_component(Component component, const std::string &combination,
+                                       const std::string &span, const Camber &camber) const;
 
     // The reaction of a support.
     Reaction reaction(const std::string &combination, Time time, const std::string &support) const {
@@ -84,6 +101,18 @@ public:
     // The camber for a plan.
     Camber camber(const CamberPlan &plan) const;
 
+    // The line that remains after a camber, positive below the straight line.
+    Field<Length> remaining(const std::string &combination, Time time, const Camber &camber) const;
+
+    // The readings to expect at the stations of a camber, lying and standing on trestles.
+    std::vector<Reading> readings(const Camber &camber, const Trestles &trestles) const;
+
+    // Compares limits with the results, one check per limit and span, each under the combination
+    // that uses it most; the camber counts for Component::remaining.
+    std::vector<LimitCheck> check_limits(const std::vector<Limit> &limits) const;
+    std::vector<LimitCheck> check_limits(const std::vector<Limit> &limits,
+                                         const Camber &camber) const;
+
     // The handle of the C ABI; it lives as long as this object or a copy of it.
     const bc_response *get() const { return handle_.get(); }
 
@@ -91,6 +120,27 @@ private:
     explicit Response(detail::Shared<bc_response> handle) : handle_(std::move(handle)) {}
 
     friend class Member;
+
+    template <class Q>
+    Field<Q> field(std::int32_t field, const std::string &combination, Time time) const {
+        detail::c_text(combination, "combination");
+        const auto response = handle_;
+        return Field<Q>(
+            [=](std::int32_t side, const double *x_m, std::int32_t count, double *out) {
+                return bc_response_values(response.get(), field, combination.c_str(),
+                                          detail::code(time), side, x_m, count, out);
+            },
+            [=](std::int32_t extreme, double *value, double *at) {
+                return bc_response_extreme(response.get(), field, combination.c_str(),
+                                           detail::code(time), extreme, value, at);
+            });
+    }
+
+    // The same with a camber or, where its handle is empty, without one.
+    Field<Length> component(Component component, const std::string &combination,
+                            const std::string &span, detail::Shared<bc_camber> camber) const;
+    std::vector<LimitCheck> checks(const std::vector<Limit> &limits,
+                                   const bc_camber *camber) const;
 
     detail::Shared<bc_response> handle_;
 };
