@@ -183,9 +183,16 @@ fn golden_answers_have_the_bits_of_rust() {
     for (name, sources) in [
         (
             "golden-c",
-            &["tests/c/golden.c", "tests/c/golden_typed.c"][..],
+            &[
+                "tests/c/golden.c",
+                "tests/c/golden_typed.c",
+                "tests/c/golden_roof_beam.c",
+            ][..],
         ),
-        ("golden-cpp", &["tests/c/golden.cpp"][..]),
+        (
+            "golden-cpp",
+            &["tests/c/golden.cpp", "tests/c/golden_roof_beam.cpp"][..],
+        ),
     ] {
         for program in built(name, sources) {
             assert_same(name, &answers, &run(&program, &["job".as_ref(), &folder]));

@@ -78,6 +78,7 @@ int main(int count, char **arguments) {
         flitch();
         two_span();
         slab_strip();
+        roof_beam();
         return EXIT_SUCCESS;
     }
     if (count == 3 && strcmp(arguments[1], "job") == 0) {

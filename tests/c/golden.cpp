@@ -1,6 +1,6 @@
 // The golden runner in C++: `golden job FOLDER` answers the golden cases of a folder through job
 // text, `golden typed` through the typed classes. A line of an answer is CASE<TAB>PATH<TAB>BITS.
-#include <beamcore.hpp>
+#include "golden.hpp"
 
 #include <cinttypes>
 #include <cmath>
@@ -13,7 +13,7 @@
 using namespace beamcore;
 using namespace beamcore::literals;
 
-static void put(const std::string &name, const std::string &path, double value) {
+void put(const std::string &name, const std::string &path, double value) {
     std::uint64_t bits = 0;
     std::memcpy(&bits, &value, sizeof bits);
     std::printf("%s\t%s\t%016" PRIx64 "\n", name.c_str(), path.c_str(), bits);
@@ -177,6 +177,7 @@ int main(int count, char **arguments) {
             flitch();
             two_span();
             slab_strip();
+            roof_beam();
             return 0;
         }
         std::cerr << "usage: golden job FOLDER | golden typed\n";

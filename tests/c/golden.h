@@ -1,4 +1,4 @@
-// What the two files of the golden runner in C share.
+// What the files of the golden runner in C share.
 #ifndef GOLDEN_H
 #define GOLDEN_H
 
@@ -20,5 +20,6 @@ void put(const char *name, const char *path, double value);
 void flitch(void);
 void two_span(void);
 void slab_strip(void);
+void roof_beam(void);
 
 #endif
