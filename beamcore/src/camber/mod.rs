@@ -29,7 +29,7 @@ pub struct Ordinate {
 }
 
 /// The camber to build.
-#[derive(Clone, Debug)]
+#[derive(Clone, Debug, PartialEq)]
 pub struct Camber {
     shape: Shape,
     target: Length,

@@ -49,7 +49,7 @@ impl Shape {
 }
 
 /// A camber line: heights above the chord, positive upward, in m.
-#[derive(Clone, Debug)]
+#[derive(Clone, Debug, PartialEq)]
 pub(crate) enum Line {
     /// y = 4 c s (1 - s) with s the share of the chord; tangents beyond its ends.
     Parabola { from: f64, length: f64, rise: f64 },

@@ -7,7 +7,7 @@ use std::sync::Arc;
 const TIE: f64 = 1e-12;
 
 /// Polynomials over the pieces between `stations`; a station may have two values.
-#[derive(Clone, Debug)]
+#[derive(Clone, Debug, PartialEq)]
 pub(crate) struct Piecewise {
     stations: Arc<[f64]>,
     pieces: Vec<Coefficients>,
