@@ -1,86 +1,24 @@
-//! The classes `Load` and `Action`.
+//! The class `Action`.
 
-use crate::convert::{self, Inputs};
+use crate::error::OrRaise;
+use crate::load::Load;
 use crate::made::{Made, Recipe, Reduced};
 use crate::operand::Number;
-use beamcore::member::{self, ActionKind, CombinationFactors};
+use beamcore::member::{self, ActionKind, Category, Effect};
+use pyo3::exceptions::PyTypeError;
 use pyo3::prelude::*;
 use pyo3::types::{PyDict, PyTuple};
 
-/// One load of an action, positive downward.
-#[pyclass(frozen, eq, module = "beamcore")]
-#[derive(Debug, PartialEq)]
-pub(crate) struct Load(Made<member::Load>);
-
-#[pymethods]
-impl Load {
-    /// What it is: "self_weight", "uniform", "partial" or "point".
-    #[getter]
-    fn kind(&self) -> &'static str {
-        self.0.name()
+record! {
+    /// The factors by which a variable action enters combinations (EN 1990:2002 Table A1.1).
+    CombinationFactors {
+        /// Beside another, leading variable action.
+        psi_0: f64,
+        /// The frequent value, as leading action.
+        psi_1: f64,
+        /// The quasi-permanent value, which makes creep.
+        psi_2: f64,
     }
-
-    fn __reduce__<'py>(&self, py: Python<'py>) -> PyResult<Reduced<'py>> {
-        self.0.reduce(py)
-    }
-}
-
-/// The weight of the section over the whole member: sum of density x area x g.
-#[pyfunction]
-fn self_weight(py: Python<'_>) -> PyResult<Load> {
-    let recipe = Recipe::call(py, "self_weight", PyTuple::empty(py))?;
-    Ok(Load(Made::new(member::Load::SelfWeight, recipe)))
-}
-
-/// A constant line load over the whole member, positive downward.
-///
-/// >>> uniform(5*kN/m) == uniform("5 N/mm")
-/// True
-#[pyfunction]
-fn uniform(load: &Bound<'_, PyAny>) -> PyResult<Load> {
-    let core = member::Load::Uniform {
-        load: convert::read(load, "uniform.load")?,
-    };
-    let recipe = Recipe::call(load.py(), "uniform", (load,))?;
-    Ok(Load(Made::new(core, recipe)))
-}
-
-/// A constant line load from one place to another, positive downward.
-#[pyfunction]
-#[pyo3(signature = (load, from_, to))]
-fn partial<'py>(
-    load: &Bound<'py, PyAny>,
-    from_: &Bound<'py, PyAny>,
-    to: &Bound<'py, PyAny>,
-) -> PyResult<Load> {
-    let mut inputs = Inputs::default();
-    let q = inputs.read(load, "partial.load")?;
-    let from = inputs.read(from_, "partial.from")?;
-    let end = inputs.read(to, "partial.to")?;
-    let core = || {
-        Some(member::Load::Partial {
-            load: q?,
-            from: from?,
-            to: end?,
-        })
-    };
-    let core = inputs.done(load.py(), core())?;
-    let recipe = Recipe::call(load.py(), "partial", (load, from_, to))?;
-    Ok(Load(Made::new(core, recipe)))
-}
-
-/// A point load at a place, positive downward.
-#[pyfunction]
-fn point<'py>(load: &Bound<'py, PyAny>, at: &Bound<'py, PyAny>) -> PyResult<Load> {
-    let mut inputs = Inputs::default();
-    let force = inputs.read(load, "point.load")?;
-    let place = inputs.read(at, "point.at")?;
-    let core = force
-        .zip(place)
-        .map(|(load, at)| member::Load::Point { load, at });
-    let core = inputs.done(load.py(), core)?;
-    let recipe = Recipe::call(load.py(), "point", (load, at))?;
-    Ok(Load(Made::new(core, recipe)))
 }
 
 /// A named action: what acts together, from one cause.
@@ -88,13 +26,41 @@ fn point<'py>(load: &Bound<'py, PyAny>, at: &Bound<'py, PyAny>) -> PyResult<Load
 #[derive(Debug, PartialEq)]
 pub(crate) struct Action(pub(crate) Made<member::Action>);
 
-impl Action {
-    fn made(name: &str, kind: ActionKind, loads: &[Py<Load>], recipe: Recipe) -> Self {
-        let action = member::Action::new(name, kind);
-        let action = loads
-            .iter()
-            .fold(action, |action, load| action.load(load.get().0.inner));
-        Self(Made::new(action, recipe))
+/// The name and the loads of an action, and whether it relieves.
+struct Given<'a> {
+    name: &'a str,
+    loads: &'a [Py<Load>],
+    favourable: bool,
+}
+
+impl Given<'_> {
+    /// The action of a kind, made again by a call of `function` with these keywords.
+    fn made(
+        &self,
+        kind: ActionKind,
+        function: &'static str,
+        keywords: &Bound<'_, PyDict>,
+    ) -> PyResult<Action> {
+        let py = keywords.py();
+        let mut arguments = vec![self.name.into_pyobject(py)?.into_any()];
+        arguments.extend(
+            self.loads
+                .iter()
+                .map(|load| load.bind(py).clone().into_any()),
+        );
+        keywords.set_item("favourable", self.favourable)?;
+        let recipe = Recipe::call(py, function, PyTuple::new(py, arguments)?)?.with(keywords);
+        let action = member::Action::new(self.name, kind);
+        let action = if self.favourable {
+            action.favourable()
+        } else {
+            action
+        };
+        let loads = self.loads.iter().map(|load| load.get().0.inner);
+        Ok(Action(Made::new(
+            loads.fold(action, member::Action::load),
+            recipe,
+        )))
     }
 }
 
@@ -115,6 +81,25 @@ impl Action {
         }
     }
 
+    /// Whether it relieves what is being checked.
+    #[getter]
+    fn favourable(&self) -> bool {
+        self.0.effect() == Effect::Favourable
+    }
+
+    /// The combination factors of a variable action; None for a permanent one.
+    #[getter]
+    fn factors(&self) -> Option<CombinationFactors> {
+        match self.0.kind() {
+            ActionKind::Permanent => None,
+            ActionKind::Variable(factors) => Some(CombinationFactors {
+                psi_0: factors.psi_0,
+                psi_1: factors.psi_1,
+                psi_2: factors.psi_2,
+            }),
+        }
+    }
+
     fn __reduce__<'py>(&self, py: Python<'py>) -> PyResult<Reduced<'py>> {
         self.0.reduce(py)
     }
@@ -124,72 +109,103 @@ impl Action {
     }
 }
 
-/// The name and the loads as the arguments of a call.
-fn arguments<'py>(
-    py: Python<'py>,
-    name: &str,
-    loads: &[Py<Load>],
-) -> PyResult<Bound<'py, PyTuple>> {
-    let mut arguments = vec![name.into_pyobject(py)?.into_any()];
-    arguments.extend(loads.iter().map(|load| load.bind(py).clone().into_any()));
-    PyTuple::new(py, arguments)
-}
-
 /// An action that acts from the first day to the last.
+///
+/// favourable: it relieves what is being checked, so that the fundamental combination takes it with
+/// the smaller partial factor permanent_favourable.
 ///
 /// >>> permanent("floor", self_weight(), uniform(1.2*kN/m)).kind
 /// 'permanent'
 #[pyfunction]
-#[pyo3(signature = (name, *loads))]
-fn permanent(py: Python<'_>, name: &str, loads: Vec<Py<Load>>) -> PyResult<Action> {
-    let recipe = Recipe::call(py, "permanent", arguments(py, name, &loads)?)?;
-    Ok(Action::made(name, ActionKind::Permanent, &loads, recipe))
+#[pyo3(signature = (name, *loads, favourable=false))]
+#[expect(
+    clippy::needless_pass_by_value,
+    reason = "Python's arguments are taken as owned"
+)]
+fn permanent(
+    py: Python<'_>,
+    name: &str,
+    loads: Vec<Py<Load>>,
+    favourable: bool,
+) -> PyResult<Action> {
+    let given = Given {
+        name,
+        loads: &loads,
+        favourable,
+    };
+    given.made(ActionKind::Permanent, "permanent", &PyDict::new(py))
 }
 
 /// An action that comes and goes, with its combination factors (EN 1990:2002 Table A1.1).
 ///
-/// psi_0: beside another, leading variable action; psi_1: the frequent value; psi_2: the
-/// quasi-permanent value, which makes creep.
+/// They are given by a category with its recommended factors, from memory, or one by one.
 ///
+/// - category: "A" (homes), "B" (offices), "C" (where people gather), "D" (shops), "E" (storage),
+///   "F" (traffic of vehicles up to 30 kN), "G" (from 30 kN to 160 kN), "H" (roofs walked on for
+///   upkeep), "snow" (1000 m above the sea or lower), "snow_high" (above, and in the north),
+///   "wind", "temperature"
+/// - psi_0: beside another, leading variable action; psi_1: the frequent value; psi_2: the
+///   quasi-permanent value, which makes creep
+/// - favourable: it relieves what is being checked, so that combinations leave it out
+///
+/// >>> variable("store", uniform(3*kN/m), category="E").factors
+/// CombinationFactors(psi_0=1.0, psi_1=0.9, psi_2=0.8)
 /// >>> variable("store", uniform(3*kN/m), psi_0=1.0, psi_1=0.9, psi_2=0.8).kind
 /// 'variable'
 #[pyfunction]
-#[pyo3(signature = (name, *loads, psi_0, psi_1, psi_2))]
+#[pyo3(signature = (
+    name, *loads, category=None, psi_0=None, psi_1=None, psi_2=None, favourable=false
+))]
+#[expect(clippy::too_many_arguments, reason = "each is a keyword in Python")]
+#[expect(
+    clippy::needless_pass_by_value,
+    reason = "Python's arguments are taken as owned"
+)]
 fn variable(
     py: Python<'_>,
     name: &str,
     loads: Vec<Py<Load>>,
-    psi_0: Number,
-    psi_1: Number,
-    psi_2: Number,
+    category: Option<&str>,
+    psi_0: Option<Number>,
+    psi_1: Option<Number>,
+    psi_2: Option<Number>,
+    favourable: bool,
 ) -> PyResult<Action> {
-    let [psi_0, psi_1, psi_2] = [psi_0.0, psi_1.0, psi_2.0];
     let keywords = PyDict::new(py);
-    keywords.set_item("psi_0", psi_0)?;
-    keywords.set_item("psi_1", psi_1)?;
-    keywords.set_item("psi_2", psi_2)?;
-    let recipe = Recipe::call(py, "variable", arguments(py, name, &loads)?)?.with(&keywords);
-    let factors = CombinationFactors {
-        psi_0,
-        psi_1,
-        psi_2,
+    let factors = match (category, psi_0, psi_1, psi_2) {
+        (Some(word), None, None, None) => {
+            keywords.set_item("category", word)?;
+            Category::from_name(word).or_raise(py)?.factors()
+        }
+        (None, Some(psi_0), Some(psi_1), Some(psi_2)) => {
+            keywords.set_item("psi_0", psi_0.0)?;
+            keywords.set_item("psi_1", psi_1.0)?;
+            keywords.set_item("psi_2", psi_2.0)?;
+            member::CombinationFactors {
+                psi_0: psi_0.0,
+                psi_1: psi_1.0,
+                psi_2: psi_2.0,
+            }
+        }
+        _ => {
+            return Err(PyTypeError::new_err(
+                "variable: neither a category alone nor psi_0, psi_1 and psi_2 alone were given; \
+                 one or the other is needed, for example category=\"A\"",
+            ));
+        }
     };
-    Ok(Action::made(
+    let given = Given {
         name,
-        ActionKind::Variable(factors),
-        &loads,
-        recipe,
-    ))
+        loads: &loads,
+        favourable,
+    };
+    given.made(ActionKind::Variable(factors), "variable", &keywords)
 }
 
 /// Adds the classes and functions to the module.
 pub(crate) fn register(module: &Bound<'_, PyModule>) -> PyResult<()> {
-    module.add_class::<Load>()?;
+    module.add_class::<CombinationFactors>()?;
     module.add_class::<Action>()?;
-    module.add_function(wrap_pyfunction!(self_weight, module)?)?;
-    module.add_function(wrap_pyfunction!(uniform, module)?)?;
-    module.add_function(wrap_pyfunction!(partial, module)?)?;
-    module.add_function(wrap_pyfunction!(point, module)?)?;
     module.add_function(wrap_pyfunction!(permanent, module)?)?;
     module.add_function(wrap_pyfunction!(variable, module)?)
 }

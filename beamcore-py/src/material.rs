@@ -1,17 +1,21 @@
-//! The class `Material` and the strength classes.
+//! The class `Material`.
 
-use crate::concrete_creep::ConcreteCreepOrNumber;
-use crate::convert::Inputs;
+use crate::characteristic::CharacteristicStrength;
+use crate::convert;
 use crate::error::OrRaise;
+use crate::factors::Factors;
 use crate::made::{Made, Recipe, Reduced};
+use crate::material_values::{self, Values};
 use crate::operand::Number;
 use crate::quantity::Quantity;
 use crate::strength::Strength;
 use crate::time::TimeText;
-use beamcore::material::{self, Creep, ServiceClass};
+use beamcore::material;
+use pyo3::IntoPyObjectExt;
 use pyo3::prelude::*;
+use pyo3::types::PyTuple;
 
-/// Elastic values of one stuff, with its density, creep and design strengths.
+/// Elastic values of one stuff, with its density, creep, thermal expansion and strengths.
 ///
 /// modulus is the short-term modulus of elasticity E; at the end of the life E / (1 + creep_factor)
 /// acts. The values are checked when the material is used in a section.
@@ -22,6 +26,20 @@ use pyo3::prelude::*;
 #[pyclass(frozen, eq, module = "beamcore")]
 #[derive(Debug, PartialEq)]
 pub(crate) struct Material(pub(crate) Made<material::Material>);
+
+impl Material {
+    /// The material that a method of one argument makes of this one.
+    fn with<'py>(
+        slf: &Bound<'py, Self>,
+        method: &'static str,
+        argument: impl IntoPyObjectExt<'py>,
+        make: impl FnOnce(material::Material) -> material::Material,
+    ) -> PyResult<Self> {
+        let argument = argument.into_bound_py_any(slf.py())?;
+        let recipe = Recipe::method(slf, method, (argument,))?;
+        Ok(Self(Made::new(make(slf.get().0.inner.clone()), recipe)))
+    }
+}
 
 #[pymethods]
 impl Material {
@@ -35,24 +53,10 @@ impl Material {
         density: Option<&Bound<'py, PyAny>>,
         design_strength: Option<&Bound<'py, PyAny>>,
     ) -> PyResult<Self> {
-        let mut inputs = Inputs::default();
-        let given = inputs.read(modulus, "material.modulus")?;
-        let material = given
-            .map(|modulus| material::Material::new(name, modulus, Creep::factor(creep_factor.0)));
-        let mut material = match density {
-            None => material,
-            Some(density) => {
-                let density = inputs.read(density, "material.density")?;
-                material
-                    .zip(density)
-                    .map(|(material, density)| material.density(density))
-            }
-        };
+        let mut material = material_values::first(name, modulus, creep_factor.0, density)?;
         if let Some(strength) = design_strength {
-            let strength: Strength = strength.extract()?;
-            material = material.map(|material| material.design_strength(strength.into_core()));
+            material = material.design_strength(strength.extract::<Strength>()?.into_core());
         }
-        let material = inputs.done(py, material)?;
         let args = (name, modulus, creep_factor.0, density, design_strength);
         Ok(Self(Made::new(
             material,
@@ -77,10 +81,54 @@ impl Material {
         Quantity::of(self.0.modulus_at(time.into()))
     }
 
+    /// The 5 % fractile of the modulus of elasticity, E_05; None if it is not known.
+    #[getter]
+    fn fractile_modulus(&self) -> Option<Quantity> {
+        self.0.modulus_05().map(Quantity::of)
+    }
+
+    /// The short-term mean shear modulus: G as given, else E/(2 (1 + nu)); None if neither G nor
+    /// Poisson's ratio is known.
+    #[getter]
+    fn shear_modulus(&self) -> Option<Quantity> {
+        self.0.mean_shear_modulus().map(Quantity::of)
+    }
+
+    /// The shear modulus at a time: G at "initial", G/(1 + creep_factor) at "final"; None if it is
+    /// not known (EN 1995-1-1:2004 eq. 2.8, from memory).
+    fn shear_modulus_at(&self, time: TimeText) -> Option<Quantity> {
+        self.0.shear_modulus_at(time.into()).map(Quantity::of)
+    }
+
+    /// Poisson's ratio nu; None if it is not given.
+    #[getter]
+    fn poisson_ratio(&self) -> Option<f64> {
+        self.0.poisson()
+    }
+
     /// The mean density, from which self-weight follows; None if it is not known.
     #[getter]
     fn density(&self) -> Option<Quantity> {
         self.0.mean_density().map(Quantity::of)
+    }
+
+    /// The 5 % fractile of the density, rho_k; None if it is not known.
+    #[getter]
+    fn fractile_density(&self) -> Option<Quantity> {
+        self.0.density_05().map(Quantity::of)
+    }
+
+    /// The thermal expansion alpha, positive where warmth lengthens; None if it is not known.
+    #[getter]
+    fn thermal_expansion(&self) -> Option<Quantity> {
+        self.0.expansion().map(Quantity::of)
+    }
+
+    /// Where the thermal expansion of a class comes from, which is often not the standard of the
+    /// class; None if it was given or is not known.
+    #[getter]
+    fn thermal_expansion_origin(&self) -> Option<&str> {
+        self.0.expansion_origin()
     }
 
     /// The creep factor: strain grows by this multiple of itself under a lasting stress.
@@ -95,10 +143,35 @@ impl Material {
         self.0.creep().basis()
     }
 
-    /// The design strengths; None if they are not given.
+    /// The characteristic strengths; None if they are not known. No stress is compared with them.
+    #[getter]
+    fn characteristic_strength(&self) -> Option<CharacteristicStrength> {
+        self.0.characteristic().and_then(CharacteristicStrength::of)
+    }
+
+    /// The factors from characteristic to design strengths; None if they are not given.
+    #[getter]
+    fn design_factors(&self) -> Option<Factors> {
+        self.0.factors().and_then(Factors::of)
+    }
+
+    /// The design strengths, as given or made of the characteristic ones by the design factors;
+    /// None if there are none.
     #[getter]
     fn design_strength(&self) -> Option<Strength> {
         self.0.strength().and_then(Strength::of)
+    }
+
+    /// The design shear strength: as given, else made by the design factors (f_v,d of timber), else
+    /// f_y,d/sqrt(3) of metal; None if there is none.
+    #[getter]
+    fn design_shear_strength(&self) -> Option<Quantity> {
+        self.0.design_shear_strength().map(Quantity::of)
+    }
+
+    /// The design strengths, or the error of what is missing for them.
+    fn design_values(&self, py: Python<'_>) -> PyResult<Option<Strength>> {
+        Ok(Strength::of(&self.0.design_values().or_raise(py)?))
     }
 
     /// The standard, edition and class of the values; None if they were given one by one.
@@ -107,16 +180,91 @@ impl Material {
         self.0.origin()
     }
 
+    /// The values of the class that were overridden, one text for each; empty without a class.
+    #[getter]
+    fn overrides<'py>(&self, py: Python<'py>) -> PyResult<Bound<'py, PyTuple>> {
+        PyTuple::new(py, self.0.overrides())
+    }
+
     /// The same material under another name.
     ///
     /// >>> timber("C24", service_class=1).named("old joist").name
     /// 'old joist'
     fn named(slf: &Bound<'_, Self>, name: &str) -> PyResult<Self> {
-        let named = slf.get().0.inner.clone().named(name);
-        Ok(Self(Made::new(
-            named,
-            Recipe::method(slf, "named", (name,))?,
-        )))
+        Self::with(slf, "named", name, |material| material.named(name))
+    }
+
+    /// The same material with values of its own, beside or instead of those it has.
+    ///
+    /// - modulus: another E; E_05 and G stay, unless G follows from E and nu
+    /// - fractile_modulus, fractile_density: the 5 % fractiles E_05 and rho_k
+    /// - shear_modulus: G; poisson_ratio: nu from 0 to 0.5, so that G = E/(2 (1 + nu)). Either of
+    ///   them replaces what a class has; both must agree within 1 %
+    /// - density: the mean density, from which self-weight follows
+    /// - thermal_expansion: as 12e-6/K, positive where warmth lengthens
+    /// - creep: a creep factor, or a ConcreteCreep from which it follows
+    ///
+    /// >>> dense = timber("C24", service_class=1).with_values(density=450*kg/m**3)
+    /// >>> dense.overrides
+    /// ('density 450 kg/m3 instead of 420 kg/m3',)
+    #[pyo3(signature = (
+        *, modulus=None, fractile_modulus=None, shear_modulus=None, poisson_ratio=None,
+        density=None, fractile_density=None, thermal_expansion=None, creep=None
+    ))]
+    #[expect(clippy::too_many_arguments, reason = "each is a keyword in Python")]
+    fn with_values<'py>(
+        slf: &Bound<'py, Self>,
+        modulus: Option<&Bound<'py, PyAny>>,
+        fractile_modulus: Option<&Bound<'py, PyAny>>,
+        shear_modulus: Option<&Bound<'py, PyAny>>,
+        poisson_ratio: Option<Number>,
+        density: Option<&Bound<'py, PyAny>>,
+        fractile_density: Option<&Bound<'py, PyAny>>,
+        thermal_expansion: Option<&Bound<'py, PyAny>>,
+        creep: Option<&Bound<'py, PyAny>>,
+    ) -> PyResult<Self> {
+        use material::Material as Core;
+        let py = slf.py();
+        let (material, keywords) = Values::of(py, slf.get().0.inner.clone())
+            .quantity("modulus", modulus, Core::modulus_override)?
+            .quantity("fractile_modulus", fractile_modulus, Core::fractile_modulus)?
+            .quantity("shear_modulus", shear_modulus, Core::shear_modulus)?
+            .poisson_ratio(poisson_ratio)?
+            .quantity("density", density, Core::density)?
+            .quantity("fractile_density", fractile_density, Core::fractile_density)?
+            .quantity(
+                "thermal_expansion",
+                thermal_expansion,
+                Core::thermal_expansion,
+            )?
+            .creep(creep)?
+            .done()?;
+        let recipe = Recipe::method(slf, "with_values", PyTuple::empty(py))?.with(&keywords);
+        Ok(Self(Made::new(material, recipe)))
+    }
+
+    /// The same material with these characteristic strengths, which need design factors beside them
+    /// (or design strengths) before the material can be used in a section; concrete needs none.
+    fn with_characteristic_strength(
+        slf: &Bound<'_, Self>,
+        strength: CharacteristicStrength,
+    ) -> PyResult<Self> {
+        let core = strength.clone().into_core();
+        Self::with(slf, "with_characteristic_strength", strength, |material| {
+            material.characteristic_strength(core)
+        })
+    }
+
+    /// The same material with the factors that make design strengths of the characteristic ones.
+    ///
+    /// >>> plate = steel_of_thickness("S275", 20*mm).with_design_factors(MetalFactors(1.0))
+    /// >>> plate.design_strength.yield_stress
+    /// 265 MPa
+    fn with_design_factors(slf: &Bound<'_, Self>, factors: Factors) -> PyResult<Self> {
+        let core = factors.clone().into_core();
+        Self::with(slf, "with_design_factors", factors, |material| {
+            material.design_factors(core)
+        })
     }
 
     /// The same material with design strengths, against which stresses are compared.
@@ -124,14 +272,22 @@ impl Material {
     /// >>> strong = steel("S275").with_design_strength(MetalStrength(yield_stress=275*MPa))
     /// >>> strong.design_strength.yield_stress
     /// 275 MPa
-    fn with_design_strength<'py>(
+    fn with_design_strength(slf: &Bound<'_, Self>, strength: Strength) -> PyResult<Self> {
+        let core = strength.clone().into_core();
+        Self::with(slf, "with_design_strength", strength, |material| {
+            material.design_strength(core)
+        })
+    }
+
+    /// The same material with this design shear strength, as f_v,d of timber.
+    fn with_design_shear_strength<'py>(
         slf: &Bound<'py, Self>,
         strength: &Bound<'py, PyAny>,
     ) -> PyResult<Self> {
-        let core = strength.extract::<Strength>()?.into_core();
-        let with = slf.get().0.inner.clone().design_strength(core);
-        let recipe = Recipe::method(slf, "with_design_strength", (strength,))?;
-        Ok(Self(Made::new(with, recipe)))
+        let value = convert::read(strength, "material.shear_strength")?;
+        Self::with(slf, "with_design_shear_strength", strength, |material| {
+            material.shear_strength(value)
+        })
     }
 
     fn __reduce__<'py>(&self, py: Python<'py>) -> PyResult<Reduced<'py>> {
@@ -141,58 +297,4 @@ impl Material {
     fn __repr__(&self) -> String {
         format!("<Material {:?}, E = {}>", self.0.name(), self.modulus())
     }
-}
-
-/// Solid or glued laminated timber: E_0,mean along the grain, mean density, k_def as creep factor.
-///
-/// strength_class: C16, C24, C30 (EN 338:2016) or GL24h, GL28h, GL32h (EN 14080:2013), from memory;
-/// service_class: 1, 2 or 3 (EN 1995-1-1:2004).
-///
-/// >>> timber("C24", service_class=1).modulus
-/// 11 GPa
-#[pyfunction]
-fn timber(py: Python<'_>, strength_class: &str, service_class: i64) -> PyResult<Material> {
-    let mut inputs = Inputs::default();
-    let class = inputs.checked(ServiceClass::from_number(service_class));
-    let class = inputs.done(py, class)?;
-    let material = material::timber(strength_class, class).or_raise(py)?;
-    let recipe = Recipe::call(py, "timber", (strength_class, service_class))?;
-    Ok(Material(Made::new(material, recipe)))
-}
-
-/// Structural steel: E = 210 GPa, 7850 kg/m3, no creep.
-///
-/// strength_class: S235, S275 or S355 (EN 1993-1-1:2005), from memory.
-///
-/// >>> steel("S275").density
-/// 7850 kg/m**3
-#[pyfunction]
-fn steel(py: Python<'_>, strength_class: &str) -> PyResult<Material> {
-    let material = material::steel(strength_class).or_raise(py)?;
-    let recipe = Recipe::call(py, "steel", (strength_class,))?;
-    Ok(Material(Made::new(material, recipe)))
-}
-
-/// Concrete: the rounded E_cm of its class; 2500 kg/m3 with its bars. Its creep must be said.
-///
-/// strength_class: C25/30 or C30/37 (EN 1992-1-1:2004 Table 3.1), from memory;
-/// creep: a creep coefficient phi, or a ConcreteCreep from which it follows.
-///
-/// >>> concrete("C30/37", creep=2.5).modulus_at("final") == 33*GPa / 3.5
-/// True
-#[pyfunction]
-fn concrete(strength_class: &str, creep: &Bound<'_, PyAny>) -> PyResult<Material> {
-    let py = creep.py();
-    let core = creep.extract::<ConcreteCreepOrNumber>()?.into_core();
-    let material = material::concrete(strength_class, &core.or_raise(py)?).or_raise(py)?;
-    let recipe = Recipe::call(py, "concrete", (strength_class, creep))?;
-    Ok(Material(Made::new(material, recipe)))
-}
-
-/// Adds the classes and functions to the module.
-pub(crate) fn register(module: &Bound<'_, PyModule>) -> PyResult<()> {
-    module.add_class::<Material>()?;
-    module.add_function(wrap_pyfunction!(timber, module)?)?;
-    module.add_function(wrap_pyfunction!(steel, module)?)?;
-    module.add_function(wrap_pyfunction!(concrete, module)?)
 }

@@ -80,17 +80,24 @@ pub(crate) struct Part(pub(crate) Made<section::Part>);
 
 /// A part, or the name of one.
 #[derive(FromPyObject)]
-enum PartOrName {
+pub(crate) enum PartOrName {
     Part(Py<Part>),
     Name(String),
 }
 
+impl PartOrName {
+    /// The name.
+    pub(crate) fn into_name(self) -> String {
+        match self {
+            Self::Part(part) => part.get().0.name().to_owned(),
+            Self::Name(name) => name,
+        }
+    }
+}
+
 impl Part {
     fn beside(slf: &Bound<'_, Self>, side: Side, of: PartOrName) -> PyResult<Self> {
-        let of = match of {
-            PartOrName::Part(part) => part.get().0.name().to_owned(),
-            PartOrName::Name(name) => name,
-        };
+        let of = of.into_name();
         let recipe = Recipe::method(slf, side.name(), (&of,))?;
         let part = slf.get().0.inner.clone().beside(side, of);
         Ok(Self(Made::new(part, recipe)))

@@ -1,37 +1,28 @@
 //! The class `Response`.
 
-use crate::camber::Camber;
-use crate::convert::Inputs;
+use crate::camber::{Camber, Wish};
+use crate::combination::Combination;
 use crate::error::OrRaise;
 use crate::field::{Field, Line};
+use crate::limit::{self, Limit};
 use crate::made::{Made, Recipe, Reduced};
 use crate::operand::Number;
+use crate::part::PartOrName;
 use crate::quantity::Quantity;
-use crate::run::run;
+use crate::reading;
 use crate::stress::{PartStress, Utilisation};
+use crate::support::Reaction;
 use crate::time::TimeText;
-use beamcore::camber::CamberPlan;
-use beamcore::member::Combination;
+use beamcore::member;
 use beamcore::response;
 use beamcore::time::Time;
 use pyo3::prelude::*;
-use pyo3::types::{PyDict, PyTuple};
-
-record! {
-    /// The reaction of one support on the member.
-    Reaction {
-        /// The force, positive upward.
-        force: Quantity,
-        /// The couple, positive clockwise with x to the right and z up; zero unless the support
-        /// holds the rotation.
-        couple: Quantity,
-    }
-}
+use pyo3::types::PyTuple;
 
 /// The solved member: every field under every combination, at both times.
 ///
-/// Combinations are named "permanent", "quasi-permanent", "characteristic" and "fundamental"; where
-/// several variable actions can lead, as in "fundamental, NAME leading". At "initial" all parts have
+/// Combinations are named "permanent", "quasi-permanent", "characteristic", "frequent" and
+/// "fundamental"; where several variable actions can lead, as in "fundamental, NAME leading". At "initial" all parts have
 /// short-term moduli; at "final" the quasi-permanent share acts on E/(1 + creep factor) of each
 /// part and the rest on E, so that only what creeps softens.
 #[pyclass(frozen, module = "beamcore")]
@@ -60,7 +51,12 @@ impl Response {
     #[getter]
     fn combinations<'py>(&self, py: Python<'py>) -> PyResult<Bound<'py, PyTuple>> {
         let combinations = self.0.member().combinations();
-        PyTuple::new(py, combinations.iter().map(Combination::name))
+        PyTuple::new(py, combinations.iter().map(member::Combination::name))
+    }
+
+    /// The combination of a name, with its kind and its factors.
+    fn combination(&self, py: Python<'_>, name: &str) -> PyResult<Combination> {
+        Ok(Combination::of(self.0.combination(name).or_raise(py)?))
     }
 
     /// The deflection w along the member, positive downward.
@@ -143,15 +139,82 @@ impl Response {
         }))
     }
 
-    /// The camber to build in: a parabola over the chord between two supports.
+    /// The deflection of one span, positive downward: between two supports from the chord through
+    /// them, of an overhang from its support.
+    fn span_deflection(
+        slf: &Bound<'_, Self>,
+        combination: &str,
+        time: TimeText,
+        span: &str,
+    ) -> PyResult<Field> {
+        let time: Time = time.into();
+        let response = &slf.get().0;
+        let line = response
+            .span_deflection(combination, time, span)
+            .or_raise(slf.py())?;
+        let args = (combination, time.name(), span);
+        let recipe = Recipe::method(slf, "span_deflection", args)?;
+        Ok(Field(Made::new(Line::Deflection(line), recipe)))
+    }
+
+    /// The line of a component of the deflection along a span, positive downward (EN 1990:2002
+    /// A1.4.3, from memory).
     ///
-    /// Its rise is fraction x the deflection under the combination at the middle of the chord,
-    /// rounded ("nearest", "down" or "up") to whole steps; ordinates are given at the ends of equal
-    /// divisions of the chord.
-    #[pyo3(signature = (*, combination, time, fraction, from_, to, step, rounding, divisions))]
+    /// - component: "w_inst" (initial), "w_1" (permanent actions, initial), "w_2" (what creep adds
+    ///   under permanent actions), "w_3" (what variable actions add, with the creep under their
+    ///   quasi-permanent part), "w_tot" = w_1 + w_2 + w_3, or "w_max" = w_tot - w_c
+    /// - combination: a characteristic one, or one of one's own
+    /// - camber: the camber w_c, of which only w_max takes notice.
+    #[pyo3(signature = (component, combination, span, camber=None))]
+    fn deflection_component<'py>(
+        slf: &Bound<'py, Self>,
+        component: &str,
+        combination: &str,
+        span: &str,
+        camber: Option<&Bound<'py, Camber>>,
+    ) -> PyResult<Field> {
+        let (py, response) = (slf.py(), &slf.get().0);
+        let part = limit::component(component).or_raise(py)?;
+        let built = camber.map(|camber| &camber.get().0.inner);
+        let line = response
+            .deflection_component(part, combination, span, built)
+            .or_raise(py)?;
+        let args = (component, combination, span, camber);
+        let recipe = Recipe::method(slf, "deflection_component", args)?;
+        Ok(Field(Made::new(Line::Deflection(line), recipe)))
+    }
+
+    /// Compares limits of the deflection with the results: one LimitCheck per limit and span, each
+    /// under the combination that uses the limit most.
+    #[pyo3(signature = (limits, camber=None))]
+    #[expect(
+        clippy::needless_pass_by_value,
+        reason = "Python's arguments are taken as owned"
+    )]
+    fn check_limits<'py>(
+        slf: &Bound<'py, Self>,
+        limits: Vec<Py<Limit>>,
+        camber: Option<&Bound<'py, Camber>>,
+    ) -> PyResult<Bound<'py, PyTuple>> {
+        limit::checks(slf.py(), &slf.get().0, &limits, camber)
+    }
+
+    /// The camber to build in, over the chord between the supports from_ and to.
+    ///
+    /// - shape: "parabola" or "arc_through_middle", whose rise is that of the deflection line at the
+    ///   middle of the chord; "mirror", the mirror image of that line; or "arc_least_gap", the arc
+    ///   whose greatest gap to it is least
+    /// - combination, time, fraction: fraction x this deflection is built in
+    /// - step, rounding: the rise is rounded ("nearest", "down" or "up") to whole steps
+    /// - least: a smaller rise is not worth building and becomes none; without it, any is built
+    /// - divisions: ordinates are given at the ends of equal divisions of the chord.
+    #[pyo3(signature = (
+        *, shape, combination, time, fraction, from_, to, step, rounding, divisions, least=None
+    ))]
     #[expect(clippy::too_many_arguments, reason = "each is a keyword in Python")]
     fn camber<'py>(
         slf: &Bound<'py, Self>,
+        shape: &str,
         combination: &str,
         time: TimeText,
         fraction: Number,
@@ -160,36 +223,56 @@ impl Response {
         step: &Bound<'py, PyAny>,
         rounding: &str,
         divisions: u32,
+        least: Option<&Bound<'py, PyAny>>,
     ) -> PyResult<Camber> {
-        let py = slf.py();
-        let time: Time = time.into();
-        let mut inputs = Inputs::default();
-        let height = inputs.read(step, "camber.step")?;
-        let direction = inputs.checked(rounding.parse());
-        let plan = height.zip(direction).map(|(step, rounding)| CamberPlan {
-            combination: combination.to_owned(),
-            time,
+        let wish = Wish {
+            shape,
+            combination,
+            time: time.into(),
             fraction: fraction.0,
-            from: from_.to_owned(),
-            to: to.to_owned(),
+            from: from_,
+            to,
             step,
             rounding,
+            least,
             divisions,
-        });
-        let plan = inputs.done(py, plan)?;
-        let response = &slf.get().0.inner;
-        let camber = run(py, || response.camber(&plan))?;
-        let keywords = PyDict::new(py);
-        keywords.set_item("combination", combination)?;
-        keywords.set_item("time", time.name())?;
-        keywords.set_item("fraction", fraction.0)?;
-        keywords.set_item("from_", from_)?;
-        keywords.set_item("to", to)?;
-        keywords.set_item("step", step)?;
-        keywords.set_item("rounding", rounding)?;
-        keywords.set_item("divisions", divisions)?;
-        let recipe = Recipe::method(slf, "camber", PyTuple::empty(py))?.with(&keywords);
-        Ok(Camber(Made::new(camber, recipe)))
+        };
+        wish.made(slf)
+    }
+
+    /// The line that remains after the camber, deflection - camber: positive where the member lies
+    /// below the straight line, negative where it stays crowned.
+    fn remaining<'py>(
+        slf: &Bound<'py, Self>,
+        combination: &str,
+        time: TimeText,
+        camber: &Bound<'py, Camber>,
+    ) -> PyResult<Field> {
+        let time: Time = time.into();
+        let line = slf
+            .get()
+            .0
+            .remaining(combination, time, &camber.get().0.inner)
+            .or_raise(slf.py())?;
+        let args = (combination, time.name(), camber);
+        let recipe = Recipe::method(slf, "remaining", args)?;
+        Ok(Field(Made::new(Line::Deflection(line), recipe)))
+    }
+
+    /// The readings to expect in the shop at the stations of a camber, one Reading for each.
+    ///
+    /// The member lies on its side, or stands on trestles at the places left and right with the
+    /// given parts (a slab cast on site is not yet there), their own weight and short-term moduli:
+    /// standing = camber - w + (line through w at the ends of the chord), w the deflection there.
+    #[pyo3(signature = (camber, *, left, right, parts))]
+    fn readings<'py>(
+        slf: &Bound<'py, Self>,
+        camber: &Bound<'py, Camber>,
+        left: &Bound<'py, PyAny>,
+        right: &Bound<'py, PyAny>,
+        parts: Vec<PartOrName>,
+    ) -> PyResult<Bound<'py, PyTuple>> {
+        reading::readings(&slf.get().0, camber, left, right, parts)
     }
 
     /// What is left of equilibrium and continuity in the solutions, relative to their greatest
@@ -202,10 +285,4 @@ impl Response {
     fn __reduce__<'py>(&self, py: Python<'py>) -> PyResult<Reduced<'py>> {
         self.0.reduce(py)
     }
-}
-
-/// Adds the classes to the module.
-pub(crate) fn register(module: &Bound<'_, PyModule>) -> PyResult<()> {
-    module.add_class::<Reaction>()?;
-    module.add_class::<Response>()
 }

@@ -101,7 +101,7 @@ impl MetalStrength {
 }
 
 /// Design strengths of either kind.
-#[derive(FromPyObject, IntoPyObject)]
+#[derive(Clone, FromPyObject, IntoPyObject)]
 pub(crate) enum Strength {
     Timber(TimberStrength),
     Metal(MetalStrength),

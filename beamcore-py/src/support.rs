@@ -1,10 +1,21 @@
-//! The class `Support`.
+//! The classes `Support` and `Reaction`.
 
 use crate::convert;
 use crate::made::{Recipe, Reduced};
 use crate::quantity::Quantity;
 use beamcore::member::{self, SupportKind};
 use pyo3::prelude::*;
+
+record! {
+    /// The reaction of one support on the member.
+    Reaction {
+        /// The force, positive upward.
+        force: Quantity,
+        /// The couple, positive clockwise with x to the right and z up; zero unless the support
+        /// holds the rotation.
+        couple: Quantity,
+    }
+}
 
 /// A lasting support of a member, with a name that addresses its reactions.
 #[pyclass(frozen, eq, module = "beamcore")]
@@ -71,6 +82,7 @@ fn fixed(name: &str, at: &Bound<'_, PyAny>) -> PyResult<Support> {
 /// Adds the class and functions to the module.
 pub(crate) fn register(module: &Bound<'_, PyModule>) -> PyResult<()> {
     module.add_class::<Support>()?;
+    module.add_class::<Reaction>()?;
     module.add_function(wrap_pyfunction!(pin, module)?)?;
     module.add_function(wrap_pyfunction!(roller, module)?)?;
     module.add_function(wrap_pyfunction!(fixed, module)?)

@@ -39,8 +39,13 @@ impl Unit {
     }
 
     fn named(symbol: &str) -> Result<Self, Problem> {
+        let any = match symbol {
+            // The core only has what is per kelvin; as 1 / (1/K), products and powers go with K too.
+            "K" => AnyUnit::ONE.per(AnyUnit::named("/K")?)?,
+            symbol => AnyUnit::named(symbol)?,
+        };
         Ok(Self {
-            any: AnyUnit::named(symbol)?,
+            any,
             factors: vec![(symbol.to_owned(), 1)],
         })
     }

@@ -2,7 +2,7 @@
 
 Signs: x runs left to right, z up; a section is drawn as seen against x, with y to the right.
 Deflection and loads are positive downward, slope is dw/dx, V = dM/dx, a positive (sagging) moment
-stretches the bottom, tension is positive.
+stretches the bottom, tension is positive; a couple is positive clockwise.
 
 >>> from beamcore import *
 >>> joist = Part("joist", rectangle(80*mm, 220*mm), timber("C24", service_class=1))
@@ -18,21 +18,26 @@ array([0.    , 0.0061, 0.0086])
 
 from beamcore._core import *
 from beamcore._core import __version__ as __version__
-from beamcore._units import *
+from beamcore.units import *
 
 __all__ = [
-    "__version__", "Unit", "Quantity", "TimberStrength", "MetalStrength", "ConcreteCreep",
-    "Material", "timber", "steel", "concrete", "Outline", "rectangle", "Part", "Section",
-    "Stiffness", "TransformedPart", "TransformedSection", "Support", "pin", "roller", "fixed",
-    "Load", "self_weight", "uniform", "partial", "point", "Action", "permanent", "variable",
+    "__version__", "Unit", "Quantity", "TimberStrength", "MetalStrength",
+    "CharacteristicTimberStrength", "CharacteristicMetalStrength",
+    "CharacteristicConcreteStrength", "TimberFactors", "MetalFactors", "ConcreteCreep",
+    "ConcreteShrinkage", "concrete_mean_modulus", "concrete_strength_share",
+    "concrete_modulus_at_age", "Material", "timber", "steel", "steel_of_thickness", "aluminium",
+    "concrete", "Outline", "rectangle", "Part", "Section", "Stiffness", "TransformedPart",
+    "TransformedSection", "Support", "pin", "roller", "fixed", "CombinationFactors", "Load",
+    "self_weight", "uniform", "partial", "trapezoidal", "area", "point", "couple", "Action",
+    "permanent", "variable", "PartialFactors", "OwnCombination", "Combination", "Span",
     "Member", "Job", "Outcome", "run", "job_schema", "outcome_schema", "BeamcoreError",
     "ValueProblem", "NameProblem", "KeyProblem", "UnitProblem", "DuplicateProblem",
     "GeometryProblem", "MissingProblem", "MechanismProblem", "PositionProblem", "SyntaxProblem",
     "VersionProblem", "FileProblem", "LookupProblem", "NumericalProblem", "Problem", "Extreme",
     "Sides", "Field", "StressExtreme", "Utilisation", "PartStress", "Ordinate", "Camber",
-    "Reaction", "Response",
+    "Reading", "Reaction", "Limit", "LimitCheck", "Response",
     # Units
     "m", "mm", "cm", "inch", "ft", "N", "kN", "MN", "lbf", "kip", "plf", "Pa", "kPa", "MPa",
     "psi", "ksi", "GPa", "permille", "rad", "mrad", "deg", "kg", "t", "lb", "s", "h", "day",
-    "year",
+    "year", "K",
 ]

@@ -3,6 +3,13 @@ from os import PathLike
 from typing import Any, ClassVar, Final, Literal, TypeAlias, TypeVar, final, overload
 
 from beamcore._typing import QuantityLike
+from beamcore.actions import (
+    CombinationFactors as CombinationFactors, Load as Load, self_weight as self_weight,
+    uniform as uniform, partial as partial, trapezoidal as trapezoidal, area as area,
+    point as point, couple as couple, Action as Action, permanent as permanent,
+    variable as variable, PartialFactors as PartialFactors, OwnCombination as OwnCombination,
+    Combination as Combination,
+)
 from beamcore.errors import (
     BeamcoreError as BeamcoreError, ValueProblem as ValueProblem, NameProblem as NameProblem,
     KeyProblem as KeyProblem, UnitProblem as UnitProblem, DuplicateProblem as DuplicateProblem,
@@ -11,23 +18,41 @@ from beamcore.errors import (
     SyntaxProblem as SyntaxProblem, VersionProblem as VersionProblem, FileProblem as FileProblem,
     LookupProblem as LookupProblem, NumericalProblem as NumericalProblem, Problem as Problem,
 )
+from beamcore.materials import (
+    TimberStrength as TimberStrength, MetalStrength as MetalStrength,
+    CharacteristicTimberStrength as CharacteristicTimberStrength,
+    CharacteristicMetalStrength as CharacteristicMetalStrength,
+    CharacteristicConcreteStrength as CharacteristicConcreteStrength,
+    TimberFactors as TimberFactors, MetalFactors as MetalFactors, ConcreteCreep as ConcreteCreep,
+    ConcreteShrinkage as ConcreteShrinkage, concrete_mean_modulus as concrete_mean_modulus,
+    concrete_strength_share as concrete_strength_share,
+    concrete_modulus_at_age as concrete_modulus_at_age, Material as Material, timber as timber,
+    steel as steel, steel_of_thickness as steel_of_thickness, aluminium as aluminium,
+    concrete as concrete,
+)
 from beamcore.results import (
     Extreme as Extreme, Sides as Sides, Field as Field, StressExtreme as StressExtreme,
     Utilisation as Utilisation, PartStress as PartStress, Ordinate as Ordinate, Camber as Camber,
-    Reaction as Reaction, Response as Response,
+    Reading as Reading, Reaction as Reaction, Limit as Limit, LimitCheck as LimitCheck,
+    Response as Response,
 )
 
 __all__ = [
-    "__version__", "Unit", "Quantity", "TimberStrength", "MetalStrength", "ConcreteCreep",
-    "Material", "timber", "steel", "concrete", "Outline", "rectangle", "Part", "Section",
-    "Stiffness", "TransformedPart", "TransformedSection", "Support", "pin", "roller", "fixed",
-    "Load", "self_weight", "uniform", "partial", "point", "Action", "permanent", "variable",
+    "__version__", "Unit", "Quantity", "TimberStrength", "MetalStrength",
+    "CharacteristicTimberStrength", "CharacteristicMetalStrength",
+    "CharacteristicConcreteStrength", "TimberFactors", "MetalFactors", "ConcreteCreep",
+    "ConcreteShrinkage", "concrete_mean_modulus", "concrete_strength_share",
+    "concrete_modulus_at_age", "Material", "timber", "steel", "steel_of_thickness", "aluminium",
+    "concrete", "Outline", "rectangle", "Part", "Section", "Stiffness", "TransformedPart",
+    "TransformedSection", "Support", "pin", "roller", "fixed", "CombinationFactors", "Load",
+    "self_weight", "uniform", "partial", "trapezoidal", "area", "point", "couple", "Action",
+    "permanent", "variable", "PartialFactors", "OwnCombination", "Combination", "Span",
     "Member", "Job", "Outcome", "run", "job_schema", "outcome_schema", "BeamcoreError",
     "ValueProblem", "NameProblem", "KeyProblem", "UnitProblem", "DuplicateProblem",
     "GeometryProblem", "MissingProblem", "MechanismProblem", "PositionProblem", "SyntaxProblem",
     "VersionProblem", "FileProblem", "LookupProblem", "NumericalProblem", "Problem", "Extreme",
     "Sides", "Field", "StressExtreme", "Utilisation", "PartStress", "Ordinate", "Camber",
-    "Reaction", "Response",
+    "Reading", "Reaction", "Limit", "LimitCheck", "Response",
 ]
 
 _T = TypeVar("_T", Unit, Quantity)
@@ -91,64 +116,6 @@ class Quantity:
     def __ge__(self, other: Quantity, /) -> bool: ...
     def __eq__(self, other: object, /) -> bool: ...
     def __hash__(self) -> int: ...
-
-@final
-class TimberStrength:
-    bending: Final[Quantity]
-    tension: Final[Quantity]
-    compression: Final[Quantity]
-    def __new__(
-        cls, bending: QuantityLike, tension: QuantityLike, compression: QuantityLike
-    ) -> TimberStrength: ...
-
-@final
-class MetalStrength:
-    yield_stress: Final[Quantity]
-    def __new__(cls, yield_stress: QuantityLike) -> MetalStrength: ...
-
-@final
-class ConcreteCreep:
-    coefficient: Final[float]
-    mean_strength: Final[Quantity]
-    relative_humidity_percent: Final[float]
-    notional_size: Final[Quantity]
-    age_at_loading: Final[Quantity]
-    age_at_end: Final[Quantity]
-    cement: Final[Literal["S", "N", "R"]]
-    def __new__(
-        cls,
-        mean_strength: QuantityLike,
-        relative_humidity_percent: float,
-        notional_size: QuantityLike,
-        age_at_loading: QuantityLike,
-        age_at_end: QuantityLike,
-        cement: Literal["S", "N", "R"],
-    ) -> ConcreteCreep: ...
-
-@final
-class Material:
-    name: Final[str]
-    modulus: Final[Quantity]
-    density: Final[Quantity | None]
-    creep_factor: Final[float]
-    creep_basis: Final[str]
-    design_strength: Final[TimberStrength | MetalStrength | None]
-    origin: Final[str | None]
-    def __new__(
-        cls,
-        name: str,
-        modulus: QuantityLike,
-        creep_factor: float,
-        density: QuantityLike | None = None,
-        design_strength: TimberStrength | MetalStrength | None = None,
-    ) -> Material: ...
-    def modulus_at(self, time: _Time) -> Quantity: ...
-    def named(self, name: str) -> Material: ...
-    def with_design_strength(self, strength: TimberStrength | MetalStrength) -> Material: ...
-
-def timber(strength_class: str, service_class: int) -> Material: ...
-def steel(strength_class: str) -> Material: ...
-def concrete(strength_class: str, creep: float | ConcreteCreep) -> Material: ...
 
 @final
 class Outline:
@@ -222,27 +189,23 @@ def roller(name: str, at: QuantityLike) -> Support: ...
 def fixed(name: str, at: QuantityLike) -> Support: ...
 
 @final
-class Load:
-    kind: Final[str]
-
-def self_weight() -> Load: ...
-def uniform(load: QuantityLike) -> Load: ...
-def partial(load: QuantityLike, from_: QuantityLike, to: QuantityLike) -> Load: ...
-def point(load: QuantityLike, at: QuantityLike) -> Load: ...
-
-@final
-class Action:
+class Span:
     name: Final[str]
-    kind: Final[str]
-
-def permanent(name: str, *loads: Load) -> Action: ...
-def variable(name: str, *loads: Load, psi_0: float, psi_1: float, psi_2: float) -> Action: ...
+    from_: Final[Quantity]
+    to: Final[Quantity]
+    length: Final[Quantity]
+    cantilever: Final[bool]
+    def __new__(
+        cls, name: str, from_: Quantity, to: Quantity, length: Quantity, cantilever: bool
+    ) -> Span: ...
 
 @final
 class Member:
     length: Final[Quantity]
     support_names: Final[tuple[str, ...]]
     combinations: Final[tuple[str, ...]]
+    partial_factors: Final[PartialFactors]
+    spans: Final[tuple[Span, ...]]
     notes: Final[tuple[str, ...]]
     def __new__(
         cls,
@@ -250,9 +213,20 @@ class Member:
         length: QuantityLike,
         supports: Sequence[Support],
         actions: Sequence[Action],
+        *,
+        partial_factors: PartialFactors | None = None,
+        own_combinations: Sequence[OwnCombination] = ...,
     ) -> Member: ...
     @staticmethod
-    def simple_span(section: Section, span: QuantityLike, actions: Sequence[Action]) -> Member: ...
+    def simple_span(
+        section: Section,
+        span: QuantityLike,
+        actions: Sequence[Action],
+        *,
+        partial_factors: PartialFactors | None = None,
+        own_combinations: Sequence[OwnCombination] = ...,
+    ) -> Member: ...
+    def span(self, name: str) -> Span: ...
     def solve(self) -> Response: ...
 
 @final

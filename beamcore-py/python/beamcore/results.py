@@ -1,4 +1,4 @@
-"""What comes of a solved member: fields along it, reactions, stresses and camber."""
+"""What comes of a solved member: fields, reactions, stresses, limits and camber."""
 
 from beamcore._core import (
     Extreme,
@@ -9,7 +9,10 @@ from beamcore._core import (
     PartStress,
     Ordinate,
     Camber,
+    Reading,
     Reaction,
+    Limit,
+    LimitCheck,
     Response,
 )
 
@@ -22,6 +25,9 @@ __all__ = [
     "PartStress",
     "Ordinate",
     "Camber",
+    "Reading",
     "Reaction",
+    "Limit",
+    "LimitCheck",
     "Response",
 ]

@@ -1,9 +1,11 @@
-from typing import Final, Literal, TypeAlias, final
+from collections.abc import Sequence
+from typing import Final, Literal, TypeAlias, final, overload
 
 import numpy as np
 from numpy.typing import ArrayLike, NDArray
 
-from beamcore._core import Quantity
+from beamcore._core import Part, Quantity
+from beamcore.actions import Combination
 from beamcore._typing import QuantityLike
 
 __all__ = [
@@ -15,11 +17,16 @@ __all__ = [
     "PartStress",
     "Ordinate",
     "Camber",
+    "Reading",
     "Reaction",
+    "Limit",
+    "LimitCheck",
     "Response",
 ]
 
 _Time: TypeAlias = Literal["initial", "final"]
+_Component: TypeAlias = Literal["w_inst", "w_1", "w_2", "w_3", "w_tot", "w_max"]
+_Shape: TypeAlias = Literal["parabola", "mirror", "arc_through_middle", "arc_least_gap"]
 _Array: TypeAlias = NDArray[np.float64]
 
 @final
@@ -77,11 +84,68 @@ class Ordinate:
 
 @final
 class Camber:
+    shape: Final[_Shape]
+    radius: Final[Quantity | None]
     target: Final[Quantity]
     rise: Final[Quantity]
     chord: Final[tuple[Quantity, Quantity]]
     ordinates: Final[tuple[Ordinate, ...]]
     def ordinate(self, at: QuantityLike) -> Quantity: ...
+
+@final
+class Reading:
+    station: Final[Quantity]
+    lying: Final[Quantity]
+    standing: Final[Quantity]
+    def __new__(cls, station: Quantity, lying: Quantity, standing: Quantity) -> Reading: ...
+
+@final
+class Limit:
+    component: Final[_Component]
+    span_over: Final[float | None]
+    value: Final[Quantity | None]
+    span: Final[str | None]
+    combination: Final[str | None]
+    @overload
+    def __new__(
+        cls,
+        component: _Component,
+        *,
+        span_over: float,
+        value: None = None,
+        span: str | None = None,
+        combination: str | None = None,
+    ) -> Limit: ...
+    @overload
+    def __new__(
+        cls,
+        component: _Component,
+        *,
+        span_over: None = None,
+        value: QuantityLike,
+        span: str | None = None,
+        combination: str | None = None,
+    ) -> Limit: ...
+
+@final
+class LimitCheck:
+    component: Final[str]
+    combination: Final[str]
+    span: Final[str]
+    value: Final[Quantity]
+    at: Final[Quantity]
+    allowed: Final[Quantity]
+    utilisation: Final[float]
+    def __new__(
+        cls,
+        component: str,
+        combination: str,
+        span: str,
+        value: Quantity,
+        at: Quantity,
+        allowed: Quantity,
+        utilisation: float,
+    ) -> LimitCheck: ...
 
 @final
 class Reaction:
@@ -93,6 +157,7 @@ class Reaction:
 class Response:
     combinations: Final[tuple[str, ...]]
     residual: Final[float]
+    def combination(self, name: str) -> Combination: ...
     def deflection(self, combination: str, time: _Time) -> Field: ...
     def slope(self, combination: str, time: _Time) -> Field: ...
     def shear(self, combination: str, time: _Time) -> Field: ...
@@ -100,9 +165,17 @@ class Response:
     def reaction(self, combination: str, time: _Time, support: str) -> Reaction: ...
     def stress(self, combination: str, time: _Time, part: str) -> PartStress: ...
     def utilisation(self, combination: str, time: _Time, part: str) -> Utilisation | None: ...
+    def span_deflection(self, combination: str, time: _Time, span: str) -> Field: ...
+    def deflection_component(
+        self, component: _Component, combination: str, span: str, camber: Camber | None = None
+    ) -> Field: ...
+    def check_limits(
+        self, limits: Sequence[Limit], camber: Camber | None = None
+    ) -> tuple[LimitCheck, ...]: ...
     def camber(
         self,
         *,
+        shape: _Shape,
         combination: str,
         time: _Time,
         fraction: float,
@@ -111,4 +184,14 @@ class Response:
         step: QuantityLike,
         rounding: Literal["nearest", "down", "up"],
         divisions: int,
+        least: QuantityLike | None = None,
     ) -> Camber: ...
+    def remaining(self, combination: str, time: _Time, camber: Camber) -> Field: ...
+    def readings(
+        self,
+        camber: Camber,
+        *,
+        left: QuantityLike,
+        right: QuantityLike,
+        parts: Sequence[Part | str],
+    ) -> tuple[Reading, ...]: ...

@@ -1,4 +1,14 @@
-"""Units to multiply numbers with: ``225 * mm``, ``6.5 * kN / m``, ``8e6 * mm**4``."""
+"""Units to multiply numbers with: ``225 * mm``, ``6.5 * kN / m``, ``12e-6 / K``."""
 
+from typing import Final
+
+from beamcore._core import Unit
 from beamcore._units import *
-from beamcore._units import __all__ as __all__
+
+__all__ = [
+    "m", "mm", "cm", "inch", "ft", "N", "kN", "MN", "lbf", "kip", "plf", "Pa", "kPa", "MPa",
+    "psi", "ksi", "GPa", "permille", "rad", "mrad", "deg", "kg", "t", "lb", "s", "h", "day",
+    "year", "K",
+]
+
+K: Final[Unit] = Unit("K")

@@ -1,0 +1,43 @@
+"""Materials by value and by strength class, with their strengths, creep and shrinkage."""
+
+from beamcore._core import (
+    TimberStrength,
+    MetalStrength,
+    CharacteristicTimberStrength,
+    CharacteristicMetalStrength,
+    CharacteristicConcreteStrength,
+    TimberFactors,
+    MetalFactors,
+    ConcreteCreep,
+    ConcreteShrinkage,
+    concrete_mean_modulus,
+    concrete_strength_share,
+    concrete_modulus_at_age,
+    Material,
+    timber,
+    steel,
+    steel_of_thickness,
+    aluminium,
+    concrete,
+)
+
+__all__ = [
+    "TimberStrength",
+    "MetalStrength",
+    "CharacteristicTimberStrength",
+    "CharacteristicMetalStrength",
+    "CharacteristicConcreteStrength",
+    "TimberFactors",
+    "MetalFactors",
+    "ConcreteCreep",
+    "ConcreteShrinkage",
+    "concrete_mean_modulus",
+    "concrete_strength_share",
+    "concrete_modulus_at_age",
+    "Material",
+    "timber",
+    "steel",
+    "steel_of_thickness",
+    "aluminium",
+    "concrete",
+]
