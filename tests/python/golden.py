@@ -10,6 +10,8 @@ from collections.abc import Iterator
 from pathlib import Path
 from typing import Literal
 
+import golden_roof_beam
+
 from beamcore import Job, Member, Response, Section
 from beamcore import ConcreteCreep, Material, concrete, steel, timber
 from beamcore import Part, fixed, partial, permanent, point, rectangle, roller, self_weight
@@ -107,6 +109,7 @@ def typed() -> list[str]:
         answers += [line(case, *found) for found in fields(section, member, response)]
         if case == "slab-strip":
             answers += [line(case, *found) for found in camber(response)]
+    answers += [line("roof-beam", *found) for found in golden_roof_beam.answers()]
     return answers
 
 
@@ -147,6 +150,7 @@ def fields(section: Section, member: Member, response: Response) -> Found:
 
 def camber(response: Response) -> Found:
     camber = response.camber(
+        shape="parabola",
         combination="quasi-permanent",
         time="final",
         fraction=1,

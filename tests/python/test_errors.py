@@ -138,7 +138,8 @@ def test_two_mistakes_of_meaning_give_both() -> None:
 def test_mistakes_in_camber_are_told_at_once() -> None:
     def camber(step: Any, rounding: Any, to: str = "right") -> Any:
         return span(DEAD).solve().camber(
-            combination="dead", time="final", fraction=3, from_="left", to=to, step=step,
+            shape="mirror", combination="dead", time="final", fraction=3, from_="left", to=to,
+            step=step,
             rounding=rounding, divisions=0,
         )
 

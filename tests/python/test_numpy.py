@@ -76,7 +76,7 @@ def test_empty_and_large_arrays(deflection: Field) -> None:
 
 
 def test_arrays_that_do_not_fit(deflection: Field) -> None:
-    with pytest.raises(beamcore.PositionProblem, match="found 4.1 m; expected a place on the mem"):
+    with pytest.raises(beamcore.PositionProblem, match="found 4.1 m; expected a place on the line"):
         deflection.values_m([0, 4.1])
     with pytest.raises(beamcore.PositionProblem):
         deflection.values_m([float("nan")])

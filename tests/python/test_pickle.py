@@ -6,16 +6,20 @@ from pathlib import Path
 from typing import Any
 
 import golden
+import golden_roof_beam
 import numpy as np
 import pytest
 
 import beamcore
 from beamcore import (
-    Camber, ConcreteCreep, Extreme, Field, Job, MetalStrength, Part, Problem, Quantity, Section,
-    TimberStrength, Unit, concrete, fixed, partial, permanent, pin, point, rectangle, roller,
-    self_weight, steel, timber, uniform, variable,
+    Camber, CharacteristicConcreteStrength, CharacteristicMetalStrength,
+    CharacteristicTimberStrength, ConcreteCreep, ConcreteShrinkage, Extreme, Field, Job, Limit,
+    MetalFactors, MetalStrength, OwnCombination, Part, PartialFactors, Problem, Quantity, Section,
+    TimberFactors, TimberStrength, Unit, aluminium, area, concrete, couple, fixed, partial,
+    permanent, pin, point, rectangle, roller, self_weight, steel, steel_of_thickness, timber,
+    trapezoidal, uniform, variable,
 )
-from beamcore.units import MPa, day, kN, m, mm
+from beamcore.units import K, MPa, day, kN, m, mm
 
 JOB = Path(__file__).parents[1] / "golden" / "slab-strip.toml"
 CREEP = ConcreteCreep(38*MPa, 50, 150*mm, 28*day, 18250*day, "N")
@@ -23,11 +27,15 @@ TIMBER = TimberStrength(14.8*MPa, 8.9*MPa, 12.9*MPa)
 METAL = MetalStrength("275 MPa")
 SECTION, MEMBER = golden.slab_strip()
 RESPONSE = MEMBER.solve()
+ROOF = golden_roof_beam.roof_beam()[1]
+SHRINKAGE = ConcreteShrinkage(38*MPa, 50, 150*mm, 3*day, 18250*day, "N")
+OAK = CharacteristicTimberStrength(30*MPa, 18*MPa, 23*MPa, 4*MPa, 0.6*MPa)
 
 
 def camber() -> Camber:
     return RESPONSE.camber(
-        combination="quasi-permanent", time="final", fraction=0.8, from_="left", to="right",
+        shape="parabola", combination="quasi-permanent", time="final", fraction=0.8,
+        from_="left", to="right",
         step="1 mm", rounding="up", divisions=4,
     )
 
@@ -40,7 +48,14 @@ def again(value: Any) -> Any:
 
 VALUES: list[Any] = [
     mm, kN/m, Unit("kip in2"), 75*mm, 5*kN/m * (4.2*m), (1*mm) / 3,
-    CREEP, TIMBER, METAL,
+    K, 12e-6/K, 12e-6/K * (5*m),
+    CREEP, TIMBER, METAL, SHRINKAGE, OAK, CharacteristicMetalStrength(275*MPa, 430*MPa),
+    CharacteristicConcreteStrength(30*MPa, 38*MPa, 2.9*MPa),
+    TimberFactors(0.8, 1.25, k_sys=1.1), MetalFactors(1.1),
+    steel_of_thickness("S355", 20*mm).with_design_factors(MetalFactors(1.1)),
+    aluminium("EN AW-6082 T6", "8 mm").with_design_shear_strength(90*MPa),
+    timber("C24", 2).with_values(density="450 kg/m3", thermal_expansion=6e-6/K, creep=CREEP),
+    timber("C24", 2).with_values(poisson_ratio=0.3).with_characteristic_strength(OAK),
     timber("C24", 2), steel("S355"), concrete("C30/37", CREEP), concrete("C25/30", 2.5),
     timber("GL24h", 1).named("ridge").with_design_strength(TIMBER),
     beamcore.Material("a", "10 GPa", 0.5, density="500 kg/m3", design_strength=METAL),
@@ -52,6 +67,17 @@ VALUES: list[Any] = [
     SECTION.transformed_to("C24", "final").parts[1],
     pin("left", 0*m), roller("r", 1*m), fixed("f", 2*m),
     self_weight(), uniform(1*kN/m), partial(1*kN/m, 1*m, 2*m), point(1*kN, 1*m),
+    trapezoidal(1*kN/m, 2*kN/m, 1*m, 2*m), area("1 kN/m2", 3*m), couple(1*kN*m, 1*m),
+    area(1*kN/m**2, 3*m, from_=1*m, to="2 m"),
+    permanent("g", uniform(1*kN/m), favourable=True), variable("s", category="snow"),
+    variable("s", category="snow").factors, PartialFactors(variable=1.6),
+    OwnCombination("a", {"g": 1, "q": 0.5}, ultimate=True),
+    ROOF.spans[0], ROOF.solve().combination("erection"), *golden_roof_beam.LIMITS,
+    *ROOF.solve().check_limits(golden_roof_beam.LIMITS),
+    golden_roof_beam.camber(ROOF.solve()),
+    ROOF.solve().readings(
+        golden_roof_beam.camber(ROOF.solve()), left=2*m, right=9*m, parts=["beam"]
+    )[2],
     permanent("g", self_weight(), uniform(1*kN/m)),
     variable("q", point(1*kN, 2*m), psi_0=0.7, psi_1=0.5, psi_2=0.3),
     camber(), camber().ordinates[2],
@@ -105,6 +131,12 @@ def test_a_quantity_keeps_its_bits_and_its_unit() -> None:
 
 FIELDS = {
     "deflection": (RESPONSE.deflection("fundamental", "final"), "values_m"),
+    "span": (RESPONSE.span_deflection("fundamental", "final", "left to right"), "values_m"),
+    "remaining": (RESPONSE.remaining("fundamental", "final", camber()), "values_m"),
+    "component": (
+        RESPONSE.deflection_component("w_max", "characteristic", "left to right", camber()),
+        "values_m",
+    ),
     "slope": (RESPONSE.slope("fundamental", "final"), "values_rad"),
     "shear": (RESPONSE.shear("fundamental", "final"), "values_N"),
     "moment": (RESPONSE.moment("fundamental", "final"), "values_Nm"),
@@ -124,10 +156,11 @@ def test_fields_come_back_with_their_bits(name: str) -> None:
 
 
 def test_members_and_responses_come_back() -> None:
-    for _, member in (golden.two_span(), golden.slab_strip()):
+    for _, member in (golden.two_span(), golden.slab_strip(), golden_roof_beam.roof_beam()):
         found = again(member)
         assert found.length == member.length
         assert found.support_names == member.support_names
+        assert found.partial_factors == member.partial_factors
         response = again(member.solve())
         assert response.combinations == member.combinations
         for combination in member.combinations:

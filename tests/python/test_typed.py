@@ -204,6 +204,8 @@ def test_combinations_with_two_variable_actions() -> None:
         "permanent": 1.0, "quasi-permanent": 1 + 0.3*3,
         "characteristic, snow leading": 1 + 2 + 0.7*3,
         "characteristic, live leading": 1 + 3 + 0.5*2,
+        "frequent, snow leading": 1 + 0.2*2 + 0.3*3,
+        "frequent, live leading": 1 + 0.5*3,
         "fundamental, snow leading": 1.35 + 1.5*(2 + 0.7*3),
         "fundamental, live leading": 1.35 + 1.5*(3 + 0.5*2),
     }
@@ -241,7 +243,8 @@ def test_camber() -> None:
     response = member.solve()
     sag = response.deflection("permanent", "final").greatest.value
     camber = response.camber(
-        combination="permanent", time="final", fraction=0.5, from_="left", to="right",
+        shape="parabola", combination="permanent", time="final", fraction=0.5,
+        from_="left", to="right",
         step=1*mm, rounding="up", divisions=4,
     )
     assert near(camber.target, sag / 2)

@@ -10,7 +10,8 @@ import pytest
 import beamcore
 from beamcore import Quantity, Unit, UnitProblem, rectangle
 from beamcore.units import (
-    GPa, MPa, N, Pa, day, deg, ft, h, inch, kN, kg, kip, lb, m, mm, mrad, permille, rad, s, t, year,
+    GPa, K, MPa, N, Pa, day, deg, ft, h, inch, kN, kg, kip, lb, m, mm, mrad, permille, rad, s, t,
+    year,
 )
 
 
@@ -70,6 +71,20 @@ def test_a_unit_prints_what_it_reads(symbol: str) -> None:
     unit = Unit(symbol)
     assert Unit(str(unit)) == unit
     assert hash(Unit(str(unit))) == hash(unit)
+
+
+def test_kelvin_goes_with_what_is_per_kelvin() -> None:
+    assert 12e-6/K == 12e-6*Unit("/K") == 12e-6*Unit("1/K")
+    assert (12e-6/K).to("/K") == 12e-6
+    assert 12e-6/K * (20*K) == 12e-6 * 20
+    assert str(5*K) == "5 K" and Unit("K") == K and Unit(str(m/K)) == m/K
+    given = beamcore.steel("S275").with_values
+    assert given(thermal_expansion=13e-6/K) == given(thermal_expansion="13e-6 /K")
+
+
+def test_every_unit_has_its_name() -> None:
+    assert set(beamcore.units.__all__) == {*beamcore._units.__all__, "K"}
+    assert set(beamcore.units.__all__) < set(beamcore.__all__)
 
 
 def test_products_and_powers() -> None:
