@@ -29,7 +29,7 @@ fn flitch() -> Result<Member> {
     let c24 = timber("C24", ServiceClass::One)?;
     let s275 = steel("S275")?;
     let outline = rectangle(47.mm(), 220.mm());
-    let left = Part::new("left joist", outline, c24.clone()).left_of("plate");
+    let left = Part::new("left joist", outline.clone(), c24.clone()).left_of("plate");
     let plate = Part::new("plate", rectangle(10.mm(), 200.mm()), s275);
     let right = Part::new("right joist", outline, c24).right_of(&plate);
     Member::simple_span(Section::of([left, plate, right])?, 4.m())

@@ -15,3 +15,8 @@ pub(crate) fn exp(x: f64) -> f64 {
 pub(crate) fn pow(base: f64, exponent: f64) -> f64 {
     libm::pow(base, exponent)
 }
+
+/// The angle of the point (x, y), from -pi to pi.
+pub(crate) fn atan2(y: f64, x: f64) -> f64 {
+    libm::atan2(y, x)
+}

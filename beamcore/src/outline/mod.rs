@@ -29,6 +29,7 @@ mod flank;
 mod inside;
 mod integrals;
 mod meeting;
+mod mirror;
 mod overlap;
 mod point;
 mod polygon_problems;

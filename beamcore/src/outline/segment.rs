@@ -50,7 +50,7 @@ impl Segment {
 
     /// Half the angle of the arc, from 0 to pi.
     fn half_angle(self) -> f64 {
-        libm::atan2(self.half_chord, self.offset)
+        crate::math::atan2(self.half_chord, self.offset)
     }
 
     /// The length of the arc, 2 a r.

@@ -1,29 +1,63 @@
 //! Which parts touch, and which overlap.
 
-use super::part::PlacedPart;
+use super::placed::PlacedPart;
 use crate::error::{ErrorKind, Problem};
 use crate::lookup;
+use crate::outline::{CONTACT, Outline, contains, overlap_area, touches};
+use crate::path;
 use crate::units::{Area, Length};
 
-/// Overlap is area above this share of the smaller part; less is contact.
-const CONTACT: f64 = 1e-9;
-
-/// A problem for each pair of parts that overlap.
+/// A problem for each pair of parts that overlap, and for each insert that is not within its host.
 pub(super) fn overlaps(parts: &[PlacedPart]) -> Vec<Problem> {
     let mut problems = Vec::new();
     for (i, a) in parts.iter().enumerate() {
         for b in &parts[i + 1..] {
             let (across, upright) = common(a, b);
-            if across <= Length::ZERO || upright <= Length::ZERO {
+            if is_within(a, b)
+                || is_within(b, a)
+                || across <= Length::ZERO
+                || upright <= Length::ZERO
+            {
                 continue;
             }
-            let area = across * upright;
-            if area > a.area().min(b.area()) * CONTACT {
+            let area = common_area(a, b, across * upright);
+            if area > whole_area(a).min(whole_area(b)) * CONTACT {
                 problems.push(overlap(a, b, area));
             }
         }
+        let host = parts.iter().find(|host| is_within(a, host));
+        if let Some(host) = host
+            && !contains(&host.region(), &a.region())
+        {
+            problems.push(Problem::new(
+                ErrorKind::Geometry,
+                path::key(
+                    &path::key(&path::named("section.parts", a.name()), "place"),
+                    "set_into",
+                ),
+                format!("a part that reaches out of its host \"{}\"", host.name()),
+                "a place wholly within the host",
+            ));
+        }
     }
     problems
+}
+
+/// Whether `insert` is set into `host`.
+fn is_within(insert: &PlacedPart, host: &PlacedPart) -> bool {
+    insert.host() == Some(host.name())
+}
+
+fn whole_area(part: &PlacedPart) -> Area {
+    Area::from_si(part.whole().area)
+}
+
+/// The area that two parts have in common; rectangles fill the common part of their boxes.
+fn common_area(a: &PlacedPart, b: &PlacedPart, of_boxes: Area) -> Area {
+    match (a.outline(), b.outline()) {
+        (Outline::Rectangle { .. }, Outline::Rectangle { .. }) => of_boxes,
+        _ => Area::from_si(overlap_area(&a.region(), &b.region())),
+    }
 }
 
 fn overlap(a: &PlacedPart, b: &PlacedPart, area: Area) -> Problem {
@@ -50,10 +84,17 @@ fn common(a: &PlacedPart, b: &PlacedPart) -> (Length, Length) {
 }
 
 fn touch(a: &PlacedPart, b: &PlacedPart) -> bool {
+    if is_within(a, b) || is_within(b, a) {
+        return true;
+    }
     let (across, upright) = common(a, b);
     let size = a.outline().width().max(a.outline().height());
     let slack = size * CONTACT;
-    across >= -slack && upright >= -slack && (across > slack || upright > slack)
+    let boxes = across >= -slack && upright >= -slack && (across > slack || upright > slack);
+    match (a.outline(), b.outline()) {
+        (Outline::Rectangle { .. }, Outline::Rectangle { .. }) => boxes,
+        _ => boxes && touches(&a.region(), &b.region(), slack.si()),
+    }
 }
 
 /// A note that names the parts which no chain of contacts joins to the first part.

@@ -1,15 +1,20 @@
 //! Sections: parts of several materials, rigidly joined, and what follows from them.
 
 mod contact;
-mod outline;
 mod part;
 mod place;
+mod placed;
+mod plane;
 mod stiffness;
 mod transformed;
 
-pub use outline::{Outline, rectangle};
-pub use part::{Part, PlacedPart};
-pub use place::{PartName, Placement, Side};
+pub use crate::outline::{
+    Outline, angle, channel, disc, hollow_box, i_shape, polygon, rectangle, ring, tee,
+};
+pub use part::Part;
+pub use place::{MirrorAxis, PartName, Placement, Side};
+pub use placed::PlacedPart;
+pub use plane::{PointStress, Principal, SectionForces, Sideways, StrainPlane};
 pub use stiffness::Stiffness;
 pub use transformed::{TransformedPart, TransformedSection};
 
@@ -51,12 +56,7 @@ impl Section {
         let parts: Vec<Part> = parts.into_iter().collect();
         let mut problems = Vec::new();
         if parts.is_empty() {
-            problems.push(Problem::new(
-                ErrorKind::Missing,
-                "section.parts",
-                "an empty section",
-                "at least one part",
-            ));
+            problems.push(no_parts());
         }
         for part in &parts {
             problems.extend(part.problems());
@@ -69,8 +69,12 @@ impl Section {
         );
         problems.extend(materials(&parts));
         let placed = place::resolve(&parts, &mut problems);
-        problems.extend(contact::overlaps(&placed));
+        // Outlines that are not whole have no region to compare.
+        if problems.is_empty() {
+            problems.extend(contact::overlaps(&placed));
+        }
         Error::check(problems)?;
+        let placed = displaced(placed);
         let notes = contact::notes(&placed);
         Ok(Self {
             parts,
@@ -82,13 +86,30 @@ impl Section {
     /// The section of some of the parts alone, each where it stands in the whole section.
     ///
     /// # Errors
-    /// As [`Section::of`].
+    /// [`ErrorKind::Missing`] if none of the names is that of a part.
     pub fn only(&self, names: &[String]) -> Result<Self> {
-        let kept = self.parts.iter().zip(&self.placed);
-        let kept = kept.filter(|(part, _)| names.iter().any(|name| name == part.name()));
-        Self::of(
-            kept.map(|(part, placed)| part.clone().at(placed.centroid_y(), placed.centroid_z())),
-        )
+        let kept = |name: &str| names.iter().any(|known| known == name);
+        let parts: Vec<_> = self
+            .parts
+            .iter()
+            .filter(|p| kept(p.name()))
+            .cloned()
+            .collect();
+        let placed: Vec<_> = self
+            .placed
+            .iter()
+            .filter(|p| kept(p.name()))
+            .cloned()
+            .collect();
+        if parts.is_empty() {
+            return Err(no_parts().into());
+        }
+        let notes = contact::notes(&placed);
+        Ok(Self {
+            parts,
+            placed: displaced(placed),
+            notes,
+        })
     }
 
     /// The parts as given.
@@ -150,6 +171,28 @@ impl Section {
     pub fn notes(&self) -> &[String] {
         &self.notes
     }
+}
+
+fn no_parts() -> Problem {
+    Problem::new(
+        ErrorKind::Missing,
+        "section.parts",
+        "an empty section",
+        "at least one part",
+    )
+}
+
+/// The hosts without what is set into them.
+fn displaced(mut placed: Vec<PlacedPart>) -> Vec<PlacedPart> {
+    for i in 0..placed.len() {
+        let name = placed[i].name().to_owned();
+        let inserts = placed
+            .iter()
+            .filter(|part| part.host() == Some(name.as_str()));
+        let inserts: Vec<_> = inserts.map(|insert| *insert.whole()).collect();
+        placed[i].displace(&inserts);
+    }
+    placed
 }
 
 /// Problems of the materials, each material once; one name must mean one material.

@@ -1,26 +1,27 @@
 //! Parts: one piece of one material each.
 
-use super::outline::Outline;
-use super::place::{PartName, Placement, Side};
+use super::place::{MirrorAxis, PartName, Placement, Side};
 use crate::check;
 use crate::error::Problem;
 use crate::material::Material;
+use crate::outline::Outline;
 use crate::path;
-use crate::units::{Area, Length, LineMass};
+use crate::units::{Length, LineMass};
 
 /// One piece of one material in a section, with a name that addresses its results.
 ///
-/// A part that is given no place stands with the middle of its outline at y = 0, z = 0.
+/// A part that is given no place stands with the point by which its outline is placed at y = 0, z = 0.
 #[derive(Clone, Debug, PartialEq)]
 pub struct Part {
     name: String,
     outline: Outline,
     material: Material,
     placement: Placement,
+    line_mass: Option<LineMass>,
 }
 
 impl Part {
-    /// A part with the middle of its outline at y = 0, z = 0.
+    /// A part with the point by which its outline is placed at y = 0, z = 0.
     pub fn new(name: impl Into<String>, outline: Outline, material: Material) -> Self {
         let placement = Placement::At {
             y: Length::ZERO,
@@ -31,6 +32,7 @@ impl Part {
             outline,
             material,
             placement,
+            line_mass: None,
         }
     }
 
@@ -74,6 +76,34 @@ impl Part {
         })
     }
 
+    /// The same part as the mirror image of another: at the mirrored place, with its own outline
+    /// mirrored.
+    #[must_use]
+    pub fn mirror_of(self, other: impl Into<PartName>, axis: MirrorAxis) -> Self {
+        self.placed(Placement::MirrorOf {
+            of: other.into().0,
+            axis,
+        })
+    }
+
+    /// The same part set into another, its host, at (y, z): it displaces the host exactly, whose
+    /// area and moments become smaller by its own.
+    #[must_use]
+    pub fn set_into(self, host: impl Into<PartName>, y: Length, z: Length) -> Self {
+        self.placed(Placement::SetInto {
+            host: host.into().0,
+            y,
+            z,
+        })
+    }
+
+    /// The same part with a mass per length of its own, instead of density x area.
+    #[must_use]
+    pub const fn line_mass(mut self, mass: LineMass) -> Self {
+        self.line_mass = Some(mass);
+        self
+    }
+
     /// The same part at the given place.
     #[must_use]
     pub fn placed(mut self, placement: Placement) -> Self {
@@ -99,6 +129,12 @@ impl Part {
         &self.material
     }
 
+    /// The mass per length, if it was given instead of density x area.
+    #[must_use]
+    pub const fn given_line_mass(&self) -> Option<LineMass> {
+        self.line_mass
+    }
+
     /// The place as given.
     #[must_use]
     pub const fn placement(&self) -> &Placement {
@@ -110,118 +146,15 @@ impl Part {
         check::name(&mut problems, &self.name, "section.parts");
         let base = path::named("section.parts", &self.name);
         problems.extend(self.outline.problems(&path::key(&base, "outline")));
-        if let Placement::At { y, z } = self.placement {
-            let at = path::key(&path::key(&base, "place"), "at");
-            check::finite(&mut problems, y, &path::key(&at, "y"));
-            check::finite(&mut problems, z, &path::key(&at, "z"));
+        if let Some(mass) = self.line_mass {
+            check::not_negative(&mut problems, mass, &path::key(&base, "line_mass"));
+        }
+        if let Placement::At { y, z } | Placement::SetInto { y, z, .. } = &self.placement {
+            let key = self.placement.refers_to().map_or("at", |(key, _)| key);
+            let at = path::key(&path::key(&base, "place"), key);
+            check::finite(&mut problems, *y, &path::key(&at, "y"));
+            check::finite(&mut problems, *z, &path::key(&at, "z"));
         }
         problems
-    }
-}
-
-/// A part at its place in a section.
-#[derive(Clone, Debug, PartialEq)]
-pub struct PlacedPart {
-    name: String,
-    outline: Outline,
-    material: Material,
-    left: Length,
-    bottom: Length,
-}
-
-impl PlacedPart {
-    pub(super) fn centred(part: &Part, y: Length, z: Length) -> Self {
-        let outline = part.outline;
-        Self::with_corner(part, y - outline.width() / 2.0, z - outline.height() / 2.0)
-    }
-
-    pub(super) fn beside(part: &Part, side: Side, other: &Self) -> Self {
-        let outline = part.outline;
-        let left = other.centroid_y() - outline.width() / 2.0;
-        let bottom = other.centroid_z() - outline.height() / 2.0;
-        match side {
-            Side::Left => Self::with_corner(part, other.left() - outline.width(), bottom),
-            Side::Right => Self::with_corner(part, other.right(), bottom),
-            Side::Above => Self::with_corner(part, left, other.top()),
-            Side::Below => Self::with_corner(part, left, other.bottom() - outline.height()),
-        }
-    }
-
-    fn with_corner(part: &Part, left: Length, bottom: Length) -> Self {
-        Self {
-            name: part.name.clone(),
-            outline: part.outline,
-            material: part.material.clone(),
-            left,
-            bottom,
-        }
-    }
-
-    /// The name.
-    #[must_use]
-    pub fn name(&self) -> &str {
-        &self.name
-    }
-
-    /// The outline.
-    #[must_use]
-    pub const fn outline(&self) -> &Outline {
-        &self.outline
-    }
-
-    /// The material.
-    #[must_use]
-    pub const fn material(&self) -> &Material {
-        &self.material
-    }
-
-    /// The least y of the outline.
-    #[must_use]
-    pub const fn left(&self) -> Length {
-        self.left
-    }
-
-    /// The greatest y of the outline.
-    #[must_use]
-    pub fn right(&self) -> Length {
-        self.left + self.outline.width()
-    }
-
-    /// The least z of the outline.
-    #[must_use]
-    pub const fn bottom(&self) -> Length {
-        self.bottom
-    }
-
-    /// The greatest z of the outline.
-    #[must_use]
-    pub fn top(&self) -> Length {
-        self.bottom + self.outline.height()
-    }
-
-    /// The y of the part's own centroid.
-    #[must_use]
-    pub fn centroid_y(&self) -> Length {
-        self.left + self.outline.width() / 2.0
-    }
-
-    /// The z of the part's own centroid.
-    #[must_use]
-    pub fn centroid_z(&self) -> Length {
-        self.bottom + self.outline.height() / 2.0
-    }
-
-    /// The area.
-    #[must_use]
-    pub fn area(&self) -> Area {
-        self.outline.area()
-    }
-
-    /// Mass per length, density x area; `None` if the material has no density.
-    #[must_use]
-    pub fn line_mass(&self) -> Option<LineMass> {
-        self.material
-            .mean_density()
-            .map(|density| density * self.area())
     }
 }

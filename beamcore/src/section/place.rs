@@ -1,6 +1,7 @@
 //! Where a part stands in the section: by coordinates, or beside another part.
 
-use super::part::{Part, PlacedPart};
+use super::part::Part;
+use super::placed::PlacedPart;
 use crate::error::{ErrorKind, Problem};
 use crate::units::Length;
 use crate::{lookup, path};
@@ -31,11 +32,32 @@ impl Side {
     }
 }
 
+/// An axis of the section about which a part is mirrored.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
+pub enum MirrorAxis {
+    /// The upright axis y = 0: left and right change.
+    Upright,
+    /// The level axis z = 0: top and bottom change.
+    Level,
+}
+
+impl MirrorAxis {
+    /// The word used in documents.
+    #[must_use]
+    pub const fn name(self) -> &'static str {
+        match self {
+            Self::Upright => "upright",
+            Self::Level => "level",
+        }
+    }
+}
+
 /// The place of a part.
 #[derive(Clone, Debug, PartialEq)]
 pub enum Placement {
-    /// With the middle of its outline at these coordinates: y to the right, z upward, seen against
-    /// the direction of x.
+    /// With the point by which its outline is placed (the middle of its bounding box; of a polygon,
+    /// the origin of its coordinates) here: y to the right, z upward, seen against the direction of
+    /// x.
     At {
         /// Coordinate to the right.
         y: Length,
@@ -49,6 +71,34 @@ pub enum Placement {
         /// The name of the other part.
         of: String,
     },
+    /// The mirror image of the place of another part; the part's own outline is mirrored too.
+    MirrorOf {
+        /// The name of the other part.
+        of: String,
+        /// The axis.
+        axis: MirrorAxis,
+    },
+    /// Set into another part, its host, which it displaces; it must lie wholly within it.
+    SetInto {
+        /// The name of the host.
+        host: String,
+        /// Coordinate to the right.
+        y: Length,
+        /// Coordinate upward.
+        z: Length,
+    },
+}
+
+impl Placement {
+    /// The part that this place refers to, with the key of the document that names it.
+    pub(super) fn refers_to(&self) -> Option<(&'static str, &str)> {
+        match self {
+            Self::At { .. } => None,
+            Self::Beside { side, of } => Some((side.name(), of)),
+            Self::MirrorOf { of, .. } => Some(("mirror_of", of)),
+            Self::SetInto { host, .. } => Some(("set_into", host)),
+        }
+    }
 }
 
 /// The name of a part, taken from the part itself or from a text.
@@ -83,13 +133,25 @@ pub(super) fn resolve(parts: &[Part], problems: &mut Vec<Problem>) -> Vec<Placed
             if placed[i].is_some() {
                 continue;
             }
-            let next = match part.placement() {
-                Placement::At { y, z } => Some(PlacedPart::centred(part, *y, *z)),
-                Placement::Beside { side, of } => parts
-                    .iter()
-                    .position(|other| other.name() == of)
-                    .and_then(|other| placed[other].as_ref())
-                    .map(|other| PlacedPart::beside(part, *side, other)),
+            let neighbour = part.placement().refers_to().map(|(_, name)| {
+                let index = parts.iter().position(|other| other.name() == name);
+                index.and_then(|other| placed[other].as_ref())
+            });
+            let next = match (part.placement(), neighbour.flatten()) {
+                (Placement::At { y, z }, _) => Some(PlacedPart::at(part, *y, *z)),
+                (Placement::Beside { side, .. }, Some(other)) => {
+                    Some(PlacedPart::beside(part, *side, other))
+                }
+                (Placement::MirrorOf { axis, .. }, Some(other)) => {
+                    Some(PlacedPart::mirror_of(part, *axis, other))
+                }
+                (Placement::SetInto { y, z, .. }, Some(_)) => Some(PlacedPart::at(part, *y, *z)),
+                (
+                    Placement::Beside { .. }
+                    | Placement::MirrorOf { .. }
+                    | Placement::SetInto { .. },
+                    None,
+                ) => None,
             };
             progress |= next.is_some();
             placed[i] = next;
@@ -110,19 +172,18 @@ pub(super) fn resolve(parts: &[Part], problems: &mut Vec<Problem>) -> Vec<Placed
 
 /// Why a part has no place: its neighbour is not there, or waits for it in turn.
 fn unplaced(part: &Part, parts: &[Part]) -> Problem {
-    let Placement::Beside { side, of } = part.placement() else {
-        unreachable!("a part placed by coordinates always has a place")
-    };
-    let at = path::key(
-        &path::key(&path::named("section.parts", part.name()), "place"),
-        side.name(),
-    );
+    let (key, of) = part
+        .placement()
+        .refers_to()
+        .expect("a part placed by coordinates always has a place");
+    let base = path::key(&path::named("section.parts", part.name()), "place");
+    let at = path::key(&base, key);
     let others: Vec<_> = parts
         .iter()
         .map(Part::name)
         .filter(|name| *name != part.name())
         .collect();
-    if !others.contains(&of.as_str()) {
+    if !others.contains(&of) {
         let expected = if others.is_empty() {
             "another part of this section, or a place by coordinates".into()
         } else {

@@ -1,8 +1,10 @@
 //! Stiffness of a section: sums weighted with the modulus of each part.
 
-use super::part::PlacedPart;
+use super::placed::PlacedPart;
+use super::plane::{Principal, SectionForces, Sideways, StrainPlane};
+use crate::math;
 use crate::time::Time;
-use crate::units::{AxialStiffness, BendingStiffness, Length, Modulus};
+use crate::units::{Angle, AxialStiffness, BendingStiffness, Curvature, Length, Modulus};
 
 /// EA, the elastic centroid and EI of a section at a time, in E-weighted sums; no reference
 /// material is needed for them.
@@ -25,22 +27,22 @@ impl Stiffness {
             .collect();
         let (mut ea, mut es_y, mut es_z) = (0.0, 0.0, 0.0);
         for (part, modulus) in parts.iter().zip(&moduli) {
-            let e_a = modulus.si() * part.area().si();
+            let e_a = modulus.si() * part.net().area;
             ea += e_a;
-            es_y += e_a * part.centroid_y().si();
-            es_z += e_a * part.centroid_z().si();
+            es_y += e_a * part.net().y;
+            es_z += e_a * part.net().z;
         }
         let (y0, z0) = (es_y / ea, es_z / ea);
         let (mut yy, mut zz, mut yz) = (0.0, 0.0, 0.0);
         let mut own = Vec::with_capacity(parts.len());
         for (part, modulus) in parts.iter().zip(&moduli) {
-            let (e, area) = (modulus.si(), part.area().si());
-            let (dy, dz) = (part.centroid_y().si() - y0, part.centroid_z().si() - z0);
-            let part_yy = e * (part.outline().second_moment_yy().si() + area * dz * dz);
+            let (e, own_part) = (modulus.si(), part.net());
+            let (dy, dz) = (own_part.y - y0, own_part.z - z0);
+            let part_yy = e * (own_part.iyy + own_part.area * dz * dz);
             own.push(part_yy);
             yy += part_yy;
-            zz += e * (part.outline().second_moment_zz().si() + area * dy * dy);
-            yz += e * area * dy * dz;
+            zz += e * (own_part.izz + own_part.area * dy * dy);
+            yz += e * (own_part.iyz + own_part.area * dy * dz);
         }
         Self {
             moduli,
@@ -85,7 +87,7 @@ impl Stiffness {
         self.bending.1
     }
 
-    /// `EI_yz`: sum of `E_i` `A_i` `dy_i` `dz_i`; zero for a section with an axis of symmetry.
+    /// `EI_yz`: sum of `E_i` (`I_yz,i` + `A_i` `dy_i` `dz_i`); zero for a section with an axis of symmetry.
     #[must_use]
     pub const fn bending_yz(&self) -> BendingStiffness {
         self.bending.2
@@ -101,5 +103,55 @@ impl Stiffness {
     #[must_use]
     pub fn shares(&self) -> &[f64] {
         &self.shares
+    }
+
+    /// The principal bending stiffnesses, the greater first, and the angle from the level axis to
+    /// the axis of the greater one, positive from y towards z, between -90 and 90 degrees.
+    ///
+    /// EI = (`EI_yy` + `EI_zz`)/2 +- sqrt(((`EI_yy` - `EI_zz`)/2)^2 + `EI_yz`^2),
+    /// tan 2a = -2 `EI_yz`/(`EI_yy` - `EI_zz`) (Mohr's circle).
+    #[must_use]
+    pub fn principal(&self) -> Principal {
+        let (yy, zz, yz) = (
+            self.bending.0.si(),
+            self.bending.1.si(),
+            self.bending.2.si(),
+        );
+        let middle = f64::midpoint(yy, zz);
+        let half = (yy - zz) / 2.0;
+        let radius = (half * half + yz * yz).sqrt();
+        Principal {
+            greater: BendingStiffness::from_si(middle + radius),
+            smaller: BendingStiffness::from_si(middle - radius),
+            angle: Angle::from_si(math::atan2(-yz, half) / 2.0),
+        }
+    }
+
+    /// The plane of strain under section forces: bending about both axes, coupled by `EI_yz`; with
+    /// the section held sideways, about the level axis only.
+    ///
+    /// `kappa_y` = (M_y `EI_zz` - M_z `EI_yz`)/D, `kappa_z` = (M_z `EI_yy` - M_y `EI_yz`)/D,
+    /// D = `EI_yy` `EI_zz` - `EI_yz`^2, eps0 = N/EA at the elastic centroid.
+    #[must_use]
+    pub fn strain_plane(&self, forces: &SectionForces, sideways: Sideways) -> StrainPlane {
+        let (yy, zz, yz) = (
+            self.bending.0.si(),
+            self.bending.1.si(),
+            self.bending.2.si(),
+        );
+        let (m_y, m_z) = (forces.moment_y.si(), forces.moment_z.si());
+        let (kappa_y, kappa_z) = match sideways {
+            Sideways::Held => (m_y / yy, 0.0),
+            Sideways::Free => {
+                let d = yy * zz - yz * yz;
+                ((m_y * zz - m_z * yz) / d, (m_z * yy - m_y * yz) / d)
+            }
+        };
+        StrainPlane {
+            axial: forces.axial / self.axial,
+            curvature_y: Curvature::from_si(kappa_y),
+            curvature_z: Curvature::from_si(kappa_z),
+            centroid: self.centroid,
+        }
     }
 }

@@ -1,20 +1,20 @@
 //! The transformed section: presentation only, no other result rests on it.
 
-use super::part::PlacedPart;
+use super::placed::PlacedPart;
 use crate::error::Result;
 use crate::lookup;
 use crate::time::Time;
 use crate::units::{Area, Length, Modulus, Moment, SecondMoment, Stress};
 
-/// One part of a transformed section: its width is multiplied by n = E/E_ref about its own
-/// centroid, its height is kept.
+/// One part of a transformed section: its widths, parallel to the bending axis, are multiplied by
+/// n = E/E_ref about its own centroid, its heights are kept.
 #[derive(Clone, Debug, PartialEq)]
 pub struct TransformedPart {
     /// The name of the part.
     pub name: String,
     /// The modular ratio n = E/E_ref.
     pub ratio: f64,
-    /// The transformed width, n b.
+    /// The transformed width of the bounding box, n b.
     pub width: Length,
     /// The least z of the outline.
     pub bottom: Length,
@@ -46,35 +46,36 @@ impl TransformedSection {
             return Err(lookup::unknown("material", material, &names).into());
         };
         let reference = reference.modulus_at(time);
-        let parts: Vec<_> = parts
+        let ratio = |part: &PlacedPart| part.material().modulus_at(time) / reference;
+        let area: f64 = parts.iter().map(|part| ratio(part) * part.net().area).sum();
+        let first: f64 = parts
+            .iter()
+            .map(|part| ratio(part) * part.net().area * part.net().z)
+            .sum();
+        let z = first / area;
+        let second: f64 = parts
             .iter()
             .map(|part| {
-                let ratio = part.material().modulus_at(time) / reference;
-                TransformedPart {
-                    name: part.name().into(),
-                    ratio,
-                    width: part.outline().width() * ratio,
-                    bottom: part.bottom(),
-                    top: part.top(),
-                }
-            })
-            .collect();
-        let area = |p: &TransformedPart| p.width * (p.top - p.bottom);
-        let middle = |p: &TransformedPart| (p.top + p.bottom) / 2.0;
-        let total: Area = parts.iter().map(area).sum();
-        let first: f64 = parts.iter().map(|p| (area(p) * middle(p)).si()).sum();
-        let centroid_z = Length::from_si(first / total.si());
-        let second_moment = parts
-            .iter()
-            .map(|p| {
-                let (height, arm) = (p.top - p.bottom, middle(p) - centroid_z);
-                p.width * height * height * height / 12.0 + area(p) * arm * arm
+                let (own, arm) = (part.net(), part.net().z - z);
+                ratio(part) * (own.iyy + own.area * arm * arm)
             })
             .sum();
+        let (area, centroid_z) = (Area::from_si(area), Length::from_si(z));
+        let second_moment = SecondMoment::from_si(second);
+        let parts = parts
+            .iter()
+            .map(|part| TransformedPart {
+                name: part.name().into(),
+                ratio: ratio(part),
+                width: part.outline().width() * ratio(part),
+                bottom: part.bottom(),
+                top: part.top(),
+            })
+            .collect();
         Ok(Self {
             reference,
             parts,
-            area: total,
+            area,
             centroid_z,
             second_moment,
         })
@@ -92,7 +93,7 @@ impl TransformedSection {
         &self.parts
     }
 
-    /// Area: sum of n b h. Times the reference modulus it is EA.
+    /// Area: sum of n A. Times the reference modulus it is EA.
     #[must_use]
     pub const fn area(&self) -> Area {
         self.area
@@ -105,7 +106,7 @@ impl TransformedSection {
     }
 
     /// Second moment of area about the horizontal axis through the centroid:
-    /// sum of n (b h^3/12 + b h dz^2). Times the reference modulus it is EI_yy.
+    /// sum of n (I + A dz^2). Times the reference modulus it is EI_yy.
     #[must_use]
     pub const fn second_moment(&self) -> SecondMoment {
         self.second_moment
