@@ -32,7 +32,7 @@ pub(crate) use span::all as spans_of;
 use crate::error::Result;
 use crate::lookup;
 use crate::response::Response;
-use crate::section::{Section, Stiffness};
+use crate::section::{Section, Sideways, Stiffness};
 use crate::solve::beam::Beam;
 use crate::time::Time;
 use crate::units::Length;
@@ -98,7 +98,7 @@ impl Member {
         let states = Time::ALL.map(|time| {
             let stiffness = plan.section().stiffness(time);
             layout
-                .beam(stiffness.bending_yy())
+                .beam(stiffness.against_bending(plan.is_held()).0)
                 .map(|beam| MemberState { stiffness, beam })
         });
         let [initial, end] = states;
@@ -155,6 +155,12 @@ impl Member {
     #[must_use]
     pub fn partial_factors(&self) -> &PartialFactors {
         self.data.plan.factors()
+    }
+
+    /// Whether the member is held sideways.
+    #[must_use]
+    pub fn sideways(&self) -> Sideways {
+        self.data.plan.is_held()
     }
 
     /// The spans and overhangs, from left to right.

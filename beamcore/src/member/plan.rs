@@ -2,7 +2,7 @@
 
 use super::{Action, Member, OwnCombination, PartialFactors, Support, checks, combination};
 use crate::error::{Error, Result};
-use crate::section::Section;
+use crate::section::{Section, Sideways};
 use crate::units::Length;
 
 /// A member as it is being described. [`MemberPlan::check`] makes a [`Member`] of it.
@@ -14,6 +14,7 @@ pub struct MemberPlan {
     actions: Vec<Action>,
     factors: PartialFactors,
     own: Vec<OwnCombination>,
+    sideways: Sideways,
 }
 
 impl MemberPlan {
@@ -25,6 +26,7 @@ impl MemberPlan {
             actions: Vec::new(),
             factors: PartialFactors::default(),
             own: Vec::new(),
+            sideways: Sideways::Held,
         }
     }
 
@@ -54,6 +56,14 @@ impl MemberPlan {
     #[must_use]
     pub fn combination(mut self, combination: OwnCombination) -> Self {
         self.own.push(combination);
+        self
+    }
+
+    /// The same plan of a member that is free to move sideways between its supports: where its
+    /// section has no axis of symmetry it bends sideways too. Without this it is held.
+    #[must_use]
+    pub const fn sideways(mut self, sideways: Sideways) -> Self {
+        self.sideways = sideways;
         self
     }
 
@@ -103,5 +113,9 @@ impl MemberPlan {
 
     pub(super) fn own_combinations(&self) -> &[OwnCombination] {
         &self.own
+    }
+
+    pub(super) const fn is_held(&self) -> Sideways {
+        self.sideways
     }
 }

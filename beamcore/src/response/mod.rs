@@ -75,6 +75,24 @@ impl Response {
         self.field(combination, time, |piece| &piece.deflection)
     }
 
+    /// The movement sideways along the member, positive towards positive y; zero unless the member
+    /// is free sideways and its section has no axis of symmetry.
+    ///
+    /// v = w `EI_yz`/`EI_zz`, each share of the load with its own moduli.
+    ///
+    /// # Errors
+    /// [`crate::ErrorKind::Lookup`] if there is no such combination.
+    pub fn sideways(&self, combination: &str, time: Time) -> Result<Field<Length>> {
+        let shares = self.parted(combination, time, |piece| &piece.deflection)?;
+        let mut line = shares[0].zeroed();
+        for (share, time) in shares.iter().zip(Time::ALL) {
+            let stiffness = &self.member.state(time).stiffness;
+            let (_, ratio) = stiffness.against_bending(self.member.sideways());
+            line.add(share.pieces(), -ratio);
+        }
+        Ok(Field::new(line))
+    }
+
     /// The slope dw/dx along the member, positive where the deflection grows to the right.
     ///
     /// # Errors

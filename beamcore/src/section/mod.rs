@@ -6,6 +6,8 @@ mod place;
 mod placed;
 mod plane;
 mod stiffness;
+#[cfg(test)]
+mod tests;
 mod transformed;
 
 pub use crate::outline::{

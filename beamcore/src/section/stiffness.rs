@@ -127,6 +127,21 @@ impl Stiffness {
         }
     }
 
+    /// The stiffness against M_y, and the curvature about the upright axis that comes with a unit
+    /// of that about the level axis: `EI_yy` and 0 where the section is held sideways, else
+    /// `EI_yy` - `EI_yz`^2/`EI_zz` and -`EI_yz`/`EI_zz`.
+    pub(crate) fn against_bending(&self, sideways: Sideways) -> (BendingStiffness, f64) {
+        let (yy, zz, yz) = (
+            self.bending.0.si(),
+            self.bending.1.si(),
+            self.bending.2.si(),
+        );
+        match sideways {
+            Sideways::Held => (self.bending.0, 0.0),
+            Sideways::Free => (BendingStiffness::from_si(yy - yz * yz / zz), -yz / zz),
+        }
+    }
+
     /// The plane of strain under section forces: bending about both axes, coupled by `EI_yz`; with
     /// the section held sideways, about the level axis only.
     ///

@@ -2,7 +2,7 @@
 
 use super::PartStress;
 use crate::error::Result;
-use crate::field::{Peak, Piecewise};
+use crate::field::Peak;
 use crate::material::DesignStrength;
 use crate::response::Response;
 use crate::time::Time;
@@ -47,18 +47,20 @@ fn greatest(stress: &PartStress, strength: &DesignStrength) -> Utilisation {
             compression,
         } => timber(stress, bending, tension, compression),
         DesignStrength::Metal { yield_stress } => {
-            let edge = |line: &Piecewise| line.greatest().scaled(1.0 / yield_stress.si());
-            let [bottom, top] = [edge(&stress.bottom), edge(&stress.top)];
-            larger(
-                Peak {
-                    value: bottom.value.abs(),
-                    ..bottom
-                },
-                Peak {
-                    value: top.value.abs(),
-                    ..top
-                },
-            )
+            let start = Peak {
+                value: 0.0,
+                at: stress.centroid.stations()[0],
+            };
+            stress.lines().fold(start, |best, line| {
+                let peak = line.greatest().scaled(1.0 / yield_stress.si());
+                larger(
+                    best,
+                    Peak {
+                        value: peak.value.abs(),
+                        ..peak
+                    },
+                )
+            })
         }
     };
     Utilisation {
@@ -72,9 +74,9 @@ fn greatest(stress: &PartStress, strength: &DesignStrength) -> Utilisation {
 fn timber(stress: &PartStress, bending: Stress, tension: Stress, compression: Stress) -> Peak {
     let mut best = Peak {
         value: 0.0,
-        at: stress.bottom.stations()[0],
+        at: stress.centroid.stations()[0],
     };
-    for edge in [&stress.bottom, &stress.top] {
+    for edge in stress.lines() {
         for (axial, remainder) in [
             (tension.si(), bending.si()),
             (tension.si(), -bending.si()),
