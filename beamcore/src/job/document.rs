@@ -3,6 +3,7 @@
 use super::document_action::{ActionDocument, CombinationDocument, PartialFactorsDocument};
 use super::document_camber::{CamberDocument, LimitDocument};
 use super::document_material::MaterialDocument;
+use super::document_section::SectionDocument;
 use super::written::Written;
 use crate::units::Length;
 use schemars::JsonSchema;
@@ -44,63 +45,6 @@ pub(crate) struct JobDocument {
     pub(crate) camber: Option<CamberDocument>,
 }
 
-/// The section.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(crate) struct SectionDocument {
-    /// The parts, rigidly joined.
-    pub(crate) parts: Vec<PartDocument>,
-}
-
-/// A part of the section.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(crate) struct PartDocument {
-    /// The name of the part.
-    pub(crate) name: String,
-    /// The name of its material.
-    pub(crate) material: String,
-    /// The outline of the part.
-    pub(crate) outline: OutlineDocument,
-    /// The place of the part; without it, the middle of its outline is at y = 0, z = 0.
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(crate) place: Option<PlaceDocument>,
-}
-
-/// An outline.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(rename_all = "snake_case", deny_unknown_fields)]
-pub(crate) enum OutlineDocument {
-    /// A rectangle.
-    Rectangle {
-        /// The size across the section.
-        width: Written<Length>,
-        /// The upright size.
-        height: Written<Length>,
-    },
-}
-
-/// A place in the section.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(rename_all = "snake_case", deny_unknown_fields)]
-pub(crate) enum PlaceDocument {
-    /// The middle of the outline by coordinates.
-    At {
-        /// The coordinate to the right.
-        y: Written<Length>,
-        /// The coordinate upward.
-        z: Written<Length>,
-    },
-    /// Touching the left side of a part.
-    LeftOf(String),
-    /// Touching the right side of a part.
-    RightOf(String),
-    /// Standing on a part.
-    Above(String),
-    /// Under a part, touching it.
-    Below(String),
-}
-
 /// The member.
 #[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
 #[serde(deny_unknown_fields)]
@@ -109,6 +53,9 @@ pub(crate) struct MemberDocument {
     pub(crate) length: Written<Length>,
     /// The supports.
     pub(crate) supports: Vec<SupportDocument>,
+    /// Whether the member is held sideways or free; without it, held.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(crate) sideways: Option<SidewaysDocument>,
 }
 
 /// A support.
@@ -130,4 +77,12 @@ pub(crate) enum SupportKindDocument {
     Pin,
     Roller,
     Fixed,
+}
+
+/// Whether a member is held sideways.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, Serialize, Deserialize, JsonSchema)]
+#[serde(rename_all = "snake_case")]
+pub(crate) enum SidewaysDocument {
+    Held,
+    Free,
 }

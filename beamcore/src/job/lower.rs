@@ -3,18 +3,13 @@
 //! Texts of quantities that are wrong were told by the check against the schema; here they make
 //! the thing they belong to unknown (`None`), so that all other mistakes can still be found.
 
-use super::document::{
-    JobDocument, OutlineDocument, PartDocument, PlaceDocument, SupportDocument, SupportKindDocument,
-};
-use super::{lower_action, lower_camber, lower_material};
+use super::document::{JobDocument, SidewaysDocument, SupportDocument, SupportKindDocument};
+use super::{lower_action, lower_camber, lower_material, lower_section};
 use crate::camber::{CamberPlan, Trestles};
 use crate::error::{Error, ErrorKind, Problem};
-use crate::lookup;
-use crate::material::Material;
 use crate::member::{self, Known, Member, Support, SupportKind};
-use crate::path;
 use crate::response::Limit;
-use crate::section::{Part, Section, Side, rectangle};
+use crate::section::Sideways;
 
 /// What a document asks for, in the core's own types.
 #[derive(Clone, Debug)]
@@ -30,7 +25,7 @@ pub(super) fn lower(document: &JobDocument) -> Result<Lowered, Vec<Problem>> {
     let mut problems = Vec::new();
     check_quantity(&mut problems, document.quantity);
     let materials = lower_material::all(&document.materials, &mut problems);
-    let section = section(document, &materials, &mut problems);
+    let section = lower_section::section(&document.section, &materials, &mut problems);
     let length = document.member.length.value();
     let supports: Vec<_> = document
         .member
@@ -83,7 +78,13 @@ pub(super) fn lower(document: &JobDocument) -> Result<Lowered, Vec<Problem>> {
     let (Some(section), Some(length)) = (section, length) else {
         return Err(problems);
     };
-    let plan = Member::of_length(section, length).partial_factors(factors);
+    let sideways = match document.member.sideways {
+        None | Some(SidewaysDocument::Held) => Sideways::Held,
+        Some(SidewaysDocument::Free) => Sideways::Free,
+    };
+    let plan = Member::of_length(section, length)
+        .partial_factors(factors)
+        .sideways(sideways);
     let plan = supports.into_iter().fold(plan, member::MemberPlan::support);
     let plan = actions.into_iter().fold(plan, member::MemberPlan::action);
     let plan = own.into_iter().fold(plan, member::MemberPlan::combination);
@@ -109,65 +110,6 @@ fn check_quantity(problems: &mut Vec<Problem>, quantity: Option<u32>) {
 
 fn into_problems(error: Error) -> Vec<Problem> {
     error.problems().to_vec()
-}
-
-fn section(
-    document: &JobDocument,
-    materials: &[(String, Option<Material>)],
-    problems: &mut Vec<Problem>,
-) -> Option<Section> {
-    let mut parts = Vec::new();
-    let mut known = true;
-    for part in &document.section.parts {
-        let found = materials
-            .iter()
-            .find(|material| material.0 == part.material);
-        if found.is_none() {
-            let names: Vec<_> = materials
-                .iter()
-                .map(|material| material.0.as_str())
-                .collect();
-            problems.push(Problem::new(
-                ErrorKind::Name,
-                path::key(&path::named("section.parts", &part.name), "material"),
-                format!("the unknown material \"{}\"", part.material),
-                format!("one of the materials {}", lookup::listed(&names)),
-            ));
-        }
-        match found
-            .and_then(|material| material.1.as_ref())
-            .and_then(|m| lower_part(part, m))
-        {
-            Some(part) => parts.push(part),
-            None => known = false,
-        }
-    }
-    if !known && parts.is_empty() {
-        return None;
-    }
-    match Section::of(parts) {
-        Ok(section) => known.then_some(section),
-        Err(error) => {
-            // A part that is left out here must not be missed by its neighbours.
-            let missed = |p: &Problem| !known && p.found().starts_with("the unknown part");
-            problems.extend(into_problems(error).into_iter().filter(|p| !missed(p)));
-            None
-        }
-    }
-}
-
-fn lower_part(part: &PartDocument, material: &Material) -> Option<Part> {
-    let OutlineDocument::Rectangle { width, height } = &part.outline;
-    let outline = rectangle(width.value()?, height.value()?);
-    let lowered = Part::new(&part.name, outline, material.clone());
-    Some(match &part.place {
-        None => lowered,
-        Some(PlaceDocument::At { y, z }) => lowered.at(y.value()?, z.value()?),
-        Some(PlaceDocument::LeftOf(other)) => lowered.beside(Side::Left, other.as_str()),
-        Some(PlaceDocument::RightOf(other)) => lowered.beside(Side::Right, other.as_str()),
-        Some(PlaceDocument::Above(other)) => lowered.beside(Side::Above, other.as_str()),
-        Some(PlaceDocument::Below(other)) => lowered.beside(Side::Below, other.as_str()),
-    })
 }
 
 fn support(support: &SupportDocument) -> Option<Support> {

@@ -39,10 +39,12 @@ mod document;
 mod document_action;
 mod document_camber;
 mod document_material;
+mod document_section;
 mod lower;
 mod lower_action;
 mod lower_camber;
 mod lower_material;
+mod lower_section;
 mod reader;
 mod written;
 

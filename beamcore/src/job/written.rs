@@ -2,8 +2,8 @@
 
 use crate::error::Problem;
 use crate::units::{
-    AreaLoad, Density, Duration, Force, Length, LineLoad, Modulus, Moment, Quantity, Stress,
-    ThermalExpansion,
+    AreaLoad, Density, Duration, Force, Length, LineLoad, LineMass, Modulus, Moment, Quantity,
+    Stress, ThermalExpansion,
 };
 use schemars::{JsonSchema, Schema, SchemaGenerator};
 use serde::{Deserialize, Serialize};
@@ -66,6 +66,7 @@ pub(super) fn problem(name: &str, text: &str, path: &str) -> Option<Problem> {
         (Force::NAME, of::<Force>),
         (LineLoad::NAME, of::<LineLoad>),
         (AreaLoad::NAME, of::<AreaLoad>),
+        (LineMass::NAME, of::<LineMass>),
         (Moment::NAME, of::<Moment>),
         (Stress::NAME, of::<Stress>),
         (Modulus::NAME, of::<Modulus>),

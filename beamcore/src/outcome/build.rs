@@ -146,7 +146,11 @@ fn section(member: &Member) -> Result<SectionOutcome> {
 
 fn stiffness(section: &Section, time: Time) -> StiffnessOutcome {
     let stiffness = section.stiffness(time);
+    let principal = stiffness.principal();
     StiffnessOutcome {
+        principal_greater_Nm2: principal.greater.to_N_m2(),
+        principal_smaller_Nm2: principal.smaller.to_N_m2(),
+        principal_angle_rad: principal.angle.to_rad(),
         axial_stiffness_N: stiffness.axial().to_N(),
         centroid_y_m: stiffness.centroid_y().to_m(),
         centroid_z_m: stiffness.centroid_z().to_m(),
@@ -168,6 +172,7 @@ fn part(member: &Member, part: &PlacedPart, index: usize) -> PartOutcome {
     PartOutcome {
         name: part.name().into(),
         material: part.material().name().into(),
+        outline: part.outline().name().into(),
         left_m: part.left().to_m(),
         right_m: part.right().to_m(),
         bottom_m: part.bottom().to_m(),
@@ -243,6 +248,7 @@ fn results(response: &Response, combination: &Combination, time: Time) -> Result
     Ok(ResultsOutcome {
         deflection: (&response.deflection(name, time)?).into(),
         spans: spans.collect::<Result<_>>()?,
+        sideways: (&response.sideways(name, time)?).into(),
         slope: (&response.slope(name, time)?).into(),
         shear: (&response.shear(name, time)?).into(),
         moment: (&response.moment(name, time)?).into(),
@@ -261,6 +267,7 @@ fn stress(
     let fibre = |extreme: StressExtreme| FibreOutcome {
         value_Pa: extreme.value.to_Pa(),
         at_m: extreme.at.to_m(),
+        y_m: extreme.y.to_m(),
         z_m: extreme.z.to_m(),
     };
     // Design strengths belong to the fundamental combination only.

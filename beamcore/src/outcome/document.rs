@@ -111,6 +111,12 @@ pub(super) struct StiffnessOutcome {
     pub(super) bending_stiffness_yy_Nm2: f64,
     pub(super) bending_stiffness_zz_Nm2: f64,
     pub(super) bending_stiffness_yz_Nm2: f64,
+    /// The greater principal bending stiffness.
+    pub(super) principal_greater_Nm2: f64,
+    /// The smaller principal bending stiffness.
+    pub(super) principal_smaller_Nm2: f64,
+    /// From the level axis to the axis of the greater one, positive from y towards z.
+    pub(super) principal_angle_rad: f64,
 }
 
 /// A part at its place.
@@ -119,6 +125,8 @@ pub(super) struct StiffnessOutcome {
 pub(super) struct PartOutcome {
     pub(super) name: String,
     pub(super) material: String,
+    /// The outline by its word in the document.
+    pub(super) outline: String,
     pub(super) left_m: f64,
     pub(super) right_m: f64,
     pub(super) bottom_m: f64,
@@ -215,6 +223,8 @@ pub(super) struct ResultsOutcome {
     pub(super) deflection: LengthExtremes,
     /// The deflection of each span from its own chord.
     pub(super) spans: Vec<SpanDeflectionOutcome>,
+    /// The movement sideways, positive towards positive y.
+    pub(super) sideways: LengthExtremes,
     pub(super) slope: AngleExtremes,
     pub(super) shear: ForceExtremes,
     pub(super) moment: MomentExtremes,
@@ -255,6 +265,7 @@ pub(super) struct StressOutcome {
 pub(super) struct FibreOutcome {
     pub(super) value_Pa: f64,
     pub(super) at_m: f64,
+    pub(super) y_m: f64,
     pub(super) z_m: f64,
 }
 

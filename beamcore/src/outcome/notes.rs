@@ -5,6 +5,7 @@ use super::document::{CombinationOutcome, OutcomeDocument};
 use crate::constants::GRAVITY;
 use crate::job::Job;
 use crate::member::{ActionKind, Load, Member, PartialFactors, SupportKind};
+use crate::section::Sideways;
 use crate::time::Time;
 
 /// The rules that the results rest on.
@@ -39,7 +40,16 @@ pub(super) fn assumptions(job: &Job) -> Vec<String> {
         "Plane sections stay plane; materials are linear elastic; deflections are small".into(),
         "The parts are joined rigidly, without slip".into(),
         "Deflection by bending only; shear deflection is left out".into(),
-        "The member bends about the horizontal axis only; it is held sideways".into(),
+        match member.sideways() {
+            Sideways::Held => {
+                "The member bends about the level axis only; it is held sideways".into()
+            }
+            Sideways::Free => {
+                "The member is free to move sideways between its supports, which hold \
+                 it there as they hold it upright; loads act through the shear centre"
+                    .into()
+            }
+        },
         "The axial and longitudinal restraint of supports causes no axial force".into(),
     ];
     if member
@@ -116,7 +126,7 @@ pub(super) fn warnings(member: &Member, document: &OutcomeDocument) -> Vec<Strin
         section.bending_stiffness_yy_Nm2,
         section.bending_stiffness_yz_Nm2,
     );
-    if yz.abs() > 1e-9 * yy {
+    if yz.abs() > 1e-9 * yy && member.sideways() == Sideways::Held {
         notes.push(
             "The section has no axis of symmetry: left free sideways it would also bend \
              sideways, and stresses would be others"

@@ -123,11 +123,15 @@ fn description(page: &mut Page, outcome: &OutcomeDocument) {
         ));
     }
     page.blank();
-    page.line("Part              Material          Width x height      E now   E final   Share");
-    page.line("                                            mm         N/mm2     N/mm2   of EI");
+    page.line("Part              Material          Outline, mm         E now   E final   Share");
+    page.line("                                    width x height      N/mm2     N/mm2   of EI");
     for part in &outcome.section.parts {
+        let shape = match part.outline.as_str() {
+            "rectangle" => String::new(),
+            other => format!("{} ", other.replace('_', " ")),
+        };
         let size = format!(
-            "{} x {}",
+            "{shape}{} x {}",
             figure((part.right_m - part.left_m) * 1e3, 1),
             figure((part.top_m - part.bottom_m) * 1e3, 1)
         );
