@@ -11,6 +11,8 @@ use beamcore::section::{Part, Section, rectangle};
 use beamcore::time::Time;
 use beamcore::units::{Length, Number};
 
+#[path = "typed_odd_section.rs"]
+mod odd_section;
 #[path = "typed_roof_beam.rs"]
 mod roof_beam;
 
@@ -22,6 +24,7 @@ pub fn answers() -> Result<String> {
     text += &fields("slab-strip", &response)?;
     text += &camber("slab-strip", &response)?;
     text += &roof_beam::answers()?;
+    text += &odd_section::answers()?;
     Ok(text)
 }
 

@@ -213,9 +213,10 @@ def handbook() -> list[Case]:
 def main() -> int:
     from two_span import two_span
     from roof_beam import roof_beam
+    from odd_section import odd_section
     from slab_strip import slab_strip
 
-    cases = [flitch(), brass_core(), *handbook(), two_span(), slab_strip(), roof_beam()]
+    cases = [flitch(), brass_core(), *handbook(), two_span(), slab_strip(), roof_beam(), odd_section()]
     stale = []
     for case in cases:
         file = HERE / f"{case.name}.expect"
