@@ -80,8 +80,21 @@ fn loads() -> impl Strategy<Value = Vec<Load>> {
             from: x.m(),
             to: (x + length).m(),
         });
+    let trapezoidal = (-9.0..9.0f64, -9.0..9.0f64, 0.0..2.9f64, 0.1..3.0f64).prop_map(
+        |(left, right, x, length)| Load::Trapezoidal {
+            load_from: left.kN_per_m(),
+            load_to: right.kN_per_m(),
+            from: x.m(),
+            to: (x + length).m(),
+        },
+    );
+    let couple = (-9.0..9.0f64, 0.0..6.0f64).prop_map(|(c, x)| Load::Couple {
+        couple: c.kN_m(),
+        at: x.m(),
+    });
     let uniform = (-9.0..9.0f64).prop_map(|q| Load::Uniform { load: q.kN_per_m() });
-    prop::collection::vec(prop_oneof![point, partial, uniform], 1..5)
+    let load = prop_oneof![point, partial, trapezoidal, couple, uniform];
+    prop::collection::vec(load, 1..5)
 }
 
 fn permanent(name: &str, loads: &[Load]) -> Action {
@@ -246,6 +259,10 @@ proptest! {
         let total: f64 = loads.iter().map(|load| match *load {
             Load::Point { load, .. } => load.to_N(),
             Load::Partial { load, from, to } => (load * (to - from)).to_N(),
+            Load::Trapezoidal { load_from, load_to, from, to } => {
+                ((load_from + load_to) / 2.0 * (to - from)).to_N()
+            }
+            Load::Couple { .. } => 0.0,
             Load::Uniform { load } => (load * 6.m()).to_N(),
             _ => unreachable!("no other loads are drawn"),
         }).sum();

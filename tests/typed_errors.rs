@@ -1,6 +1,6 @@
 //! The typed way refuses the same mistakes as the document, under the same paths.
 
-use beamcore::camber::{CamberPlan, Rounding};
+use beamcore::camber::{CamberPlan, Rounding, Shape};
 use beamcore::material::{Creep, Material, ServiceClass, timber};
 use beamcore::member::{Action, CombinationFactors, Member, MemberPlan, Support};
 use beamcore::section::{Part, Section, rectangle};
@@ -247,6 +247,7 @@ fn results_that_are_not_there() {
 #[test]
 fn cambers_that_cannot_be() {
     let camber = CamberPlan {
+        shape: Shape::Parabola,
         combination: "permanent".into(),
         time: Time::Final,
         fraction: -1.0,
@@ -254,6 +255,7 @@ fn cambers_that_cannot_be() {
         to: "left".into(),
         step: Length::from_mm(-1.0),
         rounding: Rounding::Down,
+        least: Length::from_mm(f64::NAN),
         divisions: 5000,
     };
     let error = plan().check().unwrap().solve().camber(&camber).unwrap_err();
@@ -268,6 +270,7 @@ fn cambers_that_cannot_be() {
             "camber.fraction",
             "camber.to",
             "camber.step",
+            "camber.least",
             "camber.divisions"
         ]
     );

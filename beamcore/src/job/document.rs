@@ -20,6 +20,9 @@ pub(crate) struct JobDocument {
     pub(crate) mark: String,
     /// What the member is, in a few words.
     pub(crate) title: String,
+    /// What was assumed for the job beyond what the calculation assumes; stands in the outcome.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(crate) assumptions: Vec<String>,
     /// How many of them are made; without it, one.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(crate) quantity: Option<u32>,

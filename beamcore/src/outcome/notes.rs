@@ -36,7 +36,13 @@ pub(super) fn rules(member: &Member) -> Vec<String> {
 /// What was assumed.
 pub(super) fn assumptions(job: &Job) -> Vec<String> {
     let member = job.member();
-    let mut notes: Vec<String> = vec![
+    let mut notes: Vec<String> = job
+        .document()
+        .assumptions
+        .iter()
+        .map(|text| format!("For this job: {text}"))
+        .collect();
+    notes.extend([
         "Plane sections stay plane; materials are linear elastic; deflections are small".into(),
         "The parts are joined rigidly, without slip".into(),
         "Deflection by bending only; shear deflection is left out".into(),
@@ -51,7 +57,7 @@ pub(super) fn assumptions(job: &Job) -> Vec<String> {
             }
         },
         "The axial and longitudinal restraint of supports causes no axial force".into(),
-    ];
+    ]);
     if member
         .actions()
         .iter()

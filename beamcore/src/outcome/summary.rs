@@ -167,7 +167,7 @@ fn description(page: &mut Page, outcome: &OutcomeDocument) {
 
 fn stresses(page: &mut Page, outcome: &OutcomeDocument) {
     page.heading("GREATEST NORMAL STRESS, N/mm2 (tension positive)");
-    page.line("Part              Combination, time            Tension  Compression  Used");
+    page.line("Part            Combination                Time      Tension Compression   Used");
     for name in outcome.section.parts.iter().map(|part| &part.name) {
         for (combination, time, results) in each(outcome) {
             if matches!(combination.name.as_str(), "permanent" | "frequent") {
@@ -181,9 +181,10 @@ fn stresses(page: &mut Page, outcome: &OutcomeDocument) {
                 .as_ref()
                 .map_or_else(String::new, |u| figure(u.value, 2));
             page.line(&format!(
-                "{:<17} {:<26} {:>9} {:>12} {used:>5}",
-                short(name),
-                short_to(&format!("{}, {time}", combination.name), 26),
+                "{:<15} {:<26} {:<8} {:>8} {:>11} {used:>6}",
+                short_to(name, 15),
+                short_to(&combination.name, 26),
+                time.name(),
                 figure(stress.tension.value_Pa / 1e6, 2),
                 figure(stress.compression.value_Pa / 1e6, 2),
             ));
@@ -220,7 +221,7 @@ fn strengths(page: &mut Page, outcome: &OutcomeDocument) {
 
 fn reactions(page: &mut Page, outcome: &OutcomeDocument) {
     page.heading("REACTIONS (force upward positive, couple clockwise positive)");
-    page.line("Support           Combination                   instant        final");
+    page.line("Support         Combination                       instant        final");
     for support in outcome
         .job
         .member
@@ -241,9 +242,9 @@ fn reactions(page: &mut Page, outcome: &OutcomeDocument) {
             let (now, end) = (of(&combination.initial), of(&combination.end));
             let mut row = |now: f64, end: f64, unit: &str| {
                 page.line(&format!(
-                    "{:<17} {:<24} {:>9} {unit} {:>9} {unit}",
-                    short(support),
-                    short_to(&combination.name, 24),
+                    "{:<15} {:<28} {:>9} {unit} {:>9} {unit}",
+                    short_to(support, 15),
+                    short_to(&combination.name, 28),
                     figure(now / 1e3, 2),
                     figure(end / 1e3, 2),
                 ));

@@ -30,13 +30,14 @@ pub(super) fn components(page: &mut Page, outcome: &OutcomeDocument) {
     page.heading("COMPONENTS OF THE DEFLECTION, mm (EN 1990 A1.4.3)");
     page.line("w_inst instant; w_1 permanent, instant; w_2 creep under permanent load;");
     page.line("w_3 variable, with its creep; w_tot sum of the three; w_max after the camber");
-    page.line("Span, combination                  w_inst    w_1    w_2    w_3  w_tot  w_max");
+    page.line("Span                               w_inst    w_1    w_2    w_3  w_tot  w_max");
     for combination in &outcome.components {
+        page.line(&format!("under the {} combination", combination.name));
         for span in &combination.spans {
             let cell = |extreme: &LengthExtreme| figure(extreme.value_m * 1e3, 1);
             page.line(&format!(
                 "{:<34} {:>6} {:>6} {:>6} {:>6} {:>6} {:>6}",
-                short_to(&format!("{}, {}", span.name, combination.name), 34),
+                short_to(&span.name, 34),
                 cell(&span.w_inst),
                 cell(&span.w_1),
                 cell(&span.w_2),
