@@ -38,8 +38,8 @@ impl Camber {
         self.0.shape().name()
     }
 
-    /// The rise before rounding: fraction x deflection at the chord's middle, or, of an arc of least
-    /// gap, the rise that fits best.
+    /// The rise before rounding: fraction x deflection at the chord's middle, or, of an arc of
+    /// least gap, the rise that fits best.
     #[getter]
     fn target(&self) -> Quantity {
         Quantity::of(self.0.target())
@@ -52,8 +52,8 @@ impl Camber {
         Quantity::of(self.0.rise())
     }
 
-    /// The radius of an arc, (l^2/4 + c^2)/(2 c) for a rise c over a chord l, negative for a hanging
-    /// arc; None for other shapes and for no rise.
+    /// The radius of an arc, (l^2/4 + c^2)/(2 c) for a rise c over a chord l, negative for a
+    /// hanging arc; None for other shapes and for no rise.
     #[getter]
     fn radius(&self) -> Option<Quantity> {
         self.0.radius().map(Quantity::of)

@@ -36,7 +36,9 @@ pub(crate) struct CharacteristicTimberStrength(material::TimberStrength);
 #[pymethods]
 impl CharacteristicTimberStrength {
     #[new]
-    #[pyo3(signature = (bending, tension, compression, shear, tension_across=None, compression_across=None))]
+    #[pyo3(signature = (
+        bending, tension, compression, shear, tension_across=None, compression_across=None
+    ))]
     fn new(
         py: Python<'_>,
         bending: &Bound<'_, PyAny>,
@@ -122,8 +124,8 @@ impl CharacteristicTimberStrength {
 
 /// Characteristic strengths of metal; not yet the design strength MetalStrength.
 ///
-/// yield_stress: f_y of steel, the 0.2 % proof strength f_o of aluminium; ultimate: f_u, where it is
-/// known.
+/// yield_stress: f_y of steel, the 0.2 % proof strength f_o of aluminium; ultimate: f_u, where it
+/// is known.
 ///
 /// >>> CharacteristicMetalStrength(275*MPa, ultimate="430 MPa").ultimate
 /// 430 MPa

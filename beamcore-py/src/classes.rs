@@ -12,8 +12,8 @@ use pyo3::prelude::*;
 /// characteristic strengths, and k_def as creep factor.
 ///
 /// strength_class: C14 to C50, D18 to D70 (EN 338:2016), GL20h to GL32h or GL20c to GL32c
-/// (EN 14080:2013), from memory; service_class: 1, 2 or 3 (EN 1995-1-1:2004). Thermal expansion along
-/// the grain 5e-6/K: common practice, no source.
+/// (EN 14080:2013), from memory; service_class: 1, 2 or 3 (EN 1995-1-1:2004). Thermal expansion
+/// along the grain 5e-6/K: common practice, no source.
 ///
 /// >>> timber("C24", service_class=1).modulus
 /// 11 GPa
@@ -62,8 +62,8 @@ fn steel_of_thickness(strength_class: &str, thickness: &Bound<'_, PyAny>) -> PyR
 /// Aluminium as an extruded profile of a thickness: E = 70 GPa, G = 27 GPa, 2700 kg/m3, 23e-6/K, no
 /// creep, 0.2 % proof strength f_o and ultimate strength f_u away from welds.
 ///
-/// alloy_and_temper: EN AW-6060 T6, EN AW-6063 T6 or EN AW-6082 T6; thickness: from 0.6 mm to 15 mm,
-/// of EN AW-6063 T6 to 25 mm (EN 1999-1-1:2007 3.2.5 and Table 3.2b, from memory).
+/// alloy_and_temper: EN AW-6060 T6, EN AW-6063 T6 or EN AW-6082 T6; thickness: from 0.6 mm to
+/// 15 mm, of EN AW-6063 T6 to 25 mm (EN 1999-1-1:2007 3.2.5 and Table 3.2b, from memory).
 ///
 /// >>> aluminium("EN AW-6082 T6", "8 mm").modulus
 /// 70 GPa

@@ -8,8 +8,8 @@ use pyo3::types::{PyDict, PyMapping, PyTuple};
 
 /// Partial factors of the fundamental combination.
 ///
-/// What is not given has the recommended value of EN 1990:2002 Table A1.2(B), from memory; the local
-/// annex decides.
+/// What is not given has the recommended value of EN 1990:2002 Table A1.2(B), from memory; the
+/// local annex decides.
 ///
 /// - permanent: gamma_G,sup of permanent actions that are unfavourable, 1.35
 /// - permanent_favourable: gamma_G,inf of permanent actions that are favourable, 1.0

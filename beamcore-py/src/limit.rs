@@ -26,7 +26,8 @@ pub(crate) fn component(symbol: &str) -> Result<Component, Problem> {
 ///   what is left after the camber w_c
 /// - span_over: the length of the span over this number is allowed; or value: this length is
 /// - span: the name of the span it holds for; all spans where there is none. The length of an
-///   overhang is that of the overhang itself: where a code counts it twice, give it a limit of its own
+///   overhang is that of the overhang itself: where a code counts it twice, give it one of
+///   its own
 /// - combination: the combination it holds for; where there is none, every characteristic one
 ///
 /// >>> Limit("w_max", span_over=300).span_over

@@ -198,14 +198,13 @@ impl Material {
     ///
     /// - modulus: another E; E_05 and G stay, unless G follows from E and nu
     /// - fractile_modulus, fractile_density: the 5 % fractiles E_05 and rho_k
-    /// - shear_modulus: G; poisson_ratio: nu from 0 to 0.5, so that G = E/(2 (1 + nu)). Either of
-    ///   them replaces what a class has; both must agree within 1 %
+    /// - shear_modulus: G; poisson_ratio: nu from 0 to 0.5, so that G = E/(2 (1 + nu)). Either
+    ///   replaces what a class has; both must agree within 1 %
     /// - density: the mean density, from which self-weight follows
     /// - thermal_expansion: as 12e-6/K, positive where warmth lengthens
     /// - creep: a creep factor, or a ConcreteCreep from which it follows
     ///
-    /// >>> dense = timber("C24", service_class=1).with_values(density=450*kg/m**3)
-    /// >>> dense.overrides
+    /// >>> timber("C24", service_class=1).with_values(density=450*kg/m**3).overrides
     /// ('density 450 kg/m3 instead of 420 kg/m3',)
     #[pyo3(signature = (
         *, modulus=None, fractile_modulus=None, shear_modulus=None, poisson_ratio=None,

@@ -17,8 +17,8 @@ use pyo3::types::{PyDict, PyTuple};
 
 /// A section along a length, on supports, under actions.
 ///
-/// It is checked when it is made; all that is wrong is raised at once. Its combinations are those of
-/// EN 1990:2002 with partial_factors (the recommended ones where none are given), and then
+/// It is checked when it is made; all that is wrong is raised at once. Its combinations are those
+/// of EN 1990:2002 with partial_factors (the recommended ones where none are given), and then
 /// own_combinations.
 ///
 /// >>> joist = Part("joist", rectangle(80*mm, 220*mm), timber("C24", service_class=1))

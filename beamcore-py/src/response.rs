@@ -22,9 +22,9 @@ use pyo3::types::PyTuple;
 /// The solved member: every field under every combination, at both times.
 ///
 /// Combinations are named "permanent", "quasi-permanent", "characteristic", "frequent" and
-/// "fundamental"; where several variable actions can lead, as in "fundamental, NAME leading". At "initial" all parts have
-/// short-term moduli; at "final" the quasi-permanent share acts on E/(1 + creep factor) of each
-/// part and the rest on E, so that only what creeps softens.
+/// "fundamental"; where several variable actions can lead, as in "fundamental, NAME leading". At
+/// "initial" all parts have short-term moduli; at "final" the quasi-permanent share acts on
+/// E/(1 + creep factor) of each part and the rest on E, so that only what creeps softens.
 #[pyclass(frozen, module = "beamcore")]
 #[derive(Debug)]
 pub(crate) struct Response(pub(crate) Made<response::Response>);
@@ -201,9 +201,9 @@ impl Response {
 
     /// The camber to build in, over the chord between the supports from_ and to.
     ///
-    /// - shape: "parabola" or "arc_through_middle", whose rise is that of the deflection line at the
-    ///   middle of the chord; "mirror", the mirror image of that line; or "arc_least_gap", the arc
-    ///   whose greatest gap to it is least
+    /// - shape: "parabola" or "arc_through_middle", whose rise is that of the deflection line at
+    ///   the middle of the chord; "mirror", the mirror image of that line; or "arc_least_gap", the
+    ///   arc whose greatest gap to it is least
     /// - combination, time, fraction: fraction x this deflection is built in
     /// - step, rounding: the rise is rounded ("nearest", "down" or "up") to whole steps
     /// - least: a smaller rise is not worth building and becomes none; without it, any is built

@@ -40,7 +40,7 @@ impl Unit {
 
     fn named(symbol: &str) -> Result<Self, Problem> {
         let any = match symbol {
-            // The core only has what is per kelvin; as 1 / (1/K), products and powers go with K too.
+            // The core only has what is per kelvin; as 1 / (1/K) it has K too.
             "K" => AnyUnit::ONE.per(AnyUnit::named("/K")?)?,
             symbol => AnyUnit::named(symbol)?,
         };

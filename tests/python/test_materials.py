@@ -137,7 +137,7 @@ def test_mistakes_in_values_are_told_at_once() -> None:
     assert [problem.split(": found ")[0] for problem in found] == [
         "material.modulus", "material.density", "material.thermal_expansion",
     ]
-    assert found[2].endswith('without a unit; expected a thermal expansion with one of the units /K, '
+    assert found[2].endswith('expected a thermal expansion with one of the units /K, '
                              'for example "0.000012 /K"')
     hot = steel("S275").with_values(thermal_expansion=12/K)
     [problem] = problems(lambda: used(hot))

@@ -37,7 +37,7 @@ __all__ = [
     "Sides", "Field", "StressExtreme", "Utilisation", "PartStress", "Ordinate", "Camber",
     "Reading", "Reaction", "Limit", "LimitCheck", "Response",
     # Units
-    "m", "mm", "cm", "inch", "ft", "N", "kN", "MN", "lbf", "kip", "plf", "Pa", "kPa", "MPa",
+    "m", "mm", "cm", "inch", "ft", "N", "kN", "MN", "lbf", "kip", "plf", "psf", "Pa", "kPa", "MPa",
     "psi", "ksi", "GPa", "permille", "rad", "mrad", "deg", "kg", "t", "lb", "s", "h", "day",
     "year", "K",
 ]

@@ -17,6 +17,7 @@ __all__ = [
     "lbf",
     "kip",
     "plf",
+    "psf",
     "Pa",
     "kPa",
     "MPa",
@@ -47,6 +48,7 @@ MN: Final[Unit] = Unit("MN")
 lbf: Final[Unit] = Unit("lbf")
 kip: Final[Unit] = Unit("kip")
 plf: Final[Unit] = Unit("plf")
+psf: Final[Unit] = Unit("psf")
 Pa: Final[Unit] = Unit("Pa")
 kPa: Final[Unit] = Unit("kPa")
 MPa: Final[Unit] = Unit("MPa")

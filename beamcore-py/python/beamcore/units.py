@@ -6,7 +6,7 @@ from beamcore._core import Unit
 from beamcore._units import *
 
 __all__ = [
-    "m", "mm", "cm", "inch", "ft", "N", "kN", "MN", "lbf", "kip", "plf", "Pa", "kPa", "MPa",
+    "m", "mm", "cm", "inch", "ft", "N", "kN", "MN", "lbf", "kip", "plf", "psf", "Pa", "kPa", "MPa",
     "psi", "ksi", "GPa", "permille", "rad", "mrad", "deg", "kg", "t", "lb", "s", "h", "day",
     "year", "K",
 ]
