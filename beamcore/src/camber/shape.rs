@@ -110,9 +110,9 @@ impl Line {
             self.height(from + (to - from) * share)
         });
         // Newton's divided differences on the nodes i/5, then Horner's scheme to powers of t.
-        for order in 1..6 {
+        for (order, width) in FIFTHS.iter().enumerate().skip(1) {
             for i in (order..6).rev() {
-                table[i] = (table[i] - table[i - 1]) / (FIFTHS[order]);
+                table[i] = (table[i] - table[i - 1]) / width;
             }
         }
         let mut c: Coefficients = [0.0; 6];
