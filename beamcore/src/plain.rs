@@ -14,6 +14,7 @@ use crate::member::SAME_PLACE;
 use crate::section::{Part, Section, Stiffness, rectangle};
 use crate::solve::beam::{Beam, LoadCase};
 use crate::solve::condition::Holds;
+use crate::solve::polynomial::PieceLoad;
 use crate::time::Time;
 use crate::units::{AnyUnit, BendingStiffness, Duration, Force, Length, LineLoad, Modulus, Stress};
 use std::sync::Arc;
@@ -115,7 +116,10 @@ pub fn simple_span_uniform_deflection(
     check::finite(&mut problems, load, "load_N_per_m");
     Error::check(problems)?;
     let case = LoadCase {
-        line: vec![[load_N_per_m; 2]],
+        pieces: vec![PieceLoad {
+            line: [load_N_per_m; 2],
+            curvature: 0.0,
+        }],
         ..LoadCase::none(2)
     };
     greatest_deflection(vec![0.0, span_m], bending_stiffness_Nm2, &case)

@@ -55,6 +55,13 @@ impl Piecewise {
         }
     }
 
+    /// Adds the same value everywhere.
+    pub(crate) fn shift(&mut self, value: f64) {
+        for piece in &mut self.pieces {
+            piece[0] += value;
+        }
+    }
+
     /// The same field over the pieces between two stations only.
     pub(crate) fn between(&self, from: f64, to: f64) -> Self {
         let first = self.stations.partition_point(|&x| x < from);

@@ -7,7 +7,7 @@ use super::support::{Support, SupportKind};
 use crate::check;
 use crate::error::{ErrorKind, Problem};
 use crate::path;
-use crate::section::Section;
+use crate::section::{InitialStrain, PlacedPart, Section, Sideways};
 use crate::units::Length;
 
 /// A list as far as it is known: an entry whose text cannot be read is left out of it.
@@ -275,4 +275,19 @@ fn check_self_weight(problems: &mut Vec<Problem>, section: &Section, actions: &[
             ));
         }
     }
+}
+
+/// Initial strains are followed for members that are held sideways only.
+pub(super) fn strains_held(section: &Section, sideways: Sideways) -> Option<Problem> {
+    let strained = |part: &&PlacedPart| part.initial_strain() != InitialStrain::NONE;
+    let part = section.placed().iter().find(strained)?;
+    (sideways == Sideways::Free).then(|| {
+        let base = path::named("section.parts", part.name());
+        Problem::new(
+            ErrorKind::Value,
+            path::key(&base, "initial_strain"),
+            "an initial strain in a member that is free sideways",
+            "a member that is held sideways",
+        )
+    })
 }

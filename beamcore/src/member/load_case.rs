@@ -48,6 +48,15 @@ pub(crate) fn load_case(beam: &Beam, section: &Section, action: &Action) -> Load
     case
 }
 
+/// The free curvature of a member whose parts bear initial strains.
+pub(crate) fn curvature_case(beam: &Beam, curvature: f64) -> LoadCase {
+    let mut case = LoadCase::none(beam.stations().len());
+    for piece in &mut case.pieces {
+        piece.curvature = curvature;
+    }
+    case
+}
+
 /// The ends of the member.
 fn whole(stations: &[f64]) -> [Length; 2] {
     [stations[0], stations[stations.len() - 1]].map(Length::from_si)
@@ -68,8 +77,9 @@ fn spread(case: &mut LoadCase, stations: &[f64], ends: [Length; 2], loads: [Line
         }
     };
     for k in first..last {
-        case.line[k][0] += at(k);
-        case.line[k][1] += at(k + 1);
+        let line = &mut case.pieces[k].line;
+        line[0] += at(k);
+        line[1] += at(k + 1);
     }
 }
 

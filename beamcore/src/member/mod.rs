@@ -25,14 +25,14 @@ pub(crate) use checks::{Known, problems_of};
 #[cfg(feature = "document")]
 pub(crate) use combination::{all as combinations_of, problems as combination_problems};
 pub(crate) use layout::SAME_PLACE;
-pub(crate) use load_case::load_case;
+pub(crate) use load_case::{curvature_case, load_case};
 #[cfg(feature = "document")]
 pub(crate) use span::all as spans_of;
 
 use crate::error::Result;
 use crate::lookup;
 use crate::response::Response;
-use crate::section::{Section, Sideways, Stiffness};
+use crate::section::{Section, Sideways, Stiffness, StrainPlane};
 use crate::solve::beam::Beam;
 use crate::time::Time;
 use crate::units::Length;
@@ -60,6 +60,8 @@ struct Data {
 pub(crate) struct MemberState {
     pub(crate) stiffness: Stiffness,
     pub(crate) beam: Beam,
+    /// The strain that the section takes freely under the initial strains of its parts.
+    pub(crate) free: StrainPlane,
 }
 
 impl Member {
@@ -99,7 +101,11 @@ impl Member {
             let stiffness = plan.section().stiffness(time);
             layout
                 .beam(stiffness.against_bending(plan.is_held()).0)
-                .map(|beam| MemberState { stiffness, beam })
+                .map(|beam| MemberState {
+                    free: plan.section().free_plane(time, plan.is_held()),
+                    stiffness,
+                    beam,
+                })
         });
         let [initial, end] = states;
         let combinations =

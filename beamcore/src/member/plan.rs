@@ -72,7 +72,8 @@ impl MemberPlan {
     /// # Errors
     /// All of: an impossible length, no support, no action, names that stand twice, supports or
     /// loads outside the member, two supports at one place, a stretch that ends before it begins,
-    /// self-weight of a material without density, combination factors outside 0 to 1, partial
+    /// self-weight of a material without density, initial strains
+    /// of a member that is free sideways, combination factors outside 0 to 1, partial
     /// factors outside 0 to 3, an own combination of unknown actions or of a name that is taken; and a member
     /// that is free to move, with the motion that nothing resists.
     pub fn check(self) -> Result<Member> {
@@ -82,6 +83,7 @@ impl MemberPlan {
             &self.supports.as_slice().into(),
             &self.actions.as_slice().into(),
         );
+        problems.extend(checks::strains_held(&self.section, self.sideways));
         problems.extend(combination::problems(
             &self.actions,
             &self.factors,

@@ -38,20 +38,24 @@ pub struct Reaction {
 pub struct Response {
     member: Member,
     stations: Arc<[f64]>,
-    /// One solution per action, for the initial and the final stiffness.
+    /// One solution per action and a last one for the initial strains of the parts, for the initial
+    /// and the final stiffness.
     solved: [Vec<Solved>; 2],
 }
 
 impl Response {
     pub(crate) fn new(member: Member) -> Self {
         let solved = Time::ALL.map(|time| {
-            let beam = &member.state(time).beam;
+            let state = member.state(time);
+            let beam = &state.beam;
             let case = |action| crate::member::load_case(beam, member.section(), action);
-            member
+            let actions = member
                 .actions()
                 .iter()
-                .map(|action| beam.solve(&case(action)))
-                .collect()
+                .map(|action| beam.solve(&case(action)));
+            let free = state.free.curvature_y.si();
+            let strains = beam.solve(&crate::member::curvature_case(beam, free));
+            actions.chain(std::iter::once(strains)).collect()
         });
         let stations = Arc::from(member.state(Time::Initial).beam.stations());
         Self {
@@ -217,7 +221,7 @@ impl Response {
         ))
     }
 
-    /// For each action, its solution with short-term and with effective moduli.
+    /// For each action, and last for the initial strains, its solution with short-term and with effective moduli.
     fn both(&self) -> impl Iterator<Item = [&Solved; 2]> {
         self.solved[0]
             .iter()

@@ -12,7 +12,8 @@ pub(super) struct Share {
     pub(super) effective: f64,
 }
 
-/// The shares of all actions.
+/// The shares of all actions, and last of the initial strains of the parts, which last from the
+/// first day.
 ///
 /// At the end the lasting share of an action, its quasi-permanent value (or all of it where the
 /// combination holds less), is met with effective moduli; what comes on top of it is met with

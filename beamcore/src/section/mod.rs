@@ -1,6 +1,7 @@
 //! Sections: parts of several materials, rigidly joined, and what follows from them.
 
 mod contact;
+mod initial;
 mod part;
 mod place;
 mod placed;
@@ -13,6 +14,7 @@ mod transformed;
 pub use crate::outline::{
     Outline, angle, channel, disc, hollow_box, i_shape, polygon, rectangle, ring, tee,
 };
+pub use initial::InitialStrain;
 pub use part::Part;
 pub use place::{MirrorAxis, PartName, Placement, Side};
 pub use placed::PlacedPart;
@@ -149,6 +151,15 @@ impl Section {
     #[must_use]
     pub fn stiffness(&self, time: Time) -> Stiffness {
         Stiffness::new(&self.placed, time)
+    }
+
+    /// The plane of strain that the section takes freely under the initial strains of its parts.
+    ///
+    /// Source: EA eps0 = sum of `E_i` int eps_i* dA, EI kappa = -sum of `E_i` int z eps_i* dA (e.g.
+    /// Timoshenko, J. Opt. Soc. Am. 11, 1925, 233, for two strips, from memory).
+    #[must_use]
+    pub fn free_plane(&self, time: Time, sideways: Sideways) -> StrainPlane {
+        initial::free_plane(&self.placed, &self.stiffness(time), sideways)
     }
 
     /// The section as if made of the material of one part, at a time.

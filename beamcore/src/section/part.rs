@@ -1,5 +1,6 @@
 //! Parts: one piece of one material each.
 
+use super::initial::InitialStrain;
 use super::place::{MirrorAxis, PartName, Placement, Side};
 use crate::check;
 use crate::error::Problem;
@@ -18,6 +19,7 @@ pub struct Part {
     material: Material,
     placement: Placement,
     line_mass: Option<LineMass>,
+    initial_strain: InitialStrain,
 }
 
 impl Part {
@@ -33,6 +35,7 @@ impl Part {
             material,
             placement,
             line_mass: None,
+            initial_strain: InitialStrain::NONE,
         }
     }
 
@@ -104,6 +107,14 @@ impl Part {
         self
     }
 
+    /// The same part with an initial strain from the first day, which makes the section bend and
+    /// its parts press on each other.
+    #[must_use]
+    pub const fn initial_strain(mut self, strain: InitialStrain) -> Self {
+        self.initial_strain = strain;
+        self
+    }
+
     /// The same part at the given place.
     #[must_use]
     pub fn placed(mut self, placement: Placement) -> Self {
@@ -129,6 +140,12 @@ impl Part {
         &self.material
     }
 
+    /// The initial strain; none unless it was given.
+    #[must_use]
+    pub const fn given_initial_strain(&self) -> InitialStrain {
+        self.initial_strain
+    }
+
     /// The mass per length, if it was given instead of density x area.
     #[must_use]
     pub const fn given_line_mass(&self) -> Option<LineMass> {
@@ -146,6 +163,8 @@ impl Part {
         check::name(&mut problems, &self.name, "section.parts");
         let base = path::named("section.parts", &self.name);
         problems.extend(self.outline.problems(&path::key(&base, "outline")));
+        let strain = path::key(&base, "initial_strain");
+        problems.extend(self.initial_strain.problems(&strain));
         if let Some(mass) = self.line_mass {
             check::not_negative(&mut problems, mass, &path::key(&base, "line_mass"));
         }

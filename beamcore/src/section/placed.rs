@@ -1,5 +1,6 @@
 //! Parts at their places in a section.
 
+use super::initial::InitialStrain;
 use super::part::Part;
 use super::place::{MirrorAxis, Placement, Side};
 use crate::material::Material;
@@ -123,6 +124,18 @@ impl PlacedPart {
     #[must_use]
     pub const fn material(&self) -> &Material {
         self.part.material()
+    }
+
+    /// The initial strain that the part bears; of a mirror image it is mirrored too.
+    #[must_use]
+    pub fn initial_strain(&self) -> InitialStrain {
+        let sign = |flip: bool| if flip { -1.0 } else { 1.0 };
+        let strain = self.part.given_initial_strain();
+        InitialStrain {
+            axial: strain.axial,
+            curvature_y: strain.curvature_y * sign(self.mirrored.1),
+            curvature_z: strain.curvature_z * sign(self.mirrored.0),
+        }
     }
 
     /// The host that the part is set into, if it is.

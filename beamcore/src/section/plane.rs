@@ -90,7 +90,8 @@ pub struct PointStress {
 }
 
 impl Section {
-    /// The stress in a part at a point of it, under section forces: E x strain.
+    /// The stress in a part at a point of it, under section forces: E x strain. Initial strains of
+    /// parts are not in it.
     ///
     /// # Errors
     /// [`crate::ErrorKind::Lookup`] for an unknown part; [`crate::ErrorKind::Value`] for forces that are not
@@ -108,7 +109,8 @@ impl Section {
         Ok(stiffness.moduli()[index] * plane.strain_at(y, z))
     }
 
-    /// The greatest and the least stress in a part under section forces, with their points: the
+    /// The greatest and the least stress in a part under section forces (initial strains are not in
+    /// them), with their points: the
     /// strain is linear, so they stand where the outline reaches farthest.
     ///
     /// # Errors

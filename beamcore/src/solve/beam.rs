@@ -2,7 +2,7 @@
 
 use super::condition::{self, Holds};
 use super::mechanism::Motion;
-use super::polynomial::{PieceFields, PolynomialPiece};
+use super::polynomial::{PieceFields, PieceLoad, PolynomialPiece};
 use super::relation::Piece;
 use super::residual;
 use super::state::{HALF, STATES, Scale};
@@ -22,8 +22,8 @@ pub(crate) struct Beam {
 /// The loads of one case.
 #[derive(Clone, Debug, Default, PartialEq)]
 pub(crate) struct LoadCase {
-    /// The line load at the two ends of each piece, linear between them; N/m, positive downward.
-    pub(crate) line: Vec<[f64; 2]>,
+    /// What acts on each piece.
+    pub(crate) pieces: Vec<PieceLoad>,
     /// The point load at each station; N, positive downward.
     pub(crate) point: Vec<f64>,
     /// The couple at each station; N m, positive clockwise.
@@ -50,7 +50,7 @@ impl LoadCase {
     /// No load on a member with so many stations.
     pub(crate) fn none(stations: usize) -> Self {
         Self {
-            line: vec![[0.0; 2]; stations - 1],
+            pieces: vec![PieceLoad::default(); stations - 1],
             point: vec![0.0; stations],
             couple: vec![0.0; stations],
         }
@@ -117,8 +117,8 @@ impl Beam {
         let sides: Vec<_> = self
             .pieces
             .iter()
-            .zip(&load.line)
-            .map(|(piece, line)| piece.load_side(line))
+            .zip(&load.pieces)
+            .map(|(piece, load)| piece.load_side(load))
             .collect();
         let mut relations = sides;
         for (k, side) in relations.iter_mut().enumerate().take(last - 1) {
@@ -131,7 +131,7 @@ impl Beam {
         };
         let states = self.sweep.solve(&chain);
         let fields: Vec<_> = (0..last)
-            .map(|k| self.pieces[k].fields(&states[k], load.line[k]))
+            .map(|k| self.pieces[k].fields(&states[k], &load.pieces[k]))
             .collect();
         let reactions = (0..=last)
             .map(|k| {

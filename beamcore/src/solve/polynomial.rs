@@ -15,6 +15,15 @@ pub(crate) struct PolynomialPiece {
     scale: Scale,
 }
 
+/// What acts on a piece.
+#[derive(Clone, Copy, Debug, Default, PartialEq)]
+pub(crate) struct PieceLoad {
+    /// The line load at the two ends, linear between them; N/m, positive downward.
+    pub(crate) line: [f64; 2],
+    /// The curvature that the piece takes freely, without moment; 1/m, positive sagging.
+    pub(crate) curvature: f64,
+}
+
 /// The four fields over one piece, each a polynomial of t from 0 (left end) to 1 (right end).
 #[derive(Clone, Copy, Debug, PartialEq)]
 pub(crate) struct PieceFields {
@@ -57,15 +66,21 @@ impl PolynomialPiece {
         (self.scaled(left), self.scaled(right - left))
     }
 
+    /// A curvature in 1/m, in the scale's unit.
+    fn scaled_curvature(&self, curvature: f64) -> f64 {
+        curvature * self.scale.length
+    }
+
     /// The fields, in SI units, from the scaled state at the left end and the line load q at the
-    /// two ends in N/m, which grows by g over the length h; t = x/h:
+    /// two ends in N/m, which grows by g over the length h; t = x/h, k the free curvature:
     ///
     /// V = V0 - q x - g x t/2, M = M0 + V0 x - q x^2/2 - g x^2 t/6,
-    /// theta = theta0 - (M0 x + V0 x^2/2 - q x^3/6 - g x^3 t/24)/EI,
-    /// w = w0 + theta0 x - (M0 x^2/2 + V0 x^3/6 - q x^4/24 - g x^4 t/120)/EI.
-    pub(crate) fn fields(&self, start: &SVector<f64, STATES>, line_load: [f64; 2]) -> PieceFields {
+    /// theta = theta0 - (M0 x + V0 x^2/2 - q x^3/6 - g x^3 t/24)/EI - k x,
+    /// w = w0 + theta0 x - (M0 x^2/2 + V0 x^3/6 - q x^4/24 - g x^4 t/120)/EI - k x^2/2.
+    pub(crate) fn fields(&self, start: &SVector<f64, STATES>, load: &PieceLoad) -> PieceFields {
         let (h, f) = (self.length, self.flexibility);
-        let (q, g) = self.scaled_line(line_load);
+        let (q, g) = self.scaled_line(load.line);
+        let k = self.scaled_curvature(load.curvature);
         let h2 = h * h;
         let (h3, h4) = (h2 * h, h2 * h2);
         let (w, theta, v, m) = (start[W], start[THETA], start[V], start[M]);
@@ -77,7 +92,7 @@ impl PolynomialPiece {
                 [
                     w,
                     theta * h,
-                    -f * m * h2 / 2.0,
+                    -(f * m + k) * h2 / 2.0,
                     -f * v * h3 / 6.0,
                     f * q * h4 / 24.0,
                     f * g * h4 / 120.0,
@@ -87,7 +102,7 @@ impl PolynomialPiece {
                 units[THETA],
                 [
                     theta,
-                    -f * m * h,
+                    -(f * m + k) * h,
                     -f * v * h2 / 2.0,
                     f * q * h3 / 6.0,
                     f * g * h3 / 24.0,
@@ -101,8 +116,7 @@ impl PolynomialPiece {
 }
 
 impl Piece<STATES> for PolynomialPiece {
-    /// The line load at the two ends in N/m, positive downward.
-    type Load = [f64; 2];
+    type Load = PieceLoad;
 
     fn relation(&self) -> Relation<STATES> {
         let (h, f) = (self.length, self.flexibility);
@@ -119,13 +133,14 @@ impl Piece<STATES> for PolynomialPiece {
         }
     }
 
-    fn load_side(&self, line_load: &[f64; 2]) -> LoadSide<STATES> {
+    fn load_side(&self, load: &PieceLoad) -> LoadSide<STATES> {
         let (h, f) = (self.length, self.flexibility);
-        let (q, g) = self.scaled_line(*line_load);
+        let (q, g) = self.scaled_line(load.line);
+        let k = self.scaled_curvature(load.curvature);
         let h2 = h * h;
         SVector::<f64, STATES>::new(
-            f * h2 * h2 * (q / 24.0 + g / 120.0),
-            f * h2 * h * (q / 6.0 + g / 24.0),
+            f * h2 * h2 * (q / 24.0 + g / 120.0) - k * h2 / 2.0,
+            f * h2 * h * (q / 6.0 + g / 24.0) - k * h,
             -h * (q + g / 2.0),
             -h2 * (q / 2.0 + g / 6.0),
         )

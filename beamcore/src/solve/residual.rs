@@ -18,7 +18,8 @@ pub(super) fn of(stations: &[f64], load: &LoadCase, solved: &Solved) -> f64 {
         moments.add(reaction.couple);
         moments.add(load.couple[k]);
     }
-    for (ends, &[left, right]) in stations.windows(2).zip(&load.line) {
+    for (ends, piece) in stations.windows(2).zip(&load.pieces) {
+        let [left, right] = piece.line;
         // A line load is two triangles, each with its force at a third of the length.
         let third = (ends[1] - ends[0]) / 3.0;
         for (line, arm) in [(left, third), (right, 2.0 * third)] {

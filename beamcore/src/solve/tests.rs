@@ -3,7 +3,7 @@
 use super::beam::{Beam, LoadCase};
 use super::condition::Holds;
 use super::mechanism::Motion;
-use super::polynomial::PolynomialPiece;
+use super::polynomial::{PieceLoad, PolynomialPiece};
 use super::relation::{Piece, Relation};
 use super::state::{HALF, STATES, Scale};
 use super::sweep::{ChainLoad, Sweep};
@@ -18,9 +18,16 @@ fn near(value: f64, expected: f64, peak: f64, what: &str) {
     );
 }
 
+fn line(line: [f64; 2]) -> PieceLoad {
+    PieceLoad {
+        line,
+        curvature: 0.0,
+    }
+}
+
 fn uniform(pieces: usize, q: f64) -> LoadCase {
     LoadCase {
-        line: vec![[q, q]; pieces],
+        pieces: vec![line([q, q]); pieces],
         ..LoadCase::none(pieces + 1)
     }
 }
@@ -90,7 +97,7 @@ fn triangular_load_and_couple_on_a_simple_span() {
     let (l, ei, q) = (3.7, 1.1e6, 8.0e3);
     let beam = Beam::new(vec![0.0, l], vec![Holds::DEFLECTION; 2], &[ei]).unwrap();
     let solved = beam.solve(&LoadCase {
-        line: vec![[0.0, q]],
+        pieces: vec![line([0.0, q])],
         ..LoadCase::none(2)
     });
     let w = 5.0 * q * l * l * l * l / (768.0 * ei);
@@ -121,6 +128,39 @@ fn triangular_load_and_couple_on_a_simple_span() {
     near(solved.fields[0].moment[0], c, c, "moment at the couple");
     let w = c * l * l / (16.0 * ei);
     near(value(&solved.fields[0].deflection, 0.5), w, w, "deflection");
+    assert!(solved.residual < 1e-14, "{}", solved.residual);
+}
+
+#[test]
+fn free_curvature_bends_and_restrained_curvature_makes_moments() {
+    // Simple span: w = kappa L^2/8 and no moment. Both ends fixed: no deflection, M = -kappa EI.
+    let (l, ei, kappa) = (6.2, 3.0e6, 1.4e-3);
+    let case = LoadCase {
+        pieces: vec![PieceLoad {
+            line: [0.0; 2],
+            curvature: kappa,
+        }],
+        ..LoadCase::none(2)
+    };
+    let simple = Beam::new(vec![0.0, l], vec![Holds::DEFLECTION; 2], &[ei]).unwrap();
+    let solved = simple.solve(&case);
+    let w = kappa * l * l / 8.0;
+    near(value(&solved.fields[0].deflection, 0.5), w, w, "deflection");
+    near(solved.fields[0].moment[0], 0.0, kappa * ei, "moment");
+    let fixed = Beam::new(vec![0.0, l], vec![Holds::BOTH; 2], &[ei]).unwrap();
+    let solved = fixed.solve(&case);
+    near(
+        solved.fields[0].moment[0],
+        -kappa * ei,
+        kappa * ei,
+        "moment",
+    );
+    near(
+        value(&solved.fields[0].deflection, 0.5),
+        0.0,
+        w,
+        "deflection",
+    );
     assert!(solved.residual < 1e-14, "{}", solved.residual);
 }
 
@@ -192,12 +232,12 @@ proptest! {
     /// The relations may be multiplied by any regular matrix: the solution is the same. So the
     /// sweep does not rest on the special form that polynomial pieces give.
     #[test]
-    fn mixing_the_relations_changes_nothing((lengths, stiffness, line, mix) in chain()) {
+    fn mixing_the_relations_changes_nothing((lengths, stiffness, loads, mix) in chain()) {
         let scale = Scale { length: 1.0, stiffness: 1.0 };
         let pieces: Vec<_> = lengths.iter().zip(&stiffness)
             .map(|(&h, &ei)| PolynomialPiece::new(h, ei, scale)).collect();
         let plain: Vec<_> = pieces.iter().map(Piece::relation).collect();
-        let sides: Vec<_> = pieces.iter().zip(&line).map(|(p, &q)| p.load_side(&[q, 2.0 * q])).collect();
+        let sides: Vec<_> = pieces.iter().zip(&loads).map(|(p, &q)| p.load_side(&line([q, 2.0 * q]))).collect();
         let mixer = |k: usize| {
             SMatrix::<f64, STATES, STATES>::from_fn(|i, j| {
                 mix[(k * STATES + i) * STATES + j] + if i == j { 3.0 } else { 0.0 }

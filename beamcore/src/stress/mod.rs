@@ -57,14 +57,15 @@ impl Response {
         let moments = self.parted_moment(combination, time)?;
         let line = |point: Point| {
             let mut line = moments[0].zeroed();
-            for (moment, time) in moments.iter().zip(Time::ALL) {
-                let stiffness = &member.state(time).stiffness;
+            for (moment, share) in moments.iter().zip(Time::ALL) {
+                let stiffness = &member.state(share).stiffness;
                 let (bending, ratio) = stiffness.against_bending(member.sideways());
                 let arm = (point.z - stiffness.centroid_z().si())
                     + ratio * (point.y - stiffness.centroid_y().si());
                 let modulus = stiffness.moduli()[index].si();
                 line.add(moment.pieces(), -modulus * arm / bending.si());
             }
+            line.shift(self.self_stress(index, point, time));
             line
         };
         let fibres = fibres(placed, &self.directions());
@@ -78,6 +79,18 @@ impl Response {
                 .collect(),
             centroid: line(Point::new(placed.net().y, placed.net().z)),
         })
+    }
+
+    /// The stress that the initial strains of the parts make without any load or restraint:
+    /// E (eps of the free section - eps* of the part), with the moduli of the time.
+    fn self_stress(&self, part: usize, point: Point, time: Time) -> f64 {
+        let state = self.member().state(time);
+        let placed = &self.member().section().placed()[part];
+        let strain = placed.initial_strain();
+        let (y, z) = (Length::from_si(point.y), Length::from_si(point.z));
+        let centroid = (placed.centroid_y(), placed.centroid_z());
+        let elastic = state.free.strain_at(y, z) - strain.at(centroid, y, z);
+        (state.stiffness.moduli()[part] * elastic).si()
     }
 
     /// The directions in which the strain grows: r for each of the two shares of the load.
