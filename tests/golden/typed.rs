@@ -15,6 +15,8 @@ use beamcore::units::{Length, Number};
 mod odd_section;
 #[path = "typed_roof_beam.rs"]
 mod roof_beam;
+#[path = "typed_shrinking_slab.rs"]
+mod shrinking_slab;
 
 /// All typed cases, answered.
 pub fn answers() -> Result<String> {
@@ -25,6 +27,7 @@ pub fn answers() -> Result<String> {
     text += &camber("slab-strip", &response)?;
     text += &roof_beam::answers()?;
     text += &odd_section::answers()?;
+    text += &shrinking_slab::answers()?;
     Ok(text)
 }
 

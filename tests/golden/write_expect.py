@@ -204,7 +204,41 @@ def handbook() -> list[Case]:
     f.exact(f"{at}.deflection.minimum.at_m", float(l) / 3**0.5)
     f.exact(f'{at}.reactions["left"].force_N', -p * a1 / l)
     f.exact(f'{at}.reactions["right"].force_N', p * (l + a1) / l)
-    cases = [a, b, c, d, e, f]
+
+    l, q = F(12, 5), F(2000)
+    g = case("cantilever-uniform", "AISC Manual Table 3-23 case 19; Roark Table 8.1 case 2a", ["wall"])
+    g.exact(f"{at}.deflection.greatest.value_m", q * l**4 / (8 * ei))
+    g.exact(f"{at}.slope.greatest.value_rad", q * l**3 / (6 * ei))
+    g.exact(f"{at}.moment.greatest.value_Nm", -q * l**2 / 2)
+
+    q = F(3000)
+    h = case("cantilever-triangular", "AISC Manual Table 3-23 case 18; Roark Table 8.1 case 2a with "
+             "the load falling to zero at the free end", ["wall"])
+    h.exact(f"{at}.deflection.greatest.value_m", q * l**4 / (30 * ei))
+    h.exact(f"{at}.moment.greatest.value_Nm", -q * l**2 / 6)
+    h.exact(f"{at}.shear.greatest.value_N", q * l / 2)
+
+    l, p = F(5), F(8000)
+    i = case("fixed-central", "AISC Manual Table 3-23 case 16; Roark Table 8.1 case 1d",
+             ["left", "right"])
+    i.exact(f"{at}.deflection.greatest.value_m", p * l**3 / (192 * ei))
+    i.exact(f"{at}.moment.maximum.value_Nm", p * l / 8)
+    i.exact(f"{at}.moment.minimum.value_Nm", -p * l / 8)
+
+    l, m = F(4), F(3000)
+    j = case("end-couple", "Roark Table 8.1 case 3e with the couple at the end",
+             ["left", "right"])
+    j.exact(f'{at}.reactions["left"].force_N', -m / l)
+    j.exact(f"{at}.slope.greatest.value_rad", m * l / (3 * ei))
+    j.exact(f"{at}.deflection.greatest.value_m", float(m * l**2 / ei) / (9 * 3**0.5))
+    j.exact(f"{at}.deflection.greatest.at_m", float(l) * (1 - 1 / 3**0.5))
+
+    l, p = F(9, 2), F(5000)
+    k = case("third-points", "AISC Manual Table 3-23 case 9 with a = L/3", ["left", "right"])
+    k.exact(f"{at}.deflection.greatest.value_m", 23 * p * l**3 / (648 * ei))
+    k.exact(f"{at}.deflection.greatest.at_m", l / 2)
+    k.exact(f"{at}.moment.greatest.value_Nm", p * l / 3)
+    cases = [a, b, c, d, e, f, g, h, i, j, k]
     for made in cases:
         made.fields(made.supports, ["beam"])  # type: ignore[attr-defined]
     return cases
@@ -214,9 +248,10 @@ def main() -> int:
     from two_span import two_span
     from roof_beam import roof_beam
     from odd_section import odd_section
+    from shrinking_slab import shrinking_slab
     from slab_strip import slab_strip
 
-    cases = [flitch(), brass_core(), *handbook(), two_span(), slab_strip(), roof_beam(), odd_section()]
+    cases = [flitch(), brass_core(), *handbook(), two_span(), slab_strip(), roof_beam(), odd_section(), shrinking_slab()]
     stale = []
     for case in cases:
         file = HERE / f"{case.name}.expect"

@@ -1,7 +1,7 @@
 //! Actions, loads and combinations as they are written.
 
 use super::written::Written;
-use crate::units::{AreaLoad, Force, Length, LineLoad, Moment};
+use crate::units::{AreaLoad, Duration, Force, Length, LineLoad, Moment};
 use schemars::JsonSchema;
 use serde::{Deserialize, Serialize};
 use std::collections::BTreeMap;
@@ -17,8 +17,25 @@ pub(crate) struct ActionDocument {
     /// Whether the action relieves what is being checked; without it, it does not.
     #[serde(default, skip_serializing_if = "is_false")]
     pub(crate) favourable: bool,
+    /// How long the action acts at a time; kept with the action, no result depends on it.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(crate) duration: Option<DurationDocument>,
+    /// When the action starts; kept with the action, no result depends on it.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(crate) start: Option<Written<Duration>>,
     /// The loads.
     pub(crate) loads: Vec<LoadDocument>,
+}
+
+/// How long an action acts at a time.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, Serialize, Deserialize, JsonSchema)]
+#[serde(rename_all = "snake_case")]
+pub(crate) enum DurationDocument {
+    Permanent,
+    Long,
+    Medium,
+    Short,
+    Instantaneous,
 }
 
 /// Whether an action always acts.

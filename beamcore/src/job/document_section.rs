@@ -1,7 +1,7 @@
 //! The section as it is written.
 
 use super::written::Written;
-use crate::units::{Length, LineMass};
+use crate::units::{Curvature, Length, LineMass, Strain};
 use schemars::JsonSchema;
 use serde::{Deserialize, Serialize};
 
@@ -29,6 +29,23 @@ pub(crate) struct PartDocument {
     /// The mass per length of the part, instead of density x area.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(crate) line_mass: Option<Written<LineMass>>,
+    /// What the part would be strained by if it were alone.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(crate) initial_strain: Option<InitialStrainDocument>,
+}
+
+/// The plane of strain that a part bears from the first day, about its own centroid.
+#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
+#[serde(deny_unknown_fields)]
+pub(crate) struct InitialStrainDocument {
+    /// At the part's own centroid; shrinkage is negative.
+    pub(crate) axial: Written<Strain>,
+    /// About the level axis, positive where the bottom would grow longer.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(crate) curvature_y: Option<Written<Curvature>>,
+    /// About the upright axis, positive where the side of negative y would grow longer.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(crate) curvature_z: Option<Written<Curvature>>,
 }
 
 /// An outline, with sharp corners.

@@ -1,11 +1,13 @@
 //! Actions, loads and combinations of the document.
 
 use super::document_action::{
-    ActionDocument, ActionKindDocument, CombinationDocument, LoadDocument, PartialFactorsDocument,
+    ActionDocument, ActionKindDocument, CombinationDocument, DurationDocument, LoadDocument,
+    PartialFactorsDocument,
 };
 use crate::error::{ErrorKind, Problem};
 use crate::member::{
-    Action, ActionKind, Category, CombinationFactors, Load, OwnCombination, PartialFactors,
+    Action, ActionKind, Category, CombinationFactors, Load, LoadDuration, OwnCombination,
+    PartialFactors,
 };
 use crate::path;
 
@@ -37,6 +39,18 @@ fn action(document: &ActionDocument, problems: &mut Vec<Problem>) -> Option<Acti
         action.favourable()
     } else {
         action
+    };
+    let action = match document.duration {
+        None => action,
+        Some(DurationDocument::Permanent) => action.duration(LoadDuration::Permanent),
+        Some(DurationDocument::Long) => action.duration(LoadDuration::Long),
+        Some(DurationDocument::Medium) => action.duration(LoadDuration::Medium),
+        Some(DurationDocument::Short) => action.duration(LoadDuration::Short),
+        Some(DurationDocument::Instantaneous) => action.duration(LoadDuration::Instantaneous),
+    };
+    let action = match &document.start {
+        None => action,
+        Some(start) => action.starting(start.value()?),
     };
     Some(loads?.into_iter().fold(action, Action::load))
 }

@@ -1,7 +1,8 @@
 //! The section of the document.
 
 use super::document_section::{
-    AxisDocument, OutlineDocument, PartDocument, PlaceDocument, SectionDocument,
+    AxisDocument, InitialStrainDocument, OutlineDocument, PartDocument, PlaceDocument,
+    SectionDocument,
 };
 use super::written::Written;
 use crate::error::{ErrorKind, Problem};
@@ -9,8 +10,8 @@ use crate::lookup;
 use crate::material::Material;
 use crate::outline::{Outline, Vertex};
 use crate::path;
-use crate::section::{MirrorAxis, Part, Section, Side};
-use crate::units::Length;
+use crate::section::{InitialStrain, MirrorAxis, Part, Section, Side};
+use crate::units::{Curvature, Length};
 
 /// The section, if all its parts are known and fit together.
 pub(super) fn section(
@@ -64,6 +65,10 @@ fn lower_part(part: &PartDocument, material: &Material) -> Option<Part> {
         Some(mass) => lowered.line_mass(mass.value()?),
         None => lowered,
     };
+    let lowered = match &part.initial_strain {
+        Some(strain) => lowered.initial_strain(initial_strain(strain)?),
+        None => lowered,
+    };
     Some(match &part.place {
         None => lowered,
         Some(PlaceDocument::At { y, z }) => lowered.at(y.value()?, z.value()?),
@@ -81,6 +86,19 @@ fn lower_part(part: &PartDocument, material: &Material) -> Option<Part> {
         Some(PlaceDocument::SetInto { host, y, z }) => {
             lowered.set_into(host.as_str(), y.value()?, z.value()?)
         }
+    })
+}
+
+/// A curvature that is not given is none.
+fn initial_strain(document: &InitialStrainDocument) -> Option<InitialStrain> {
+    let curvature = |given: &Option<Written<Curvature>>| match given {
+        Some(curvature) => curvature.value(),
+        None => Some(Curvature::ZERO),
+    };
+    Some(InitialStrain {
+        axial: document.axial.value()?,
+        curvature_y: curvature(&document.curvature_y)?,
+        curvature_z: curvature(&document.curvature_z)?,
     })
 }
 

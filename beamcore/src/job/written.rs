@@ -2,8 +2,8 @@
 
 use crate::error::Problem;
 use crate::units::{
-    AreaLoad, Density, Duration, Force, Length, LineLoad, LineMass, Modulus, Moment, Quantity,
-    Stress, ThermalExpansion,
+    AreaLoad, Curvature, Density, Duration, Force, Length, LineLoad, LineMass, Modulus, Moment,
+    Quantity, Strain, Stress, ThermalExpansion,
 };
 use schemars::{JsonSchema, Schema, SchemaGenerator};
 use serde::{Deserialize, Serialize};
@@ -67,6 +67,8 @@ pub(super) fn problem(name: &str, text: &str, path: &str) -> Option<Problem> {
         (LineLoad::NAME, of::<LineLoad>),
         (AreaLoad::NAME, of::<AreaLoad>),
         (LineMass::NAME, of::<LineMass>),
+        (Strain::NAME, of::<Strain>),
+        (Curvature::NAME, of::<Curvature>),
         (Moment::NAME, of::<Moment>),
         (Stress::NAME, of::<Stress>),
         (Modulus::NAME, of::<Modulus>),

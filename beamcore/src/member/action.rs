@@ -2,7 +2,7 @@
 
 use super::category::CombinationFactors;
 use super::load::Load;
-use crate::units::{AreaLoad, Force, Length, LineLoad, Moment};
+use crate::units::{AreaLoad, Duration, Force, Length, LineLoad, Moment};
 
 /// Whether an action always acts.
 #[derive(Clone, Copy, Debug, PartialEq)]
@@ -23,12 +23,52 @@ pub enum Effect {
     Favourable,
 }
 
+/// How long an action acts at a time (EN 1995-1-1:2004 2.3.1.2, from memory).
+#[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
+pub enum LoadDuration {
+    /// More than ten years.
+    Permanent,
+    /// Six months to ten years.
+    Long,
+    /// A week to six months.
+    Medium,
+    /// Less than a week.
+    Short,
+    /// Moments.
+    Instantaneous,
+}
+
+impl LoadDuration {
+    /// All durations, the longest first.
+    pub const ALL: [Self; 5] = [
+        Self::Permanent,
+        Self::Long,
+        Self::Medium,
+        Self::Short,
+        Self::Instantaneous,
+    ];
+
+    /// The word used in documents.
+    #[must_use]
+    pub const fn name(self) -> &'static str {
+        match self {
+            Self::Permanent => "permanent",
+            Self::Long => "long",
+            Self::Medium => "medium",
+            Self::Short => "short",
+            Self::Instantaneous => "instantaneous",
+        }
+    }
+}
+
 /// A named action: what acts together, from one cause.
 #[derive(Clone, Debug, PartialEq)]
 pub struct Action {
     name: String,
     kind: ActionKind,
     effect: Effect,
+    duration: Option<LoadDuration>,
+    start: Option<Duration>,
     loads: Vec<Load>,
 }
 
@@ -39,6 +79,8 @@ impl Action {
             name: name.into(),
             kind,
             effect: Effect::Unfavourable,
+            duration: None,
+            start: None,
             loads: Vec::new(),
         }
     }
@@ -58,6 +100,22 @@ impl Action {
     #[must_use]
     pub fn favourable(mut self) -> Self {
         self.effect = Effect::Favourable;
+        self
+    }
+
+    /// The same action with its duration, by which the engineer chooses k_mod. It is kept with the
+    /// action; no result depends on it.
+    #[must_use]
+    pub const fn duration(mut self, duration: LoadDuration) -> Self {
+        self.duration = Some(duration);
+        self
+    }
+
+    /// The same action with its start, counted from the first day of the member. It is kept with
+    /// the action; the final state takes the creep of the whole life.
+    #[must_use]
+    pub const fn starting(mut self, start: Duration) -> Self {
+        self.start = Some(start);
         self
     }
 
@@ -149,6 +207,18 @@ impl Action {
     #[must_use]
     pub const fn effect(&self) -> Effect {
         self.effect
+    }
+
+    /// How long it acts at a time, if that was said.
+    #[must_use]
+    pub const fn load_duration(&self) -> Option<LoadDuration> {
+        self.duration
+    }
+
+    /// When it starts, if that was said.
+    #[must_use]
+    pub const fn start(&self) -> Option<Duration> {
+        self.start
     }
 
     pub(super) const fn is_variable(&self) -> bool {

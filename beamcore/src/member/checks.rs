@@ -159,6 +159,9 @@ fn check_actions(
                 &path::key(&base, "psi_2"),
             );
         }
+        if let Some(start) = action.start() {
+            check::not_negative(problems, start, &path::key(&base, "start"));
+        }
         let loads = path::key(&base, "loads");
         if action.loads().is_empty() {
             problems.push(Problem::new(

@@ -12,7 +12,7 @@ mod plausible;
 mod span;
 mod support;
 
-pub use action::{Action, ActionKind, Effect};
+pub use action::{Action, ActionKind, Effect, LoadDuration};
 pub use category::{Category, CombinationFactors};
 pub use combination::{Combination, CombinationKind, OwnCombination, PartialFactors};
 pub use load::Load;

@@ -196,6 +196,11 @@ fn transformed(section: &Section, name: &str, time: Time) -> Result<TransformedS
             name: part.name.clone(),
             ratio: part.ratio,
             width_m: part.width.to_m(),
+            loops_m: part
+                .loops
+                .iter()
+                .map(|corners| corners.iter().map(|(y, z)| [y.to_m(), z.to_m()]).collect())
+                .collect(),
         });
     Ok(TransformedStateOutcome {
         reference_modulus_Pa: transformed.reference_modulus().to_Pa(),

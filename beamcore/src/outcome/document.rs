@@ -181,6 +181,8 @@ pub(super) struct TransformedPartOutcome {
     /// The modular ratio E/E_ref.
     pub(super) ratio: f64,
     pub(super) width_m: f64,
+    /// The corners of the transformed outline, loop by loop, as pairs y, z; arcs by short chords.
+    pub(super) loops_m: Vec<Vec<[f64; 2]>>,
 }
 
 /// The member as a whole.

@@ -2,10 +2,11 @@
 
 use super::build::distinct;
 use super::document::{CombinationOutcome, OutcomeDocument};
+use super::figure::figure;
 use crate::constants::GRAVITY;
 use crate::job::Job;
 use crate::member::{ActionKind, Load, Member, PartialFactors, SupportKind};
-use crate::section::Sideways;
+use crate::section::{InitialStrain, PlacedPart, Sideways};
 use crate::time::Time;
 
 /// The rules that the results rest on.
@@ -67,6 +68,21 @@ pub(super) fn assumptions(job: &Job) -> Vec<String> {
             "Self-weight from mean densities with g = {GRAVITY} m/s2"
         ));
     }
+    if member
+        .actions()
+        .iter()
+        .any(|action| action.start().is_some())
+    {
+        notes.push("Starts of actions are recorded only: creep is that of the whole life".into());
+    }
+    let strained = |part: &&PlacedPart| part.initial_strain() != InitialStrain::NONE;
+    for part in member.section().placed().iter().filter(strained) {
+        notes.push(format!(
+            "Initial strain of part \"{}\" acts from the first day, with the factor 1 in every \
+             combination; its stresses relax by creep",
+            part.name()
+        ));
+    }
     let holding = |kind| kind == SupportKind::Pin || kind == SupportKind::Fixed;
     if member
         .supports()
@@ -116,17 +132,8 @@ pub(super) fn warnings(member: &Member, document: &OutcomeDocument) -> Vec<Strin
                 ));
             }
         }
-        for reaction in results
-            .reactions
-            .iter()
-            .filter(|reaction| reaction.force_N < 0.0)
-        {
-            notes.push(format!(
-                "UPLIFT: the support \"{}\" must hold the member down ({}, {time})",
-                reaction.name, combination.name
-            ));
-        }
     }
+    notes.extend(uplifts(member, document));
     let section = &document.section.initial;
     let (yy, yz) = (
         section.bending_stiffness_yy_Nm2,
@@ -166,6 +173,36 @@ pub(super) fn warnings(member: &Member, document: &OutcomeDocument) -> Vec<Strin
     notes.extend(member.section().notes().iter().cloned());
     notes.extend(member.notes().iter().cloned());
     notes
+}
+
+/// A warning for each support that must hold the member down, with the worst combination.
+fn uplifts(member: &Member, document: &OutcomeDocument) -> Vec<String> {
+    let worst = |support: &str| {
+        each(document)
+            .filter_map(|(combination, time, results)| {
+                let found = results
+                    .reactions
+                    .iter()
+                    .find(|reaction| reaction.name == support);
+                found.map(|reaction| (reaction.force_N, &combination.name, time))
+            })
+            .min_by(|a, b| a.0.total_cmp(&b.0))
+    };
+    member
+        .supports()
+        .iter()
+        .filter_map(|support| {
+            let (force, combination, time) = worst(support.name())?;
+            (force < 0.0).then(|| {
+                format!(
+                    "UPLIFT: the support \"{}\" must hold the member down, with {} kN at most \
+                     ({combination}, {time})",
+                    support.name(),
+                    figure(-force / 1e3, 2)
+                )
+            })
+        })
+        .collect()
 }
 
 /// What was not checked.

@@ -76,6 +76,27 @@ impl Contour {
         }
     }
 
+    /// The corners in order; along an arc, points so close that a chord spans at most 12 degrees.
+    #[must_use]
+    pub fn corners(&self) -> Vec<Point> {
+        fn walk(edge: &Edge, halvings: u32, corners: &mut Vec<Point>) {
+            match edge.split(edge.middle()) {
+                (first, Some(second)) if halvings > 0 => {
+                    walk(&first, halvings - 1, corners);
+                    walk(&second, halvings - 1, corners);
+                }
+                _ => corners.push(edge.from()),
+            }
+        }
+        let mut corners = Vec::new();
+        for edge in &self.edges {
+            // Five halvings leave less than 12 degrees of the longest arc.
+            let halvings = if edge.radius().is_some() { 5 } else { 0 };
+            walk(edge, halvings, &mut corners);
+        }
+        corners
+    }
+
     /// The edges in order.
     #[must_use]
     pub fn edges(&self) -> &[Edge] {

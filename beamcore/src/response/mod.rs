@@ -221,7 +221,8 @@ impl Response {
         ))
     }
 
-    /// For each action, and last for the initial strains, its solution with short-term and with effective moduli.
+    /// For each action, and last for the initial strains, its solution with short-term and with
+    /// effective moduli.
     fn both(&self) -> impl Iterator<Item = [&Solved; 2]> {
         self.solved[0]
             .iter()

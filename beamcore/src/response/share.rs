@@ -32,10 +32,16 @@ pub(super) fn of(combination: &Combination, actions: &[Action], time: Time) -> V
             }
         }
     };
-    combination
-        .factors()
-        .iter()
-        .zip(actions)
-        .map(share)
-        .collect()
+    let strains = match time {
+        Time::Initial => Share {
+            short_term: 1.0,
+            effective: 0.0,
+        },
+        Time::Final => Share {
+            short_term: 0.0,
+            effective: 1.0,
+        },
+    };
+    let actions = combination.factors().iter().zip(actions).map(share);
+    actions.chain(std::iter::once(strains)).collect()
 }

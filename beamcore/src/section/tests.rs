@@ -199,3 +199,26 @@ fn equal_layers_bend_by_one_and_a_half() {
     let plane = section.free_plane(Time::Initial, Sideways::Held);
     near(plane.curvature_y.to_per_m(), 1.5e-3 / 0.01, 1e-12);
 }
+
+/// The transformed outline has the transformed area: exactly for straight edges, by chords for a
+/// disc.
+#[test]
+fn transformed_outlines_have_the_transformed_area() {
+    let wood = Part::new("wood", rectangle(90.mm(), 200.mm()), stuff("wood", 10.0));
+    let rod = Part::new("rod", disc(30.mm()), stuff("steel", 200.0)).below(&wood);
+    let section = Section::of([wood, rod]).unwrap();
+    let transformed = section.transformed_to("wood", Time::Initial).unwrap();
+    let area = |corners: &[(Length, Length)]| {
+        let next = corners.iter().cycle().skip(1);
+        let cross = corners
+            .iter()
+            .zip(next)
+            .map(|(a, b)| (a.0 * b.1 - b.0 * a.1).to_mm2());
+        cross.sum::<f64>() / 2.0
+    };
+    let [wood, rod] = [&transformed.parts()[0].loops, &transformed.parts()[1].loops];
+    near(area(&wood[0]), 90.0 * 200.0, 1e-9);
+    let exact = 20.0 * std::f64::consts::PI * 225.0;
+    near(area(&rod[0]) / exact, 1.0, 0.002);
+    assert!(area(&rod[0]) < exact);
+}

@@ -3,6 +3,7 @@
 use super::placed::PlacedPart;
 use crate::error::Result;
 use crate::lookup;
+use crate::outline::Point;
 use crate::time::Time;
 use crate::units::{Area, Length, Modulus, Moment, SecondMoment, Stress};
 
@@ -16,6 +17,9 @@ pub struct TransformedPart {
     pub ratio: f64,
     /// The transformed width of the bounding box, n b.
     pub width: Length,
+    /// The corners of the transformed outline, loop by loop, y and z; arcs are given by chords of
+    /// at most 12 degrees. For drawing: the sums below do not rest on it.
+    pub loops: Vec<Vec<(Length, Length)>>,
     /// The least z of the outline.
     pub bottom: Length,
     /// The greatest z of the outline.
@@ -68,6 +72,7 @@ impl TransformedSection {
                 name: part.name().into(),
                 ratio: ratio(part),
                 width: part.outline().width() * ratio(part),
+                loops: loops(part, ratio(part)),
                 bottom: part.bottom(),
                 top: part.top(),
             })
@@ -127,4 +132,20 @@ impl TransformedSection {
             -found.ratio * moment.si() * arm / self.second_moment.si(),
         ))
     }
+}
+
+/// The loops of a part's outline with their widths multiplied about the part's centroid.
+fn loops(part: &PlacedPart, ratio: f64) -> Vec<Vec<(Length, Length)>> {
+    let centre = part.net().y;
+    let point = |p: Point| {
+        (
+            Length::from_si(centre + ratio * (p.y - centre)),
+            Length::from_si(p.z),
+        )
+    };
+    part.region()
+        .contours()
+        .iter()
+        .map(|contour| contour.corners().into_iter().map(point).collect())
+        .collect()
 }
