@@ -1,15 +1,10 @@
 //! Materials of the document: by strength class or by values, never half of each.
 
-use super::document_material::{
-    CementDocument, CharacteristicDocument, ConcreteCreepDocument, FactorsDocument,
-    MaterialDocument, StrengthDocument,
-};
+use super::document_material::{CementDocument, ConcreteCreepDocument, MaterialDocument};
+use super::lower_strength;
 use crate::error::{ErrorKind, Problem};
 use crate::material::concrete::{Cement, ConcreteCreep};
-use crate::material::{
-    self, CharacteristicStrength, Creep, DesignFactors, DesignStrength, Material, MetalStrength,
-    ServiceClass, TimberFactors, TimberStrength,
-};
+use crate::material::{self, Creep, Material, ServiceClass};
 use crate::path;
 use std::collections::BTreeMap;
 
@@ -103,13 +98,13 @@ impl Lowering<'_> {
             material = material.thermal_expansion(expansion.value()?);
         }
         if let Some(strength) = &document.characteristic_strength {
-            material = material.characteristic_strength(characteristic(strength)?);
+            material = material.characteristic_strength(lower_strength::characteristic(strength)?);
         }
         if let Some(factors) = &document.design_factors {
-            material = material.design_factors(self::factors(factors));
+            material = material.design_factors(lower_strength::factors(factors));
         }
         if let Some(strength) = &document.design_strength {
-            material = material.design_strength(design(strength)?);
+            material = material.design_strength(lower_strength::design(strength)?);
         }
         Some(material)
     }
@@ -274,56 +269,4 @@ impl Lowering<'_> {
         };
         self.problems.push(Problem::new(kind, at, found, expected));
     }
-}
-
-fn characteristic(strength: &CharacteristicDocument) -> Option<CharacteristicStrength> {
-    Some(match strength {
-        CharacteristicDocument::Timber {
-            bending,
-            tension,
-            compression,
-            shear,
-        } => CharacteristicStrength::Timber(TimberStrength::new(
-            bending.value()?,
-            tension.value()?,
-            compression.value()?,
-            shear.value()?,
-        )),
-        CharacteristicDocument::Metal { yield_stress } => {
-            CharacteristicStrength::Metal(MetalStrength::new(yield_stress.value()?))
-        }
-    })
-}
-
-fn factors(factors: &FactorsDocument) -> DesignFactors {
-    match *factors {
-        FactorsDocument::Timber {
-            k_mod,
-            gamma_m,
-            k_h,
-            k_sys,
-        } => {
-            let factors = TimberFactors::new(k_mod, gamma_m);
-            let factors = k_h.map_or(factors, |k_h| factors.size(k_h));
-            DesignFactors::Timber(k_sys.map_or(factors, |k_sys| factors.sharing(k_sys)))
-        }
-        FactorsDocument::Metal { gamma_m } => DesignFactors::metal(gamma_m),
-    }
-}
-
-fn design(strength: &StrengthDocument) -> Option<DesignStrength> {
-    Some(match strength {
-        StrengthDocument::Timber {
-            bending,
-            tension,
-            compression,
-        } => DesignStrength::Timber {
-            bending: bending.value()?,
-            tension: tension.value()?,
-            compression: compression.value()?,
-        },
-        StrengthDocument::Metal { yield_stress } => DesignStrength::Metal {
-            yield_stress: yield_stress.value()?,
-        },
-    })
 }

@@ -45,6 +45,7 @@ mod lower_action;
 mod lower_camber;
 mod lower_material;
 mod lower_section;
+mod lower_strength;
 mod reader;
 mod written;
 
