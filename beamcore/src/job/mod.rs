@@ -57,7 +57,6 @@ pub(crate) use reader::{Step, steps};
 use crate::camber::{CamberPlan, Trestles};
 use crate::error::{Error, ErrorKind, Problem, Result};
 use crate::member::Member;
-use crate::outcome::Outcome;
 use crate::response::Limit;
 use lower::Lowered;
 use reader::{Node, NodeValue};
@@ -167,15 +166,6 @@ impl Job {
     #[must_use]
     pub fn limits(&self) -> &[Limit] {
         &self.lowered.limits
-    }
-
-    /// Solves the job.
-    ///
-    /// # Errors
-    /// [`ErrorKind::Numerical`] if a result is not a finite number, as when loads are beyond all
-    /// measure.
-    pub fn solve(&self) -> Result<Outcome> {
-        Outcome::of(self)
     }
 
     pub(crate) const fn document(&self) -> &JobDocument {

@@ -31,7 +31,6 @@ pub(crate) use span::all as spans_of;
 
 use crate::error::Result;
 use crate::lookup;
-use crate::response::Response;
 use crate::section::{Section, Sideways, Stiffness, StrainPlane};
 use crate::solve::beam::Beam;
 use crate::time::Time;
@@ -202,11 +201,5 @@ impl Member {
             Time::Initial => &self.data.states[0],
             Time::Final => &self.data.states[1],
         }
-    }
-
-    /// Solves the member for each action at each time.
-    #[must_use]
-    pub fn solve(&self) -> Response {
-        Response::new(self.clone())
     }
 }

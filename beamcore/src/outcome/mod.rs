@@ -27,8 +27,19 @@ pub struct Outcome {
     value: Value,
 }
 
+impl Job {
+    /// Solves the job.
+    ///
+    /// # Errors
+    /// [`ErrorKind::Numerical`] if a result is not a finite number, as when loads are beyond all
+    /// measure.
+    pub fn solve(&self) -> Result<Outcome> {
+        Outcome::of(self)
+    }
+}
+
 impl Outcome {
-    pub(crate) fn of(job: &Job) -> Result<Self> {
+    fn of(job: &Job) -> Result<Self> {
         let document = build::outcome(job)?;
         let value = serde_json::to_value(&document).expect("an outcome is plain data");
         if let Some(at) = not_finite(&value, "") {

@@ -43,8 +43,16 @@ pub struct Response {
     solved: [Vec<Solved>; 2],
 }
 
+impl Member {
+    /// Solves the member for each action at each time.
+    #[must_use]
+    pub fn solve(&self) -> Response {
+        Response::of(self.clone())
+    }
+}
+
 impl Response {
-    pub(crate) fn new(member: Member) -> Self {
+    fn of(member: Member) -> Self {
         let solved = Time::ALL.map(|time| {
             let state = member.state(time);
             let beam = &state.beam;
