@@ -113,7 +113,7 @@ impl Part {
         material: &Bound<'_, Material>,
     ) -> PyResult<Self> {
         let core = material.get().0.inner.clone();
-        let part = section::Part::new(name, outline.get().0, core);
+        let part = section::Part::new(name, outline.get().0.clone(), core);
         let recipe = Recipe::call(outline.py(), "Part", (name, outline, material))?;
         Ok(Self(Made::new(part, recipe)))
     }
@@ -127,7 +127,7 @@ impl Part {
     /// The outline.
     #[getter]
     fn outline(&self) -> Outline {
-        Outline(*self.0.outline())
+        Outline(self.0.outline().clone())
     }
 
     /// The same part with the middle of its outline at (y, z).

@@ -7,12 +7,15 @@ use beamcore::stress;
 use pyo3::prelude::*;
 
 record! {
-    /// A greatest stress with its place along the member and over the height.
+    /// A greatest stress with its place along the member and in the section.
     StressExtreme {
         /// The stress, tension positive.
         value: Quantity,
         /// The place along the member.
         at: Quantity,
+        /// The y of the fibre in the section's coordinates; the middle of the part where the member
+        /// is held sideways, for then all points of one height are stressed alike.
+        y: Quantity,
         /// The height z of the fibre in the section's coordinates.
         z: Quantity,
     }
@@ -40,6 +43,7 @@ fn extreme(found: stress::StressExtreme) -> StressExtreme {
     StressExtreme {
         value: Quantity::of(found.value),
         at: Quantity::of(found.at),
+        y: Quantity::of(found.y),
         z: Quantity::of(found.z),
     }
 }
