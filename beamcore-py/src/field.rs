@@ -37,7 +37,8 @@ record! {
 /// A field of any of the quantities that a member has along its length.
 #[derive(Debug)]
 pub(crate) enum Line {
-    Deflection(field::Field<Length>),
+    /// Downward or sideways.
+    Movement(field::Field<Length>),
     Slope(field::Field<Angle>),
     Shear(field::Field<Force>),
     Moment(field::Field<Moment>),
@@ -48,7 +49,7 @@ pub(crate) enum Line {
 macro_rules! each {
     ($line:expr, $field:ident => $result:expr) => {
         match $line {
-            Line::Deflection($field) => $result,
+            Line::Movement($field) => $result,
             Line::Slope($field) => $result,
             Line::Shear($field) => $result,
             Line::Moment($field) => $result,
@@ -61,7 +62,7 @@ impl Line {
     /// The SI unit of the values, as it ends the name of their method.
     const fn unit_name(&self) -> &'static str {
         match self {
-            Self::Deflection(_) => "m",
+            Self::Movement(_) => "m",
             Self::Slope(_) => "rad",
             Self::Shear(_) => "N",
             Self::Moment(_) => "Nm",
@@ -78,8 +79,8 @@ impl Line {
 
 /// A quantity along the member, exact between stations and evaluated anywhere.
 ///
-/// Deflection is positive downward, slope is dw/dx, shear force is V = dM/dx, a moment is positive
-/// where it stretches the bottom, a tensile stress is positive. At a support or a point load a
+/// Deflection is positive downward, movement sideways towards positive y, slope is dw/dx, shear force
+/// is V = dM/dx, a moment is positive where it stretches the bottom, a tensile stress is positive. At a support or a point load a
 /// shear force has two values.
 #[pyclass(frozen, module = "beamcore")]
 #[derive(Debug)]
@@ -166,7 +167,8 @@ impl Field {
         })
     }
 
-    /// Deflections in m at places x in m, of a list or an array; positive downward.
+    /// Deflections (positive downward) or movements sideways (towards positive y) in m at places x
+    /// in m, of a list or an array.
     fn values_m<'py>(&self, x_m: &Bound<'py, PyAny>) -> Values<'py> {
         self.array("m", x_m)
     }

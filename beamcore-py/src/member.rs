@@ -11,7 +11,9 @@ use crate::run::run;
 use crate::section::Section;
 use crate::span::Span;
 use crate::support::Support;
+use crate::word::Sideways;
 use beamcore::member::{self, Combination, MemberPlan};
+use beamcore::section;
 use pyo3::prelude::*;
 use pyo3::types::{PyDict, PyTuple};
 
@@ -20,6 +22,9 @@ use pyo3::types::{PyDict, PyTuple};
 /// It is checked when it is made; all that is wrong is raised at once. Its combinations are those
 /// of EN 1990:2002 with partial_factors (the recommended ones where none are given), and then
 /// own_combinations.
+///
+/// sideways: "held", as by a floor, so that it bends about the level axis only; or "free", so that
+/// it also moves sideways between its supports where its section has no axis of symmetry.
 ///
 /// >>> joist = Part("joist", rectangle(80*mm, 220*mm), timber("C24", service_class=1))
 /// >>> member = Member(Section([joist]), 4*m,
@@ -36,6 +41,7 @@ struct Combined {
     actions: Vec<Py<Action>>,
     factors: Option<PartialFactors>,
     own: Vec<Py<OwnCombination>>,
+    sideways: section::Sideways,
 }
 
 impl Combined {
@@ -49,7 +55,9 @@ impl Combined {
             None => plan,
         };
         let own = self.own.iter().map(|own| own.get().0.clone());
-        let plan = own.fold(plan, MemberPlan::combination);
+        let plan = own
+            .fold(plan, MemberPlan::combination)
+            .sideways(self.sideways);
         run(py, || plan.check())
     }
 
@@ -59,6 +67,7 @@ impl Combined {
         keywords.set_item("actions", self.actions)?;
         keywords.set_item("partial_factors", self.factors)?;
         keywords.set_item("own_combinations", self.own)?;
+        keywords.set_item("sideways", self.sideways.name())?;
         Ok(keywords)
     }
 }
@@ -67,7 +76,8 @@ impl Combined {
 impl Member {
     #[new]
     #[pyo3(signature = (
-        section, length, supports, actions, *, partial_factors=None, own_combinations=vec![]
+        section, length, supports, actions, *, partial_factors=None, own_combinations=vec![],
+        sideways=Sideways(section::Sideways::Held)
     ))]
     fn new<'py>(
         section: &Bound<'py, Section>,
@@ -76,12 +86,14 @@ impl Member {
         actions: Vec<Py<Action>>,
         partial_factors: Option<PartialFactors>,
         own_combinations: Vec<Py<OwnCombination>>,
+        sideways: Sideways,
     ) -> PyResult<Self> {
         let py = section.py();
         let combined = Combined {
             actions,
             factors: partial_factors,
             own: own_combinations,
+            sideways: sideways.0,
         };
         let core = section.get().0.inner.clone();
         let plan = member::Member::of_length(core, convert::read(length, "member.length")?);
@@ -100,19 +112,24 @@ impl Member {
     /// >>> member.solve().deflection("quasi-permanent", "final").greatest.at
     /// 2 m
     #[staticmethod]
-    #[pyo3(signature = (section, span, actions, *, partial_factors=None, own_combinations=vec![]))]
+    #[pyo3(signature = (
+        section, span, actions, *, partial_factors=None, own_combinations=vec![],
+        sideways=Sideways(section::Sideways::Held)
+    ))]
     fn simple_span<'py>(
         section: &Bound<'py, Section>,
         span: &Bound<'py, PyAny>,
         actions: Vec<Py<Action>>,
         partial_factors: Option<PartialFactors>,
         own_combinations: Vec<Py<OwnCombination>>,
+        sideways: Sideways,
     ) -> PyResult<Self> {
         let py = section.py();
         let combined = Combined {
             actions,
             factors: partial_factors,
             own: own_combinations,
+            sideways: sideways.0,
         };
         let core = section.get().0.inner.clone();
         let plan = member::Member::simple_span(core, convert::read(span, "member.length")?);
@@ -156,6 +173,12 @@ impl Member {
     /// The span of a name, as in "left to right", "before left" or "beyond right".
     fn span(&self, py: Python<'_>, name: &str) -> PyResult<Span> {
         Ok(Span::of(self.0.span(name).or_raise(py)?))
+    }
+
+    /// Whether the member may move sideways: "held" or "free".
+    #[getter]
+    fn sideways(&self) -> &'static str {
+        self.0.sideways().name()
     }
 
     /// What was noticed while the member was laid out: for example stations that were merged.

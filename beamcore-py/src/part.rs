@@ -1,76 +1,20 @@
-//! The classes `Outline` and `Part`.
+//! The class `Part`.
 
-use crate::convert::Inputs;
+use crate::convert::{self, Inputs};
 use crate::made::{Made, Recipe, Reduced};
 use crate::material::Material;
+use crate::outline::Outline;
 use crate::quantity::Quantity;
+use crate::word::MirrorAxis;
 use beamcore::section::{self, Side};
 use pyo3::prelude::*;
 
-/// The outline of a part, without its place.
-#[pyclass(frozen, eq, module = "beamcore", from_py_object)]
-#[derive(Clone, Debug, PartialEq)]
-pub(crate) struct Outline(section::Outline);
-
-#[pymethods]
-impl Outline {
-    /// Size along y, across the section.
-    #[getter]
-    fn width(&self) -> Quantity {
-        Quantity::of(self.0.width())
-    }
-
-    /// Size along z, upright.
-    #[getter]
-    fn height(&self) -> Quantity {
-        Quantity::of(self.0.height())
-    }
-
-    /// Area, b h for a rectangle.
-    #[getter]
-    fn area(&self) -> Quantity {
-        Quantity::of(self.0.area())
-    }
-
-    /// Second moment of area about the horizontal axis through its own centroid, b h^3/12.
-    #[getter]
-    fn second_moment_yy(&self) -> Quantity {
-        Quantity::of(self.0.second_moment_yy())
-    }
-
-    /// Second moment of area about the upright axis through its own centroid, h b^3/12.
-    #[getter]
-    fn second_moment_zz(&self) -> Quantity {
-        Quantity::of(self.0.second_moment_zz())
-    }
-
-    fn __reduce__<'py>(&self, py: Python<'py>) -> PyResult<Reduced<'py>> {
-        Recipe::call(py, "rectangle", (self.width(), self.height()))?.reduce(py)
-    }
-
-    fn __repr__(&self) -> String {
-        format!("<rectangle {} x {}>", self.width(), self.height())
-    }
-}
-
-/// A rectangle of a width (along y) and a height (along z).
-///
-/// >>> rectangle(75*mm, "220 mm").area.to("mm2")
-/// 16500.0
-#[pyfunction]
-fn rectangle(width: &Bound<'_, PyAny>, height: &Bound<'_, PyAny>) -> PyResult<Outline> {
-    let mut inputs = Inputs::default();
-    let w = inputs.read(width, "rectangle.width")?;
-    let h = inputs.read(height, "rectangle.height")?;
-    let outline = w.zip(h).map(|(w, h)| section::rectangle(w, h));
-    Ok(Outline(inputs.done(width.py(), outline)?))
-}
-
 /// One piece of one material in a section, with a name that addresses its results.
 ///
-/// Its place is one of: the middle of its outline at (y, z), with y to the right and z upward in a
-/// drawing that is seen against the direction of x; or touching another part, centred on it. A part
-/// that is given no place stands with its middle at y = 0, z = 0.
+/// Its place is one of: the middle of its outline (of a polygon, the origin of its coordinates) at
+/// (y, z), with y to the right and z upward in a drawing that is seen against the direction of x;
+/// touching another part, centred on it; the mirror image of another; or set into another. A part
+/// that is given no place stands at y = 0, z = 0.
 ///
 /// >>> joist = Part("joist", rectangle(75*mm, 220*mm), timber("C24", service_class=1))
 /// >>> plate = Part("plate", rectangle(10*mm, 200*mm), steel("S275")).right_of(joist)
@@ -130,7 +74,24 @@ impl Part {
         Outline(self.0.outline().clone())
     }
 
-    /// The same part with the middle of its outline at (y, z).
+    /// The material.
+    #[getter]
+    fn material(slf: &Bound<'_, Self>) -> PyResult<Material> {
+        let material = slf.get().0.material().clone();
+        Ok(Material(Made::new(
+            material,
+            Recipe::property(slf, "material")?,
+        )))
+    }
+
+    /// The mass per length, if it was given instead of density x area; else None.
+    #[getter]
+    fn given_line_mass(&self) -> Option<Quantity> {
+        self.0.given_line_mass().map(Quantity::of)
+    }
+
+    /// The same part with the middle of its outline (of a polygon, the origin of its coordinates)
+    /// at (y, z).
     fn at<'py>(
         slf: &Bound<'py, Self>,
         y: &Bound<'py, PyAny>,
@@ -165,6 +126,53 @@ impl Part {
         Self::beside(slf, Side::Below, other)
     }
 
+    /// The same part as the mirror image of another, at the mirrored place, with its own outline
+    /// mirrored: about the "upright" axis y = 0 (left and right change) or the "level" axis z = 0
+    /// (top and bottom change).
+    ///
+    /// >>> foot = Part("foot", rectangle(90*mm, 30*mm), steel("S275")).at(0*mm, -150*mm)
+    /// >>> head = Part("head", rectangle(90*mm, 30*mm), steel("S275")).mirror_of(foot, "level")
+    /// >>> Section([foot, head]).part("head").top
+    /// 165 mm
+    fn mirror_of(slf: &Bound<'_, Self>, other: PartOrName, axis: MirrorAxis) -> PyResult<Self> {
+        let (of, axis) = (other.into_name(), axis.0);
+        let recipe = Recipe::method(slf, "mirror_of", (&of, axis.name()))?;
+        let part = slf.get().0.inner.clone().mirror_of(of, axis);
+        Ok(Self(Made::new(part, recipe)))
+    }
+
+    /// The same part set into another, its host, with the middle of its outline at (y, z): it
+    /// displaces the host exactly, whose area and moments become smaller by its own.
+    ///
+    /// >>> beam = Part("beam", rectangle(120*mm, 300*mm), timber("C24", service_class=1))
+    /// >>> bar = Part("bar", rectangle(20*mm, 20*mm), steel("S275")).set_into(beam, 0*mm, -120*mm)
+    /// >>> Section([beam, bar]).part("beam").area.to("mm2")
+    /// 35600.0
+    fn set_into<'py>(
+        slf: &Bound<'py, Self>,
+        host: PartOrName,
+        y: &Bound<'py, PyAny>,
+        z: &Bound<'py, PyAny>,
+    ) -> PyResult<Self> {
+        let mut inputs = Inputs::default();
+        let place = inputs
+            .read(y, "place.set_into.y")?
+            .zip(inputs.read(z, "place.set_into.z")?);
+        let (y_core, z_core) = inputs.done(slf.py(), place)?;
+        let host = host.into_name();
+        let recipe = Recipe::method(slf, "set_into", (&host, y, z))?;
+        let part = slf.get().0.inner.clone().set_into(host, y_core, z_core);
+        Ok(Self(Made::new(part, recipe)))
+    }
+
+    /// The same part with a mass per length of its own, instead of density x area.
+    fn with_line_mass<'py>(slf: &Bound<'py, Self>, mass: &Bound<'py, PyAny>) -> PyResult<Self> {
+        let value = convert::read(mass, "line_mass")?;
+        let recipe = Recipe::method(slf, "with_line_mass", (mass,))?;
+        let part = slf.get().0.inner.clone().line_mass(value);
+        Ok(Self(Made::new(part, recipe)))
+    }
+
     fn __reduce__<'py>(&self, py: Python<'py>) -> PyResult<Reduced<'py>> {
         self.0.reduce(py)
     }
@@ -172,11 +180,4 @@ impl Part {
     fn __repr__(&self) -> String {
         format!("<Part {:?} of {}>", self.0.name(), self.0.material().name())
     }
-}
-
-/// Adds the classes and functions to the module.
-pub(crate) fn register(module: &Bound<'_, PyModule>) -> PyResult<()> {
-    module.add_class::<Outline>()?;
-    module.add_class::<Part>()?;
-    module.add_function(wrap_pyfunction!(rectangle, module)?)
 }

@@ -62,7 +62,14 @@ impl Response {
     /// The deflection w along the member, positive downward.
     fn deflection(slf: &Bound<'_, Self>, combination: &str, time: TimeText) -> PyResult<Field> {
         let of = |r: &response::Response, time| r.deflection(combination, time);
-        Self::field(slf, "deflection", combination, time, of, Line::Deflection)
+        Self::field(slf, "deflection", combination, time, of, Line::Movement)
+    }
+
+    /// The movement sideways along the member, v = w EI_yz/EI_zz for each share of the load, positive
+    /// towards positive y; zero unless the member is free sideways and has no axis of symmetry.
+    fn sideways(slf: &Bound<'_, Self>, combination: &str, time: TimeText) -> PyResult<Field> {
+        let of = |r: &response::Response, time| r.sideways(combination, time);
+        Self::field(slf, "sideways", combination, time, of, Line::Movement)
     }
 
     /// The slope dw/dx along the member, positive where the deflection grows to the right.
@@ -154,7 +161,7 @@ impl Response {
             .or_raise(slf.py())?;
         let args = (combination, time.name(), span);
         let recipe = Recipe::method(slf, "span_deflection", args)?;
-        Ok(Field(Made::new(Line::Deflection(line), recipe)))
+        Ok(Field(Made::new(Line::Movement(line), recipe)))
     }
 
     /// The line of a component of the deflection along a span, positive downward (EN 1990:2002
@@ -181,7 +188,7 @@ impl Response {
             .or_raise(py)?;
         let args = (component, combination, span, camber);
         let recipe = Recipe::method(slf, "deflection_component", args)?;
-        Ok(Field(Made::new(Line::Deflection(line), recipe)))
+        Ok(Field(Made::new(Line::Movement(line), recipe)))
     }
 
     /// Compares limits of the deflection with the results: one LimitCheck per limit and span, each
@@ -256,7 +263,7 @@ impl Response {
             .or_raise(slf.py())?;
         let args = (combination, time.name(), camber);
         let recipe = Recipe::method(slf, "remaining", args)?;
-        Ok(Field(Made::new(Line::Deflection(line), recipe)))
+        Ok(Field(Made::new(Line::Movement(line), recipe)))
     }
 
     /// The readings to expect in the shop at the stations of a camber, one Reading for each.

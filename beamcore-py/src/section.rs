@@ -1,11 +1,16 @@
-//! The classes `Section`, `Stiffness` and `TransformedSection`.
+//! The class `Section`.
 
-use crate::convert;
+use crate::convert::Inputs;
 use crate::error::OrRaise;
+use crate::forces::{PointStress, SectionForces};
 use crate::made::{Made, Recipe, Reduced};
-use crate::part::Part;
+use crate::part::{Part, PartOrName};
+use crate::placed::PlacedPart;
 use crate::quantity::Quantity;
+use crate::stiffness::Stiffness;
 use crate::time::TimeText;
+use crate::transformed::TransformedSection;
+use crate::word::Sideways;
 use beamcore::section;
 use pyo3::prelude::*;
 use pyo3::types::PyTuple;
@@ -47,6 +52,19 @@ impl Section {
         PyTuple::new(py, self.0.notes())
     }
 
+    /// The parts at their places, in the order given.
+    #[getter]
+    fn placed<'py>(slf: &Bound<'py, Self>) -> PyResult<Bound<'py, PyTuple>> {
+        let placed = slf.get().0.placed().iter();
+        let placed = placed.map(|part| PlacedPart::of(slf, part));
+        PyTuple::new(slf.py(), placed.collect::<PyResult<Vec<_>>>()?)
+    }
+
+    /// The part of a name, at its place.
+    fn part(slf: &Bound<'_, Self>, name: &str) -> PyResult<PlacedPart> {
+        PlacedPart::of(slf, slf.get().0.part(name).or_raise(slf.py())?)
+    }
+
     /// The stiffness at a time, "initial" or "final".
     fn stiffness(slf: &Bound<'_, Self>, time: TimeText) -> PyResult<Stiffness> {
         let time = time.into();
@@ -71,158 +89,61 @@ impl Section {
         Ok(TransformedSection(Made::new(transformed, recipe)))
     }
 
-    fn __reduce__<'py>(&self, py: Python<'py>) -> PyResult<Reduced<'py>> {
-        self.0.reduce(py)
-    }
-}
-
-/// EA, elastic centroid and EI of a section at a time: sums weighted with the modulus of each part.
-#[pyclass(frozen, eq, module = "beamcore")]
-#[derive(Debug, PartialEq)]
-pub(crate) struct Stiffness(Made<section::Stiffness>);
-
-#[pymethods]
-impl Stiffness {
-    /// EA = sum of E_i A_i.
-    #[getter]
-    fn axial(&self) -> Quantity {
-        Quantity::of(self.0.axial())
-    }
-
-    /// y of the elastic centroid: sum of E_i A_i y_i over EA.
-    #[getter]
-    fn centroid_y(&self) -> Quantity {
-        Quantity::of(self.0.centroid_y())
-    }
-
-    /// z of the elastic centroid: sum of E_i A_i z_i over EA.
-    #[getter]
-    fn centroid_z(&self) -> Quantity {
-        Quantity::of(self.0.centroid_z())
-    }
-
-    /// EI_yy about the horizontal axis through the centroid: sum of E_i (I_i + A_i dz_i^2).
-    #[getter]
-    fn bending_yy(&self) -> Quantity {
-        Quantity::of(self.0.bending_yy())
-    }
-
-    /// EI_zz about the upright axis through the centroid: sum of E_i (I_i + A_i dy_i^2).
-    #[getter]
-    fn bending_zz(&self) -> Quantity {
-        Quantity::of(self.0.bending_zz())
-    }
-
-    /// EI_yz = sum of E_i A_i dy_i dz_i; zero for a section with an axis of symmetry.
-    #[getter]
-    fn bending_yz(&self) -> Quantity {
-        Quantity::of(self.0.bending_yz())
-    }
-
-    /// The modulus of each part at this time, in the order of the parts.
-    #[getter]
-    fn moduli<'py>(&self, py: Python<'py>) -> PyResult<Bound<'py, PyTuple>> {
-        let moduli: Vec<_> = self.0.moduli().iter().copied().map(Quantity::of).collect();
-        PyTuple::new(py, moduli)
-    }
-
-    /// The share of each part in EI_yy, in the order of the parts; they sum to 1.
-    #[getter]
-    fn shares<'py>(&self, py: Python<'py>) -> PyResult<Bound<'py, PyTuple>> {
-        PyTuple::new(py, self.0.shares())
-    }
-
-    fn __reduce__<'py>(&self, py: Python<'py>) -> PyResult<Reduced<'py>> {
-        self.0.reduce(py)
-    }
-}
-
-record! {
-    /// One part of a transformed section: its width is multiplied by n = E/E_ref about its own
-    /// centroid, its height is kept.
-    TransformedPart {
-        /// The name of the part.
-        name: String,
-        /// The modular ratio n = E/E_ref.
-        ratio: f64,
-        /// The transformed width, n b.
-        width: Quantity,
-        /// The least z of the outline.
-        bottom: Quantity,
-        /// The greatest z of the outline.
-        top: Quantity,
-    }
-}
-
-/// A section as if made of one chosen material; presentation only, no other result rests on it.
-#[pyclass(frozen, eq, module = "beamcore")]
-#[derive(Debug, PartialEq)]
-pub(crate) struct TransformedSection(Made<section::TransformedSection>);
-
-#[pymethods]
-impl TransformedSection {
-    /// The modulus of the reference material at the time asked for.
-    #[getter]
-    fn reference_modulus(&self) -> Quantity {
-        Quantity::of(self.0.reference_modulus())
-    }
-
-    /// Area: sum of n b h. Times the reference modulus it is EA.
-    #[getter]
-    fn area(&self) -> Quantity {
-        Quantity::of(self.0.area())
-    }
-
-    /// z of the centroid.
-    #[getter]
-    fn centroid_z(&self) -> Quantity {
-        Quantity::of(self.0.centroid_z())
-    }
-
-    /// Second moment of area about the horizontal axis through the centroid:
-    /// sum of n (b h^3/12 + b h dz^2). Times the reference modulus it is EI_yy.
-    #[getter]
-    fn second_moment(&self) -> Quantity {
-        Quantity::of(self.0.second_moment())
-    }
-
-    /// The transformed parts, in the order given.
-    #[getter]
-    fn parts<'py>(&self, py: Python<'py>) -> PyResult<Bound<'py, PyTuple>> {
-        let parts = self.0.parts().iter().map(|part| TransformedPart {
-            name: part.name.clone(),
-            ratio: part.ratio,
-            width: Quantity::of(part.width),
-            bottom: Quantity::of(part.bottom),
-            top: Quantity::of(part.top),
-        });
-        PyTuple::new(py, parts.collect::<Vec<_>>())
-    }
-
-    /// The stress in the real material of a part at height z under a moment (positive sagging):
-    /// -n M (z - z_centroid)/I, tension positive.
-    fn stress(
+    /// The stress in a part at a point (y, z) of it under section forces, E x strain, tension
+    /// positive, at a time, "initial" or "final".
+    ///
+    /// Strain: N/EA - kappa_y (z - z_n) - kappa_z (y - y_n). A section that is "held" sideways bends
+    /// about the level axis only: kappa_y = M_y/EI_yy, kappa_z = 0. One that is "free" bends about
+    /// both: kappa_y = (M_y EI_zz - M_z EI_yz)/D, kappa_z = (M_z EI_yy - M_y EI_yz)/D, with
+    /// D = EI_yy EI_zz - EI_yz^2 (unsymmetrical bending, derived from the plane of strain).
+    ///
+    /// >>> beam = Part("beam", rectangle(100*mm, 200*mm), steel("S275"))
+    /// >>> forces = SectionForces(axial=0*kN, moment_y=20*kN*m, moment_z=0*kN*m)
+    /// >>> stress = Section([beam]).stress_at(
+    /// ...     "beam", 0*mm, -100*mm, forces, sideways="held", time="initial")
+    /// >>> f"{stress.to(MPa):.3f} MPa"
+    /// '30.000 MPa'
+    #[pyo3(signature = (part, y, z, forces, *, sideways, time))]
+    fn stress_at(
         &self,
-        part: &str,
+        part: PartOrName,
+        y: &Bound<'_, PyAny>,
         z: &Bound<'_, PyAny>,
-        moment: &Bound<'_, PyAny>,
+        forces: &Bound<'_, SectionForces>,
+        sideways: Sideways,
+        time: TimeText,
     ) -> PyResult<Quantity> {
-        let py = z.py();
-        let mut inputs = convert::Inputs::default();
-        let place = inputs.read(z, "z")?.zip(inputs.read(moment, "moment")?);
-        let (z, moment) = inputs.done(py, place)?;
-        Ok(Quantity::of(self.0.stress(part, z, moment).or_raise(py)?))
+        let py = y.py();
+        let mut inputs = Inputs::default();
+        let point = inputs.read(y, "y")?.zip(inputs.read(z, "z")?);
+        let point = inputs.done(py, point)?;
+        let (part, forces) = (part.into_name(), &forces.get().0);
+        let stress = self
+            .0
+            .stress_at(&part, point, forces, sideways.0, time.into());
+        Ok(Quantity::of(stress.or_raise(py)?))
+    }
+
+    /// The greatest and the least stress in a part under section forces, as two PointStress; the
+    /// formula is that of stress_at, and as the strain is linear they stand where the outline
+    /// reaches farthest.
+    #[pyo3(signature = (part, forces, *, sideways, time))]
+    fn stress_extremes<'py>(
+        &self,
+        part: PartOrName,
+        forces: &Bound<'py, SectionForces>,
+        sideways: Sideways,
+        time: TimeText,
+    ) -> PyResult<Bound<'py, PyTuple>> {
+        let (py, part) = (forces.py(), part.into_name());
+        let forces = &forces.get().0;
+        let found = self
+            .0
+            .stress_extremes(&part, forces, sideways.0, time.into());
+        PyTuple::new(py, found.or_raise(py)?.map(PointStress::of))
     }
 
     fn __reduce__<'py>(&self, py: Python<'py>) -> PyResult<Reduced<'py>> {
         self.0.reduce(py)
     }
-}
-
-/// Adds the classes to the module.
-pub(crate) fn register(module: &Bound<'_, PyModule>) -> PyResult<()> {
-    module.add_class::<Section>()?;
-    module.add_class::<Stiffness>()?;
-    module.add_class::<TransformedPart>()?;
-    module.add_class::<TransformedSection>()
 }

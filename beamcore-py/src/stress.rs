@@ -31,10 +31,12 @@ record! {
     }
 }
 
-/// The normal stress in one part: at its bottom, its own centroid and its top.
+/// The normal stress in one part: along the fibres that can be stressed most, and along its own
+/// centroid.
 ///
-/// sigma = -E_i M (z - z_n)/EI, tension positive; at the end of the life the sum of two such terms,
-/// one per share of the load, each with its own moduli, centroid and EI.
+/// sigma = -E_i M ((z - z_n) + r (y - y_n))/EI, tension positive, with r = 0 and EI = EI_yy where the
+/// member is held sideways, else r = -EI_yz/EI_zz and EI = EI_yy - EI_yz^2/EI_zz; at the end of the
+/// life the sum of two such terms, one per share of the load, each with its own moduli.
 #[pyclass(frozen, module = "beamcore")]
 #[derive(Debug)]
 pub(crate) struct PartStress(pub(crate) Made<stress::PartStress>);
@@ -50,7 +52,8 @@ fn extreme(found: stress::StressExtreme) -> StressExtreme {
 
 #[pymethods]
 impl PartStress {
-    /// The stress along the bottom fibre of the part.
+    /// The stress along the bottom fibre of the part; of a member that is free sideways, the lowest
+    /// in the direction of bending.
     #[getter]
     fn bottom(slf: &Bound<'_, Self>) -> PyResult<Field> {
         let line = Line::Stress(slf.get().0.bottom());
@@ -64,7 +67,8 @@ impl PartStress {
         Ok(Field(Made::new(line, Recipe::property(slf, "centroid")?)))
     }
 
-    /// The stress along the top fibre of the part.
+    /// The stress along the top fibre of the part; of a member that is free sideways, the highest in
+    /// the direction of bending.
     #[getter]
     fn top(slf: &Bound<'_, Self>) -> PyResult<Field> {
         let line = Line::Stress(slf.get().0.top());

@@ -36,6 +36,13 @@ from beamcore.results import (
     Reading as Reading, Reaction as Reaction, Limit as Limit, LimitCheck as LimitCheck,
     Response as Response,
 )
+from beamcore.sections import (
+    Outline as Outline, rectangle as rectangle, polygon as polygon, disc as disc, ring as ring,
+    i_shape as i_shape, tee as tee, channel as channel, angle as angle, hollow_box as hollow_box,
+    Part as Part, PlacedPart as PlacedPart, Section as Section, SectionForces as SectionForces,
+    PointStress as PointStress, Stiffness as Stiffness, Principal as Principal,
+    TransformedPart as TransformedPart, TransformedSection as TransformedSection,
+)
 
 __all__ = [
     "__version__", "Unit", "Quantity", "TimberStrength", "MetalStrength",
@@ -43,20 +50,21 @@ __all__ = [
     "CharacteristicConcreteStrength", "TimberFactors", "MetalFactors", "ConcreteCreep",
     "ConcreteShrinkage", "concrete_mean_modulus", "concrete_strength_share",
     "concrete_modulus_at_age", "Material", "timber", "steel", "steel_of_thickness", "aluminium",
-    "concrete", "Outline", "rectangle", "Part", "Section", "Stiffness", "TransformedPart",
-    "TransformedSection", "Support", "pin", "roller", "fixed", "CombinationFactors", "Load",
-    "self_weight", "uniform", "partial", "trapezoidal", "area", "point", "couple", "Action",
-    "permanent", "variable", "PartialFactors", "OwnCombination", "Combination", "Span",
-    "Member", "Job", "Outcome", "run", "job_schema", "outcome_schema", "BeamcoreError",
-    "ValueProblem", "NameProblem", "KeyProblem", "UnitProblem", "DuplicateProblem",
-    "GeometryProblem", "MissingProblem", "MechanismProblem", "PositionProblem", "SyntaxProblem",
-    "VersionProblem", "FileProblem", "LookupProblem", "NumericalProblem", "Problem", "Extreme",
-    "Sides", "Field", "StressExtreme", "Utilisation", "PartStress", "Ordinate", "Camber",
-    "Reading", "Reaction", "Limit", "LimitCheck", "Response",
+    "concrete", "Outline", "rectangle", "polygon", "disc", "ring", "i_shape", "tee", "channel",
+    "angle", "hollow_box", "Part", "PlacedPart", "Section", "SectionForces", "PointStress",
+    "Stiffness", "Principal", "TransformedPart", "TransformedSection", "Support", "pin", "roller",
+    "fixed", "CombinationFactors", "Load", "self_weight", "uniform", "partial", "trapezoidal",
+    "area", "point", "couple", "Action", "permanent", "variable", "PartialFactors",
+    "OwnCombination", "Combination", "Span", "Member", "Job", "Outcome", "run", "job_schema",
+    "outcome_schema", "BeamcoreError", "ValueProblem", "NameProblem", "KeyProblem", "UnitProblem",
+    "DuplicateProblem", "GeometryProblem", "MissingProblem", "MechanismProblem", "PositionProblem",
+    "SyntaxProblem", "VersionProblem", "FileProblem", "LookupProblem", "NumericalProblem",
+    "Problem", "Extreme", "Sides", "Field", "StressExtreme", "Utilisation", "PartStress",
+    "Ordinate", "Camber", "Reading", "Reaction", "Limit", "LimitCheck", "Response",
 ]
 
 _T = TypeVar("_T", Unit, Quantity)
-_Time: TypeAlias = Literal["initial", "final"]
+_Sideways: TypeAlias = Literal["held", "free"]
 _Format: TypeAlias = Literal["toml", "json"]
 
 __version__: str
@@ -118,67 +126,6 @@ class Quantity:
     def __hash__(self) -> int: ...
 
 @final
-class Outline:
-    width: Final[Quantity]
-    height: Final[Quantity]
-    area: Final[Quantity]
-    second_moment_yy: Final[Quantity]
-    second_moment_zz: Final[Quantity]
-
-def rectangle(width: QuantityLike, height: QuantityLike) -> Outline: ...
-
-@final
-class Part:
-    name: Final[str]
-    outline: Final[Outline]
-    def __new__(cls, name: str, outline: Outline, material: Material) -> Part: ...
-    def at(self, y: QuantityLike, z: QuantityLike) -> Part: ...
-    def left_of(self, other: Part | str) -> Part: ...
-    def right_of(self, other: Part | str) -> Part: ...
-    def above(self, other: Part | str) -> Part: ...
-    def below(self, other: Part | str) -> Part: ...
-
-@final
-class Section:
-    part_names: Final[tuple[str, ...]]
-    line_mass: Final[Quantity | None]
-    notes: Final[tuple[str, ...]]
-    def __new__(cls, parts: Sequence[Part]) -> Section: ...
-    def stiffness(self, time: _Time) -> Stiffness: ...
-    def transformed_to(self, material: str, time: _Time) -> TransformedSection: ...
-
-@final
-class Stiffness:
-    axial: Final[Quantity]
-    centroid_y: Final[Quantity]
-    centroid_z: Final[Quantity]
-    bending_yy: Final[Quantity]
-    bending_zz: Final[Quantity]
-    bending_yz: Final[Quantity]
-    moduli: Final[tuple[Quantity, ...]]
-    shares: Final[tuple[float, ...]]
-
-@final
-class TransformedPart:
-    name: Final[str]
-    ratio: Final[float]
-    width: Final[Quantity]
-    bottom: Final[Quantity]
-    top: Final[Quantity]
-    def __new__(
-        cls, name: str, ratio: float, width: Quantity, bottom: Quantity, top: Quantity
-    ) -> TransformedPart: ...
-
-@final
-class TransformedSection:
-    reference_modulus: Final[Quantity]
-    area: Final[Quantity]
-    centroid_z: Final[Quantity]
-    second_moment: Final[Quantity]
-    parts: Final[tuple[TransformedPart, ...]]
-    def stress(self, part: str, z: QuantityLike, moment: QuantityLike) -> Quantity: ...
-
-@final
 class Support:
     name: Final[str]
     kind: Final[str]
@@ -206,6 +153,7 @@ class Member:
     combinations: Final[tuple[str, ...]]
     partial_factors: Final[PartialFactors]
     spans: Final[tuple[Span, ...]]
+    sideways: Final[_Sideways]
     notes: Final[tuple[str, ...]]
     def __new__(
         cls,
@@ -216,6 +164,7 @@ class Member:
         *,
         partial_factors: PartialFactors | None = None,
         own_combinations: Sequence[OwnCombination] = ...,
+        sideways: _Sideways = ...,
     ) -> Member: ...
     @staticmethod
     def simple_span(
@@ -225,6 +174,7 @@ class Member:
         *,
         partial_factors: PartialFactors | None = None,
         own_combinations: Sequence[OwnCombination] = ...,
+        sideways: _Sideways = ...,
     ) -> Member: ...
     def span(self, name: str) -> Span: ...
     def solve(self) -> Response: ...
