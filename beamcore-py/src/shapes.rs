@@ -4,7 +4,9 @@ use crate::convert::Inputs;
 use crate::outline::Outline;
 use beamcore::section;
 use beamcore::units::Length;
+use pyo3::exceptions::PyTypeError;
 use pyo3::prelude::*;
+use pyo3::types::PyString;
 
 /// The lengths of a shape with their names, read all before any problem is raised.
 fn lengths<const N: usize>(
@@ -35,19 +37,31 @@ fn rectangle(width: &Bound<'_, PyAny>, height: &Bound<'_, PyAny>) -> PyResult<Ou
     Ok(Outline(section::rectangle(width, height)))
 }
 
-/// A point of a polygon as it is given: y and z.
-type Pair<'py> = [Bound<'py, PyAny>; 2];
+/// The y and z of a point of a polygon as it is given.
+fn pair<'py>(point: &Bound<'py, PyAny>, path: &str) -> PyResult<[Bound<'py, PyAny>; 2]> {
+    let pair = if point.is_instance_of::<PyString>() {
+        None
+    } else {
+        point.extract().ok()
+    };
+    pair.ok_or_else(|| {
+        PyTypeError::new_err(format!(
+            "{path}: a point (y, z) such as (0*mm, 60*mm) is needed, not {point}"
+        ))
+    })
+}
 
 /// The points of a loop; `None` is a problem that was kept.
 fn vertices(
     inputs: &mut Inputs,
-    points: &[Pair<'_>],
+    points: &[Bound<'_, PyAny>],
     path: &str,
 ) -> PyResult<Option<Vec<(Length, Length)>>> {
     let mut found = Some(Vec::with_capacity(points.len()));
-    for (i, [y, z]) in points.iter().enumerate() {
-        let y = inputs.read(y, &format!("{path}[{i}][0]"))?;
-        let z = inputs.read(z, &format!("{path}[{i}][1]"))?;
+    for (i, point) in points.iter().enumerate() {
+        let [y, z] = pair(point, &format!("{path}[{i}]"))?;
+        let y = inputs.read(&y, &format!("{path}[{i}][0]"))?;
+        let z = inputs.read(&z, &format!("{path}[{i}][1]"))?;
         found = found.zip(y.zip(z)).map(|(mut found, point)| {
             found.push(point);
             found
@@ -69,7 +83,11 @@ fn vertices(
     clippy::needless_pass_by_value,
     reason = "Python's arguments are taken as owned"
 )]
-fn polygon(py: Python<'_>, points: Vec<Pair<'_>>, holes: Vec<Vec<Pair<'_>>>) -> PyResult<Outline> {
+fn polygon(
+    py: Python<'_>,
+    points: Vec<Bound<'_, PyAny>>,
+    holes: Vec<Vec<Bound<'_, PyAny>>>,
+) -> PyResult<Outline> {
     let mut inputs = Inputs::default();
     let outer = vertices(&mut inputs, &points, "polygon.points")?;
     let mut loops = Some(Vec::with_capacity(holes.len()));

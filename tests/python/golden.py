@@ -10,6 +10,7 @@ from collections.abc import Iterator
 from pathlib import Path
 from typing import Literal
 
+import golden_odd_section
 import golden_roof_beam
 
 from beamcore import Job, Member, Response, Section
@@ -110,6 +111,7 @@ def typed() -> list[str]:
         if case == "slab-strip":
             answers += [line(case, *found) for found in camber(response)]
     answers += [line("roof-beam", *found) for found in golden_roof_beam.answers()]
+    answers += [line("odd-section", *found) for found in golden_odd_section.answers()]
     return answers
 
 

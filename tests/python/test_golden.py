@@ -32,10 +32,14 @@ def test_job_text_gives_the_bits_of_rust() -> None:
 
 def test_the_typed_way_gives_the_bits_of_rust_and_of_job_text() -> None:
     found = python("typed")
-    assert len(found) > 250
+    assert len(found) > 400
     assert found == rust("typed")
     through_text, _ = golden.job(FOLDER)
     assert set(found) <= set(through_text)
+
+
+def test_the_expected_results_are_what_their_script_works_out() -> None:
+    answers(sys.executable, str(FOLDER / "write_expect.py"), "--check")
 
 
 def test_a_missed_tolerance_fails_the_runner(tmp_path: Path) -> None:
