@@ -46,7 +46,7 @@ fn pair<'py>(point: &Bound<'py, PyAny>, path: &str) -> PyResult<[Bound<'py, PyAn
     };
     pair.ok_or_else(|| {
         PyTypeError::new_err(format!(
-            "{path}: a point (y, z) such as (0*mm, 60*mm) is needed, not {point}"
+            "{path}: a point (y, z) such as (0*mm, 60*mm) is needed, not {point:?}"
         ))
     })
 }
@@ -76,7 +76,7 @@ fn vertices(
 ///
 /// >>> triangle = polygon([(0*mm, 0*mm), (30*mm, 0*mm), (0*mm, 60*mm)])
 /// >>> triangle.area, triangle.centroid_z
-/// (900 mm2, 20 mm)
+/// (900 mm**2, 20 mm)
 #[pyfunction]
 #[pyo3(signature = (points, holes=vec![]))]
 #[expect(
@@ -127,7 +127,7 @@ fn ring(diameter: &Bound<'_, PyAny>, wall_thickness: &Bound<'_, PyAny>) -> PyRes
 ///
 /// >>> beam = i_shape(200*mm, 100*mm, 10*mm, 120*mm, 10*mm, 6*mm)
 /// >>> beam.area  # 100 x 10 + 120 x 10 + 180 x 6
-/// 3280 mm2
+/// 3280 mm**2
 #[pyfunction]
 fn i_shape(
     height: &Bound<'_, PyAny>,
@@ -167,7 +167,7 @@ fn flanged(
 /// A flange on top of a web in its middle; the height is overall.
 ///
 /// >>> tee(150*mm, 200*mm, flange_thickness=20*mm, web_thickness=10*mm).centroid_y
-/// 0 mm
+/// 0 m
 #[pyfunction]
 fn tee(
     height: &Bound<'_, PyAny>,
@@ -183,7 +183,7 @@ fn tee(
 /// A web on the left with two equal flanges to the right; height and width are overall.
 ///
 /// >>> channel(100*mm, 40*mm, flange_thickness=8*mm, web_thickness=6*mm).centroid_z
-/// 0 mm
+/// 0 m
 #[pyfunction]
 fn channel(
     height: &Bound<'_, PyAny>,

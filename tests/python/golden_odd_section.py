@@ -11,6 +11,7 @@ from beamcore.units import GPa, kg, kN, m, mm
 
 Found = Iterator[tuple[str, float]]
 Time = Literal["initial", "final"]
+Sideways = Literal["held", "free"]
 TIMES: tuple[Time, Time] = ("initial", "final")
 
 

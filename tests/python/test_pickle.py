@@ -6,6 +6,7 @@ from pathlib import Path
 from typing import Any
 
 import golden
+import golden_odd_section
 import golden_roof_beam
 import numpy as np
 import pytest
@@ -15,9 +16,10 @@ from beamcore import (
     Camber, CharacteristicConcreteStrength, CharacteristicMetalStrength,
     CharacteristicTimberStrength, ConcreteCreep, ConcreteShrinkage, Extreme, Field, Job, Limit,
     MetalFactors, MetalStrength, OwnCombination, Part, PartialFactors, Problem, Quantity, Section,
-    TimberFactors, TimberStrength, Unit, aluminium, area, concrete, couple, fixed, partial,
-    permanent, pin, point, rectangle, roller, self_weight, steel, steel_of_thickness, timber,
-    trapezoidal, uniform, variable,
+    SectionForces, TimberFactors, TimberStrength, Unit, aluminium, angle, area, channel, concrete,
+    couple, disc, fixed, hollow_box, i_shape, partial, permanent, pin, point, polygon, rectangle,
+    ring, roller, self_weight, steel, steel_of_thickness, tee, timber, trapezoidal, uniform,
+    variable,
 )
 from beamcore.units import K, MPa, day, kN, m, mm
 
@@ -27,6 +29,10 @@ TIMBER = TimberStrength(14.8*MPa, 8.9*MPa, 12.9*MPa)
 METAL = MetalStrength("275 MPa")
 SECTION, MEMBER = golden.slab_strip()
 RESPONSE = MEMBER.solve()
+ODD, ODD_MEMBER = golden_odd_section.odd_section()
+ODD_RESPONSE = ODD_MEMBER.solve()
+FORCES = SectionForces("10 kN", 5*kN*m, moment_z=-1*kN*m)
+TRIANGLE = [(0*mm, 0*mm), (1*m, 0*mm), (0*mm, 1*m)]
 ROOF = golden_roof_beam.roof_beam()[1]
 SHRINKAGE = ConcreteShrinkage(38*MPa, 50, 150*mm, 3*day, 18250*day, "N")
 OAK = CharacteristicTimberStrength(30*MPa, 18*MPa, 23*MPa, 4*MPa, 0.6*MPa)
@@ -60,7 +66,15 @@ VALUES: list[Any] = [
     timber("GL24h", 1).named("ridge").with_design_strength(TIMBER),
     beamcore.Material("a", "10 GPa", 0.5, density="500 kg/m3", design_strength=METAL),
     beamcore.Material("a", "10 GPa", 0.5),
-    rectangle(75*mm, 220*mm),
+    rectangle(75*mm, 220*mm), disc("0.1 mm"), ring(60*mm, 5*mm), tee(9*mm, 8*mm, 2*mm, 1*mm),
+    i_shape(200*mm, 100*mm, 10*mm, 120*mm, 12*mm, 6*mm), channel(9*mm, 8*mm, 2*mm, 1*mm),
+    angle(9*mm, 8*mm, 1*mm), hollow_box(9*mm, 8*mm, 2*mm, 1*mm), polygon(TRIANGLE),
+    polygon(TRIANGLE, [[(0.1*m, 0.1*m), (0.2*m, 0.1*m), (0.1*m, 0.2*m)]]),
+    Part("a", disc(1*mm), steel("S235")).mirror_of("b", "upright").with_line_mass("9 kg/m"),
+    Part("a", disc(1*mm), steel("S235")).set_into("b", 1*mm, "2 mm"),
+    Part("a", disc(1*mm), timber("C24", 2)).material,
+    ODD, *ODD.placed, ODD.part("bar").material, FORCES, ODD.stiffness("final").principal,
+    *ODD.stress_extremes("channel", FORCES, sideways="free", time="final"),
     Part("a", rectangle(75*mm, 220*mm), steel("S235")),
     Part("a", rectangle(75*mm, 220*mm), steel("S235")).at(1*m, "2 m").above("b"),
     SECTION, SECTION.stiffness("final"), SECTION.transformed_to("C24", "final"),
@@ -137,6 +151,7 @@ FIELDS = {
         RESPONSE.deflection_component("w_max", "characteristic", "left to right", camber()),
         "values_m",
     ),
+    "sideways": (ODD_RESPONSE.sideways("fundamental", "final"), "values_m"),
     "slope": (RESPONSE.slope("fundamental", "final"), "values_rad"),
     "shear": (RESPONSE.shear("fundamental", "final"), "values_N"),
     "moment": (RESPONSE.moment("fundamental", "final"), "values_Nm"),
@@ -150,14 +165,16 @@ FIELDS = {
 def test_fields_come_back_with_their_bits(name: str) -> None:
     field, values = FIELDS[name]
     found: Field = again(field)
-    x_m = np.linspace(0, 5.4, 101)
+    x_m = np.linspace(0, field.stations_m[-1], 101)
     assert getattr(found, values)(x_m).tobytes() == getattr(field, values)(x_m).tobytes()
     assert found.greatest == field.greatest
 
 
 def test_members_and_responses_come_back() -> None:
-    for _, member in (golden.two_span(), golden.slab_strip(), golden_roof_beam.roof_beam()):
+    for _, member in (golden.two_span(), golden.slab_strip(), golden_roof_beam.roof_beam(),
+                      (ODD, ODD_MEMBER)):
         found = again(member)
+        assert found.sideways == member.sideways
         assert found.length == member.length
         assert found.support_names == member.support_names
         assert found.partial_factors == member.partial_factors
