@@ -40,7 +40,8 @@ impl Section {
         PyTuple::new(py, self.0.parts().iter().map(section::Part::name))
     }
 
-    /// Mass per length, sum of density x area; None if a part has no density.
+    /// Mass per length: the sum of those of the parts, each as given or density x area; None if a
+    /// part without one has no density.
     #[getter]
     fn line_mass(&self) -> Option<Quantity> {
         self.0.line_mass().map(Quantity::of)
