@@ -79,9 +79,9 @@ impl Line {
 
 /// A quantity along the member, exact between stations and evaluated anywhere.
 ///
-/// Deflection is positive downward, movement sideways towards positive y, slope is dw/dx, shear force
-/// is V = dM/dx, a moment is positive where it stretches the bottom, a tensile stress is positive. At a support or a point load a
-/// shear force has two values.
+/// Deflection is positive downward, movement sideways towards positive y, slope is dw/dx, shear
+/// force is V = dM/dx, a moment is positive where it stretches the bottom, a tensile stress is
+/// positive. At a support or a point load a shear force has two values.
 #[pyclass(frozen, module = "beamcore")]
 #[derive(Debug)]
 pub(crate) struct Field(pub(crate) Made<Line>);

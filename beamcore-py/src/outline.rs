@@ -159,8 +159,8 @@ impl Outline {
         Ok(Quantity::of(self.sound(py)?.second_moment_zz()))
     }
 
-    /// Product moment of area, int (y - y_c)(z - z_c) dA: exactly zero for a shape with an upright or
-    /// level axis of symmetry, negative for an angle with its heel at the bottom left.
+    /// Product moment of area, int (y - y_c)(z - z_c) dA: exactly zero for a shape with an upright
+    /// or level axis of symmetry, negative for an angle with its heel at the bottom left.
     #[getter]
     fn second_moment_yz(&self, py: Python<'_>) -> PyResult<Quantity> {
         Ok(Quantity::of(self.sound(py)?.second_moment_yz()))

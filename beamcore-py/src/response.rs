@@ -65,8 +65,9 @@ impl Response {
         Self::field(slf, "deflection", combination, time, of, Line::Movement)
     }
 
-    /// The movement sideways along the member, v = w EI_yz/EI_zz for each share of the load, positive
-    /// towards positive y; zero unless the member is free sideways and has no axis of symmetry.
+    /// The movement sideways along the member, positive towards positive y: v = w EI_yz/EI_zz for
+    /// each share of the load; zero unless it is free sideways and its section has no axis of
+    /// symmetry.
     fn sideways(slf: &Bound<'_, Self>, combination: &str, time: TimeText) -> PyResult<Field> {
         let of = |r: &response::Response, time| r.sideways(combination, time);
         Self::field(slf, "sideways", combination, time, of, Line::Movement)

@@ -93,9 +93,9 @@ impl Section {
     /// The stress in a part at a point (y, z) of it under section forces, E x strain, tension
     /// positive, at a time, "initial" or "final".
     ///
-    /// Strain: N/EA - kappa_y (z - z_n) - kappa_z (y - y_n). A section that is "held" sideways bends
-    /// about the level axis only: kappa_y = M_y/EI_yy, kappa_z = 0. One that is "free" bends about
-    /// both: kappa_y = (M_y EI_zz - M_z EI_yz)/D, kappa_z = (M_z EI_yy - M_y EI_yz)/D, with
+    /// Strain: N/EA - kappa_y (z - z_n) - kappa_z (y - y_n). A section "held" sideways bends about
+    /// the level axis only: kappa_y = M_y/EI_yy, kappa_z = 0. One that is "free" bends
+    /// about both: kappa_y = (M_y EI_zz - M_z EI_yz)/D, kappa_z = (M_z EI_yy - M_y EI_yz)/D, with
     /// D = EI_yy EI_zz - EI_yz^2 (unsymmetrical bending, derived from the plane of strain).
     ///
     /// >>> beam = Part("beam", rectangle(100*mm, 200*mm), steel("S275"))

@@ -34,9 +34,9 @@ record! {
 /// The normal stress in one part: along the fibres that can be stressed most, and along its own
 /// centroid.
 ///
-/// sigma = -E_i M ((z - z_n) + r (y - y_n))/EI, tension positive, with r = 0 and EI = EI_yy where the
-/// member is held sideways, else r = -EI_yz/EI_zz and EI = EI_yy - EI_yz^2/EI_zz; at the end of the
-/// life the sum of two such terms, one per share of the load, each with its own moduli.
+/// sigma = -E_i M ((z - z_n) + r (y - y_n))/EI, tension positive, with r = 0 and EI = EI_yy where
+/// the member is held sideways, else r = -EI_yz/EI_zz and EI = EI_yy - EI_yz^2/EI_zz; at the end of
+/// the life the sum of two such terms, one per share of the load, each with its own moduli.
 #[pyclass(frozen, module = "beamcore")]
 #[derive(Debug)]
 pub(crate) struct PartStress(pub(crate) Made<stress::PartStress>);
@@ -67,8 +67,8 @@ impl PartStress {
         Ok(Field(Made::new(line, Recipe::property(slf, "centroid")?)))
     }
 
-    /// The stress along the top fibre of the part; of a member that is free sideways, the highest in
-    /// the direction of bending.
+    /// The stress along the top fibre of the part; of a member that is free sideways, the highest
+    /// in the direction of bending.
     #[getter]
     fn top(slf: &Bound<'_, Self>) -> PyResult<Field> {
         let line = Line::Stress(slf.get().0.top());

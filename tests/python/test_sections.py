@@ -1,4 +1,4 @@
-"""Sections of any outline: closed forms of the shapes, places, principal axes, stress at a point."""
+"""Sections of any outline: closed forms of shapes, places, principal axes, stress at a point."""
 
 import math
 
