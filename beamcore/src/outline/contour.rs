@@ -57,13 +57,13 @@ impl Contour {
         }
     }
 
-    /// The loop of straight edges through the points; a point equal to the one before it is passed
-    /// over. What is no polygon is left to the checks of the caller.
     /// A loop of edges that are known to close.
     pub(super) const fn of(edges: Vec<Edge>) -> Self {
         Self { edges }
     }
 
+    /// The loop of straight edges through the points; a point equal to the one before it is passed
+    /// over. What is no polygon is left to the checks of the caller.
     pub(super) fn through(points: &[Point]) -> Self {
         let next = points.iter().cycle().skip(1);
         Self {

@@ -90,8 +90,12 @@ impl Section {
     /// The section of some of the parts alone, each where it stands in the whole section.
     ///
     /// # Errors
-    /// [`ErrorKind::Missing`] if none of the names is that of a part.
+    /// [`ErrorKind::Lookup`] for a name that is not that of a part; [`ErrorKind::Missing`] if there
+    /// are no names.
     pub fn only(&self, names: &[String]) -> Result<Self> {
+        for name in names {
+            self.index(name)?;
+        }
         let kept = |name: &str| names.iter().any(|known| known == name);
         let parts: Vec<_> = self
             .parts
