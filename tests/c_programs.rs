@@ -127,6 +127,8 @@ fn run(program: &Path, arguments: &[&Path]) -> String {
         Command::new(program)
     };
     command.args(arguments);
+    // The path of cargo may lead to the library of an earlier build; the program knows its own.
+    command.env_remove("LD_LIBRARY_PATH");
     let output = finished(&mut command, "run the programs in C and C++");
     assert!(
         output.status.success(),
