@@ -150,6 +150,8 @@ fn printed(name: &str, sources: &[&str], arguments: &[&Path]) -> String {
 #[test]
 fn the_test_programs_in_c_pass() {
     for name in [
+        "materials",
+        "outlines",
         "sections",
         "members",
         "plans",
@@ -165,7 +167,7 @@ fn the_test_programs_in_c_pass() {
 
 #[test]
 fn the_test_programs_in_cpp_pass() {
-    for name in ["wrapper", "exceptions"] {
+    for name in ["wrapper", "wrapper_sections", "exceptions"] {
         printed(name, &[&format!("tests/c/{name}.cpp")], &[]);
     }
 }
@@ -189,11 +191,16 @@ fn golden_answers_have_the_bits_of_rust() {
                 "tests/c/golden.c",
                 "tests/c/golden_typed.c",
                 "tests/c/golden_roof_beam.c",
+                "tests/c/golden_odd_section.c",
             ][..],
         ),
         (
             "golden-cpp",
-            &["tests/c/golden.cpp", "tests/c/golden_roof_beam.cpp"][..],
+            &[
+                "tests/c/golden.cpp",
+                "tests/c/golden_roof_beam.cpp",
+                "tests/c/golden_odd_section.cpp",
+            ][..],
         ),
     ] {
         for program in built(name, sources) {

@@ -43,7 +43,8 @@
  * SIGNS. x runs left to right, z up; a section is drawn as seen against x, with y to the right.
  * Deflection and loads are positive downward, couples clockwise, the slope is dw/dx, the shear
  * force V = dM/dx, a positive (sagging) moment stretches the bottom, tension is positive, forces of
- * supports, cambers and readings are positive upward.
+ * supports, cambers and readings are positive upward. A movement sideways is positive towards
+ * positive y.
  *
  * PANICS. A fault inside the library is caught and reported as BC_ERROR_PANIC; the caller is never
  * aborted by it.
@@ -306,6 +307,63 @@
 // Shape of a camber: the circular arc whose greatest gap to the deflection line is least.
 #define BC_SHAPE_ARC_LEAST_GAP 4
 
+// Axis of a mirror image: the upright axis y = 0; left and right change.
+#define BC_MIRROR_UPRIGHT 1
+
+// Axis of a mirror image: the level axis z = 0; top and bottom change.
+#define BC_MIRROR_LEVEL 2
+
+// Sideways: held, as by a floor; bends about the level axis only.
+#define BC_SIDEWAYS_HELD 1
+
+// Sideways: free; also bends about the upright axis where there is no axis of symmetry.
+#define BC_SIDEWAYS_FREE 2
+
+// Design strength of timber: bending, f_m,d.
+#define BC_STRENGTH_DESIGN_BENDING 1
+
+// Design strength of timber: tension along the grain, f_t,0,d.
+#define BC_STRENGTH_DESIGN_TENSION 2
+
+// Design strength of timber: compression along the grain, f_c,0,d.
+#define BC_STRENGTH_DESIGN_COMPRESSION 3
+
+// Design strength of metal: yield, f_y,d.
+#define BC_STRENGTH_DESIGN_YIELD 4
+
+// Design strength: shear, f_v,d of timber or f_y,d/sqrt(3) of metal, unless it was given.
+#define BC_STRENGTH_DESIGN_SHEAR 5
+
+// Characteristic strength of timber: bending, f_m,k.
+#define BC_STRENGTH_BENDING 6
+
+// Characteristic strength of timber: tension along the grain, f_t,0,k.
+#define BC_STRENGTH_TENSION 7
+
+// Characteristic strength: compression, f_c,0,k of timber along the grain, f_ck of concrete.
+#define BC_STRENGTH_COMPRESSION 8
+
+// Characteristic strength of timber: shear, f_v,k.
+#define BC_STRENGTH_SHEAR 9
+
+// Characteristic strength of timber: tension across the grain, f_t,90,k.
+#define BC_STRENGTH_TENSION_ACROSS 10
+
+// Characteristic strength of timber: compression across the grain, f_c,90,k.
+#define BC_STRENGTH_COMPRESSION_ACROSS 11
+
+// Characteristic strength of metal: yield f_y, or 0.2 % proof f_o.
+#define BC_STRENGTH_YIELD 12
+
+// Characteristic strength of metal: ultimate in tension, f_u.
+#define BC_STRENGTH_ULTIMATE 13
+
+// Mean strength of concrete: compression, f_cm.
+#define BC_STRENGTH_MEAN_COMPRESSION 14
+
+// Mean strength of concrete: tension, f_ctm.
+#define BC_STRENGTH_MEAN_TENSION 15
+
 // An action: loads that act together, from one cause.
 typedef struct bc_action bc_action;
 
@@ -329,6 +387,11 @@ typedef struct bc_member bc_member;
 
 // An outcome: all results of a job, with its inputs, what was assumed and what was not checked.
 typedef struct bc_outcome bc_outcome;
+
+// An outline: the shape of a part with its sizes, without a place. It has a point by which a part
+// is placed: the middle of its bounding box, or the origin of the coordinates of a polygon.
+// Corners are sharp. The sizes are checked when a part of the outline is used in a section.
+typedef struct bc_outline bc_outline;
 
 // A part: one piece of one material, with a name that addresses its results.
 typedef struct bc_part bc_part;
@@ -463,6 +526,258 @@ int32_t bc_material_name(const bc_material *material,
 // Frees a material; NULL is allowed.
 void bc_material_free(bc_material *material);
 
+// Structural steel of a class ("S275") with the yield and ultimate strengths of a nominal
+// thickness as characteristic strengths.
+int32_t bc_material_steel_of_thickness(const char *class_name,
+                                       double thickness_m,
+                                       bc_material **material_out);
+
+// Aluminium of an alloy and temper ("EN AW-6082 T6") as an extruded profile of a thickness, with
+// its proof and ultimate strengths away from welds as characteristic strengths.
+int32_t bc_material_aluminium(const char *class_name,
+                              double thickness_m,
+                              bc_material **material_out);
+
+// The same material with another mean modulus of elasticity E. The fractile of the modulus and a
+// given shear modulus stay as they are.
+int32_t bc_material_with_modulus(const bc_material *material,
+                                 double modulus_Pa,
+                                 bc_material **material_out);
+
+// The same material with a 5 % fractile of the modulus of elasticity, E_05.
+int32_t bc_material_with_fractile_modulus(const bc_material *material,
+                                          double modulus_Pa,
+                                          bc_material **material_out);
+
+// The same material with a mean shear modulus G; it replaces the shear modulus or Poisson's ratio
+// of a class.
+int32_t bc_material_with_shear_modulus(const bc_material *material,
+                                       double modulus_Pa,
+                                       bc_material **material_out);
+
+// The same material with a Poisson's ratio nu, so that G = E/(2 (1 + nu)); it replaces the shear
+// modulus or Poisson's ratio of a class. Not for timber.
+int32_t bc_material_with_poisson_ratio(const bc_material *material,
+                                       double ratio,
+                                       bc_material **material_out);
+
+// The same material with a 5 % fractile of the density, rho_k.
+int32_t bc_material_with_fractile_density(const bc_material *material,
+                                          double density_kg_per_m3,
+                                          bc_material **material_out);
+
+// The same material with a thermal expansion alpha, positive where warmth lengthens it.
+int32_t bc_material_with_thermal_expansion(const bc_material *material,
+                                           double expansion_per_K,
+                                           bc_material **material_out);
+
+// The same material with another creep factor (0 for no creep).
+int32_t bc_material_with_creep_factor(const bc_material *material,
+                                      double creep_factor,
+                                      bc_material **material_out);
+
+// The same material with characteristic strengths of timber along the grain: bending f_m,k,
+// tension f_t,0,k, compression f_c,0,k and shear f_v,k. Stresses are compared with design
+// strengths only: see bc_material_with_timber_factors.
+int32_t bc_material_with_characteristic_timber(const bc_material *material,
+                                               double bending_Pa,
+                                               double tension_Pa,
+                                               double compression_Pa,
+                                               double shear_Pa,
+                                               bc_material **material_out);
+
+// The same material with characteristic strengths of timber along the grain and, last, across it:
+// tension f_t,90,k and compression f_c,90,k.
+int32_t bc_material_with_characteristic_timber_across(const bc_material *material,
+                                                      double bending_Pa,
+                                                      double tension_Pa,
+                                                      double compression_Pa,
+                                                      double shear_Pa,
+                                                      double tension_across_Pa,
+                                                      double compression_across_Pa,
+                                                      bc_material **material_out);
+
+// The same material with the characteristic strength of a metal: yield f_y, or 0.2 % proof f_o.
+int32_t bc_material_with_characteristic_metal(const bc_material *material,
+                                              double yield_Pa,
+                                              bc_material **material_out);
+
+// The same material with the characteristic strengths of a metal, last the ultimate one in
+// tension, f_u.
+int32_t bc_material_with_characteristic_metal_ultimate(const bc_material *material,
+                                                       double yield_Pa,
+                                                       double ultimate_Pa,
+                                                       bc_material **material_out);
+
+// The same material with the factors that make design strengths of the characteristic ones of
+// timber: k_mod, the partial factor gamma_M, the size factor k_h and the factor of load sharing
+// k_sys; the last two are 1 where there is none.
+int32_t bc_material_with_timber_factors(const bc_material *material,
+                                        double k_mod,
+                                        double gamma_m,
+                                        double k_h,
+                                        double k_sys,
+                                        bc_material **material_out);
+
+// The same material with the partial factor that makes the design strength of the characteristic
+// one of a metal: gamma_M0 of steel, gamma_M1 of aluminium.
+int32_t bc_material_with_metal_factor(const bc_material *material,
+                                      double gamma_m,
+                                      bc_material **material_out);
+
+// The same material with a design shear strength, as f_v,d of timber.
+int32_t bc_material_with_shear_strength(const bc_material *material,
+                                        double shear_Pa,
+                                        bc_material **material_out);
+
+// A strength (BC_STRENGTH_...) of a material. Where it is not known, or is one of another stuff,
+// has_value_out is 0 and the strength is left as it is.
+int32_t bc_material_strength(const bc_material *material,
+                             int32_t strength,
+                             int32_t *has_value_out,
+                             double *strength_Pa_out);
+
+// The 5 % fractile of the modulus of elasticity, E_05. Where it is not known, has_value_out is 0 and
+// the modulus is left as it is.
+int32_t bc_material_fractile_modulus(const bc_material *material,
+                                     int32_t *has_value_out,
+                                     double *modulus_Pa_out);
+
+// The shear modulus at a time: G at first, G/(1 + creep factor) at the end, with G as given, else
+// E/(2 (1 + nu)). Where it is not known, has_value_out is 0 and the modulus is left as it is.
+int32_t bc_material_shear_modulus(const bc_material *material,
+                                  int32_t time,
+                                  int32_t *has_value_out,
+                                  double *modulus_Pa_out);
+
+// Poisson's ratio nu. Where it is not given, has_value_out is 0 and the ratio is left as it is.
+int32_t bc_material_poisson_ratio(const bc_material *material,
+                                  int32_t *has_value_out,
+                                  double *ratio_out);
+
+// The mean density rho_mean. Where it is not known, has_value_out is 0 and the density is left as it
+// is.
+int32_t bc_material_density(const bc_material *material,
+                            int32_t *has_value_out,
+                            double *density_kg_per_m3_out);
+
+// The 5 % fractile of the density, rho_k. Where it is not known, has_value_out is 0 and the density
+// is left as it is.
+int32_t bc_material_fractile_density(const bc_material *material,
+                                     int32_t *has_value_out,
+                                     double *density_kg_per_m3_out);
+
+// The thermal expansion alpha. Where it is not known, has_value_out is 0 and the expansion is left as
+// it is.
+int32_t bc_material_thermal_expansion(const bc_material *material,
+                                      int32_t *has_value_out,
+                                      double *expansion_per_K_out);
+
+// The creep factor, 0 for no creep.
+int32_t bc_material_creep_factor(const bc_material *material, double *creep_factor_out);
+
+// Where the creep factor comes from.
+int32_t bc_material_creep_basis(const bc_material *material,
+                                char *buffer,
+                                int64_t capacity,
+                                int64_t *length_out);
+
+// The standard, edition and class that the values come from; an empty text if they were given one
+// by one.
+int32_t bc_material_origin(const bc_material *material,
+                           char *buffer,
+                           int64_t capacity,
+                           int64_t *length_out);
+
+// The number of values of the class that were overridden; 0 without a class.
+int32_t bc_material_override_count(const bc_material *material, int32_t *count_out);
+
+// A value of the class that was overridden, as in "density 450 kg/m3 instead of 420 kg/m3".
+// Overrides are counted from 0.
+int32_t bc_material_override(const bc_material *material,
+                             int32_t index,
+                             char *buffer,
+                             int64_t capacity,
+                             int64_t *length_out);
+
+// A rectangle, width along y and height along z.
+int32_t bc_outline_rectangle(double width_m, double height_m, bc_outline **outline_out);
+
+// A full disc: a round bar.
+int32_t bc_outline_disc(double diameter_m, bc_outline **outline_out);
+
+// A round tube of an outer diameter, its wall thinner than half of it.
+int32_t bc_outline_ring(double diameter_m, double wall_thickness_m, bc_outline **outline_out);
+
+// Two flanges joined by a web in their middle; the height is overall.
+int32_t bc_outline_i_shape(double height_m,
+                           double top_width_m,
+                           double top_thickness_m,
+                           double bottom_width_m,
+                           double bottom_thickness_m,
+                           double web_thickness_m,
+                           bc_outline **outline_out);
+
+// A flange on top of a web in its middle; the height is overall.
+int32_t bc_outline_tee(double height_m,
+                       double width_m,
+                       double flange_thickness_m,
+                       double web_thickness_m,
+                       bc_outline **outline_out);
+
+// A web on the left with two equal flanges to the right; height and width are overall.
+int32_t bc_outline_channel(double height_m,
+                           double width_m,
+                           double flange_thickness_m,
+                           double web_thickness_m,
+                           bc_outline **outline_out);
+
+// An upright leg on the left and a level leg at the bottom, of one thickness, with the heel at the
+// bottom left; height and width are overall.
+int32_t bc_outline_angle(double height_m,
+                         double width_m,
+                         double thickness_m,
+                         bc_outline **outline_out);
+
+// A rectangular tube of two upright sides and two level plates; width and height are overall.
+int32_t bc_outline_box(double width_m,
+                       double height_m,
+                       double side_thickness_m,
+                       double plate_thickness_m,
+                       bc_outline **outline_out);
+
+// The word for the shape in documents: rectangle, polygon, disc, ring, i_shape, tee, channel,
+// angle or box.
+int32_t bc_outline_name(const bc_outline *outline,
+                        char *buffer,
+                        int64_t capacity,
+                        int64_t *length_out);
+
+// Frees an outline; NULL is allowed.
+void bc_outline_free(bc_outline *outline);
+
+// A polygon through points (y, z), in its own coordinates: y to the right, z up. The loop closes
+// by itself and may be given in either direction.
+int32_t bc_outline_polygon(const double *y_m,
+                           const double *z_m,
+                           int32_t point_count,
+                           bc_outline **outline_out);
+
+// The same polygon with one more hole, given by its points as the polygon is. Other outlines than
+// polygons have no holes: they are BC_ERROR_GEOMETRY.
+int32_t bc_outline_with_hole(const bc_outline *outline,
+                             const double *y_m,
+                             const double *z_m,
+                             int32_t point_count,
+                             bc_outline **outline_out);
+
+// A part of an outline, the point by which the outline is placed at y = 0, z = 0. The values are
+// checked when the part is used in a section.
+int32_t bc_part_new(const char *name,
+                    const bc_outline *outline,
+                    const bc_material *material,
+                    bc_part **part_out);
+
 // A rectangular part, width along y and height along z, with its middle at y = 0, z = 0. The
 // values are checked when the part is used in a section.
 int32_t bc_part_rectangle(const char *name,
@@ -471,7 +786,8 @@ int32_t bc_part_rectangle(const char *name,
                           const bc_material *material,
                           bc_part **part_out);
 
-// The same part with the middle of its outline at (y, z).
+// The same part with the point by which its outline is placed at (y, z): the middle of its bounding
+// box, or the origin of the coordinates of a polygon.
 int32_t bc_part_at(const bc_part *part, double y_m, double z_m, bc_part **part_out);
 
 // The same part touching another one of the section: place is BC_PLACE_...
@@ -485,6 +801,24 @@ int32_t bc_part_name(const bc_part *part, char *buffer, int64_t capacity, int64_
 
 // Frees a part; NULL is allowed.
 void bc_part_free(bc_part *part);
+
+// The same part as the mirror image of another one about an axis (BC_MIRROR_...): at the mirrored
+// place, with its own outline mirrored.
+int32_t bc_part_mirror_of(const bc_part *part,
+                          const char *other_name,
+                          int32_t axis,
+                          bc_part **part_out);
+
+// The same part set into another one, its host, at (y, z): it displaces the host exactly, and must
+// lie wholly within it.
+int32_t bc_part_set_into(const bc_part *part,
+                         const char *host_name,
+                         double y_m,
+                         double z_m,
+                         bc_part **part_out);
+
+// The same part with a mass per length of its own, instead of density x area.
+int32_t bc_part_with_line_mass(const bc_part *part, double line_mass_kg_per_m, bc_part **part_out);
 
 // A section of parts. All that is wrong with them is reported at once; no part at all is
 // BC_ERROR_MISSING.
@@ -544,6 +878,43 @@ int32_t bc_section_note(const bc_section *section,
 
 // Frees a section; NULL is allowed.
 void bc_section_free(bc_section *section);
+
+// The principal bending stiffnesses at a time, the greater and the smaller one, and the angle from
+// the level axis to the axis of the greater one, positive from y towards z.
+int32_t bc_section_principal(const bc_section *section,
+                             int32_t time,
+                             double *greater_Nm2_out,
+                             double *smaller_Nm2_out,
+                             double *angle_rad_out);
+
+// The stress in a part at a point (y, z) under section forces, tension positive: an axial force
+// (tension positive), a moment about the level axis (positive where it stretches the bottom) and
+// one about the upright axis (positive where it stretches the side of negative y). A section that
+// is held sideways (BC_SIDEWAYS_...) bends about the level axis only.
+int32_t bc_section_stress_at(const bc_section *section,
+                             int32_t time,
+                             int32_t sideways,
+                             const char *part,
+                             double y_m,
+                             double z_m,
+                             double axial_N,
+                             double moment_y_Nm,
+                             double moment_z_Nm,
+                             double *stress_Pa_out);
+
+// The algebraically greatest (BC_STRESS_TENSION) or least (BC_STRESS_COMPRESSION) stress in a part
+// under section forces, tension positive, with its point; forces as for bc_section_stress_at.
+int32_t bc_section_stress_extreme(const bc_section *section,
+                                  int32_t time,
+                                  int32_t sideways,
+                                  const char *part,
+                                  double axial_N,
+                                  double moment_y_Nm,
+                                  double moment_z_Nm,
+                                  int32_t sign,
+                                  double *value_Pa_out,
+                                  double *y_m_out,
+                                  double *z_m_out);
 
 // The section at a time as if made of one of its materials: the modulus of that material, and
 // area, centroid and second moment of area about the horizontal axis of the transformed section.
@@ -701,6 +1072,10 @@ int32_t bc_plan_with_combination(const bc_plan *plan,
                                  int32_t is_ultimate,
                                  bc_plan **plan_out);
 
+// The same plan of a member that is held sideways or free to move (BC_SIDEWAYS_...); without this
+// it is held.
+int32_t bc_plan_with_sideways(const bc_plan *plan, int32_t sideways, bc_plan **plan_out);
+
 // Checks a plan and makes the member; all that is wrong is reported at once.
 int32_t bc_plan_check(const bc_plan *plan, bc_member **member_out);
 
@@ -824,7 +1199,8 @@ int32_t bc_response_residual(const bc_response *response, double *residual_out);
 void bc_response_free(bc_response *response);
 
 // The greatest tension or compression (BC_STRESS_...) in a part, tension positive, with its
-// place along the member and the height z of the fibre.
+// place along the member and the point (y, z) of the section where it stands; where the member is
+// held sideways, y is the middle of the part, for then all points of one height are stressed alike.
 int32_t bc_response_stress(const bc_response *response,
                            const char *combination,
                            int32_t time,
@@ -832,6 +1208,7 @@ int32_t bc_response_stress(const bc_response *response,
                            int32_t sign,
                            double *value_Pa_out,
                            double *at_m_out,
+                           double *y_m_out,
                            double *z_m_out);
 
 // The stresses at count places along a fibre (BC_FIBRE_...) of a part, tension positive; where
@@ -856,6 +1233,26 @@ int32_t bc_response_utilisation(const bc_response *response,
                                 int32_t *has_value_out,
                                 double *value_out,
                                 double *at_m_out);
+
+// Whether a member is held sideways or free (BC_SIDEWAYS_...).
+int32_t bc_member_sideways(const bc_member *member, int32_t *sideways_out);
+
+// An extreme (BC_EXTREME_...) of the movement sideways, positive towards positive y, and its
+// place; zero unless the member is free sideways and its section has no axis of symmetry.
+int32_t bc_response_sideways_extreme(const bc_response *response,
+                                     const char *combination,
+                                     int32_t time,
+                                     int32_t extreme,
+                                     double *value_m_out,
+                                     double *at_m_out);
+
+// The movement sideways at count places, positive towards positive y.
+int32_t bc_response_sideways_values(const bc_response *response,
+                                    const char *combination,
+                                    int32_t time,
+                                    const double *x_m,
+                                    int32_t count,
+                                    double *values_m_out);
 
 // The number of spans of a member: between neighbouring supports, and the overhangs.
 int32_t bc_member_span_count(const bc_member *member, int32_t *count_out);
@@ -1177,6 +1574,26 @@ double bc_plain_concrete_creep(double mean_strength_Pa,
 
 // A number of one unit as a number of another unit of the same kind: 50 from "mm" to "m" is 0.05.
 double bc_plain_convert(double value, const char *from_unit, const char *to_unit);
+
+// The mean modulus E_cm in Pa of concrete at 28 days of a mean compressive strength f_cm.
+double bc_plain_concrete_mean_modulus(double mean_strength_Pa);
+
+// The share of its strength at 28 days that concrete has at an age, by its cement
+// (BC_CEMENT_...).
+double bc_plain_concrete_strength_share(double age_s, int32_t cement);
+
+// The mean modulus in Pa of concrete at an age, from the one at 28 days.
+double bc_plain_concrete_modulus_at_age(double mean_modulus_Pa, double age_s, int32_t cement);
+
+// The whole shrinkage of concrete at an age, drying and autogenous, as a strain that is positive
+// where it shortens: mean strength f_cm, relative humidity in percent (50 means 50 %), notional
+// size h0 = 2 A/u, the ages at which drying begins and at which the shrinkage is asked for.
+double bc_plain_concrete_shrinkage(double mean_strength_Pa,
+                                   double relative_humidity_percent,
+                                   double notional_size_m,
+                                   double age_at_drying_s,
+                                   double age_at_end_s,
+                                   int32_t cement);
 
 #ifdef __cplusplus
 }  // extern "C"

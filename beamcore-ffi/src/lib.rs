@@ -28,11 +28,27 @@ pub mod choice;
 
 pub mod choice_member;
 
+pub mod choice_section;
+
 pub mod material;
+
+pub mod material_given;
+
+pub mod material_strength;
+
+pub mod material_values;
+
+pub mod outline;
+
+pub mod polygon;
 
 pub mod part;
 
+pub mod part_place;
+
 pub mod section;
+
+pub mod plane;
 
 pub mod transformed;
 
@@ -50,6 +66,8 @@ pub mod response;
 
 pub mod stress;
 
+pub mod sideways;
+
 pub mod span;
 
 pub mod camber;
@@ -66,11 +84,14 @@ pub mod outcome;
 
 pub mod plain;
 
+pub mod plain_concrete;
+
 /// Handles may be used by several threads at once: a type of the core that could not be shared
 /// does not compile here.
 const _: () = {
     const fn shared_between_threads<T: Send + Sync>() {}
     shared_between_threads::<(material::BcMaterial, part::BcPart, section::BcSection)>();
+    shared_between_threads::<outline::BcOutline>();
     shared_between_threads::<(action::BcAction, member::BcMember, response::BcResponse)>();
     shared_between_threads::<(plan::BcPlan, reading::BcReadings)>();
     shared_between_threads::<(limit::BcLimit, limit_check::BcChecks)>();

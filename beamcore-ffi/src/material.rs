@@ -142,7 +142,7 @@ pub unsafe extern "C" fn bc_material_new(
 ///
 /// # Safety
 /// As for the functions of the ABI.
-unsafe fn changed(
+pub(crate) unsafe fn changed(
     material: *const BcMaterial,
     material_out: *mut *mut BcMaterial,
     change: impl FnOnce(Material) -> Material,
@@ -158,6 +158,14 @@ unsafe fn changed(
         out.give(BcMaterial(change(material.0.clone())));
         Ok(())
     })
+}
+
+/// Writes a value that may be unknown.
+pub(crate) fn write_optional(value: Option<f64>, has_out: Slot<i32>, value_out: Slot<f64>) {
+    has_out.put(i32::from(value.is_some()));
+    if let Some(value) = value {
+        value_out.put(value);
+    }
 }
 
 /// The same material under another name.

@@ -4,6 +4,7 @@ use crate::choice;
 use crate::guard;
 use crate::handle::{self, Slot};
 use crate::material::BcMaterial;
+use crate::outline::BcOutline;
 use crate::text::{self, TextOut};
 use beamcore::section::{Part, rectangle};
 use beamcore::units::Length;
@@ -11,6 +12,31 @@ use std::ffi::c_char;
 
 /// A part: one piece of one material, with a name that addresses its results.
 pub struct BcPart(pub(crate) Part);
+
+/// A part of an outline, the point by which the outline is placed at y = 0, z = 0. The values are
+/// checked when the part is used in a section.
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn bc_part_new(
+    name: *const c_char,
+    outline: *const BcOutline,
+    material: *const BcMaterial,
+    part_out: *mut *mut BcPart,
+) -> i32 {
+    guard::status(|| {
+        // SAFETY: the caller keeps the header's contract for these pointers.
+        let (name, outline, material, out) = unsafe {
+            (
+                text::read(name, "name")?,
+                handle::shared(outline, "outline")?,
+                handle::shared(material, "material")?,
+                Slot::new(part_out, "part_out")?,
+            )
+        };
+        let (outline, material) = (outline.0.clone(), material.0.clone());
+        out.give(BcPart(Part::new(name, outline, material)));
+        Ok(())
+    })
+}
 
 /// A rectangular part, width along y and height along z, with its middle at y = 0, z = 0. The
 /// values are checked when the part is used in a section.
@@ -37,7 +63,8 @@ pub unsafe extern "C" fn bc_part_rectangle(
     })
 }
 
-/// The same part with the middle of its outline at (y, z).
+/// The same part with the point by which its outline is placed at (y, z): the middle of its bounding
+/// box, or the origin of the coordinates of a polygon.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn bc_part_at(
     part: *const BcPart,

@@ -2,6 +2,7 @@
 
 use crate::action::BcAction;
 use crate::choice;
+use crate::choice_section;
 use crate::fault::Fault;
 use crate::guard;
 use crate::handle::{self, Slot};
@@ -165,6 +166,19 @@ pub unsafe extern "C" fn bc_plan_with_combination(
             is_ultimate: choice::yes(is_ultimate, "is_ultimate")?,
         }))
     };
+    // SAFETY: the caller keeps the header's contract for these pointers.
+    unsafe { changed(plan, plan_out, change) }
+}
+
+/// The same plan of a member that is held sideways or free to move (BC_SIDEWAYS_...); without this
+/// it is held.
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn bc_plan_with_sideways(
+    plan: *const BcPlan,
+    sideways: i32,
+    plan_out: *mut *mut BcPlan,
+) -> i32 {
+    let change = |plan: MemberPlan| Ok(plan.sideways(choice_section::sideways(sideways)?));
     // SAFETY: the caller keeps the header's contract for these pointers.
     unsafe { changed(plan, plan_out, change) }
 }

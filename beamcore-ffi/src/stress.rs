@@ -8,7 +8,8 @@ use crate::text;
 use std::ffi::c_char;
 
 /// The greatest tension or compression (BC_STRESS_...) in a part, tension positive, with its
-/// place along the member and the height z of the fibre.
+/// place along the member and the point (y, z) of the section where it stands; where the member is
+/// held sideways, y is the middle of the part, for then all points of one height are stressed alike.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn bc_response_stress(
     response: *const BcResponse,
@@ -18,17 +19,19 @@ pub unsafe extern "C" fn bc_response_stress(
     sign: i32,
     value_Pa_out: *mut f64,
     at_m_out: *mut f64,
+    y_m_out: *mut f64,
     z_m_out: *mut f64,
 ) -> i32 {
     guard::status(|| {
         // SAFETY: the caller keeps the header's contract for these pointers.
-        let (response, combination, part, value_out, at_out, z_out) = unsafe {
+        let (response, combination, part, value_out, at_out, y_out, z_out) = unsafe {
             (
                 handle::shared(response, "response")?,
                 text::read(combination, "combination")?,
                 text::read(part, "part")?,
                 Slot::new(value_Pa_out, "value_Pa_out")?,
                 Slot::new(at_m_out, "at_m_out")?,
+                Slot::new(y_m_out, "y_m_out")?,
                 Slot::new(z_m_out, "z_m_out")?,
             )
         };
@@ -40,6 +43,7 @@ pub unsafe extern "C" fn bc_response_stress(
         };
         value_out.put(extreme.value.si());
         at_out.put(extreme.at.si());
+        y_out.put(extreme.y.si());
         z_out.put(extreme.z.si());
         Ok(())
     })

@@ -256,5 +256,11 @@ pub fn convert(value: f64, from_unit: &str, to_unit: &str) -> Result<f64> {
     Ok(result)
 }
 
+mod concrete;
+
+pub use concrete::{
+    concrete_mean_modulus, concrete_modulus_at_age, concrete_shrinkage, concrete_strength_share,
+};
+
 #[cfg(test)]
 mod tests;

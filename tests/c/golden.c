@@ -79,6 +79,7 @@ int main(int count, char **arguments) {
         two_span();
         slab_strip();
         roof_beam();
+        odd_section();
         return EXIT_SUCCESS;
     }
     if (count == 3 && strcmp(arguments[1], "job") == 0) {

@@ -178,6 +178,7 @@ int main(int count, char **arguments) {
             two_span();
             slab_strip();
             roof_beam();
+            odd_section();
             return 0;
         }
         std::cerr << "usage: golden job FOLDER | golden typed\n";

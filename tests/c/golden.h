@@ -21,5 +21,6 @@ void flitch(void);
 void two_span(void);
 void slab_strip(void);
 void roof_beam(void);
+void odd_section(void);
 
 #endif

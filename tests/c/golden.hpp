@@ -1,4 +1,4 @@
-// What the two files of the golden runner in C++ share.
+// What the files of the golden runner in C++ share.
 #ifndef GOLDEN_HPP
 #define GOLDEN_HPP
 
@@ -7,7 +7,8 @@
 // Prints a line of the answer.
 void put(const std::string &name, const std::string &path, double value);
 
-// A case of the typed way in a file of its own.
+// The cases of the typed way in files of their own.
 void roof_beam();
+void odd_section();
 
 #endif

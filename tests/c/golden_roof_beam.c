@@ -77,7 +77,7 @@ static bc_member *make_member(void) {
 static void put_fields(const bc_response *r, const char *combination, int32_t time) {
     static const char *const supports[] = {"left", "right"};
     char base[100], path[300];
-    double value, at, z;
+    double value, at, y, z;
     snprintf(base, sizeof base, "combinations[\"%s\"].%s", combination,
              time == BC_TIME_INITIAL ? "initial" : "final");
     must(bc_response_extreme(r, BC_FIELD_DEFLECTION, combination, time, BC_EXTREME_GREATEST, &value,
@@ -95,7 +95,8 @@ static void put_fields(const bc_response *r, const char *combination, int32_t ti
         snprintf(path, sizeof path, "%s.reactions[\"%s\"].force_N", base, supports[i]);
         put(CASE, path, value);
     }
-    must(bc_response_stress(r, combination, time, "beam", BC_STRESS_TENSION, &value, &at, &z));
+    must(bc_response_stress(r, combination, time, "beam", BC_STRESS_TENSION, &value, &at, &y,
+                            &z));
     snprintf(path, sizeof path, "%s.stresses[\"beam\"].tension.value_Pa", base);
     put(CASE, path, value);
     must(bc_response_span_extreme(r, combination, time, SPAN, BC_EXTREME_GREATEST, &value, &at));

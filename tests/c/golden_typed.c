@@ -57,13 +57,13 @@ static void put_combination(const struct golden *g, const char *combination, int
         put(g->name, path, couple);
     }
     for (int i = 0; g->parts[i] != NULL; ++i) {
-        double value, at, z;
+        double value, at, y, z;
         must(bc_response_stress(g->response, combination, time, g->parts[i], BC_STRESS_TENSION,
-                                &value, &at, &z));
+                                &value, &at, &y, &z));
         snprintf(path, sizeof path, "%s.stresses[\"%s\"].tension.value_Pa", base, g->parts[i]);
         put(g->name, path, value);
         must(bc_response_stress(g->response, combination, time, g->parts[i], BC_STRESS_COMPRESSION,
-                                &value, &at, &z));
+                                &value, &at, &y, &z));
         snprintf(path, sizeof path, "%s.stresses[\"%s\"].compression.value_Pa", base, g->parts[i]);
         put(g->name, path, value);
     }

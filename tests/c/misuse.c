@@ -7,7 +7,7 @@ static bc_section *section;
 static bc_action *load;
 static bc_member *member;
 static bc_response *response;
-static double a, b, c;
+static double a, b, c, d;
 static int32_t n;
 static int64_t length;
 
@@ -113,7 +113,7 @@ static void choices(void) {
     NO_CHOICE(bc_response_extreme(response, 1, pm, 3, 1, &a, &b), "time");
     NO_CHOICE(bc_response_extreme(response, 1, pm, 1, INT32_MIN, &a, &b), "extreme");
     NO_CHOICE(bc_response_values(response, 1, pm, 1, 3, at, 1, &a), "side");
-    NO_CHOICE(bc_response_stress(response, pm, 1, "joist", 0, &a, &b, &c), "sign");
+    NO_CHOICE(bc_response_stress(response, pm, 1, "joist", 0, &a, &b, &c, &d), "sign");
     NO_CHOICE(bc_response_stress_values(response, pm, 1, "joist", 0, 1, at, 1, &a), "fibre");
     NO_CHOICE(bc_camber_new(response, 1, pm, 1, 1.0, "left", "right", 0.001, 0, 0, 4, &k),
               "rounding");

@@ -4,6 +4,7 @@
 
 #include "../beamcore_units.hpp"
 #include "handle.hpp"
+#include "strength.hpp"
 
 namespace beamcore {
 
@@ -68,6 +69,114 @@ public:
         });
     }
 
+    // The same material with a design shear strength, as f_v,d of timber.
+    Material shear_strength(Stress shear) const {
+        return with(bc_material_with_shear_strength, shear.si());
+    }
+
+    // The same material with characteristic strengths; stresses are compared with design
+    // strengths only, which need design factors.
+    Material characteristic_strength(const TimberStrength &s) const {
+        const double m = s.bending.si(), t = s.tension.si(), c = s.compression.si();
+        return changed([&](bc_material **out) {
+            return s.across.has_value()
+                       ? bc_material_with_characteristic_timber_across(
+                             get(), m, t, c, s.shear.si(), s.across->tension.si(),
+                             s.across->compression.si(), out)
+                       : bc_material_with_characteristic_timber(get(), m, t, c, s.shear.si(), out);
+        });
+    }
+    Material characteristic_strength(const MetalStrength &s) const {
+        return changed([&](bc_material **out) {
+            return s.ultimate.has_value()
+                       ? bc_material_with_characteristic_metal_ultimate(get(), s.yield.si(),
+                                                                        s.ultimate->si(), out)
+                       : bc_material_with_characteristic_metal(get(), s.yield.si(), out);
+        });
+    }
+
+    // The same material with the factors that make design strengths of the characteristic ones.
+    Material design_factors(const TimberFactors &factors) const {
+        return changed([&](bc_material **out) {
+            return bc_material_with_timber_factors(get(), factors.k_mod, factors.gamma_m,
+                                                   factors.k_h, factors.k_sys, out);
+        });
+    }
+    Material design_factors(const MetalFactor &factor) const {
+        return with(bc_material_with_metal_factor, factor.gamma_m);
+    }
+
+    // The same material with another mean modulus E, fractile E_05, shear modulus G, Poisson's
+    // ratio (not for timber), fractile of the density rho_k, thermal expansion or creep factor.
+    Material modulus_override(Modulus modulus) const {
+        return with(bc_material_with_modulus, modulus.si());
+    }
+    Material fractile_modulus(Modulus modulus) const {
+        return with(bc_material_with_fractile_modulus, modulus.si());
+    }
+    Material shear_modulus(Modulus modulus) const {
+        return with(bc_material_with_shear_modulus, modulus.si());
+    }
+    Material poisson_ratio(double ratio) const {
+        return with(bc_material_with_poisson_ratio, ratio);
+    }
+    Material fractile_density(Density density) const {
+        return with(bc_material_with_fractile_density, density.si());
+    }
+    Material thermal_expansion(ThermalExpansion expansion) const {
+        return with(bc_material_with_thermal_expansion, expansion.si());
+    }
+    Material creep_override(double creep_factor) const {
+        return with(bc_material_with_creep_factor, creep_factor);
+    }
+
+    // A strength, if it is known.
+    std::optional<Stress> strength(Strength strength) const {
+        return known<Stress>([&](std::int32_t *has_value, double *out) {
+            return bc_material_strength(get(), detail::code(strength), has_value, out);
+        });
+    }
+
+    // The shear modulus at a time: G at first, G/(1 + creep factor) at the end; if it is known.
+    std::optional<Modulus> shear_modulus_at(Time time) const {
+        return known<Modulus>([&](std::int32_t *has_value, double *out) {
+            return bc_material_shear_modulus(get(), detail::code(time), has_value, out);
+        });
+    }
+
+    // The fractile E_05, Poisson's ratio, the mean density, its fractile rho_k and the thermal
+    // expansion, if they are known.
+    std::optional<Modulus> modulus_05() const {
+        return value<Modulus>(bc_material_fractile_modulus);
+    }
+    std::optional<double> poisson() const {
+        std::int32_t has_value = 0;
+        double ratio = 0.0;
+        detail::check(bc_material_poisson_ratio(get(), &has_value, &ratio));
+        return has_value != 0 ? std::optional(ratio) : std::nullopt;
+    }
+    std::optional<Density> mean_density() const { return value<Density>(bc_material_density); }
+    std::optional<Density> density_05() const {
+        return value<Density>(bc_material_fractile_density);
+    }
+    std::optional<ThermalExpansion> expansion() const {
+        return value<ThermalExpansion>(bc_material_thermal_expansion);
+    }
+
+    // The creep factor, 0 for no creep, and where it comes from.
+    double creep_factor() const {
+        return detail::number([&](double *out) { return bc_material_creep_factor(get(), out); });
+    }
+    std::string creep_basis() const { return detail::name(get(), bc_material_creep_basis); }
+
+    // The standard, edition and class that the values come from; an empty text without a class.
+    std::string origin() const { return detail::name(get(), bc_material_origin); }
+
+    // The values of the class that were overridden, as in "density 450 kg/m3 instead of 420 kg/m3".
+    std::vector<std::string> overrides() const {
+        return detail::texts(get(), bc_material_override_count, bc_material_override);
+    }
+
     // The modulus at a time: E at first, E/(1 + creep factor) at the end.
     Modulus modulus_at(Time time) const {
         return Modulus::from_si(detail::number([&](double *out) {
@@ -85,6 +194,24 @@ private:
         return Material(detail::make<bc_material>(bc_material_free, call));
     }
 
+    // The same material changed by one number.
+    template <class Call> Material with(Call call, double number) const {
+        return changed([&](bc_material **out) { return call(get(), number, out); });
+    }
+
+    template <class Q, class Call> static std::optional<Q> known(Call call) {
+        std::int32_t has_value = 0;
+        double value = 0.0;
+        detail::check(call(&has_value, &value));
+        return has_value != 0 ? std::optional(Q::from_si(value)) : std::nullopt;
+    }
+
+    template <class Q, class Get> std::optional<Q> value(Get get_value) const {
+        return known<Q>([&](std::int32_t *has_value, double *out) {
+            return get_value(get(), has_value, out);
+        });
+    }
+
     detail::Shared<bc_material> handle_;
 };
 
@@ -100,6 +227,22 @@ inline Material timber(const std::string &class_name, ServiceClass service_class
 inline Material steel(const std::string &class_name) {
     return Material(detail::make<bc_material>(bc_material_free, [&](bc_material **out) {
         return bc_material_steel(detail::c_text(class_name, "class_name"), out);
+    }));
+}
+
+// Structural steel of a class with the characteristic strengths of a nominal thickness.
+inline Material steel_of_thickness(const std::string &class_name, Length thickness) {
+    return Material(detail::make<bc_material>(bc_material_free, [&](bc_material **out) {
+        return bc_material_steel_of_thickness(detail::c_text(class_name, "class_name"),
+                                              thickness.si(), out);
+    }));
+}
+
+// Aluminium of an alloy and temper ("EN AW-6082 T6") as an extruded profile of a thickness.
+inline Material aluminium(const std::string &alloy_and_temper, Length thickness) {
+    return Material(detail::make<bc_material>(bc_material_free, [&](bc_material **out) {
+        return bc_material_aluminium(detail::c_text(alloy_and_temper, "class_name"),
+                                     thickness.si(), out);
     }));
 }
 

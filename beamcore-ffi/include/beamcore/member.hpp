@@ -96,6 +96,12 @@ public:
             detail::number([&](double *out) { return bc_member_length(get(), out); }));
     }
 
+    // Whether the member is held sideways or free.
+    Sideways sideways() const {
+        return static_cast<Sideways>(detail::count(
+            [&](std::int32_t *out) { return bc_member_sideways(get(), out); }));
+    }
+
     // The combinations of the actions, each with its factors.
     std::vector<Combination> combinations() const {
         std::vector<Combination> list;

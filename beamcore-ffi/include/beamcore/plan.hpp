@@ -58,6 +58,13 @@ public:
         });
     }
 
+    // The same plan of a member that is held sideways or free to move; without this it is held.
+    MemberPlan sideways(Sideways sideways) const {
+        return made([&](bc_plan **out) {
+            return bc_plan_with_sideways(get(), detail::code(sideways), out);
+        });
+    }
+
     // Checks the plan; all that is wrong is reported at once.
     Member check() const {
         return Member(detail::make<bc_member>(

@@ -43,6 +43,23 @@ public:
         return field<Moment>(BC_FIELD_MOMENT, combination, time);
     }
 
+    // The movement sideways, positive towards positive y; zero unless the member is free sideways
+    // and its section has no axis of symmetry.
+    Field<Length> sideways(const std::string &combination, Time time) const {
+        detail::c_text(combination, "combination");
+        const auto response = handle_;
+        // A movement has one value at each place, whatever the side.
+        return Field<Length>(
+            [=](std::int32_t, const double *x_m, std::int32_t count, double *out) {
+                return bc_response_sideways_values(response.get(), combination.c_str(),
+                                                   detail::code(time), x_m, count, out);
+            },
+            [=](std::int32_t extreme, double *value, double *at) {
+                return bc_response_sideways_extreme(response.get(), combination.c_str(),
+                                                    detail::code(time), extreme, value, at);
+            });
+    }
+
     // The deflection of one span: between two supports from the chord through them, of an overhang
     // from its support.
     Field<Length> span_deflection(const std::string &combination, Time time,

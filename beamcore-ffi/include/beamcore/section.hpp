@@ -1,68 +1,13 @@
-// Parts and sections.
+// Sections.
 #ifndef BEAMCORE_SECTION_HPP
 #define BEAMCORE_SECTION_HPP
 
-#include "material.hpp"
+#include "part.hpp"
 
 #include <initializer_list>
 #include <optional>
 
 namespace beamcore {
-
-// The outline of a part: width along y, height along z.
-struct Outline {
-    Length width;
-    Length height;
-};
-
-// A rectangle of the given width and height.
-constexpr Outline rectangle(Length width, Length height) { return Outline{width, height}; }
-
-// One piece of one material, with a name that addresses its results.
-class Part {
-public:
-    // A part with the middle of its outline at y = 0, z = 0. Checked when used in a section.
-    Part(const std::string &name, Outline outline, const Material &material)
-        : handle_(detail::make<bc_part>(bc_part_free, [&](bc_part **out) {
-              return bc_part_rectangle(detail::c_text(name, "name"), outline.width.si(),
-                                       outline.height.si(), material.get(), out);
-          })) {}
-
-    // The same part with the middle of its outline at (y, z).
-    Part at(Length y, Length z) const {
-        return changed([&](bc_part **out) { return bc_part_at(get(), y.si(), z.si(), out); });
-    }
-
-    // The same part touching another one, given by itself or by its name.
-    Part left_of(const std::string &other) const { return beside(BC_PLACE_LEFT_OF, other); }
-    Part left_of(const Part &other) const { return left_of(other.name()); }
-    Part right_of(const std::string &other) const { return beside(BC_PLACE_RIGHT_OF, other); }
-    Part right_of(const Part &other) const { return right_of(other.name()); }
-    Part above(const std::string &other) const { return beside(BC_PLACE_ABOVE, other); }
-    Part above(const Part &other) const { return above(other.name()); }
-    Part below(const std::string &other) const { return beside(BC_PLACE_BELOW, other); }
-    Part below(const Part &other) const { return below(other.name()); }
-
-    std::string name() const { return detail::name(get(), bc_part_name); }
-
-    // The handle of the C ABI; it lives as long as this object or a copy of it.
-    const bc_part *get() const { return handle_.get(); }
-
-private:
-    explicit Part(detail::Shared<bc_part> handle) : handle_(std::move(handle)) {}
-
-    template <class Call> static Part changed(Call call) {
-        return Part(detail::make<bc_part>(bc_part_free, call));
-    }
-
-    Part beside(std::int32_t place, const std::string &other) const {
-        return changed([&](bc_part **out) {
-            return bc_part_beside(get(), place, detail::c_text(other, "other_name"), out);
-        });
-    }
-
-    detail::Shared<bc_part> handle_;
-};
 
 // EA, the elastic centroid, and EI about the axes through it: yy about the horizontal one, zz
 // about the upright one, yz the mixed term.
@@ -88,6 +33,44 @@ struct PartEdges {
     Length bottom;
     Length top;
     Area area;
+};
+
+// The principal bending stiffnesses.
+struct Principal {
+    BendingStiffness greater;
+    BendingStiffness smaller;
+    // From the level axis to the axis of the greater one, positive from y towards z.
+    Angle angle;
+};
+
+// Forces on a section.
+struct SectionForces {
+    // Tension positive.
+    Force axial;
+    // About the level axis, positive where it stretches the bottom.
+    Moment moment_y;
+    // About the upright axis, positive where it stretches the side of negative y.
+    Moment moment_z;
+};
+
+// Whether a section may move sideways.
+enum class Sideways : std::int32_t {
+    // Held, as by a floor: it bends about the level axis only.
+    held = BC_SIDEWAYS_HELD,
+    // Free: it also bends about the upright axis where it has no axis of symmetry.
+    free = BC_SIDEWAYS_FREE,
+};
+
+// A stress at a point of a section, tension positive.
+struct PointStress {
+    Stress value;
+    Point at;
+};
+
+// The algebraically greatest and least stress in a part.
+struct StressRange {
+    PointStress greatest;
+    PointStress least;
 };
 
 class TransformedSection;
@@ -116,6 +99,40 @@ public:
         return Stiffness{AxialStiffness::from_si(ea),   Length::from_si(y),
                          Length::from_si(z),            BendingStiffness::from_si(yy),
                          BendingStiffness::from_si(zz), BendingStiffness::from_si(yz)};
+    }
+
+    // The principal bending stiffnesses at a time.
+    Principal principal(Time time) const {
+        double greater = 0.0, smaller = 0.0, angle = 0.0;
+        detail::check(
+            bc_section_principal(get(), detail::code(time), &greater, &smaller, &angle));
+        return Principal{BendingStiffness::from_si(greater), BendingStiffness::from_si(smaller),
+                         Angle::from_si(angle)};
+    }
+
+    // The stress in a part at a point of it under section forces.
+    Stress stress_at(const std::string &part, Point point, const SectionForces &forces,
+                     Sideways sideways, Time time) const {
+        return Stress::from_si(detail::number([&](double *out) {
+            return bc_section_stress_at(get(), detail::code(time), detail::code(sideways),
+                                        detail::c_text(part, "part"), point.y.si(), point.z.si(),
+                                        forces.axial.si(), forces.moment_y.si(),
+                                        forces.moment_z.si(), out);
+        }));
+    }
+
+    // The greatest and the least stress in a part under section forces, with their points.
+    StressRange stress_extremes(const std::string &part, const SectionForces &forces,
+                                Sideways sideways, Time time) const {
+        const auto extreme = [&](std::int32_t sign) {
+            double value = 0.0, y = 0.0, z = 0.0;
+            detail::check(bc_section_stress_extreme(
+                get(), detail::code(time), detail::code(sideways), detail::c_text(part, "part"),
+                forces.axial.si(), forces.moment_y.si(), forces.moment_z.si(), sign, &value, &y,
+                &z));
+            return PointStress{Stress::from_si(value), {Length::from_si(y), Length::from_si(z)}};
+        };
+        return StressRange{extreme(BC_STRESS_TENSION), extreme(BC_STRESS_COMPRESSION)};
     }
 
     // The modulus of a part at a time and its share in EI_yy.

@@ -6,10 +6,12 @@
 
 namespace beamcore {
 
-// A greatest stress, tension positive, with its place along the member and over the height.
+// A greatest stress, tension positive, with its place along the member and its point of the
+// section; y is the middle of the part where the member is held sideways.
 struct StressExtreme {
     Stress value;
     Length at;
+    Length y;
     Length z;
 };
 
@@ -55,11 +57,12 @@ public:
 
 private:
     StressExtreme extreme(std::int32_t sign) const {
-        double value = 0.0, at = 0.0, z = 0.0;
+        double value = 0.0, at = 0.0, y = 0.0, z = 0.0;
         detail::check(bc_response_stress(response_.get(), combination_.c_str(),
                                          detail::code(time_), part_.c_str(), sign, &value, &at,
-                                         &z));
-        return StressExtreme{Stress::from_si(value), Length::from_si(at), Length::from_si(z)};
+                                         &y, &z));
+        return StressExtreme{Stress::from_si(value), Length::from_si(at), Length::from_si(y),
+                             Length::from_si(z)};
     }
 
     FibreStress fibre(std::int32_t fibre) const {

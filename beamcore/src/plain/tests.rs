@@ -77,4 +77,13 @@ fn the_rest_forwards() {
     // As in the tests of the concrete room.
     let phi = concrete_creep(38e6, 50.0, 0.15, 28.0 * day, 18250.0 * day, Cement::N).unwrap();
     assert!((phi - 2.4542).abs() <= 0.5e-4);
+    let modulus = concrete_mean_modulus(33e6).unwrap();
+    assert!((modulus - 31.476e9).abs() < 0.5e6);
+    let young = concrete_modulus_at_age(33e9, 3.0 * day, Cement::N).unwrap();
+    assert!((young - 28.286e9).abs() < 0.5e6);
+    let share = concrete_strength_share(3.0 * day, Cement::N).unwrap();
+    assert!((33e9 * libm::pow(share, 0.3) - young).abs() <= 1e-12 * young);
+    let years = 50.0 * 365.25 * day;
+    let shrinkage = concrete_shrinkage(38e6, 50.0, 0.15, 3.0 * day, years, Cement::N).unwrap();
+    assert!((shrinkage - 0.49e-3).abs() < 0.005e-3);
 }
