@@ -210,6 +210,7 @@ def handbook() -> list[Case]:
     g.exact(f"{at}.deflection.greatest.value_m", q * l**4 / (8 * ei))
     g.exact(f"{at}.slope.greatest.value_rad", q * l**3 / (6 * ei))
     g.exact(f"{at}.moment.greatest.value_Nm", -q * l**2 / 2)
+    g.exact(f'{at}.reactions["wall"].force_N', q * l)
 
     q = F(3000)
     h = case("cantilever-triangular", "AISC Manual Table 3-23 case 18; Roark Table 8.1 case 2a with "
@@ -217,6 +218,7 @@ def handbook() -> list[Case]:
     h.exact(f"{at}.deflection.greatest.value_m", q * l**4 / (30 * ei))
     h.exact(f"{at}.moment.greatest.value_Nm", -q * l**2 / 6)
     h.exact(f"{at}.shear.greatest.value_N", q * l / 2)
+    h.exact(f'{at}.reactions["wall"].couple_Nm', -q * l**2 / 6)
 
     l, p = F(5), F(8000)
     i = case("fixed-central", "AISC Manual Table 3-23 case 16; Roark Table 8.1 case 1d",
@@ -224,6 +226,7 @@ def handbook() -> list[Case]:
     i.exact(f"{at}.deflection.greatest.value_m", p * l**3 / (192 * ei))
     i.exact(f"{at}.moment.maximum.value_Nm", p * l / 8)
     i.exact(f"{at}.moment.minimum.value_Nm", -p * l / 8)
+    i.exact(f'{at}.reactions["right"].couple_Nm', p * l / 8)
 
     l, m = F(4), F(3000)
     j = case("end-couple", "Roark Table 8.1 case 3e with the couple at the end",
@@ -238,6 +241,7 @@ def handbook() -> list[Case]:
     k.exact(f"{at}.deflection.greatest.value_m", 23 * p * l**3 / (648 * ei))
     k.exact(f"{at}.deflection.greatest.at_m", l / 2)
     k.exact(f"{at}.moment.greatest.value_Nm", p * l / 3)
+    k.exact(f'{at}.reactions["left"].force_N', p)
     cases = [a, b, c, d, e, f, g, h, i, j, k]
     for made in cases:
         made.fields(made.supports, ["beam"])  # type: ignore[attr-defined]
