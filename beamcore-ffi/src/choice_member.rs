@@ -3,8 +3,8 @@
 use crate::choice::choice;
 use crate::fault::Fault;
 use beamcore::camber::Shape;
+use beamcore::limits::Component;
 use beamcore::member::{Category, CombinationKind};
-use beamcore::response::Component;
 
 /// Category A: homes.
 pub const BC_CATEGORY_DOMESTIC: i32 = 1;

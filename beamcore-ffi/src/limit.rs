@@ -4,7 +4,7 @@ use crate::choice_member;
 use crate::guard;
 use crate::handle::{self, Slot};
 use crate::text;
-use beamcore::response::{Allowed, Limit};
+use beamcore::limits::{Allowed, Limit};
 use beamcore::units::Length;
 use std::ffi::c_char;
 

@@ -7,7 +7,7 @@ use crate::handle::{self, Slot};
 use crate::limit::BcLimit;
 use crate::response::BcResponse;
 use crate::text::TextOut;
-use beamcore::response::{Limit, LimitCheck};
+use beamcore::limits::{Limit, LimitCheck};
 use std::ffi::c_char;
 
 /// Checks: limits compared with the results of a member.

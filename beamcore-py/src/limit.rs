@@ -7,7 +7,7 @@ use crate::made::{Made, Recipe, Reduced};
 use crate::operand::Number;
 use crate::quantity::Quantity;
 use crate::run::run;
-use beamcore::response::{self, Allowed, Component};
+use beamcore::limits::{self, Allowed, Component};
 use beamcore::{Problem, Result};
 use pyo3::exceptions::PyTypeError;
 use pyo3::prelude::*;
@@ -36,7 +36,7 @@ pub(crate) fn component(symbol: &str) -> Result<Component, Problem> {
 /// 35 mm
 #[pyclass(frozen, eq, module = "beamcore")]
 #[derive(Debug, PartialEq)]
-pub(crate) struct Limit(Made<response::Limit>);
+pub(crate) struct Limit(Made<limits::Limit>);
 
 #[pymethods]
 impl Limit {
@@ -72,14 +72,12 @@ impl Limit {
         keywords.set_item("combination", &combination)?;
         let recipe = Recipe::call(py, "Limit", (component,))?.with(&keywords);
         let part = inputs.checked(self::component(component));
-        let limit = part
-            .zip(allowed)
-            .map(|(component, allowed)| response::Limit {
-                component,
-                allowed,
-                span,
-                combination,
-            });
+        let limit = part.zip(allowed).map(|(component, allowed)| limits::Limit {
+            component,
+            allowed,
+            span,
+            combination,
+        });
         Ok(Self(Made::new(inputs.done(py, limit)?, recipe)))
     }
 
@@ -147,7 +145,7 @@ record! {
 /// The limits compared with the results of a response.
 pub(crate) fn checks<'py>(
     py: Python<'py>,
-    response: &response::Response,
+    response: &beamcore::response::Response,
     limits: &[Py<Limit>],
     camber: Option<&Bound<'py, Camber>>,
 ) -> PyResult<Bound<'py, PyTuple>> {

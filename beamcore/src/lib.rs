@@ -35,6 +35,7 @@ mod error;
 pub mod field;
 #[cfg(feature = "document")]
 pub mod job;
+pub mod limits;
 mod lookup;
 pub mod material;
 mod math;

@@ -3,11 +3,12 @@
 use super::super::line;
 use beamcore::Result;
 use beamcore::camber::{CamberPlan, Rounding, Shape, Trestles};
+use beamcore::limits::{Allowed, Component, Limit};
 use beamcore::material::{ServiceClass, timber};
 use beamcore::member::{
     Action, ActionKind, Category, Load, Member, OwnCombination, PartialFactors, Support,
 };
-use beamcore::response::{Allowed, Component, Limit, Response};
+use beamcore::response::Response;
 use beamcore::section::{Part, Section, rectangle};
 use beamcore::time::Time;
 use beamcore::units::Number;

@@ -7,8 +7,8 @@ use super::document::{JobDocument, SidewaysDocument, SupportDocument, SupportKin
 use super::{lower_action, lower_camber, lower_material, lower_section};
 use crate::camber::{CamberPlan, Trestles};
 use crate::error::{Error, ErrorKind, Problem};
+use crate::limits::Limit;
 use crate::member::{self, Known, Member, Support, SupportKind};
-use crate::response::Limit;
 use crate::section::Sideways;
 
 /// What a document asks for, in the core's own types.

@@ -5,8 +5,8 @@ use super::document_camber::{
 };
 use crate::camber::{CamberPlan, Rounding, Shape, Trestles};
 use crate::error::{ErrorKind, Problem};
+use crate::limits::{Allowed, Component, Limit};
 use crate::path;
-use crate::response::{Allowed, Component, Limit};
 use crate::time::Time;
 use crate::units::Length;
 

@@ -56,8 +56,8 @@ pub(crate) use reader::{Step, steps};
 
 use crate::camber::{CamberPlan, Trestles};
 use crate::error::{Error, ErrorKind, Problem, Result};
+use crate::limits::Limit;
 use crate::member::Member;
-use crate::response::Limit;
 use lower::Lowered;
 use reader::{Node, NodeValue};
 use std::path::Path;

@@ -7,8 +7,9 @@ use super::document_deflection::{
 use super::extremes::LengthExtreme;
 use crate::camber::{Camber, Reading, Trestles};
 use crate::error::Result;
+use crate::limits::{Component, Limit, LimitCheck};
 use crate::member::{Combination, CombinationKind, Span};
-use crate::response::{Component, Limit, LimitCheck, Response};
+use crate::response::Response;
 use crate::time::Time;
 
 /// The components under each characteristic combination, span by span.

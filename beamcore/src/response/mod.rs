@@ -1,11 +1,6 @@
 //! The response of a member: deflection, slope, shear force, moment and reactions along x.
 
-mod components;
-mod limits;
 mod share;
-
-pub use components::Component;
-pub use limits::{Allowed, Limit, LimitCheck};
 
 use crate::error::{Error, Result};
 use crate::field::{Field, Piecewise};

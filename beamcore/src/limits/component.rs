@@ -1,9 +1,9 @@
 //! The parts of a deflection by EN 1990:2002 A1.4.3, and their limits.
 
-use super::Response;
 use crate::camber::Camber;
 use crate::error::Result;
 use crate::field::{Field, Piecewise};
+use crate::response::Response;
 use crate::time::Time;
 use crate::units::Length;
 

@@ -1,6 +1,6 @@
 //! Limits of the deflection, and how far they are used.
 
-use super::{Component, Response};
+use super::Component;
 use crate::camber::Camber;
 use crate::check;
 use crate::error::{Error, ErrorKind, Problem, Result};
@@ -8,6 +8,7 @@ use crate::field::Extreme;
 use crate::lookup;
 use crate::member::{Combination, CombinationKind, Span};
 use crate::path;
+use crate::response::Response;
 use crate::units::Length;
 
 /// A limit of a component of the deflection.
