@@ -153,6 +153,7 @@ fn the_test_programs_in_c_pass() {
         "materials",
         "outlines",
         "sections",
+        "strains",
         "members",
         "plans",
         "limits",
@@ -192,6 +193,7 @@ fn golden_answers_have_the_bits_of_rust() {
                 "tests/c/golden_typed.c",
                 "tests/c/golden_roof_beam.c",
                 "tests/c/golden_odd_section.c",
+                "tests/c/golden_shrinking_slab.c",
             ][..],
         ),
         (
@@ -200,6 +202,7 @@ fn golden_answers_have_the_bits_of_rust() {
                 "tests/c/golden.cpp",
                 "tests/c/golden_roof_beam.cpp",
                 "tests/c/golden_odd_section.cpp",
+                "tests/c/golden_shrinking_slab.cpp",
             ][..],
         ),
     ] {

@@ -255,6 +255,21 @@
 // Category: temperature, not fire.
 #define BC_CATEGORY_TEMPERATURE 12
 
+// Duration of an action: more than ten years.
+#define BC_DURATION_PERMANENT 1
+
+// Duration of an action: six months to ten years.
+#define BC_DURATION_LONG 2
+
+// Duration of an action: a week to six months.
+#define BC_DURATION_MEDIUM 3
+
+// Duration of an action: less than a week.
+#define BC_DURATION_SHORT 4
+
+// Duration of an action: moments.
+#define BC_DURATION_INSTANTANEOUS 5
+
 // Combination: permanent actions only.
 #define BC_COMBINATION_PERMANENT 1
 
@@ -916,6 +931,36 @@ int32_t bc_section_stress_extreme(const bc_section *section,
                                   double *y_m_out,
                                   double *z_m_out);
 
+// The same part with an initial strain, which it bears from the first day: about its own centroid
+// (y_i, z_i), axial_strain - curvature_y (z - z_i) - curvature_z (y - y_i), positive where the part
+// alone would grow longer; shrinkage is negative. axial_strain is a ratio: 0.001 is 1 mm in 1 m.
+// The values are checked when the part is used in a section.
+int32_t bc_part_with_initial_strain(const bc_part *part,
+                                    double axial_strain,
+                                    double curvature_y_per_m,
+                                    double curvature_z_per_m,
+                                    bc_part **part_out);
+
+// The initial strain that a part bears, as bc_part_with_initial_strain takes it; zeros where none
+// was given. Of a mirror image it is mirrored too.
+int32_t bc_section_part_initial_strain(const bc_section *section,
+                                       const char *part,
+                                       double *axial_strain_out,
+                                       double *curvature_y_per_m_out,
+                                       double *curvature_z_per_m_out);
+
+// The plane of strain that a section takes freely at a time under the initial strains of its
+// parts: the strain at the elastic centroid (a ratio), the curvature about the level axis, positive
+// where the bottom grows longer than the top, and about the upright axis, positive where the side
+// of negative y grows longer. A section that is held sideways (BC_SIDEWAYS_...) bends about the
+// level axis only.
+int32_t bc_section_free_plane(const bc_section *section,
+                              int32_t time,
+                              int32_t sideways,
+                              double *axial_strain_out,
+                              double *curvature_y_per_m_out,
+                              double *curvature_z_per_m_out);
+
 // The section at a time as if made of one of its materials: the modulus of that material, and
 // area, centroid and second moment of area about the horizontal axis of the transformed section.
 int32_t bc_section_transformed(const bc_section *section,
@@ -943,6 +988,33 @@ int32_t bc_section_transformed_stress(const bc_section *section,
                                       double z_m,
                                       double moment_Nm,
                                       double *stress_Pa_out);
+
+// The number of loops of the outline of a part of the transformed section.
+int32_t bc_section_transformed_loop_count(const bc_section *section,
+                                          int32_t time,
+                                          const char *material,
+                                          const char *part,
+                                          int32_t *count_out);
+
+// The number of corners of a loop. Loops are counted from 0.
+int32_t bc_section_transformed_corner_count(const bc_section *section,
+                                            int32_t time,
+                                            const char *material,
+                                            const char *part,
+                                            int32_t index,
+                                            int32_t *count_out);
+
+// The corners (y, z) of a loop: widths are multiplied about the part's own centroid, arcs are given
+// by chords of at most 12 degrees. The places must have room for capacity numbers each; less room
+// than there are corners is BC_ERROR_COUNT.
+int32_t bc_section_transformed_corners(const bc_section *section,
+                                       int32_t time,
+                                       const char *material,
+                                       const char *part,
+                                       int32_t index,
+                                       int32_t capacity,
+                                       double *y_m_out,
+                                       double *z_m_out);
 
 // The category (BC_CATEGORY_...) of a word of documents: "A" to "H", "snow", "snow_high", "wind"
 // or "temperature".
@@ -1035,6 +1107,23 @@ int32_t bc_action_name(const bc_action *action,
 
 // Frees an action; NULL is allowed.
 void bc_action_free(bc_action *action);
+
+// The same action with its duration (BC_DURATION_...), by which the engineer chooses k_mod. It is
+// kept with the action; no result depends on it.
+int32_t bc_action_with_duration(const bc_action *action, int32_t duration, bc_action **action_out);
+
+// The same action with its start, counted from the first day of the member. It is kept with the
+// action; the final state takes the creep of the whole life. The value is checked when the action
+// is used in a member.
+int32_t bc_action_starting(const bc_action *action, double start_s, bc_action **action_out);
+
+// The duration of an action (BC_DURATION_...). Where it was not said, has_value_out is 0 and the
+// duration is left as it is.
+int32_t bc_action_duration(const bc_action *action, int32_t *has_value_out, int32_t *duration_out);
+
+// The start of an action, counted from the first day of the member. Where it was not said,
+// has_value_out is 0 and the start is left as it is.
+int32_t bc_action_start(const bc_action *action, int32_t *has_value_out, double *start_s_out);
 
 // A plan of a member of the given length, without supports yet.
 int32_t bc_plan_of_length(const bc_section *section, double length_m, bc_plan **plan_out);

@@ -94,7 +94,7 @@ pub unsafe extern "C" fn bc_action_favourable(
 ///
 /// # Safety
 /// As for the functions of the ABI.
-unsafe fn changed(
+pub(crate) unsafe fn changed(
     action: *const BcAction,
     action_out: *mut *mut BcAction,
     change: impl FnOnce(Action) -> Action,

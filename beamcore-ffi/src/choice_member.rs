@@ -1,10 +1,10 @@
-//! Choices that cross as `int32_t`: categories, combinations, components, shapes.
+//! Choices that cross as `int32_t`: categories, durations, combinations, components, shapes.
 
 use crate::choice::choice;
 use crate::fault::Fault;
 use beamcore::camber::Shape;
+use beamcore::member::{Category, CombinationKind, LoadDuration};
 use beamcore::limits::Component;
-use beamcore::member::{Category, CombinationKind};
 
 /// Category A: homes.
 pub const BC_CATEGORY_DOMESTIC: i32 = 1;
@@ -30,6 +30,17 @@ pub const BC_CATEGORY_SNOW_HIGH: i32 = 10;
 pub const BC_CATEGORY_WIND: i32 = 11;
 /// Category: temperature, not fire.
 pub const BC_CATEGORY_TEMPERATURE: i32 = 12;
+
+/// Duration of an action: more than ten years.
+pub const BC_DURATION_PERMANENT: i32 = 1;
+/// Duration of an action: six months to ten years.
+pub const BC_DURATION_LONG: i32 = 2;
+/// Duration of an action: a week to six months.
+pub const BC_DURATION_MEDIUM: i32 = 3;
+/// Duration of an action: less than a week.
+pub const BC_DURATION_SHORT: i32 = 4;
+/// Duration of an action: moments.
+pub const BC_DURATION_INSTANTANEOUS: i32 = 5;
 
 /// Combination: permanent actions only.
 pub const BC_COMBINATION_PERMANENT: i32 = 1;
@@ -89,6 +100,19 @@ choice!(
     SnowHigh = BC_CATEGORY_SNOW_HIGH,
     Wind = BC_CATEGORY_WIND,
     Temperature = BC_CATEGORY_TEMPERATURE
+);
+choice!(
+    duration,
+    duration_number,
+    LoadDuration,
+    "duration",
+    "BC_DURATION_PERMANENT, BC_DURATION_LONG, BC_DURATION_MEDIUM, BC_DURATION_SHORT, \
+     BC_DURATION_INSTANTANEOUS",
+    Permanent = BC_DURATION_PERMANENT,
+    Long = BC_DURATION_LONG,
+    Medium = BC_DURATION_MEDIUM,
+    Short = BC_DURATION_SHORT,
+    Instantaneous = BC_DURATION_INSTANTANEOUS
 );
 choice!(
     component,

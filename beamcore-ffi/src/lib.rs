@@ -50,11 +50,17 @@ pub mod section;
 
 pub mod plane;
 
+pub mod strain;
+
 pub mod transformed;
+
+pub mod transformed_outline;
 
 pub mod category;
 
 pub mod action;
+
+pub mod action_time;
 
 pub mod plan;
 

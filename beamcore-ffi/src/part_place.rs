@@ -14,7 +14,7 @@ use std::ffi::c_char;
 ///
 /// # Safety
 /// As for the functions of the ABI.
-unsafe fn changed(
+pub(crate) unsafe fn changed(
     part: *const BcPart,
     part_out: *mut *mut BcPart,
     change: impl FnOnce(Part) -> Result<Part, Fault>,

@@ -80,6 +80,7 @@ int main(int count, char **arguments) {
         slab_strip();
         roof_beam();
         odd_section();
+        shrinking_slab();
         return EXIT_SUCCESS;
     }
     if (count == 3 && strcmp(arguments[1], "job") == 0) {

@@ -179,6 +179,7 @@ int main(int count, char **arguments) {
             slab_strip();
             roof_beam();
             odd_section();
+            shrinking_slab();
             return 0;
         }
         std::cerr << "usage: golden job FOLDER | golden typed\n";

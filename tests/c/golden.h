@@ -22,5 +22,6 @@ void two_span(void);
 void slab_strip(void);
 void roof_beam(void);
 void odd_section(void);
+void shrinking_slab(void);
 
 #endif

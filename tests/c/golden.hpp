@@ -10,5 +10,6 @@ void put(const std::string &name, const std::string &path, double value);
 // The cases of the typed way in files of their own.
 void roof_beam();
 void odd_section();
+void shrinking_slab();
 
 #endif

@@ -1,4 +1,5 @@
-// The C++ wrapper: materials at full width, outlines, places, stresses at points, sideways freedom.
+// The C++ wrapper: materials at full width, outlines, places, stresses at points, sideways freedom,
+// initial strains, transformed outlines.
 #include <beamcore.hpp>
 
 #include "checks.h"
@@ -134,11 +135,54 @@ static void an_angle() {
     CHECK(extreme.y == range.least.at.y && extreme.z == range.least.at.z);
 }
 
+// Equal layers of one material, the lower one longer by d: kappa = 1.5 d/h. And what is kept with
+// actions.
+static void strains() {
+    const Material wood("wood", 10_GPa, 0.0);
+    const InitialStrain longer{Strain::from_permille(1.0)};
+    const Section section{Part{"lower", rectangle(10_mm, 5_mm), wood}.initial_strain(longer),
+                          Part{"upper", rectangle(10_mm, 5_mm), wood}.above("lower")};
+    const StrainPlane plane = section.free_plane(Time::initial, Sideways::held);
+    CHECK(std::fabs(plane.curvature_y.to_per_m() - 0.15) < 1e-12);
+    CHECK(near(plane.axial.to_permille(), 0.5) && plane.curvature_z.to_per_m() == 0.0);
+    CHECK(section.initial_strain("lower").axial == longer.axial);
+    CHECK(section.initial_strain("upper").axial == Strain::from_si(0.0));
+
+    const Action plain = permanent("load").uniform(1_N_per_m);
+    CHECK(!plain.load_duration().has_value() && !plain.start().has_value());
+    const Action late = plain.duration(LoadDuration::medium_term).starting(28_d);
+    CHECK(late.load_duration() == LoadDuration::medium_term && late.start() == 28_d);
+    try {
+        Member::simple_span(section, 1_m).action(late).sideways(Sideways::free).check();
+        CHECK(!"an initial strain in a member that is free sideways was accepted");
+    } catch (const InputError &error) {
+        CHECK(error.path() == "section.parts[\"lower\"].initial_strain");
+    }
+}
+
+// The corners of a steel rectangle as if of timber.
+static void transformed_outlines() {
+    const Section section{Part{"plate", rectangle(10_mm, 200_mm), steel("S275")},
+                          Part{"rod", ring(60_mm, 5_mm), steel("S275")}.right_of("plate"),
+                          Part{"joist", rectangle(40_mm, 200_mm), timber("C24", ServiceClass::one)}
+                              .left_of("plate")};
+    const TransformedSection timbered = section.transformed_to("C24", Time::initial);
+    const TransformedPart plate = timbered.part("plate");
+    CHECK(plate.loops.size() == 1 && plate.loops[0].size() == 4);
+    for (const Point &corner : plate.loops[0]) {
+        CHECK(near(std::fabs(corner.y.to_mm()), 5.0 * 210.0 / 11.0));
+        CHECK(near(std::fabs(corner.z.to_mm()), 100.0));
+    }
+    CHECK(timbered.part("rod").loops.size() == 2 && timbered.part("rod").loops[1].size() >= 30);
+}
+
 int main() {
     values_of_materials();
     strengths();
     concretes();
     outlines();
     an_angle();
+    strains();
+    transformed_outlines();
     return finish();
 }

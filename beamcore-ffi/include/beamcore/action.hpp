@@ -5,6 +5,8 @@
 #include "../beamcore_units.hpp"
 #include "handle.hpp"
 
+#include <optional>
+
 namespace beamcore {
 
 // The factors by which a variable action enters combinations.
@@ -43,6 +45,15 @@ inline CombinationFactors combination_factors(Category category) {
     detail::check(bc_category_factors(detail::code(category), &psi_0, &psi_1, &psi_2));
     return CombinationFactors{psi_0, psi_1, psi_2};
 }
+
+// How long an action acts at a time (EN 1995-1-1:2004 2.3.1.2, from memory).
+enum class LoadDuration : std::int32_t {
+    permanent = BC_DURATION_PERMANENT,         // more than ten years
+    long_term = BC_DURATION_LONG,              // six months to ten years
+    medium_term = BC_DURATION_MEDIUM,          // a week to six months
+    short_term = BC_DURATION_SHORT,            // less than a week
+    instantaneous = BC_DURATION_INSTANTANEOUS, // moments
+};
 
 // A named action: loads that act together, from one cause. Loads are positive downward.
 class Action {
@@ -106,6 +117,35 @@ public:
     // unfavourable.
     Action favourable() const {
         return made([&](bc_action **out) { return bc_action_favourable(get(), out); });
+    }
+
+    // The same action with its duration, by which the engineer chooses k_mod; no result depends on
+    // it.
+    Action duration(LoadDuration duration) const {
+        return made([&](bc_action **out) {
+            return bc_action_with_duration(get(), detail::code(duration), out);
+        });
+    }
+
+    // The same action with its start, counted from the first day of the member. It is kept with the
+    // action; the final state takes the creep of the whole life.
+    Action starting(Duration start) const {
+        return made([&](bc_action **out) { return bc_action_starting(get(), start.si(), out); });
+    }
+
+    // How long it acts at a time, if that was said.
+    std::optional<LoadDuration> load_duration() const {
+        std::int32_t has_value = 0, duration = 0;
+        detail::check(bc_action_duration(get(), &has_value, &duration));
+        return has_value != 0 ? std::optional(static_cast<LoadDuration>(duration)) : std::nullopt;
+    }
+
+    // When it starts, if that was said.
+    std::optional<Duration> start() const {
+        std::int32_t has_value = 0;
+        double start = 0.0;
+        detail::check(bc_action_start(get(), &has_value, &start));
+        return has_value != 0 ? std::optional(Duration::from_si(start)) : std::nullopt;
     }
 
     bool is_favourable() const {

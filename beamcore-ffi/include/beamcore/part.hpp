@@ -15,6 +15,18 @@ enum class MirrorAxis : std::int32_t {
     level = BC_MIRROR_LEVEL,
 };
 
+// The plane of strain that a part bears from the first day, about its own centroid (y_i, z_i):
+// axial - curvature_y (z - z_i) - curvature_z (y - y_i), positive where the part alone would grow
+// longer.
+struct InitialStrain {
+    // At the part's own centroid; shrinkage is negative.
+    Strain axial = Strain::from_si(0.0);
+    // About the level axis, positive where the bottom would grow longer than the top.
+    Curvature curvature_y = Curvature::from_si(0.0);
+    // About the upright axis, positive where the side of negative y would grow longer.
+    Curvature curvature_z = Curvature::from_si(0.0);
+};
+
 // One piece of one material, with a name that addresses its results.
 class Part {
 public:
@@ -66,6 +78,15 @@ public:
     Part line_mass(LineMass mass) const {
         return changed(
             [&](bc_part **out) { return bc_part_with_line_mass(get(), mass.si(), out); });
+    }
+
+    // The same part with an initial strain from the first day, which makes the section bend and its
+    // parts press on each other.
+    Part initial_strain(const InitialStrain &strain) const {
+        return changed([&](bc_part **out) {
+            return bc_part_with_initial_strain(get(), strain.axial.si(), strain.curvature_y.si(),
+                                               strain.curvature_z.si(), out);
+        });
     }
 
     std::string name() const { return detail::name(get(), bc_part_name); }

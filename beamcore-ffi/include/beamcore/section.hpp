@@ -73,6 +73,16 @@ struct StressRange {
     PointStress least;
 };
 
+// A plane of strain.
+struct StrainPlane {
+    // At the elastic centroid.
+    Strain axial;
+    // About the level axis, positive where the bottom grows longer than the top.
+    Curvature curvature_y;
+    // About the upright axis, positive where the side of negative y grows longer.
+    Curvature curvature_z;
+};
+
 class TransformedSection;
 
 // Parts joined rigidly, each at its place.
@@ -150,6 +160,22 @@ public:
                                             &bottom, &top, &area));
         return PartEdges{Length::from_si(left), Length::from_si(right), Length::from_si(bottom),
                          Length::from_si(top), Area::from_si(area)};
+    }
+
+    // The initial strain that a part bears; of a mirror image it is mirrored too.
+    InitialStrain initial_strain(const std::string &part) const {
+        double axial = 0.0, y = 0.0, z = 0.0;
+        detail::check(bc_section_part_initial_strain(get(), detail::c_text(part, "part"), &axial,
+                                                     &y, &z));
+        return InitialStrain{Strain::from_si(axial), Curvature::from_si(y), Curvature::from_si(z)};
+    }
+
+    // The plane of strain that the section takes freely under the initial strains of its parts.
+    StrainPlane free_plane(Time time, Sideways sideways) const {
+        double axial = 0.0, y = 0.0, z = 0.0;
+        detail::check(bc_section_free_plane(get(), detail::code(time), detail::code(sideways),
+                                            &axial, &y, &z));
+        return StrainPlane{Strain::from_si(axial), Curvature::from_si(y), Curvature::from_si(z)};
     }
 
     // Mass per length; nothing where a part has no density.

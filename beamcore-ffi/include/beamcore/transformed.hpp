@@ -10,6 +10,9 @@ namespace beamcore {
 struct TransformedPart {
     double ratio;
     Length width;
+    // The corners of the transformed outline, loop by loop, for drawing; arcs are given by chords
+    // of at most 12 degrees.
+    std::vector<std::vector<Point>> loops;
 };
 
 // A section as if made of one chosen material.
@@ -41,7 +44,15 @@ public:
         double ratio = 0.0, width = 0.0;
         detail::check(bc_section_transformed_part(section_.get(), time_, material_.c_str(),
                                                   detail::c_text(part, "part"), &ratio, &width));
-        return TransformedPart{ratio, Length::from_si(width)};
+        const std::int32_t count = detail::count([&](std::int32_t *out) {
+            return bc_section_transformed_loop_count(section_.get(), time_, material_.c_str(),
+                                                     part.c_str(), out);
+        });
+        std::vector<std::vector<Point>> loops;
+        for (std::int32_t index = 0; index < count; ++index) {
+            loops.push_back(corners(part, index));
+        }
+        return TransformedPart{ratio, Length::from_si(width), std::move(loops)};
     }
 
     // The stress in the real material of a part at height z under a moment (positive sagging),
@@ -55,6 +66,23 @@ public:
     }
 
 private:
+    // The corners of a loop of a part whose name was checked.
+    std::vector<Point> corners(const std::string &part, std::int32_t index) const {
+        const std::int32_t count = detail::count([&](std::int32_t *out) {
+            return bc_section_transformed_corner_count(section_.get(), time_, material_.c_str(),
+                                                       part.c_str(), index, out);
+        });
+        std::vector<double> y(static_cast<std::size_t>(count)), z(y.size());
+        detail::check(bc_section_transformed_corners(section_.get(), time_, material_.c_str(),
+                                                     part.c_str(), index, count, y.data(),
+                                                     z.data()));
+        std::vector<Point> list;
+        for (std::size_t i = 0; i < y.size(); ++i) {
+            list.push_back(Point{Length::from_si(y[i]), Length::from_si(z[i])});
+        }
+        return list;
+    }
+
     Section section_;
     std::string material_;
     std::int32_t time_;
