@@ -1,10 +1,14 @@
 //! The class `Action`.
 
+use crate::convert;
 use crate::error::OrRaise;
 use crate::load::Load;
 use crate::made::{Made, Recipe, Reduced};
 use crate::operand::Number;
+use crate::quantity::Quantity;
+use crate::word::LoadDuration;
 use beamcore::member::{self, ActionKind, Category, Effect};
+use beamcore::units::Duration;
 use pyo3::exceptions::PyTypeError;
 use pyo3::prelude::*;
 use pyo3::types::{PyDict, PyTuple};
@@ -26,11 +30,13 @@ record! {
 #[derive(Debug, PartialEq)]
 pub(crate) struct Action(pub(crate) Made<member::Action>);
 
-/// The name and the loads of an action, and whether it relieves.
+/// The name and the loads of an action, whether it relieves, and what else was said of it.
 struct Given<'a> {
     name: &'a str,
     loads: &'a [Py<Load>],
     favourable: bool,
+    duration: Option<member::LoadDuration>,
+    start: Option<Duration>,
 }
 
 impl Given<'_> {
@@ -49,13 +55,19 @@ impl Given<'_> {
                 .map(|load| load.bind(py).clone().into_any()),
         );
         keywords.set_item("favourable", self.favourable)?;
+        let mut action = member::Action::new(self.name, kind);
+        if self.favourable {
+            action = action.favourable();
+        }
+        if let Some(duration) = self.duration {
+            keywords.set_item("duration", duration.name())?;
+            action = action.duration(duration);
+        }
+        if let Some(start) = self.start {
+            keywords.set_item("start", Quantity::of(start))?;
+            action = action.starting(start);
+        }
         let recipe = Recipe::call(py, function, PyTuple::new(py, arguments)?)?.with(keywords);
-        let action = member::Action::new(self.name, kind);
-        let action = if self.favourable {
-            action.favourable()
-        } else {
-            action
-        };
         let loads = self.loads.iter().map(|load| load.get().0.inner);
         Ok(Action(Made::new(
             loads.fold(action, member::Action::load),
@@ -87,6 +99,18 @@ impl Action {
         self.0.effect() == Effect::Favourable
     }
 
+    /// How long it acts at a time, from "permanent" to "instantaneous"; None if that was not said.
+    #[getter]
+    fn duration(&self) -> Option<&'static str> {
+        self.0.load_duration().map(member::LoadDuration::name)
+    }
+
+    /// When it starts, counted from the first day of the member; None if that was not said.
+    #[getter]
+    fn start(&self) -> Option<Quantity> {
+        self.0.start().map(Quantity::of)
+    }
+
     /// The combination factors of a variable action; None for a permanent one.
     #[getter]
     fn factors(&self) -> Option<CombinationFactors> {
@@ -111,13 +135,20 @@ impl Action {
 
 /// An action that acts from the first day to the last.
 ///
-/// favourable: it relieves what is being checked, so that the fundamental combination takes it with
-/// the smaller partial factor permanent_favourable.
+/// - favourable: it relieves what is being checked, so that the fundamental combination takes it
+///   with the smaller partial factor permanent_favourable
+/// - duration: how long it acts at a time, by which the engineer chooses k_mod (EN 1995-1-1:2004
+///   2.3.1.2, from memory): "permanent" (more than ten years), "long" (from six months), "medium"
+///   (from a week), "short" (less), "instantaneous"; no result depends on it
+/// - start: when it starts, counted from the first day of the member; the final state takes the
+///   creep of the whole life
 ///
 /// >>> permanent("floor", self_weight(), uniform(1.2*kN/m)).kind
 /// 'permanent'
+/// >>> permanent("floor", uniform(1.2*kN/m), duration="permanent", start=28*day).start
+/// 28 d
 #[pyfunction]
-#[pyo3(signature = (name, *loads, favourable=false))]
+#[pyo3(signature = (name, *loads, favourable=false, duration=None, start=None))]
 #[expect(
     clippy::needless_pass_by_value,
     reason = "Python's arguments are taken as owned"
@@ -127,11 +158,17 @@ fn permanent(
     name: &str,
     loads: Vec<Py<Load>>,
     favourable: bool,
+    duration: Option<LoadDuration>,
+    start: Option<&Bound<'_, PyAny>>,
 ) -> PyResult<Action> {
     let given = Given {
         name,
         loads: &loads,
         favourable,
+        duration: duration.map(|word| word.0),
+        start: start
+            .map(|start| convert::read(start, "start"))
+            .transpose()?,
     };
     given.made(ActionKind::Permanent, "permanent", &PyDict::new(py))
 }
@@ -147,6 +184,11 @@ fn permanent(
 /// - psi_0: beside another, leading variable action; psi_1: the frequent value; psi_2: the
 ///   quasi-permanent value, which makes creep
 /// - favourable: it relieves what is being checked, so that combinations leave it out
+/// - duration: how long it acts at a time, by which the engineer chooses k_mod (EN 1995-1-1:2004
+///   2.3.1.2, from memory): "permanent" (more than ten years), "long" (from six months), "medium"
+///   (from a week), "short" (less), "instantaneous"; no result depends on it
+/// - start: when it starts, counted from the first day of the member; the final state takes the
+///   creep of the whole life
 ///
 /// >>> variable("store", uniform(3*kN/m), category="E").factors
 /// CombinationFactors(psi_0=1.0, psi_1=0.9, psi_2=0.8)
@@ -154,7 +196,8 @@ fn permanent(
 /// 'variable'
 #[pyfunction]
 #[pyo3(signature = (
-    name, *loads, category=None, psi_0=None, psi_1=None, psi_2=None, favourable=false
+    name, *loads, category=None, psi_0=None, psi_1=None, psi_2=None, favourable=false,
+    duration=None, start=None
 ))]
 #[expect(clippy::too_many_arguments, reason = "each is a keyword in Python")]
 #[expect(
@@ -170,6 +213,8 @@ fn variable(
     psi_1: Option<Number>,
     psi_2: Option<Number>,
     favourable: bool,
+    duration: Option<LoadDuration>,
+    start: Option<&Bound<'_, PyAny>>,
 ) -> PyResult<Action> {
     let keywords = PyDict::new(py);
     let factors = match (category, psi_0, psi_1, psi_2) {
@@ -198,6 +243,10 @@ fn variable(
         name,
         loads: &loads,
         favourable,
+        duration: duration.map(|word| word.0),
+        start: start
+            .map(|start| convert::read(start, "start"))
+            .transpose()?,
     };
     given.made(ActionKind::Variable(factors), "variable", &keywords)
 }

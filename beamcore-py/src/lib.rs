@@ -18,6 +18,7 @@ mod error;
 mod factors;
 mod field;
 mod forces;
+mod initial_strain;
 mod job;
 mod limit;
 mod load;
@@ -65,6 +66,8 @@ fn _core(module: &Bound<'_, PyModule>) -> PyResult<()> {
     classes::register(module)?;
     module.add_class::<outline::Outline>()?;
     shapes::register(module)?;
+    module.add_class::<initial_strain::InitialStrain>()?;
+    module.add_class::<initial_strain::StrainPlane>()?;
     module.add_class::<part::Part>()?;
     module.add_class::<placed::PlacedPart>()?;
     module.add_class::<section::Section>()?;

@@ -1,6 +1,7 @@
 //! The class `Part`.
 
 use crate::convert::{self, Inputs};
+use crate::initial_strain::InitialStrain;
 use crate::made::{Made, Recipe, Reduced};
 use crate::material::Material;
 use crate::outline::Outline;
@@ -90,6 +91,12 @@ impl Part {
         self.0.given_line_mass().map(Quantity::of)
     }
 
+    /// The initial strain; zero unless it was given.
+    #[getter]
+    fn given_initial_strain(&self) -> InitialStrain {
+        InitialStrain(self.0.given_initial_strain())
+    }
+
     /// The same part with the middle of its outline (of a polygon, the origin of its coordinates)
     /// at (y, z).
     fn at<'py>(
@@ -170,6 +177,21 @@ impl Part {
         let value = convert::read(mass, "line_mass")?;
         let recipe = Recipe::method(slf, "with_line_mass", (mass,))?;
         let part = slf.get().0.inner.clone().line_mass(value);
+        Ok(Self(Made::new(part, recipe)))
+    }
+
+    /// The same part with an initial strain from the first day, which makes the section bend and
+    /// its parts press on each other. A member with one must be held sideways.
+    ///
+    /// >>> slab = Part("slab", rectangle(500*mm, 60*mm), concrete("C25/30", creep=2.5))
+    /// >>> slab.with_initial_strain(InitialStrain("-0.3 permille")).given_initial_strain.axial
+    /// -0.3 permille
+    fn with_initial_strain(
+        slf: &Bound<'_, Self>,
+        strain: &Bound<'_, InitialStrain>,
+    ) -> PyResult<Self> {
+        let recipe = Recipe::method(slf, "with_initial_strain", (strain,))?;
+        let part = slf.get().0.inner.clone().initial_strain(strain.get().0);
         Ok(Self(Made::new(part, recipe)))
     }
 

@@ -1,5 +1,6 @@
 //! The class `PlacedPart`.
 
+use crate::initial_strain::InitialStrain;
 use crate::made::{Made, Recipe, Reduced};
 use crate::material::Material;
 use crate::outline::Outline;
@@ -50,6 +51,12 @@ impl PlacedPart {
             material,
             Recipe::property(slf, "material")?,
         )))
+    }
+
+    /// The initial strain that the part bears; of a mirror image it is mirrored too.
+    #[getter]
+    fn initial_strain(&self) -> InitialStrain {
+        InitialStrain(self.0.initial_strain())
     }
 
     /// The name of the host that the part is set into; None if it is set into none.

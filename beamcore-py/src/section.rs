@@ -3,6 +3,7 @@
 use crate::convert::Inputs;
 use crate::error::OrRaise;
 use crate::forces::{PointStress, SectionForces};
+use crate::initial_strain::StrainPlane;
 use crate::made::{Made, Recipe, Reduced};
 use crate::part::{Part, PartOrName};
 use crate::placed::PlacedPart;
@@ -74,6 +75,27 @@ impl Section {
         Ok(Stiffness(Made::new(stiffness, recipe)))
     }
 
+    /// The plane of strain that the section takes freely under the initial strains of its parts, at
+    /// a time, "initial" or "final": EA axial = sum of E_i int eps_i dA, and for a section "held"
+    /// sideways EI_yy curvature_y = -sum of E_i int z eps_i dA; one that is "free" also bends about
+    /// the upright axis.
+    ///
+    /// >>> lower = Part("lower", rectangle(10*mm, 5*mm), steel("S275"))
+    /// >>> upper = Part("upper", rectangle(10*mm, 5*mm), steel("S275")).above(lower)
+    /// >>> wet = lower.with_initial_strain(InitialStrain("1 permille"))
+    /// >>> Section([wet, upper]).free_plane("initial", "held").curvature_y   # 1.5 d/h
+    /// 0.15 1/m
+    fn free_plane(
+        slf: &Bound<'_, Self>,
+        time: TimeText,
+        sideways: Sideways,
+    ) -> PyResult<StrainPlane> {
+        let (time, sideways) = (time.into(), sideways.0);
+        let plane = slf.get().0.free_plane(time, sideways);
+        let recipe = Recipe::method(slf, "free_plane", (time.name(), sideways.name()))?;
+        Ok(StrainPlane(Made::new(plane, recipe)))
+    }
+
     /// The section as if made of the material of one part, at a time, "initial" or "final".
     fn transformed_to(
         slf: &Bound<'_, Self>,
@@ -91,7 +113,7 @@ impl Section {
     }
 
     /// The stress in a part at a point (y, z) of it under section forces, E x strain, tension
-    /// positive, at a time, "initial" or "final".
+    /// positive, at a time, "initial" or "final". Initial strains of parts are not in it.
     ///
     /// Strain: N/EA - kappa_y (z - z_n) - kappa_z (y - y_n). A section "held" sideways bends about
     /// the level axis only: kappa_y = M_y/EI_yy, kappa_z = 0. One that is "free" bends
@@ -126,8 +148,8 @@ impl Section {
     }
 
     /// The greatest and the least stress in a part under section forces, as two PointStress; the
-    /// formula is that of stress_at, and as the strain is linear they stand where the outline
-    /// reaches farthest.
+    /// formula is that of stress_at, without initial strains, and as the strain is linear they
+    /// stand where the outline reaches farthest.
     #[pyo3(signature = (part, forces, *, sideways, time))]
     fn stress_extremes<'py>(
         &self,

@@ -5,6 +5,7 @@ use crate::error::OrRaise;
 use crate::made::{Made, Reduced};
 use crate::quantity::Quantity;
 use beamcore::section;
+use beamcore::units::Length;
 use pyo3::prelude::*;
 use pyo3::types::PyTuple;
 
@@ -22,7 +23,17 @@ record! {
         bottom: Quantity,
         /// The greatest z of the outline.
         top: Quantity,
+        /// The corners (y, z) of the transformed outline, loop by loop, for drawing; arcs are given
+        /// by chords of at most 12 degrees.
+        loops: Vec<Vec<(Quantity, Quantity)>>,
     }
+}
+
+fn loop_of(corners: &[(Length, Length)]) -> Vec<(Quantity, Quantity)> {
+    let corners = corners.iter();
+    corners
+        .map(|&(y, z)| (Quantity::of(y), Quantity::of(z)))
+        .collect()
 }
 
 /// A section as if made of one chosen material; presentation only, no other result rests on it.
@@ -66,6 +77,7 @@ impl TransformedSection {
             width: Quantity::of(part.width),
             bottom: Quantity::of(part.bottom),
             top: Quantity::of(part.top),
+            loops: part.loops.iter().map(|corners| loop_of(corners)).collect(),
         });
         PyTuple::new(py, parts.collect::<Vec<_>>())
     }

@@ -1,8 +1,8 @@
-//! Words of the section room: whether a member is held sideways, and axes of mirroring.
+//! Words: whether a member is held sideways, axes of mirroring, durations of actions.
 
 use crate::choice::chosen;
 use crate::error::OrRaise;
-use beamcore::section;
+use beamcore::{member, section};
 use pyo3::prelude::*;
 
 /// "held" or "free".
@@ -31,6 +31,20 @@ impl<'a, 'py> FromPyObject<'a, 'py> for MirrorAxis {
         let word: String = object.extract()?;
         let all = [Core::Upright, Core::Level];
         let choice = chosen(&word, "place.mirror_of.axis", &all, Core::name);
+        Ok(Self(choice.or_raise(object.py())?))
+    }
+}
+
+/// "permanent", "long", "medium", "short" or "instantaneous".
+pub(crate) struct LoadDuration(pub(crate) member::LoadDuration);
+
+impl<'a, 'py> FromPyObject<'a, 'py> for LoadDuration {
+    type Error = PyErr;
+
+    fn extract(object: Borrowed<'a, 'py, PyAny>) -> PyResult<Self> {
+        use member::LoadDuration as Core;
+        let word: String = object.extract()?;
+        let choice = chosen(&word, "duration", &Core::ALL, Core::name);
         Ok(Self(choice.or_raise(object.py())?))
     }
 }

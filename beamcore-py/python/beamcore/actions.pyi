@@ -1,6 +1,7 @@
 from collections.abc import Mapping, Sequence
 from typing import Final, Literal, TypeAlias, final, overload
 
+from beamcore._core import Quantity
 from beamcore._typing import QuantityLike
 
 __all__ = [
@@ -24,6 +25,7 @@ __all__ = [
 _Category: TypeAlias = Literal[
     "A", "B", "C", "D", "E", "F", "G", "H", "snow", "snow_high", "wind", "temperature"
 ]
+_Duration: TypeAlias = Literal["permanent", "long", "medium", "short", "instantaneous"]
 
 @final
 class Load:
@@ -58,9 +60,17 @@ class Action:
     name: Final[str]
     kind: Final[str]
     favourable: Final[bool]
+    duration: Final[_Duration | None]
+    start: Final[Quantity | None]
     factors: Final[CombinationFactors | None]
 
-def permanent(name: str, *loads: Load, favourable: bool = False) -> Action: ...
+def permanent(
+    name: str,
+    *loads: Load,
+    favourable: bool = False,
+    duration: _Duration | None = None,
+    start: QuantityLike | None = None,
+) -> Action: ...
 @overload
 def variable(
     name: str,
@@ -70,6 +80,8 @@ def variable(
     psi_1: None = None,
     psi_2: None = None,
     favourable: bool = False,
+    duration: _Duration | None = None,
+    start: QuantityLike | None = None,
 ) -> Action: ...
 @overload
 def variable(
@@ -80,6 +92,8 @@ def variable(
     psi_1: float,
     psi_2: float,
     favourable: bool = False,
+    duration: _Duration | None = None,
+    start: QuantityLike | None = None,
 ) -> Action: ...
 
 @final

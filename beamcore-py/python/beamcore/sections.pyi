@@ -15,6 +15,8 @@ __all__ = [
     "channel",
     "angle",
     "hollow_box",
+    "InitialStrain",
+    "StrainPlane",
     "Part",
     "PlacedPart",
     "Section",
@@ -77,11 +79,31 @@ def hollow_box(
 ) -> Outline: ...
 
 @final
+class InitialStrain:
+    axial: Final[Quantity]
+    curvature_y: Final[Quantity]
+    curvature_z: Final[Quantity]
+    def __new__(
+        cls,
+        axial: QuantityLike | float,
+        curvature_y: QuantityLike | None = None,
+        curvature_z: QuantityLike | None = None,
+    ) -> InitialStrain: ...
+
+@final
+class StrainPlane:
+    axial: Final[Quantity]
+    curvature_y: Final[Quantity]
+    curvature_z: Final[Quantity]
+    def strain_at(self, y: QuantityLike, z: QuantityLike) -> Quantity: ...
+
+@final
 class Part:
     name: Final[str]
     outline: Final[Outline]
     material: Final[Material]
     given_line_mass: Final[Quantity | None]
+    given_initial_strain: Final[InitialStrain]
     def __new__(cls, name: str, outline: Outline, material: Material) -> Part: ...
     def at(self, y: QuantityLike, z: QuantityLike) -> Part: ...
     def left_of(self, other: Part | str) -> Part: ...
@@ -91,12 +113,14 @@ class Part:
     def mirror_of(self, other: Part | str, axis: _Axis) -> Part: ...
     def set_into(self, host: Part | str, y: QuantityLike, z: QuantityLike) -> Part: ...
     def with_line_mass(self, mass: QuantityLike) -> Part: ...
+    def with_initial_strain(self, strain: InitialStrain) -> Part: ...
 
 @final
 class PlacedPart:
     name: Final[str]
     outline: Final[Outline]
     material: Final[Material]
+    initial_strain: Final[InitialStrain]
     host: Final[str | None]
     left: Final[Quantity]
     right: Final[Quantity]
@@ -116,6 +140,7 @@ class Section:
     def __new__(cls, parts: Sequence[Part]) -> Section: ...
     def part(self, name: str) -> PlacedPart: ...
     def stiffness(self, time: _Time) -> Stiffness: ...
+    def free_plane(self, time: _Time, sideways: _Sideways) -> StrainPlane: ...
     def transformed_to(self, material: str, time: _Time) -> TransformedSection: ...
     def stress_at(
         self,
@@ -173,8 +198,15 @@ class TransformedPart:
     width: Final[Quantity]
     bottom: Final[Quantity]
     top: Final[Quantity]
+    loops: Final[list[list[tuple[Quantity, Quantity]]]]
     def __new__(
-        cls, name: str, ratio: float, width: Quantity, bottom: Quantity, top: Quantity
+        cls,
+        name: str,
+        ratio: float,
+        width: Quantity,
+        bottom: Quantity,
+        top: Quantity,
+        loops: Sequence[Sequence[tuple[Quantity, Quantity]]],
     ) -> TransformedPart: ...
 
 @final
