@@ -12,6 +12,7 @@ from typing import Literal
 
 import golden_odd_section
 import golden_roof_beam
+import golden_shrinking_slab
 
 from beamcore import Job, Member, Response, Section
 from beamcore import ConcreteCreep, Material, concrete, steel, timber
@@ -112,6 +113,7 @@ def typed() -> list[str]:
             answers += [line(case, *found) for found in camber(response)]
     answers += [line("roof-beam", *found) for found in golden_roof_beam.answers()]
     answers += [line("odd-section", *found) for found in golden_odd_section.answers()]
+    answers += [line("shrinking-slab", *found) for found in golden_shrinking_slab.answers()]
     return answers
 
 

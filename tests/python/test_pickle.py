@@ -8,20 +8,21 @@ from typing import Any
 import golden
 import golden_odd_section
 import golden_roof_beam
+import golden_shrinking_slab
 import numpy as np
 import pytest
 
 import beamcore
 from beamcore import (
     Camber, CharacteristicConcreteStrength, CharacteristicMetalStrength,
-    CharacteristicTimberStrength, ConcreteCreep, ConcreteShrinkage, Extreme, Field, Job, Limit,
-    MetalFactors, MetalStrength, OwnCombination, Part, PartialFactors, Problem, Quantity, Section,
-    SectionForces, TimberFactors, TimberStrength, Unit, aluminium, angle, area, channel, concrete,
-    couple, disc, fixed, hollow_box, i_shape, partial, permanent, pin, point, polygon, rectangle,
-    ring, roller, self_weight, steel, steel_of_thickness, tee, timber, trapezoidal, uniform,
-    variable,
+    CharacteristicTimberStrength, ConcreteCreep, ConcreteShrinkage, Extreme, Field, InitialStrain,
+    Job, Limit, MetalFactors, MetalStrength, OwnCombination, Part, PartialFactors, Problem,
+    Quantity, Section, SectionForces, TimberFactors, TimberStrength, Unit, aluminium, angle, area,
+    channel, concrete, couple, disc, fixed, hollow_box, i_shape, partial, permanent, pin, point,
+    polygon, rectangle, ring, roller, self_weight, steel, steel_of_thickness, tee, timber,
+    trapezoidal, uniform, variable,
 )
-from beamcore.units import K, MPa, day, kN, m, mm
+from beamcore.units import K, MPa, day, kN, m, mm, permille
 
 JOB = Path(__file__).parents[1] / "golden" / "slab-strip.toml"
 CREEP = ConcreteCreep(38*MPa, 50, 150*mm, 28*day, 18250*day, "N")
@@ -31,6 +32,7 @@ SECTION, MEMBER = golden.slab_strip()
 RESPONSE = MEMBER.solve()
 ODD, ODD_MEMBER = golden_odd_section.odd_section()
 ODD_RESPONSE = ODD_MEMBER.solve()
+SHRINKING, SHRINKING_MEMBER = golden_shrinking_slab.shrinking_slab()
 FORCES = SectionForces("10 kN", 5*kN*m, moment_z=-1*kN*m)
 TRIANGLE = [(0*mm, 0*mm), (1*m, 0*mm), (0*mm, 1*m)]
 ROOF = golden_roof_beam.roof_beam()[1]
@@ -73,6 +75,10 @@ VALUES: list[Any] = [
     Part("a", disc(1*mm), steel("S235")).mirror_of("b", "upright").with_line_mass("9 kg/m"),
     Part("a", disc(1*mm), steel("S235")).set_into("b", 1*mm, "2 mm"),
     Part("a", disc(1*mm), timber("C24", 2)).material,
+    InitialStrain(-0.3*permille, "0.1 /m", 0.7/m / 3), InitialStrain(12e-6/K * (80*K)),
+    Part("a", disc(1*mm), steel("S235")).with_initial_strain(InitialStrain("1 permille")),
+    SHRINKING, *SHRINKING.placed, SHRINKING.free_plane("final", "free"),
+    SHRINKING.part("slab").initial_strain,
     ODD, *ODD.placed, ODD.part("bar").material, FORCES, ODD.stiffness("final").principal,
     *ODD.stress_extremes("channel", FORCES, sideways="free", time="final"),
     Part("a", rectangle(75*mm, 220*mm), steel("S235")),
@@ -84,6 +90,8 @@ VALUES: list[Any] = [
     trapezoidal(1*kN/m, 2*kN/m, 1*m, 2*m), area("1 kN/m2", 3*m), couple(1*kN*m, 1*m),
     area(1*kN/m**2, 3*m, from_=1*m, to="2 m"),
     permanent("g", uniform(1*kN/m), favourable=True), variable("s", category="snow"),
+    permanent("g", uniform(1*kN/m), duration="long", start="28 d"),
+    variable("s", category="snow", duration="short", start=0.1*day),
     variable("s", category="snow").factors, PartialFactors(variable=1.6),
     OwnCombination("a", {"g": 1, "q": 0.5}, ultimate=True),
     ROOF.spans[0], ROOF.solve().combination("erection"), *golden_roof_beam.LIMITS,
@@ -172,7 +180,7 @@ def test_fields_come_back_with_their_bits(name: str) -> None:
 
 def test_members_and_responses_come_back() -> None:
     for _, member in (golden.two_span(), golden.slab_strip(), golden_roof_beam.roof_beam(),
-                      (ODD, ODD_MEMBER)):
+                      (ODD, ODD_MEMBER), (SHRINKING, SHRINKING_MEMBER)):
         found = again(member)
         assert found.sideways == member.sideways
         assert found.length == member.length
