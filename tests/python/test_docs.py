@@ -57,6 +57,11 @@ def test_examples_print_what_they_say(name: str) -> None:
 
 def test_the_readme_prints_what_it_says(capsys: pytest.CaptureFixture[str]) -> None:
     text = (ROOT / "beamcore-py" / "README.md").read_text(encoding="utf-8")
-    [code] = re.findall(r"```python\n(.*?)```", text, re.DOTALL)
-    exec(code, {})
-    assert capsys.readouterr().out == "8.6 mm at 2.10 m\n"
+    codes = re.findall(r"```python\n(.*?)```", text, re.DOTALL)
+    said = []
+    names: dict[str, Any] = {}
+    for code in codes:
+        exec(code, names)
+        said += re.findall(r"^print\(.*\) +# (.*)$", code, re.MULTILINE)
+    assert len(codes) == 2 and len(said) == 4
+    assert capsys.readouterr().out.splitlines() == said
