@@ -3,8 +3,8 @@
 use crate::choice::choice;
 use crate::fault::Fault;
 use beamcore::camber::Shape;
-use beamcore::member::{Category, CombinationKind, LoadDuration};
 use beamcore::limits::Component;
+use beamcore::member::{Category, CombinationKind, LoadDuration};
 
 /// Category A: homes.
 pub const BC_CATEGORY_DOMESTIC: i32 = 1;
