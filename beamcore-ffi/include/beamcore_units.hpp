@@ -276,48 +276,6 @@ private:
     double si_;
 };
 
-// Area load: one double in the SI unit N/m2.
-class AreaLoad {
-public:
-    static constexpr AreaLoad from_si(double si) { return AreaLoad(si); }
-    constexpr double si() const { return si_; }
-
-    // The unit N/m2.
-    static constexpr AreaLoad from_N_per_m2(double x) { return AreaLoad(x * 1.0 / 1.0); }
-    constexpr double to_N_per_m2() const { return si_ * 1.0 / 1.0; }
-
-    // The unit kN/m2.
-    static constexpr AreaLoad from_kN_per_m2(double x) { return AreaLoad(x * 1000.0 / 1.0); }
-    constexpr double to_kN_per_m2() const { return si_ * 1.0 / 1000.0; }
-
-    // The unit psf.
-    static constexpr AreaLoad from_psf(double x) { return AreaLoad(x * 8896443230521.0 / 185806080000.0); }
-    constexpr double to_psf() const { return si_ * 185806080000.0 / 8896443230521.0; }
-
-    // The unit lbf/ft2.
-    static constexpr AreaLoad from_lbf_per_ft2(double x) { return AreaLoad(x * 8896443230521.0 / 185806080000.0); }
-    constexpr double to_lbf_per_ft2() const { return si_ * 185806080000.0 / 8896443230521.0; }
-
-    friend constexpr bool operator==(AreaLoad a, AreaLoad b) { return a.si_ == b.si_; }
-    friend constexpr bool operator!=(AreaLoad a, AreaLoad b) { return a.si_ != b.si_; }
-    friend constexpr bool operator<(AreaLoad a, AreaLoad b) { return a.si_ < b.si_; }
-    friend constexpr bool operator<=(AreaLoad a, AreaLoad b) { return a.si_ <= b.si_; }
-    friend constexpr bool operator>(AreaLoad a, AreaLoad b) { return a.si_ > b.si_; }
-    friend constexpr bool operator>=(AreaLoad a, AreaLoad b) { return a.si_ >= b.si_; }
-
-    friend constexpr AreaLoad operator+(AreaLoad a, AreaLoad b) { return AreaLoad(a.si_ + b.si_); }
-    friend constexpr AreaLoad operator-(AreaLoad a, AreaLoad b) { return AreaLoad(a.si_ - b.si_); }
-    friend constexpr AreaLoad operator-(AreaLoad a) { return AreaLoad(-a.si_); }
-    friend constexpr AreaLoad operator*(AreaLoad a, double x) { return AreaLoad(a.si_ * x); }
-    friend constexpr AreaLoad operator*(double x, AreaLoad a) { return AreaLoad(x * a.si_); }
-    friend constexpr AreaLoad operator/(AreaLoad a, double x) { return AreaLoad(a.si_ / x); }
-    friend constexpr double operator/(AreaLoad a, AreaLoad b) { return a.si_ / b.si_; }
-
-private:
-    explicit constexpr AreaLoad(double si) : si_(si) {}
-    double si_;
-};
-
 // Moment: one double in the SI unit N m.
 class Moment {
 public:
@@ -473,6 +431,48 @@ public:
 
 private:
     explicit constexpr Modulus(double si) : si_(si) {}
+    double si_;
+};
+
+// Area load: one double in the SI unit N/m2.
+class AreaLoad {
+public:
+    static constexpr AreaLoad from_si(double si) { return AreaLoad(si); }
+    constexpr double si() const { return si_; }
+
+    // The unit N/m2.
+    static constexpr AreaLoad from_N_per_m2(double x) { return AreaLoad(x * 1.0 / 1.0); }
+    constexpr double to_N_per_m2() const { return si_ * 1.0 / 1.0; }
+
+    // The unit kN/m2.
+    static constexpr AreaLoad from_kN_per_m2(double x) { return AreaLoad(x * 1000.0 / 1.0); }
+    constexpr double to_kN_per_m2() const { return si_ * 1.0 / 1000.0; }
+
+    // The unit psf.
+    static constexpr AreaLoad from_psf(double x) { return AreaLoad(x * 8896443230521.0 / 185806080000.0); }
+    constexpr double to_psf() const { return si_ * 185806080000.0 / 8896443230521.0; }
+
+    // The unit lbf/ft2.
+    static constexpr AreaLoad from_lbf_per_ft2(double x) { return AreaLoad(x * 8896443230521.0 / 185806080000.0); }
+    constexpr double to_lbf_per_ft2() const { return si_ * 185806080000.0 / 8896443230521.0; }
+
+    friend constexpr bool operator==(AreaLoad a, AreaLoad b) { return a.si_ == b.si_; }
+    friend constexpr bool operator!=(AreaLoad a, AreaLoad b) { return a.si_ != b.si_; }
+    friend constexpr bool operator<(AreaLoad a, AreaLoad b) { return a.si_ < b.si_; }
+    friend constexpr bool operator<=(AreaLoad a, AreaLoad b) { return a.si_ <= b.si_; }
+    friend constexpr bool operator>(AreaLoad a, AreaLoad b) { return a.si_ > b.si_; }
+    friend constexpr bool operator>=(AreaLoad a, AreaLoad b) { return a.si_ >= b.si_; }
+
+    friend constexpr AreaLoad operator+(AreaLoad a, AreaLoad b) { return AreaLoad(a.si_ + b.si_); }
+    friend constexpr AreaLoad operator-(AreaLoad a, AreaLoad b) { return AreaLoad(a.si_ - b.si_); }
+    friend constexpr AreaLoad operator-(AreaLoad a) { return AreaLoad(-a.si_); }
+    friend constexpr AreaLoad operator*(AreaLoad a, double x) { return AreaLoad(a.si_ * x); }
+    friend constexpr AreaLoad operator*(double x, AreaLoad a) { return AreaLoad(x * a.si_); }
+    friend constexpr AreaLoad operator/(AreaLoad a, double x) { return AreaLoad(a.si_ / x); }
+    friend constexpr double operator/(AreaLoad a, AreaLoad b) { return a.si_ / b.si_; }
+
+private:
+    explicit constexpr AreaLoad(double si) : si_(si) {}
     double si_;
 };
 
@@ -964,14 +964,6 @@ constexpr LineLoad operator""_lbf_per_ft(long double x) { return LineLoad::from_
 constexpr LineLoad operator""_lbf_per_ft(unsigned long long x) { return LineLoad::from_lbf_per_ft(static_cast<double>(x)); }
 constexpr LineLoad operator""_kip_per_ft(long double x) { return LineLoad::from_kip_per_ft(static_cast<double>(x)); }
 constexpr LineLoad operator""_kip_per_ft(unsigned long long x) { return LineLoad::from_kip_per_ft(static_cast<double>(x)); }
-constexpr AreaLoad operator""_N_per_m2(long double x) { return AreaLoad::from_N_per_m2(static_cast<double>(x)); }
-constexpr AreaLoad operator""_N_per_m2(unsigned long long x) { return AreaLoad::from_N_per_m2(static_cast<double>(x)); }
-constexpr AreaLoad operator""_kN_per_m2(long double x) { return AreaLoad::from_kN_per_m2(static_cast<double>(x)); }
-constexpr AreaLoad operator""_kN_per_m2(unsigned long long x) { return AreaLoad::from_kN_per_m2(static_cast<double>(x)); }
-constexpr AreaLoad operator""_psf(long double x) { return AreaLoad::from_psf(static_cast<double>(x)); }
-constexpr AreaLoad operator""_psf(unsigned long long x) { return AreaLoad::from_psf(static_cast<double>(x)); }
-constexpr AreaLoad operator""_lbf_per_ft2(long double x) { return AreaLoad::from_lbf_per_ft2(static_cast<double>(x)); }
-constexpr AreaLoad operator""_lbf_per_ft2(unsigned long long x) { return AreaLoad::from_lbf_per_ft2(static_cast<double>(x)); }
 constexpr Moment operator""_N_m(long double x) { return Moment::from_N_m(static_cast<double>(x)); }
 constexpr Moment operator""_N_m(unsigned long long x) { return Moment::from_N_m(static_cast<double>(x)); }
 constexpr Moment operator""_kN_m(long double x) { return Moment::from_kN_m(static_cast<double>(x)); }
@@ -998,6 +990,14 @@ constexpr Stress operator""_ksi(long double x) { return Stress::from_ksi(static_
 constexpr Stress operator""_ksi(unsigned long long x) { return Stress::from_ksi(static_cast<double>(x)); }
 constexpr Modulus operator""_GPa(long double x) { return Modulus::from_GPa(static_cast<double>(x)); }
 constexpr Modulus operator""_GPa(unsigned long long x) { return Modulus::from_GPa(static_cast<double>(x)); }
+constexpr AreaLoad operator""_N_per_m2(long double x) { return AreaLoad::from_N_per_m2(static_cast<double>(x)); }
+constexpr AreaLoad operator""_N_per_m2(unsigned long long x) { return AreaLoad::from_N_per_m2(static_cast<double>(x)); }
+constexpr AreaLoad operator""_kN_per_m2(long double x) { return AreaLoad::from_kN_per_m2(static_cast<double>(x)); }
+constexpr AreaLoad operator""_kN_per_m2(unsigned long long x) { return AreaLoad::from_kN_per_m2(static_cast<double>(x)); }
+constexpr AreaLoad operator""_psf(long double x) { return AreaLoad::from_psf(static_cast<double>(x)); }
+constexpr AreaLoad operator""_psf(unsigned long long x) { return AreaLoad::from_psf(static_cast<double>(x)); }
+constexpr AreaLoad operator""_lbf_per_ft2(long double x) { return AreaLoad::from_lbf_per_ft2(static_cast<double>(x)); }
+constexpr AreaLoad operator""_lbf_per_ft2(unsigned long long x) { return AreaLoad::from_lbf_per_ft2(static_cast<double>(x)); }
 constexpr Density operator""_kg_per_m3(long double x) { return Density::from_kg_per_m3(static_cast<double>(x)); }
 constexpr Density operator""_kg_per_m3(unsigned long long x) { return Density::from_kg_per_m3(static_cast<double>(x)); }
 constexpr Density operator""_lb_per_ft3(long double x) { return Density::from_lb_per_ft3(static_cast<double>(x)); }

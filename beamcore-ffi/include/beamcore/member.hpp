@@ -102,7 +102,8 @@ public:
             [&](std::int32_t *out) { return bc_member_sideways(get(), out); }));
     }
 
-    // The combinations of the actions, each with its factors.
+    // The combinations of the actions, each with its factors. Where several variable actions can
+    // lead, each kind has one per leader, named for example "fundamental, snow leading".
     std::vector<Combination> combinations() const {
         std::vector<Combination> list;
         for (std::string &name :

@@ -17,13 +17,13 @@ __all__ = [
     "lbf",
     "kip",
     "plf",
-    "psf",
     "Pa",
     "kPa",
     "MPa",
     "psi",
     "ksi",
     "GPa",
+    "psf",
     "permille",
     "rad",
     "mrad",
@@ -48,13 +48,13 @@ MN: Final[Unit] = Unit("MN")
 lbf: Final[Unit] = Unit("lbf")
 kip: Final[Unit] = Unit("kip")
 plf: Final[Unit] = Unit("plf")
-psf: Final[Unit] = Unit("psf")
 Pa: Final[Unit] = Unit("Pa")
 kPa: Final[Unit] = Unit("kPa")
 MPa: Final[Unit] = Unit("MPa")
 psi: Final[Unit] = Unit("psi")
 ksi: Final[Unit] = Unit("ksi")
 GPa: Final[Unit] = Unit("GPa")
+psf: Final[Unit] = Unit("psf")
 permille: Final[Unit] = Unit("permille")
 rad: Final[Unit] = Unit("rad")
 mrad: Final[Unit] = Unit("mrad")

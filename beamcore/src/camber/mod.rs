@@ -35,6 +35,7 @@ pub struct Camber {
     target: Length,
     rise: Length,
     chord: (Length, Length),
+    length: Length,
     ordinates: Vec<Ordinate>,
     line: Line,
 }
@@ -82,6 +83,7 @@ impl Response {
             target,
             rise,
             chord: (from, to),
+            length: self.member().length(),
             ordinates,
             line,
         })
@@ -207,18 +209,19 @@ impl Camber {
         &self.ordinates
     }
 
-    /// The height above the chord at a place of the member, positive upward.
+    /// The height above the line of the chord at a place of the member, positive upward. Beyond the
+    /// chord the member goes on along its tangent (a mirror image along the mirrored line), so that
+    /// an overhang usually stands below it.
     ///
     /// # Errors
-    /// [`ErrorKind::Position`] if the place is not on the chord.
+    /// [`ErrorKind::Position`] if the place is not on the member.
     pub fn ordinate(&self, at: Length) -> Result<Length> {
-        let (from, to) = self.chord;
-        if !(at >= from && at <= to) {
+        if !(at >= Length::ZERO && at <= self.length) {
             return Err(Problem::new(
                 ErrorKind::Position,
                 "at",
                 at.to_string(),
-                format!("a place on the chord, from {from} to {to}"),
+                format!("a place on the member, from 0 m to {}", self.length),
             )
             .into());
         }

@@ -50,8 +50,8 @@ impl Component {
 }
 
 impl Response {
-    /// The line of a component along a span, under a characteristic combination (or one of one's
-    /// own), after the given camber.
+    /// The line of a component along a span, under the named combination, after the given
+    /// camber. EN 1990 means a characteristic combination; any other is taken as it is.
     ///
     /// Source: EN 1990:2002 A1.4.3, from memory: w_2 is creep under permanent load only; creep under
     /// psi_2 Q belongs to w_3.

@@ -47,7 +47,7 @@ pub(super) fn outcome(job: &Job) -> Result<OutcomeDocument> {
         },
         assumptions: notes::assumptions(job),
         warnings: Vec::new(),
-        not_checked: notes::not_checked(member),
+        not_checked: notes::not_checked(job),
     };
     document.warnings = notes::warnings(member, &document);
     Ok(document)

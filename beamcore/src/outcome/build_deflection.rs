@@ -11,6 +11,7 @@ use crate::limits::{Component, Limit, LimitCheck};
 use crate::member::{Combination, CombinationKind, Span};
 use crate::response::Response;
 use crate::time::Time;
+use crate::units::Length;
 
 /// The components under each characteristic combination, span by span.
 pub(super) fn components(
@@ -109,6 +110,8 @@ pub(super) fn camber(
         rise_m: camber.rise().to_m(),
         chord_from_m: camber.chord().0.to_m(),
         chord_to_m: camber.chord().1.to_m(),
+        left_end_m: camber.ordinate(Length::ZERO)?.to_m(),
+        right_end_m: camber.ordinate(response.member().length())?.to_m(),
         ordinates: ordinates.collect(),
         remaining: remaining.collect::<Result<_>>()?,
         readings: readings.iter().map(reading).collect(),

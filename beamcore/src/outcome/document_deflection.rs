@@ -86,6 +86,10 @@ pub(super) struct CamberOutcome {
     pub(super) rise_m: f64,
     pub(super) chord_from_m: f64,
     pub(super) chord_to_m: f64,
+    /// Where the left end of the member stands, above the chord.
+    pub(super) left_end_m: f64,
+    /// Where the right end of the member stands, above the chord.
+    pub(super) right_end_m: f64,
     pub(super) ordinates: Vec<OrdinateOutcome>,
     /// What remains of the deflection after the camber, positive below the straight line.
     pub(super) remaining: Vec<RemainingOutcome>,

@@ -206,8 +206,12 @@ fn uplifts(member: &Member, document: &OutcomeDocument) -> Vec<String> {
 }
 
 /// What was not checked.
-pub(super) fn not_checked(member: &Member) -> Vec<String> {
+pub(super) fn not_checked(job: &Job) -> Vec<String> {
+    let member = job.member();
     let mut notes: Vec<String> = Vec::new();
+    if job.limits().is_empty() {
+        notes.push("Limits of the deflection: none were given".into());
+    }
     for part in member.section().placed() {
         if part.material().strength().is_none() {
             notes.push(format!(
@@ -223,7 +227,7 @@ pub(super) fn not_checked(member: &Member) -> Vec<String> {
             "Transfer of load from part to part, and at the ends of parts",
             "Bearing at supports and under point loads",
             "Lateral buckling, local buckling and torsion",
-            "Limits of deflection, vibration",
+            "Vibration",
             "Fire, corrosion, moisture, fatigue, accidental actions",
             "Unfavourable patterns of variable actions, favourable permanent actions",
         ]

@@ -66,7 +66,7 @@ fn governing(page: &mut Page, outcome: &OutcomeDocument) {
             } else {
                 "within its strength"
             };
-            page.line(&format!("Bending strength used to {place}: {verdict}"));
+            page.line(&format!("Strength used to {place}: {verdict}"));
         }
         None => page.line("Strength: no design strengths were given, none was checked"),
     }
@@ -123,8 +123,8 @@ fn description(page: &mut Page, outcome: &OutcomeDocument) {
         ));
     }
     page.blank();
-    page.line("Part              Material          Outline, mm         E now   E final   Share");
-    page.line("                                    width x height      N/mm2     N/mm2   of EI");
+    page.line("Part             Material        Outline, width x height  E now E final Share");
+    page.line("                                            mm           N/mm2   N/mm2 of EI");
     for part in &outcome.section.parts {
         let shape = match part.outline.as_str() {
             "rectangle" => String::new(),
@@ -132,13 +132,13 @@ fn description(page: &mut Page, outcome: &OutcomeDocument) {
         };
         let size = format!(
             "{shape}{} x {}",
-            figure((part.right_m - part.left_m) * 1e3, 1),
-            figure((part.top_m - part.bottom_m) * 1e3, 1)
+            trimmed((part.right_m - part.left_m) * 1e3),
+            trimmed((part.top_m - part.bottom_m) * 1e3)
         );
         page.line(&format!(
-            "{:<17} {:<17} {size:<16} {:>8}  {:>8}   {:>4} %",
-            short(&part.name),
-            short(&part.material),
+            "{:<16} {:<15} {size:<22} {:>7} {:>7} {:>3} %",
+            short_to(&part.name, 16),
+            short_to(&part.material, 15),
             figure(part.initial.modulus_Pa / 1e6, 0),
             figure(part.end.modulus_Pa / 1e6, 0),
             figure(part.initial.share * 100.0, 0),
@@ -257,16 +257,23 @@ fn reactions(page: &mut Page, outcome: &OutcomeDocument) {
     }
 }
 
-fn short(name: &str) -> String {
-    short_to(name, 17)
+/// A size in mm, with a decimal only where it has one.
+fn trimmed(size: f64) -> String {
+    let text = figure(size, 1);
+    text.strip_suffix(".0")
+        .map_or_else(|| text.clone(), Into::into)
 }
 
-/// A name cut to a width, with a mark where it was cut.
+/// A name cut to a width in its middle, with a mark there: what tells names apart is often their
+/// end.
 pub(super) fn short_to(name: &str, width: usize) -> String {
-    if name.chars().count() <= width {
+    let count = name.chars().count();
+    if count <= width {
         return name.into();
     }
-    let mut cut: String = name.chars().take(width - 2).collect();
-    cut.push_str("..");
-    cut
+    let head = (width - 2) / 2;
+    let tail = width - 2 - head;
+    let start: String = name.chars().take(head).collect();
+    let end: String = name.chars().skip(count - tail).collect();
+    format!("{start}..{end}")
 }

@@ -11,18 +11,31 @@ pub(super) fn greatest(page: &mut Page, outcome: &OutcomeDocument) {
     page.heading("GREATEST DEFLECTION (downward positive)");
     page.line("Combination                           instant             final");
     for combination in &outcome.combinations {
-        let cell = |results: &ResultsOutcome| {
-            let greatest = &results.deflection.greatest;
-            let (value, at) = (figure(greatest.value_m * 1e3, 1), figure(greatest.at_m, 2));
-            format!("{value:>7} mm at {at} m")
-        };
+        let cell = |results: &ResultsOutcome| at(&results.deflection.greatest);
         page.line(&format!(
             "{:<30} {:>20} {:>20}",
             short_to(&combination.name, 30),
             cell(&combination.initial),
             cell(&combination.end)
         ));
+        // A member of several spans is looked at span by span.
+        for (initial, end) in combination.initial.spans.iter().zip(&combination.end.spans) {
+            if combination.initial.spans.len() > 1 {
+                page.line(&format!(
+                    "  {:<28} {:>20} {:>20}",
+                    short_to(&initial.name, 28),
+                    at(&initial.deflection.greatest),
+                    at(&end.deflection.greatest)
+                ));
+            }
+        }
     }
+}
+
+/// A deflection with its place.
+fn at(greatest: &LengthExtreme) -> String {
+    let (value, at) = (figure(greatest.value_m * 1e3, 1), figure(greatest.at_m, 2));
+    format!("{value:>7} mm at {at} m")
 }
 
 /// The components of the deflection, span by span.
@@ -103,6 +116,13 @@ pub(super) fn camber(page: &mut Page, outcome: &OutcomeDocument) {
             "{:>20} {:>35} {reading:>21}",
             figure(ordinate.station_m, 3),
             figure(ordinate.ordinate_m * 1e3, 1),
+        ));
+    }
+    if camber.chord_from_m > 0.0 || camber.chord_to_m < outcome.member.length_m {
+        page.line(&format!(
+            "The member's ends stand at {} mm (left) and {} mm (right) from the chord",
+            figure(camber.left_end_m * 1e3, 1),
+            figure(camber.right_end_m * 1e3, 1)
         ));
     }
     page.blank();

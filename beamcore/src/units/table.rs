@@ -63,14 +63,6 @@ macro_rules! with_table {
                 "kip/ft" (8_896_443_230_521.0, 609_600_000.0)
                     from_kip_per_ft to_kip_per_ft kip_per_ft;
             }
-            /// A load per area of floor or roof; times a tributary width it is a line load.
-            AreaLoad "area load" [1, -1, -2] prints ["kN/m2", "N/m2"] {
-                "N/m2" (1.0, 1.0) from_N_per_m2 to_N_per_m2 N_per_m2;
-                "kN/m2" (1000.0, 1.0) from_kN_per_m2 to_kN_per_m2 kN_per_m2;
-                "psf" (8_896_443_230_521.0, 185_806_080_000.0) from_psf to_psf psf;
-                "lbf/ft2" (8_896_443_230_521.0, 185_806_080_000.0)
-                    from_lbf_per_ft2 to_lbf_per_ft2 lbf_per_ft2;
-            }
             /// A bending moment or a couple.
             Moment "moment" [1, 2, -2] prints ["kN m", "N m"] {
                 "N m" (1.0, 1.0) from_N_m to_N_m N_m;
@@ -99,6 +91,14 @@ macro_rules! with_table {
                 "N/mm2" (1e6, 1.0) from_N_per_mm2 to_N_per_mm2;
                 "psi" (8_896_443_230_521.0, 1_290_320_000.0) from_psi to_psi;
                 "ksi" (8_896_443_230_521.0, 1_290_320.0) from_ksi to_ksi;
+            }
+            /// A load per area of floor or roof; times a tributary width it is a line load.
+            AreaLoad "area load" [1, -1, -2] prints ["kN/m2", "N/m2"] {
+                "N/m2" (1.0, 1.0) from_N_per_m2 to_N_per_m2 N_per_m2;
+                "kN/m2" (1000.0, 1.0) from_kN_per_m2 to_kN_per_m2 kN_per_m2;
+                "psf" (8_896_443_230_521.0, 185_806_080_000.0) from_psf to_psf psf;
+                "lbf/ft2" (8_896_443_230_521.0, 185_806_080_000.0)
+                    from_lbf_per_ft2 to_lbf_per_ft2 lbf_per_ft2;
             }
             /// A density, rho, mass per volume.
             Density "density" [1, -3, 0] prints ["kg/m3"] {
