@@ -119,6 +119,7 @@ its tolerance allows for the arc being followed by polynomials.""")
     for i in range(9):
         u = float(CHORD * F(i, 8) - CHORD / 2)
         case.exact(f"camber.ordinates[{i}].ordinate_m", arc(0.02, u), rise)
+    case.add(f"{at}.w_c.value_m", rise, "1e-7")
     case.bits(f"{at}.w_max.value_m")
     case.bits(f'camber.remaining["{chosen}"].final.greatest.value_m')
     w_inst = greatest(made[chosen, "initial"], LEFT, RIGHT)[0]

@@ -253,9 +253,10 @@ def main() -> int:
     from roof_beam import roof_beam
     from odd_section import odd_section
     from shrinking_slab import shrinking_slab
+    from angle_forces import angle_forces
     from slab_strip import slab_strip
 
-    cases = [flitch(), brass_core(), *handbook(), two_span(), slab_strip(), roof_beam(), odd_section(), shrinking_slab()]
+    cases = [flitch(), brass_core(), *handbook(), two_span(), slab_strip(), roof_beam(), odd_section(), shrinking_slab(), angle_forces()]
     stale = []
     for case in cases:
         file = HERE / f"{case.name}.expect"

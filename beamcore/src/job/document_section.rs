@@ -1,7 +1,7 @@
 //! The section as it is written.
 
 use super::written::Written;
-use crate::units::{Curvature, Length, LineMass, Strain};
+use crate::units::{Curvature, Force, Length, LineMass, Moment, Strain};
 use schemars::JsonSchema;
 use serde::{Deserialize, Serialize};
 
@@ -11,6 +11,23 @@ use serde::{Deserialize, Serialize};
 pub(crate) struct SectionDocument {
     /// The parts, rigidly joined.
     pub(crate) parts: Vec<PartDocument>,
+    /// Forces under which the stresses of the section are asked for.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(crate) forces: Vec<ForcesDocument>,
+}
+
+/// Forces on the section.
+#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
+#[serde(deny_unknown_fields)]
+pub(crate) struct ForcesDocument {
+    /// The name under which the stresses are told.
+    pub(crate) name: String,
+    /// The axial force, tension positive.
+    pub(crate) axial: Written<Force>,
+    /// The moment about the level axis, positive where it stretches the bottom.
+    pub(crate) moment_y: Written<Moment>,
+    /// The moment about the upright axis, positive where it stretches the side of negative y.
+    pub(crate) moment_z: Written<Moment>,
 }
 
 /// A part of the section.

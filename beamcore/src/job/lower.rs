@@ -9,7 +9,7 @@ use crate::camber::{CamberPlan, Trestles};
 use crate::error::{Error, ErrorKind, Problem};
 use crate::limits::Limit;
 use crate::member::{self, Known, Member, Support, SupportKind};
-use crate::section::Sideways;
+use crate::section::{SectionForces, Sideways};
 
 /// What a document asks for, in the core's own types.
 #[derive(Clone, Debug)]
@@ -18,6 +18,7 @@ pub(super) struct Lowered {
     pub(super) camber: Option<CamberPlan>,
     pub(super) trestles: Option<Trestles>,
     pub(super) limits: Vec<Limit>,
+    pub(super) forces: Vec<(String, SectionForces)>,
 }
 
 /// The core's own types of a document, or all mistakes of meaning in it.
@@ -26,6 +27,7 @@ pub(super) fn lower(document: &JobDocument) -> Result<Lowered, Vec<Problem>> {
     check_quantity(&mut problems, document.quantity);
     let materials = lower_material::all(&document.materials, &mut problems);
     let section = lower_section::section(&document.section, &materials, &mut problems);
+    let forces = lower_section::forces(&document.section, &mut problems);
     let length = document.member.length.value();
     let supports: Vec<_> = document
         .member
@@ -94,6 +96,7 @@ pub(super) fn lower(document: &JobDocument) -> Result<Lowered, Vec<Problem>> {
         camber: camber.flatten(),
         trestles: trestles.flatten(),
         limits,
+        forces,
     })
 }
 

@@ -1,17 +1,37 @@
 //! The section of the document.
 
 use super::document_section::{
-    AxisDocument, InitialStrainDocument, OutlineDocument, PartDocument, PlaceDocument,
-    SectionDocument,
+    AxisDocument, ForcesDocument, InitialStrainDocument, OutlineDocument, PartDocument,
+    PlaceDocument, SectionDocument,
 };
 use super::written::Written;
+use crate::check;
 use crate::error::{ErrorKind, Problem};
 use crate::lookup;
 use crate::material::Material;
 use crate::outline::{Outline, Vertex};
 use crate::path;
-use crate::section::{InitialStrain, MirrorAxis, Part, Section, Side};
+use crate::section::{InitialStrain, MirrorAxis, Part, Section, SectionForces, Side};
 use crate::units::{Curvature, Length};
+
+/// The named forces on the section that are known; a name that stands twice is a problem.
+pub(super) fn forces(
+    document: &SectionDocument,
+    problems: &mut Vec<Problem>,
+) -> Vec<(String, SectionForces)> {
+    let names = document.forces.iter().map(|forces| forces.name.as_str());
+    check::unique(problems, names, "forces", "section.forces");
+    let lowered = |forces: &ForcesDocument| {
+        check::name(problems, &forces.name, "section.forces");
+        let given = SectionForces {
+            axial: forces.axial.value()?,
+            moment_y: forces.moment_y.value()?,
+            moment_z: forces.moment_z.value()?,
+        };
+        Some((forces.name.clone(), given))
+    };
+    document.forces.iter().filter_map(lowered).collect()
+}
 
 /// The section, if all its parts are known and fit together.
 pub(super) fn section(

@@ -58,6 +58,7 @@ use crate::camber::{CamberPlan, Trestles};
 use crate::error::{Error, ErrorKind, Problem, Result};
 use crate::limits::Limit;
 use crate::member::Member;
+use crate::section::SectionForces;
 use lower::Lowered;
 use reader::{Node, NodeValue};
 use std::path::Path;
@@ -166,6 +167,12 @@ impl Job {
     #[must_use]
     pub fn limits(&self) -> &[Limit] {
         &self.lowered.limits
+    }
+
+    /// The named forces on the section whose stresses are asked for.
+    #[must_use]
+    pub fn section_forces(&self) -> &[(String, SectionForces)] {
+        &self.lowered.forces
     }
 
     pub(crate) const fn document(&self) -> &JobDocument {

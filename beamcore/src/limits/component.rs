@@ -88,6 +88,20 @@ impl Response {
         Ok(Field::new(sum.between(span.from().si(), span.to().si())))
     }
 
+    /// w_c: the camber line over a span, positive upward; zero everywhere without a camber.
+    ///
+    /// # Errors
+    /// [`crate::ErrorKind::Lookup`] if there is no such span.
+    #[cfg(feature = "document")]
+    pub(crate) fn camber_of_span(&self, camber: Option<&Camber>, span: &str) -> Result<Field<Length>> {
+        let span = self.member().span(span)?;
+        let mut line = self.deflection_line("permanent", Time::Initial)?.zeroed();
+        if let Some(camber) = camber {
+            line.add(camber.line(line.stations()).iter(), 1.0);
+        }
+        Ok(Field::new(line.between(span.from().si(), span.to().si())))
+    }
+
     /// The deflection of one span under a combination: between two supports from the chord through
     /// them, of an overhang from its support.
     ///

@@ -7,7 +7,7 @@ use super::document::{
     TransformedOutcome, TransformedPartOutcome, TransformedStateOutcome, UtilisationOutcome,
 };
 use super::document_deflection::{SpanDeflectionOutcome, SpanOutcome};
-use super::{build_deflection, notes};
+use super::{build_deflection, build_forces, notes};
 use crate::error::Result;
 use crate::job::Job;
 use crate::material::{DesignStrength, Material};
@@ -33,7 +33,7 @@ pub(super) fn outcome(job: &Job) -> Result<OutcomeDocument> {
         job: job.document().clone(),
         rules: notes::rules(member),
         materials: materials(member.section()),
-        section: section(member)?,
+        section: section(job)?,
         member: member_outcome(job),
         combinations: combinations?,
         components: build_deflection::components(&response, camber.as_ref())?,
@@ -121,7 +121,8 @@ fn strength(strength: &DesignStrength) -> StrengthOutcome {
     }
 }
 
-fn section(member: &Member) -> Result<SectionOutcome> {
+fn section(job: &Job) -> Result<SectionOutcome> {
+    let member = job.member();
     let section = member.section();
     let transformed = distinct(section).into_iter().map(|material| {
         let name = material.name();
@@ -140,6 +141,7 @@ fn section(member: &Member) -> Result<SectionOutcome> {
             .enumerate()
             .map(|(i, p)| part(member, p, i))
             .collect(),
+        forces: build_forces::forces(job)?,
         transformed: transformed.collect::<Result<_>>()?,
     })
 }

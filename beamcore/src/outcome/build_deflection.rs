@@ -48,6 +48,10 @@ fn span_components(
     };
     Ok(SpanComponentsOutcome {
         name: span.name().into(),
+        w_c: response
+            .camber_of_span(camber, span.name())?
+            .greatest()
+            .into(),
         w_inst: greatest(Component::Instant)?,
         w_1: greatest(Component::Permanent)?,
         w_2: greatest(Component::Creep)?,

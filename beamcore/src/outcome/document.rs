@@ -97,8 +97,41 @@ pub(super) struct SectionOutcome {
     #[serde(rename = "final")]
     pub(super) end: StiffnessOutcome,
     pub(super) parts: Vec<PartOutcome>,
+    /// The stresses under the named forces of the job.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(super) forces: Vec<ForcesOutcome>,
     /// The section transformed to each of its materials.
     pub(super) transformed: Vec<TransformedOutcome>,
+}
+
+/// The stresses of the section under named forces.
+#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
+#[serde(deny_unknown_fields)]
+pub(super) struct ForcesOutcome {
+    /// The name of the forces.
+    pub(super) name: String,
+    pub(super) initial: Vec<PartForcesOutcome>,
+    #[serde(rename = "final")]
+    pub(super) end: Vec<PartForcesOutcome>,
+}
+
+/// The greatest and the least stress in a part under named forces.
+#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
+#[serde(deny_unknown_fields)]
+pub(super) struct PartForcesOutcome {
+    /// The name of the part.
+    pub(super) name: String,
+    pub(super) greatest: PointOutcome,
+    pub(super) least: PointOutcome,
+}
+
+/// A stress at a point of the section.
+#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
+#[serde(deny_unknown_fields)]
+pub(super) struct PointOutcome {
+    pub(super) value_Pa: f64,
+    pub(super) y_m: f64,
+    pub(super) z_m: f64,
 }
 
 /// E-weighted sums of a section.

@@ -44,6 +44,8 @@ pub(super) struct ComponentsOutcome {
 pub(super) struct SpanComponentsOutcome {
     /// The name of the span.
     pub(super) name: String,
+    /// The camber of the unloaded member, positive upward; zero without one.
+    pub(super) w_c: LengthExtreme,
     /// Characteristic combination, initial.
     pub(super) w_inst: LengthExtreme,
     /// Permanent actions, initial.

@@ -2,6 +2,7 @@
 
 mod build;
 mod build_deflection;
+mod build_forces;
 mod document;
 mod document_deflection;
 mod extremes;

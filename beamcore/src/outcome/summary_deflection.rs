@@ -41,16 +41,17 @@ fn at(greatest: &LengthExtreme) -> String {
 /// The components of the deflection, span by span.
 pub(super) fn components(page: &mut Page, outcome: &OutcomeDocument) {
     page.heading("COMPONENTS OF THE DEFLECTION, mm (EN 1990 A1.4.3)");
-    page.line("w_inst instant; w_1 permanent, instant; w_2 creep under permanent load;");
-    page.line("w_3 variable, with its creep; w_tot sum of the three; w_max after the camber");
-    page.line("Span                               w_inst    w_1    w_2    w_3  w_tot  w_max");
+    page.line("w_c camber; w_inst instant; w_1 permanent, instant; w_2 creep under permanent");
+    page.line("load; w_3 variable, with its creep; w_tot = w_1 + w_2 + w_3; w_max = w_tot - w_c");
+    page.line("Span                             w_c w_inst    w_1    w_2    w_3  w_tot  w_max");
     for combination in &outcome.components {
         page.line(&format!("under the {} combination", combination.name));
         for span in &combination.spans {
             let cell = |extreme: &LengthExtreme| figure(extreme.value_m * 1e3, 1);
             page.line(&format!(
-                "{:<34} {:>6} {:>6} {:>6} {:>6} {:>6} {:>6}",
-                short_to(&span.name, 34),
+                "{:<29} {:>6} {:>6} {:>6} {:>6} {:>6} {:>6} {:>6}",
+                short_to(&span.name, 29),
+                cell(&span.w_c),
                 cell(&span.w_inst),
                 cell(&span.w_1),
                 cell(&span.w_2),

@@ -57,7 +57,11 @@ impl Response {
                 .iter()
                 .map(|action| beam.solve(&case(action)));
             let free = state.free.curvature_y.si();
-            let strains = beam.solve(&crate::member::curvature_case(beam, free));
+            let strains = if free == 0.0 {
+                Solved::at_rest(beam.stations().len())
+            } else {
+                beam.solve(&crate::member::curvature_case(beam, free))
+            };
             actions.chain(std::iter::once(strains)).collect()
         });
         let stations = Arc::from(member.state(Time::Initial).beam.stations());

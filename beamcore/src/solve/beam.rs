@@ -46,6 +46,17 @@ pub(crate) struct Solved {
     pub(crate) residual: f64,
 }
 
+impl Solved {
+    /// The solution of a member with so many stations on which nothing acts.
+    pub(crate) fn at_rest(stations: usize) -> Self {
+        Self {
+            fields: vec![PieceFields::default(); stations - 1],
+            reactions: vec![Reaction::default(); stations],
+            residual: 0.0,
+        }
+    }
+}
+
 impl LoadCase {
     /// No load on a member with so many stations.
     pub(crate) fn none(stations: usize) -> Self {

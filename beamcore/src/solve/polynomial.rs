@@ -25,7 +25,7 @@ pub(crate) struct PieceLoad {
 }
 
 /// The four fields over one piece, each a polynomial of t from 0 (left end) to 1 (right end).
-#[derive(Clone, Copy, Debug, PartialEq)]
+#[derive(Clone, Copy, Debug, Default, PartialEq)]
 pub(crate) struct PieceFields {
     pub(crate) deflection: Coefficients,
     pub(crate) slope: Coefficients,
