@@ -249,7 +249,12 @@ proptest! {
         let peak = plain.deflection("permanent", Time::Final).unwrap().greatest().value.to_m();
         let a = deflection_at(&plain, Time::Final, x.m());
         let b = deflection_at(&mirrored, Time::Final, (6.0 - x).m());
-        prop_assert!(close(a, b, peak, 1e-9), "{} {}", a, b);
+        // A load that all but stands on the fixed support bends nothing: there the deflection is a
+        // difference of forces, known to the rounding of P L^3/EI.
+        let stiffness = plain.member().section().stiffness(Time::Final).bending_yy();
+        let scale = p.kN().to_N() * 216.0 / stiffness.to_N_m2();
+        let slack = 1e-9 * peak.abs() + 1e-14 * scale;
+        prop_assert!((a - b).abs() <= slack, "{} {}", a, b);
     }
 
     /// Reactions carry the loads, and the extremes are not exceeded anywhere on a fine grid.

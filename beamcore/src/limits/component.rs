@@ -93,7 +93,11 @@ impl Response {
     /// # Errors
     /// [`crate::ErrorKind::Lookup`] if there is no such span.
     #[cfg(feature = "document")]
-    pub(crate) fn camber_of_span(&self, camber: Option<&Camber>, span: &str) -> Result<Field<Length>> {
+    pub(crate) fn camber_of_span(
+        &self,
+        camber: Option<&Camber>,
+        span: &str,
+    ) -> Result<Field<Length>> {
         let span = self.member().span(span)?;
         let mut line = self.deflection_line("permanent", Time::Initial)?.zeroed();
         if let Some(camber) = camber {
