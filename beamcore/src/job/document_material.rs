@@ -55,6 +55,9 @@ pub(crate) struct MaterialDocument {
     /// The factors that make design strengths of characteristic ones.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(crate) design_factors: Option<FactorsDocument>,
+    /// The design shear strength.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(crate) shear_strength: Option<Written<Stress>>,
     /// The design strengths.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(crate) design_strength: Option<StrengthDocument>,

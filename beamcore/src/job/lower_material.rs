@@ -106,6 +106,9 @@ impl Lowering<'_> {
         if let Some(strength) = &document.design_strength {
             material = material.design_strength(lower_strength::design(strength)?);
         }
+        if let Some(strength) = &document.shear_strength {
+            material = material.shear_strength(strength.value()?);
+        }
         Some(material)
     }
 

@@ -95,6 +95,7 @@ fn materials(section: &Section) -> Vec<MaterialOutcome> {
         creep_basis: material.creep().basis().into(),
         shear_modulus_Pa: material.mean_shear_modulus().map(|modulus| modulus.to_Pa()),
         thermal_expansion_per_K: material.expansion().map(|alpha| alpha.to_per_K()),
+        shear_strength_Pa: material.design_shear_strength().map(|f| f.to_Pa()),
         design_strength: material.strength().map(strength),
         overrides: material.overrides().to_vec(),
         density_kg_per_m3: material

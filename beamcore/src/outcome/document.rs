@@ -65,6 +65,9 @@ pub(super) struct MaterialOutcome {
     pub(super) shear_modulus_Pa: Option<f64>,
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(super) thermal_expansion_per_K: Option<f64>,
+    /// The design shear strength; no shear stress is compared with it yet.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(super) shear_strength_Pa: Option<f64>,
     /// The design strengths with which stresses were compared.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(super) design_strength: Option<StrengthOutcome>,

@@ -150,7 +150,7 @@ pub(super) fn warnings(member: &Member, document: &OutcomeDocument) -> Vec<Strin
         .actions()
         .iter()
         .any(|action| matches!(action.kind(), ActionKind::Variable(_)));
-    if variable && member.supports().len() > 2 {
+    if variable && member.spans().len() > 1 {
         notes.push(
             "Variable actions act on the whole of their loads at once: the worst pattern of \
              loaded and unloaded spans was not searched"
