@@ -1,6 +1,6 @@
 //! Stresses of the section under the named forces of the job.
 
-use super::document::{ForcesOutcome, PartForcesOutcome, PointOutcome};
+use super::document_forces::{ForcesOutcome, PartForcesOutcome, PointOutcome};
 use crate::error::Result;
 use crate::job::Job;
 use crate::section::{PointStress, SectionForces};

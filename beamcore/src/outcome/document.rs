@@ -8,6 +8,7 @@
 use super::document_deflection::{
     CamberOutcome, ComponentsOutcome, LimitOutcome, SpanDeflectionOutcome, SpanOutcome,
 };
+use super::document_forces::ForcesOutcome;
 use super::extremes::{AngleExtremes, ForceExtremes, LengthExtremes, MomentExtremes};
 use crate::job::JobDocument;
 use schemars::JsonSchema;
@@ -105,36 +106,6 @@ pub(super) struct SectionOutcome {
     pub(super) forces: Vec<ForcesOutcome>,
     /// The section transformed to each of its materials.
     pub(super) transformed: Vec<TransformedOutcome>,
-}
-
-/// The stresses of the section under named forces.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(super) struct ForcesOutcome {
-    /// The name of the forces.
-    pub(super) name: String,
-    pub(super) initial: Vec<PartForcesOutcome>,
-    #[serde(rename = "final")]
-    pub(super) end: Vec<PartForcesOutcome>,
-}
-
-/// The greatest and the least stress in a part under named forces.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(super) struct PartForcesOutcome {
-    /// The name of the part.
-    pub(super) name: String,
-    pub(super) greatest: PointOutcome,
-    pub(super) least: PointOutcome,
-}
-
-/// A stress at a point of the section.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(super) struct PointOutcome {
-    pub(super) value_Pa: f64,
-    pub(super) y_m: f64,
-    pub(super) z_m: f64,
 }
 
 /// E-weighted sums of a section.

@@ -5,6 +5,7 @@ mod build_deflection;
 mod build_forces;
 mod document;
 mod document_deflection;
+mod document_forces;
 mod extremes;
 mod figure;
 mod notes;
