@@ -148,8 +148,12 @@ fn missing(path: &str, reached: &str, value: &Value) -> crate::Error {
     Problem::new(ErrorKind::Lookup, path, "no result", expected).into()
 }
 
-/// The path of the first number that JSON cannot hold (it becomes null).
+/// The path of the first number that JSON cannot hold (it becomes null). Paths are made only on the
+/// way to it: an outcome has a thousand numbers, and next to always all of them are finite.
 fn not_finite(value: &Value, base: &str) -> Option<String> {
+    if !holds_null(value) {
+        return None;
+    }
     match value {
         Value::Null => Some(base.to_owned()),
         Value::Array(list) => list
@@ -163,9 +167,31 @@ fn not_finite(value: &Value, base: &str) -> Option<String> {
     }
 }
 
+fn holds_null(value: &Value) -> bool {
+    match value {
+        Value::Null => true,
+        Value::Array(list) => list.iter().any(holds_null),
+        Value::Object(map) => map.values().any(holds_null),
+        Value::Bool(_) | Value::Number(_) | Value::String(_) => false,
+    }
+}
+
 /// The JSON schema of the outcome document.
 #[must_use]
 pub fn schema() -> String {
     serde_json::to_string_pretty(&schemars::schema_for!(OutcomeDocument))
         .expect("a schema is plain data")
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+
+    #[test]
+    fn a_number_that_json_cannot_hold_is_found_by_its_path() {
+        let whole = serde_json::json!({"a": [1.0, {"b": 2.0}]});
+        assert_eq!(not_finite(&whole, ""), None);
+        let broken = serde_json::json!({"a": [1.0, {"b": null}], "c": null});
+        assert_eq!(not_finite(&broken, "").as_deref(), Some("a[1].b"));
+    }
 }
