@@ -70,10 +70,9 @@ fn a_truncated_document_is_an_error_at_every_place() {
         Path::new(env!("CARGO_MANIFEST_DIR")).join("examples/jobs/garden-wall.toml"),
     )
     .unwrap();
-    let last_table = whole.find("[camber]").unwrap();
-    for end in 0..last_table {
-        // Before the actions are complete nothing can be a whole job.
-        if whole.is_char_boundary(end) && end < whole.find("[[actions]]").unwrap() {
+    // Before the actions begin nothing can be a whole job.
+    for end in 0..whole.find("[[actions]]").unwrap() {
+        if whole.is_char_boundary(end) {
             assert!(
                 Job::read(&whole[..end], Format::Toml).is_err(),
                 "cut at {end}"
