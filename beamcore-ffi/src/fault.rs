@@ -1,8 +1,7 @@
 //! What a function of the ABI fails with: an error of the core or a wrong use of this binding.
 
 use crate::status::{
-    BC_ERROR_BUFFER, BC_ERROR_CHOICE, BC_ERROR_COUNT, BC_ERROR_GEOMETRY, BC_ERROR_NULL,
-    BC_ERROR_PANIC, BC_ERROR_UTF8,
+    BC_ERROR_BUFFER, BC_ERROR_CHOICE, BC_ERROR_COUNT, BC_ERROR_NULL, BC_ERROR_PANIC, BC_ERROR_UTF8,
 };
 use beamcore::{Error, Problem};
 use std::any::Any;
@@ -87,16 +86,6 @@ impl Fault {
             BC_ERROR_COUNT,
             parameter,
             number.to_string(),
-            expected.to_owned(),
-        )
-    }
-
-    /// An outline of another shape than the one that is needed.
-    pub(crate) fn outline(found: &str, expected: &str) -> Self {
-        Self::own(
-            BC_ERROR_GEOMETRY,
-            "outline",
-            found.to_owned(),
             expected.to_owned(),
         )
     }

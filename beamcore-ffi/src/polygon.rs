@@ -4,7 +4,7 @@ use crate::fault::Fault;
 use crate::guard;
 use crate::handle::{self, Slot};
 use crate::outline::BcOutline;
-use beamcore::section::{Outline, polygon};
+use beamcore::section::polygon;
 use beamcore::units::Length;
 
 /// The corners that two lists of one length hold.
@@ -68,12 +68,7 @@ pub unsafe extern "C" fn bc_outline_with_hole(
                 Slot::new(outline_out, "outline_out")?,
             )
         };
-        let Outline::Polygon { points, holes } = outline else {
-            return Err(Fault::outline(outline.name(), "polygon"));
-        };
-        let mut holes = holes.clone();
-        holes.push(hole);
-        out.give(BcOutline(polygon(points.clone(), holes)));
+        out.give(BcOutline(outline.clone().with_hole(hole)?));
         Ok(())
     })
 }

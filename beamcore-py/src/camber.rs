@@ -1,6 +1,5 @@
 //! The class `Camber`, and the wish for one.
 
-use crate::choice::chosen;
 use crate::convert::{self, Inputs};
 use crate::error::OrRaise;
 use crate::made::{Made, Recipe, Reduced};
@@ -8,6 +7,7 @@ use crate::quantity::Quantity;
 use crate::response::Response;
 use crate::run::run;
 use beamcore::camber::{self, CamberPlan, Shape};
+use beamcore::choice::chosen;
 use beamcore::time::Time;
 use beamcore::units::Length;
 use pyo3::prelude::*;

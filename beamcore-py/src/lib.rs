@@ -7,7 +7,6 @@ mod record;
 mod action;
 mod camber;
 mod characteristic;
-mod choice;
 mod classes;
 mod combination;
 mod concrete_age;

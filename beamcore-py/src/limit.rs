@@ -1,20 +1,20 @@
 //! The classes `Limit` and `LimitCheck`, and components of a deflection as texts.
 
 use crate::camber::Camber;
-use crate::choice::chosen;
 use crate::convert::Inputs;
 use crate::made::{Made, Recipe, Reduced};
 use crate::operand::Number;
 use crate::quantity::Quantity;
 use crate::run::run;
+use beamcore::Result;
+use beamcore::choice::chosen;
 use beamcore::limits::{self, Allowed, Component};
-use beamcore::{Problem, Result};
 use pyo3::exceptions::PyTypeError;
 use pyo3::prelude::*;
 use pyo3::types::{PyDict, PyTuple};
 
 /// The component of a symbol, for example "w_tot".
-pub(crate) fn component(symbol: &str) -> Result<Component, Problem> {
+pub(crate) fn component(symbol: &str) -> Result<Component> {
     chosen(symbol, "component", &Component::ALL, Component::symbol)
 }
 

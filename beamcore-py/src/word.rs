@@ -1,7 +1,7 @@
 //! Words: whether a member is held sideways, axes of mirroring, durations of actions.
 
-use crate::choice::chosen;
 use crate::error::OrRaise;
+use beamcore::choice::chosen;
 use beamcore::{member, section};
 use pyo3::prelude::*;
 

@@ -30,6 +30,7 @@
 
 pub mod camber;
 mod check;
+pub mod choice;
 pub mod constants;
 mod error;
 pub mod field;

@@ -1,6 +1,6 @@
 //! The times at which results are given.
 
-use crate::error::{ErrorKind, Problem};
+use crate::choice::chosen;
 use std::fmt;
 use std::str::FromStr;
 
@@ -38,17 +38,6 @@ impl FromStr for Time {
     type Err = crate::Error;
 
     fn from_str(text: &str) -> Result<Self, Self::Err> {
-        Self::ALL
-            .into_iter()
-            .find(|time| time.name() == text)
-            .ok_or_else(|| {
-                Problem::new(
-                    ErrorKind::Name,
-                    "time",
-                    format!("\"{text}\""),
-                    "one of \"initial\", \"final\"",
-                )
-                .into()
-            })
+        chosen(text, "time", &Self::ALL, Self::name)
     }
 }

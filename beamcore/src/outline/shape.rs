@@ -1,5 +1,6 @@
 //! The shapes that outlines of parts have.
 
+use crate::error::{ErrorKind, Problem, Result};
 use crate::units::Length;
 
 /// A point of a polygon: y to the right, z up.
@@ -130,6 +131,24 @@ pub const fn rectangle(width: Length, height: Length) -> Outline {
 #[must_use]
 pub const fn polygon(points: Vec<Vertex>, holes: Vec<Vec<Vertex>>) -> Outline {
     Outline::Polygon { points, holes }
+}
+
+impl Outline {
+    /// The same polygon with one more hole, given by its corners.
+    ///
+    /// # Errors
+    /// [`ErrorKind::Geometry`] for an outline that is no polygon: only polygons have holes.
+    pub fn with_hole(self, hole: Vec<Vertex>) -> Result<Self> {
+        match self {
+            Self::Polygon { points, mut holes } => {
+                holes.push(hole);
+                Ok(Self::Polygon { points, holes })
+            }
+            other => {
+                Err(Problem::new(ErrorKind::Geometry, "outline", other.name(), "polygon").into())
+            }
+        }
+    }
 }
 
 /// A full disc.
