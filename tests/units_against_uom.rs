@@ -6,10 +6,12 @@
 
 use beamcore::units::table;
 use uom::si::f64::{
-    Angle, Area, Force, Length, Mass, MassDensity, Pressure, Ratio, Time, Torque, Volume,
+    Angle, Area, Force, Length, Mass, MassDensity, Pressure, Ratio, TemperatureInterval, Time,
+    Torque, Volume,
 };
 use uom::si::{
-    angle, area, force, length, mass, mass_density, pressure, ratio, time, torque, volume,
+    angle, area, force, length, mass, mass_density, pressure, ratio, temperature_interval, time,
+    torque, volume,
 };
 
 fn rows() -> Vec<(&'static str, &'static str, f64)> {
@@ -88,6 +90,18 @@ fn rows() -> Vec<(&'static str, &'static str, f64)> {
             "Angle",
             "deg",
             Angle::new::<angle::degree>(1.0).get::<angle::radian>(),
+        ),
+        (
+            "TemperatureChange",
+            "degF",
+            TemperatureInterval::new::<temperature_interval::degree_fahrenheit>(1.0)
+                .get::<temperature_interval::kelvin>(),
+        ),
+        (
+            "SpringStiffness",
+            "kN/mm",
+            newton(Force::new::<force::kilonewton>(1.0))
+                / m(Length::new::<length::millimeter>(1.0)),
         ),
         ("Mass", "t", kg(Mass::new::<mass::ton>(1.0))),
         ("Mass", "lb", pound),

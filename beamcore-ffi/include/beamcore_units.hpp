@@ -844,6 +844,268 @@ private:
     double si_;
 };
 
+// Slip modulus: one double in the SI unit N/m2.
+class SlipModulus {
+public:
+    static constexpr SlipModulus from_si(double si) { return SlipModulus(si); }
+    constexpr double si() const { return si_; }
+
+    // The unit N/m2.
+    static constexpr SlipModulus from_N_per_m2(double x) { return SlipModulus(x * 1.0 / 1.0); }
+    constexpr double to_N_per_m2() const { return si_ * 1.0 / 1.0; }
+
+    // The unit kN/m2.
+    static constexpr SlipModulus from_kN_per_m2(double x) { return SlipModulus(x * 1000.0 / 1.0); }
+    constexpr double to_kN_per_m2() const { return si_ * 1.0 / 1000.0; }
+
+    // The unit N/mm2.
+    static constexpr SlipModulus from_N_per_mm2(double x) { return SlipModulus(x * 1000000.0 / 1.0); }
+    constexpr double to_N_per_mm2() const { return si_ * 1.0 / 1000000.0; }
+
+    friend constexpr bool operator==(SlipModulus a, SlipModulus b) { return a.si_ == b.si_; }
+    friend constexpr bool operator!=(SlipModulus a, SlipModulus b) { return a.si_ != b.si_; }
+    friend constexpr bool operator<(SlipModulus a, SlipModulus b) { return a.si_ < b.si_; }
+    friend constexpr bool operator<=(SlipModulus a, SlipModulus b) { return a.si_ <= b.si_; }
+    friend constexpr bool operator>(SlipModulus a, SlipModulus b) { return a.si_ > b.si_; }
+    friend constexpr bool operator>=(SlipModulus a, SlipModulus b) { return a.si_ >= b.si_; }
+
+    friend constexpr SlipModulus operator+(SlipModulus a, SlipModulus b) { return SlipModulus(a.si_ + b.si_); }
+    friend constexpr SlipModulus operator-(SlipModulus a, SlipModulus b) { return SlipModulus(a.si_ - b.si_); }
+    friend constexpr SlipModulus operator-(SlipModulus a) { return SlipModulus(-a.si_); }
+    friend constexpr SlipModulus operator*(SlipModulus a, double x) { return SlipModulus(a.si_ * x); }
+    friend constexpr SlipModulus operator*(double x, SlipModulus a) { return SlipModulus(x * a.si_); }
+    friend constexpr SlipModulus operator/(SlipModulus a, double x) { return SlipModulus(a.si_ / x); }
+    friend constexpr double operator/(SlipModulus a, SlipModulus b) { return a.si_ / b.si_; }
+
+private:
+    explicit constexpr SlipModulus(double si) : si_(si) {}
+    double si_;
+};
+
+// Shear flow: one double in the SI unit N/m.
+class ShearFlow {
+public:
+    static constexpr ShearFlow from_si(double si) { return ShearFlow(si); }
+    constexpr double si() const { return si_; }
+
+    // The unit N/m.
+    static constexpr ShearFlow from_N_per_m(double x) { return ShearFlow(x * 1.0 / 1.0); }
+    constexpr double to_N_per_m() const { return si_ * 1.0 / 1.0; }
+
+    // The unit kN/m.
+    static constexpr ShearFlow from_kN_per_m(double x) { return ShearFlow(x * 1000.0 / 1.0); }
+    constexpr double to_kN_per_m() const { return si_ * 1.0 / 1000.0; }
+
+    // The unit N/mm.
+    static constexpr ShearFlow from_N_per_mm(double x) { return ShearFlow(x * 1000.0 / 1.0); }
+    constexpr double to_N_per_mm() const { return si_ * 1.0 / 1000.0; }
+
+    friend constexpr bool operator==(ShearFlow a, ShearFlow b) { return a.si_ == b.si_; }
+    friend constexpr bool operator!=(ShearFlow a, ShearFlow b) { return a.si_ != b.si_; }
+    friend constexpr bool operator<(ShearFlow a, ShearFlow b) { return a.si_ < b.si_; }
+    friend constexpr bool operator<=(ShearFlow a, ShearFlow b) { return a.si_ <= b.si_; }
+    friend constexpr bool operator>(ShearFlow a, ShearFlow b) { return a.si_ > b.si_; }
+    friend constexpr bool operator>=(ShearFlow a, ShearFlow b) { return a.si_ >= b.si_; }
+
+    friend constexpr ShearFlow operator+(ShearFlow a, ShearFlow b) { return ShearFlow(a.si_ + b.si_); }
+    friend constexpr ShearFlow operator-(ShearFlow a, ShearFlow b) { return ShearFlow(a.si_ - b.si_); }
+    friend constexpr ShearFlow operator-(ShearFlow a) { return ShearFlow(-a.si_); }
+    friend constexpr ShearFlow operator*(ShearFlow a, double x) { return ShearFlow(a.si_ * x); }
+    friend constexpr ShearFlow operator*(double x, ShearFlow a) { return ShearFlow(x * a.si_); }
+    friend constexpr ShearFlow operator/(ShearFlow a, double x) { return ShearFlow(a.si_ / x); }
+    friend constexpr double operator/(ShearFlow a, ShearFlow b) { return a.si_ / b.si_; }
+
+private:
+    explicit constexpr ShearFlow(double si) : si_(si) {}
+    double si_;
+};
+
+// Slip modulus of a fastener: one double in the SI unit N/m.
+class FastenerStiffness {
+public:
+    static constexpr FastenerStiffness from_si(double si) { return FastenerStiffness(si); }
+    constexpr double si() const { return si_; }
+
+    // The unit N/m.
+    static constexpr FastenerStiffness from_N_per_m(double x) { return FastenerStiffness(x * 1.0 / 1.0); }
+    constexpr double to_N_per_m() const { return si_ * 1.0 / 1.0; }
+
+    // The unit N/mm.
+    static constexpr FastenerStiffness from_N_per_mm(double x) { return FastenerStiffness(x * 1000.0 / 1.0); }
+    constexpr double to_N_per_mm() const { return si_ * 1.0 / 1000.0; }
+
+    // The unit kN/mm.
+    static constexpr FastenerStiffness from_kN_per_mm(double x) { return FastenerStiffness(x * 1000000.0 / 1.0); }
+    constexpr double to_kN_per_mm() const { return si_ * 1.0 / 1000000.0; }
+
+    friend constexpr bool operator==(FastenerStiffness a, FastenerStiffness b) { return a.si_ == b.si_; }
+    friend constexpr bool operator!=(FastenerStiffness a, FastenerStiffness b) { return a.si_ != b.si_; }
+    friend constexpr bool operator<(FastenerStiffness a, FastenerStiffness b) { return a.si_ < b.si_; }
+    friend constexpr bool operator<=(FastenerStiffness a, FastenerStiffness b) { return a.si_ <= b.si_; }
+    friend constexpr bool operator>(FastenerStiffness a, FastenerStiffness b) { return a.si_ > b.si_; }
+    friend constexpr bool operator>=(FastenerStiffness a, FastenerStiffness b) { return a.si_ >= b.si_; }
+
+    friend constexpr FastenerStiffness operator+(FastenerStiffness a, FastenerStiffness b) { return FastenerStiffness(a.si_ + b.si_); }
+    friend constexpr FastenerStiffness operator-(FastenerStiffness a, FastenerStiffness b) { return FastenerStiffness(a.si_ - b.si_); }
+    friend constexpr FastenerStiffness operator-(FastenerStiffness a) { return FastenerStiffness(-a.si_); }
+    friend constexpr FastenerStiffness operator*(FastenerStiffness a, double x) { return FastenerStiffness(a.si_ * x); }
+    friend constexpr FastenerStiffness operator*(double x, FastenerStiffness a) { return FastenerStiffness(x * a.si_); }
+    friend constexpr FastenerStiffness operator/(FastenerStiffness a, double x) { return FastenerStiffness(a.si_ / x); }
+    friend constexpr double operator/(FastenerStiffness a, FastenerStiffness b) { return a.si_ / b.si_; }
+
+private:
+    explicit constexpr FastenerStiffness(double si) : si_(si) {}
+    double si_;
+};
+
+// Spring stiffness: one double in the SI unit N/m.
+class SpringStiffness {
+public:
+    static constexpr SpringStiffness from_si(double si) { return SpringStiffness(si); }
+    constexpr double si() const { return si_; }
+
+    // The unit N/m.
+    static constexpr SpringStiffness from_N_per_m(double x) { return SpringStiffness(x * 1.0 / 1.0); }
+    constexpr double to_N_per_m() const { return si_ * 1.0 / 1.0; }
+
+    // The unit kN/m.
+    static constexpr SpringStiffness from_kN_per_m(double x) { return SpringStiffness(x * 1000.0 / 1.0); }
+    constexpr double to_kN_per_m() const { return si_ * 1.0 / 1000.0; }
+
+    // The unit N/mm.
+    static constexpr SpringStiffness from_N_per_mm(double x) { return SpringStiffness(x * 1000.0 / 1.0); }
+    constexpr double to_N_per_mm() const { return si_ * 1.0 / 1000.0; }
+
+    // The unit kN/mm.
+    static constexpr SpringStiffness from_kN_per_mm(double x) { return SpringStiffness(x * 1000000.0 / 1.0); }
+    constexpr double to_kN_per_mm() const { return si_ * 1.0 / 1000000.0; }
+
+    friend constexpr bool operator==(SpringStiffness a, SpringStiffness b) { return a.si_ == b.si_; }
+    friend constexpr bool operator!=(SpringStiffness a, SpringStiffness b) { return a.si_ != b.si_; }
+    friend constexpr bool operator<(SpringStiffness a, SpringStiffness b) { return a.si_ < b.si_; }
+    friend constexpr bool operator<=(SpringStiffness a, SpringStiffness b) { return a.si_ <= b.si_; }
+    friend constexpr bool operator>(SpringStiffness a, SpringStiffness b) { return a.si_ > b.si_; }
+    friend constexpr bool operator>=(SpringStiffness a, SpringStiffness b) { return a.si_ >= b.si_; }
+
+    friend constexpr SpringStiffness operator+(SpringStiffness a, SpringStiffness b) { return SpringStiffness(a.si_ + b.si_); }
+    friend constexpr SpringStiffness operator-(SpringStiffness a, SpringStiffness b) { return SpringStiffness(a.si_ - b.si_); }
+    friend constexpr SpringStiffness operator-(SpringStiffness a) { return SpringStiffness(-a.si_); }
+    friend constexpr SpringStiffness operator*(SpringStiffness a, double x) { return SpringStiffness(a.si_ * x); }
+    friend constexpr SpringStiffness operator*(double x, SpringStiffness a) { return SpringStiffness(x * a.si_); }
+    friend constexpr SpringStiffness operator/(SpringStiffness a, double x) { return SpringStiffness(a.si_ / x); }
+    friend constexpr double operator/(SpringStiffness a, SpringStiffness b) { return a.si_ / b.si_; }
+
+private:
+    explicit constexpr SpringStiffness(double si) : si_(si) {}
+    double si_;
+};
+
+// Rotational stiffness: one double in the SI unit N m/rad.
+class RotationalStiffness {
+public:
+    static constexpr RotationalStiffness from_si(double si) { return RotationalStiffness(si); }
+    constexpr double si() const { return si_; }
+
+    // The unit N m/rad.
+    static constexpr RotationalStiffness from_N_m_per_rad(double x) { return RotationalStiffness(x * 1.0 / 1.0); }
+    constexpr double to_N_m_per_rad() const { return si_ * 1.0 / 1.0; }
+
+    // The unit kN m/rad.
+    static constexpr RotationalStiffness from_kN_m_per_rad(double x) { return RotationalStiffness(x * 1000.0 / 1.0); }
+    constexpr double to_kN_m_per_rad() const { return si_ * 1.0 / 1000.0; }
+
+    friend constexpr bool operator==(RotationalStiffness a, RotationalStiffness b) { return a.si_ == b.si_; }
+    friend constexpr bool operator!=(RotationalStiffness a, RotationalStiffness b) { return a.si_ != b.si_; }
+    friend constexpr bool operator<(RotationalStiffness a, RotationalStiffness b) { return a.si_ < b.si_; }
+    friend constexpr bool operator<=(RotationalStiffness a, RotationalStiffness b) { return a.si_ <= b.si_; }
+    friend constexpr bool operator>(RotationalStiffness a, RotationalStiffness b) { return a.si_ > b.si_; }
+    friend constexpr bool operator>=(RotationalStiffness a, RotationalStiffness b) { return a.si_ >= b.si_; }
+
+    friend constexpr RotationalStiffness operator+(RotationalStiffness a, RotationalStiffness b) { return RotationalStiffness(a.si_ + b.si_); }
+    friend constexpr RotationalStiffness operator-(RotationalStiffness a, RotationalStiffness b) { return RotationalStiffness(a.si_ - b.si_); }
+    friend constexpr RotationalStiffness operator-(RotationalStiffness a) { return RotationalStiffness(-a.si_); }
+    friend constexpr RotationalStiffness operator*(RotationalStiffness a, double x) { return RotationalStiffness(a.si_ * x); }
+    friend constexpr RotationalStiffness operator*(double x, RotationalStiffness a) { return RotationalStiffness(x * a.si_); }
+    friend constexpr RotationalStiffness operator/(RotationalStiffness a, double x) { return RotationalStiffness(a.si_ / x); }
+    friend constexpr double operator/(RotationalStiffness a, RotationalStiffness b) { return a.si_ / b.si_; }
+
+private:
+    explicit constexpr RotationalStiffness(double si) : si_(si) {}
+    double si_;
+};
+
+// Shear stiffness: one double in the SI unit N.
+class ShearStiffness {
+public:
+    static constexpr ShearStiffness from_si(double si) { return ShearStiffness(si); }
+    constexpr double si() const { return si_; }
+
+    // The unit N.
+    static constexpr ShearStiffness from_N(double x) { return ShearStiffness(x * 1.0 / 1.0); }
+    constexpr double to_N() const { return si_ * 1.0 / 1.0; }
+
+    // The unit kN.
+    static constexpr ShearStiffness from_kN(double x) { return ShearStiffness(x * 1000.0 / 1.0); }
+    constexpr double to_kN() const { return si_ * 1.0 / 1000.0; }
+
+    // The unit MN.
+    static constexpr ShearStiffness from_MN(double x) { return ShearStiffness(x * 1000000.0 / 1.0); }
+    constexpr double to_MN() const { return si_ * 1.0 / 1000000.0; }
+
+    friend constexpr bool operator==(ShearStiffness a, ShearStiffness b) { return a.si_ == b.si_; }
+    friend constexpr bool operator!=(ShearStiffness a, ShearStiffness b) { return a.si_ != b.si_; }
+    friend constexpr bool operator<(ShearStiffness a, ShearStiffness b) { return a.si_ < b.si_; }
+    friend constexpr bool operator<=(ShearStiffness a, ShearStiffness b) { return a.si_ <= b.si_; }
+    friend constexpr bool operator>(ShearStiffness a, ShearStiffness b) { return a.si_ > b.si_; }
+    friend constexpr bool operator>=(ShearStiffness a, ShearStiffness b) { return a.si_ >= b.si_; }
+
+    friend constexpr ShearStiffness operator+(ShearStiffness a, ShearStiffness b) { return ShearStiffness(a.si_ + b.si_); }
+    friend constexpr ShearStiffness operator-(ShearStiffness a, ShearStiffness b) { return ShearStiffness(a.si_ - b.si_); }
+    friend constexpr ShearStiffness operator-(ShearStiffness a) { return ShearStiffness(-a.si_); }
+    friend constexpr ShearStiffness operator*(ShearStiffness a, double x) { return ShearStiffness(a.si_ * x); }
+    friend constexpr ShearStiffness operator*(double x, ShearStiffness a) { return ShearStiffness(x * a.si_); }
+    friend constexpr ShearStiffness operator/(ShearStiffness a, double x) { return ShearStiffness(a.si_ / x); }
+    friend constexpr double operator/(ShearStiffness a, ShearStiffness b) { return a.si_ / b.si_; }
+
+private:
+    explicit constexpr ShearStiffness(double si) : si_(si) {}
+    double si_;
+};
+
+// Temperature change: one double in the SI unit K.
+class TemperatureChange {
+public:
+    static constexpr TemperatureChange from_si(double si) { return TemperatureChange(si); }
+    constexpr double si() const { return si_; }
+
+    // The unit K.
+    static constexpr TemperatureChange from_K(double x) { return TemperatureChange(x * 1.0 / 1.0); }
+    constexpr double to_K() const { return si_ * 1.0 / 1.0; }
+
+    // The unit degF.
+    static constexpr TemperatureChange from_degF(double x) { return TemperatureChange(x * 5.0 / 9.0); }
+    constexpr double to_degF() const { return si_ * 9.0 / 5.0; }
+
+    friend constexpr bool operator==(TemperatureChange a, TemperatureChange b) { return a.si_ == b.si_; }
+    friend constexpr bool operator!=(TemperatureChange a, TemperatureChange b) { return a.si_ != b.si_; }
+    friend constexpr bool operator<(TemperatureChange a, TemperatureChange b) { return a.si_ < b.si_; }
+    friend constexpr bool operator<=(TemperatureChange a, TemperatureChange b) { return a.si_ <= b.si_; }
+    friend constexpr bool operator>(TemperatureChange a, TemperatureChange b) { return a.si_ > b.si_; }
+    friend constexpr bool operator>=(TemperatureChange a, TemperatureChange b) { return a.si_ >= b.si_; }
+
+    friend constexpr TemperatureChange operator+(TemperatureChange a, TemperatureChange b) { return TemperatureChange(a.si_ + b.si_); }
+    friend constexpr TemperatureChange operator-(TemperatureChange a, TemperatureChange b) { return TemperatureChange(a.si_ - b.si_); }
+    friend constexpr TemperatureChange operator-(TemperatureChange a) { return TemperatureChange(-a.si_); }
+    friend constexpr TemperatureChange operator*(TemperatureChange a, double x) { return TemperatureChange(a.si_ * x); }
+    friend constexpr TemperatureChange operator*(double x, TemperatureChange a) { return TemperatureChange(x * a.si_); }
+    friend constexpr TemperatureChange operator/(TemperatureChange a, double x) { return TemperatureChange(a.si_ / x); }
+    friend constexpr double operator/(TemperatureChange a, TemperatureChange b) { return a.si_ / b.si_; }
+
+private:
+    explicit constexpr TemperatureChange(double si) : si_(si) {}
+    double si_;
+};
+
 // Products and quotients of quantities.
 constexpr Area operator*(Length a, Length b) { return Area::from_si(a.si() * b.si()); }
 constexpr Length operator/(Area a, Length b) { return Length::from_si(a.si() / b.si()); }
@@ -903,6 +1165,29 @@ constexpr Mass operator*(LineMass a, Length b) { return Mass::from_si(a.si() * b
 constexpr LineMass operator/(Mass a, Length b) { return LineMass::from_si(a.si() / b.si()); }
 constexpr Mass operator*(Length a, LineMass b) { return Mass::from_si(a.si() * b.si()); }
 constexpr Length operator/(Mass a, LineMass b) { return Length::from_si(a.si() / b.si()); }
+constexpr Strain operator*(ThermalExpansion a, TemperatureChange b) { return Strain::from_si(a.si() * b.si()); }
+constexpr ThermalExpansion operator/(Strain a, TemperatureChange b) { return ThermalExpansion::from_si(a.si() / b.si()); }
+constexpr Strain operator*(TemperatureChange a, ThermalExpansion b) { return Strain::from_si(a.si() * b.si()); }
+constexpr TemperatureChange operator/(Strain a, ThermalExpansion b) { return TemperatureChange::from_si(a.si() / b.si()); }
+constexpr ShearFlow operator*(SlipModulus a, Length b) { return ShearFlow::from_si(a.si() * b.si()); }
+constexpr SlipModulus operator/(ShearFlow a, Length b) { return SlipModulus::from_si(a.si() / b.si()); }
+constexpr ShearFlow operator*(Length a, SlipModulus b) { return ShearFlow::from_si(a.si() * b.si()); }
+constexpr Length operator/(ShearFlow a, SlipModulus b) { return Length::from_si(a.si() / b.si()); }
+constexpr Moment operator*(RotationalStiffness a, Angle b) { return Moment::from_si(a.si() * b.si()); }
+constexpr RotationalStiffness operator/(Moment a, Angle b) { return RotationalStiffness::from_si(a.si() / b.si()); }
+constexpr Moment operator*(Angle a, RotationalStiffness b) { return Moment::from_si(a.si() * b.si()); }
+constexpr Angle operator/(Moment a, RotationalStiffness b) { return Angle::from_si(a.si() / b.si()); }
+constexpr Force operator*(ShearFlow a, Length b) { return Force::from_si(a.si() * b.si()); }
+constexpr Force operator*(Length a, ShearFlow b) { return Force::from_si(a.si() * b.si()); }
+constexpr Length operator/(Force a, ShearFlow b) { return Length::from_si(a.si() / b.si()); }
+constexpr Force operator*(FastenerStiffness a, Length b) { return Force::from_si(a.si() * b.si()); }
+constexpr Force operator*(Length a, FastenerStiffness b) { return Force::from_si(a.si() * b.si()); }
+constexpr Length operator/(Force a, FastenerStiffness b) { return Length::from_si(a.si() / b.si()); }
+constexpr Force operator*(SpringStiffness a, Length b) { return Force::from_si(a.si() * b.si()); }
+constexpr Force operator*(Length a, SpringStiffness b) { return Force::from_si(a.si() * b.si()); }
+constexpr Length operator/(Force a, SpringStiffness b) { return Length::from_si(a.si() / b.si()); }
+constexpr SlipModulus operator/(FastenerStiffness a, Length b) { return SlipModulus::from_si(a.si() / b.si()); }
+constexpr Length operator/(FastenerStiffness a, SlipModulus b) { return Length::from_si(a.si() / b.si()); }
 
 // Number literals with units: 50_mm, 6.5_kN_per_m.
 namespace literals {
@@ -1046,6 +1331,16 @@ constexpr Duration operator""_d(long double x) { return Duration::from_d(static_
 constexpr Duration operator""_d(unsigned long long x) { return Duration::from_d(static_cast<double>(x)); }
 constexpr Duration operator""_year(long double x) { return Duration::from_year(static_cast<double>(x)); }
 constexpr Duration operator""_year(unsigned long long x) { return Duration::from_year(static_cast<double>(x)); }
+constexpr FastenerStiffness operator""_kN_per_mm(long double x) { return FastenerStiffness::from_kN_per_mm(static_cast<double>(x)); }
+constexpr FastenerStiffness operator""_kN_per_mm(unsigned long long x) { return FastenerStiffness::from_kN_per_mm(static_cast<double>(x)); }
+constexpr RotationalStiffness operator""_N_m_per_rad(long double x) { return RotationalStiffness::from_N_m_per_rad(static_cast<double>(x)); }
+constexpr RotationalStiffness operator""_N_m_per_rad(unsigned long long x) { return RotationalStiffness::from_N_m_per_rad(static_cast<double>(x)); }
+constexpr RotationalStiffness operator""_kN_m_per_rad(long double x) { return RotationalStiffness::from_kN_m_per_rad(static_cast<double>(x)); }
+constexpr RotationalStiffness operator""_kN_m_per_rad(unsigned long long x) { return RotationalStiffness::from_kN_m_per_rad(static_cast<double>(x)); }
+constexpr TemperatureChange operator""_K(long double x) { return TemperatureChange::from_K(static_cast<double>(x)); }
+constexpr TemperatureChange operator""_K(unsigned long long x) { return TemperatureChange::from_K(static_cast<double>(x)); }
+constexpr TemperatureChange operator""_degF(long double x) { return TemperatureChange::from_degF(static_cast<double>(x)); }
+constexpr TemperatureChange operator""_degF(unsigned long long x) { return TemperatureChange::from_degF(static_cast<double>(x)); }
 
 } // namespace literals
 } // namespace beamcore

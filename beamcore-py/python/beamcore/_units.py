@@ -35,6 +35,8 @@ __all__ = [
     "h",
     "day",
     "year",
+    "K",
+    "degF",
 ]
 
 m: Final[Unit] = Unit("m")
@@ -66,3 +68,5 @@ s: Final[Unit] = Unit("s")
 h: Final[Unit] = Unit("h")
 day: Final[Unit] = Unit("d")
 year: Final[Unit] = Unit("year")
+K: Final[Unit] = Unit("K")
+degF: Final[Unit] = Unit("degF")

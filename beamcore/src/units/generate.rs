@@ -1,6 +1,6 @@
 //! The text of the C++ and the Python units, made from the table.
 
-use super::products::PRODUCTS;
+use super::products::{HALF_PRODUCTS, PRODUCTS, QUOTIENTS};
 use super::{TypeRow, Unit, table};
 use std::fmt::Write as _;
 
@@ -10,7 +10,12 @@ const HEAD: &str = "Generated from the units table of beamcore; do not edit.";
 #[must_use]
 pub fn cpp() -> String {
     let classes: String = table().iter().map(cpp_class).collect();
-    let products: String = PRODUCTS.iter().map(cpp_product).collect();
+    let products: String = PRODUCTS
+        .iter()
+        .map(cpp_product)
+        .chain(HALF_PRODUCTS.iter().map(cpp_half_product))
+        .chain(QUOTIENTS.iter().map(cpp_quotient))
+        .collect();
     let literals: String = table().iter().map(cpp_literals).collect();
     format!(
         "\
@@ -98,18 +103,28 @@ fn cpp_conversions(class: &str, unit: &Unit) -> String {
     )
 }
 
+/// The operator `left sign right = result`.
+fn cpp_rule(left: &str, sign: &str, right: &str, result: &str) -> String {
+    format!(
+        "constexpr {result} operator{sign}({left} a, {right} b) \
+         {{ return {result}::from_si(a.si() {sign} b.si()); }}\n"
+    )
+}
+
 fn cpp_product([a, b, c]: &[&str; 3]) -> String {
-    let rule = |left: &str, sign: &str, right: &str, result: &str| {
-        format!(
-            "constexpr {result} operator{sign}({left} a, {right} b) \
-             {{ return {result}::from_si(a.si() {sign} b.si()); }}\n"
-        )
-    };
-    let mut text = rule(a, "*", b, c) + &rule(c, "/", b, a);
+    let mut text = cpp_rule(a, "*", b, c) + &cpp_rule(c, "/", b, a);
     if a != b {
-        text += &(rule(b, "*", a, c) + &rule(c, "/", a, b));
+        text += &(cpp_rule(b, "*", a, c) + &cpp_rule(c, "/", a, b));
     }
     text
+}
+
+fn cpp_half_product([a, b, c]: &[&str; 3]) -> String {
+    cpp_rule(a, "*", b, c) + &cpp_rule(b, "*", a, c) + &cpp_rule(c, "/", a, b)
+}
+
+fn cpp_quotient([a, b, c]: &[&str; 3]) -> String {
+    cpp_rule(a, "/", b, c) + &cpp_rule(a, "/", c, b)
 }
 
 fn cpp_literals(row: &TypeRow) -> String {

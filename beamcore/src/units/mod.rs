@@ -63,7 +63,8 @@ pub use dimension::Dimension;
 pub use number::Number;
 pub use quantity::{
     Angle, Area, AreaLoad, AxialStiffness, BendingStiffness, Curvature, Density, Duration,
-    FirstMoment, Force, Length, LineLoad, LineMass, Mass, Modulus, Moment, Quantity, SecondMoment,
-    Strain, Stress, ThermalExpansion, table,
+    FastenerStiffness, FirstMoment, Force, Length, LineLoad, LineMass, Mass, Modulus, Moment,
+    Quantity, RotationalStiffness, SecondMoment, ShearFlow, ShearStiffness, SlipModulus,
+    SpringStiffness, Strain, Stress, TemperatureChange, ThermalExpansion, table,
 };
 pub use unit::{TypeRow, Unit};

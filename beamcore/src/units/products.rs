@@ -18,7 +18,9 @@ macro_rules! rule {
 macro_rules! products {
     (
         square $Root:ident = $Square:ident;
-        $($A:ident * $B:ident = $C:ident;)+
+        whole { $($A:ident * $B:ident = $C:ident;)+ }
+        half { $($D:ident * $E:ident = $F:ident;)+ }
+        quotients { $($G:ident / $H:ident = $I:ident;)+ }
     ) => {
         rule!($Root Mul mul * $Root = $Square);
         rule!($Square Div div / $Root = $Root);
@@ -28,37 +30,68 @@ macro_rules! products {
             rule!($C Div div / $A = $B);
             rule!($C Div div / $B = $A);
         )+
+        $(
+            rule!($D Mul mul * $E = $F);
+            rule!($E Mul mul * $D = $F);
+            rule!($F Div div / $D = $E);
+        )+
+        $(
+            rule!($G Div div / $H = $I);
+            rule!($G Div div / $I = $H);
+        )+
 
-        /// The names of all products `A * B = C`, for the generated bindings.
+        /// The names of all products `A * B = C` with both their quotients, for the generated
+        /// bindings.
         pub(super) const PRODUCTS: &[[&str; 3]] = &[
             [stringify!($Root), stringify!($Root), stringify!($Square)],
             $([stringify!($A), stringify!($B), stringify!($C)]),+
         ];
+
+        /// The names of the products `A * B = C` of which `C / B` means another quantity.
+        pub(super) const HALF_PRODUCTS: &[[&str; 3]] =
+            &[$([stringify!($D), stringify!($E), stringify!($F)]),+];
+
+        /// The names of the quotients `A / B = C` of which `C * B` means another quantity.
+        pub(super) const QUOTIENTS: &[[&str; 3]] =
+            &[$([stringify!($G), stringify!($H), stringify!($I)]),+];
     };
 }
 
 products! {
     square Length = Area;
-    Area * Length = FirstMoment;
-    FirstMoment * Length = SecondMoment;
-    Force * Length = Moment;
-    LineLoad * Length = Force;
-    AreaLoad * Length = LineLoad;
-    Modulus * Strain = Stress;
-    Stress * Area = Force;
-    Modulus * Area = AxialStiffness;
-    AxialStiffness * Strain = Force;
-    Modulus * SecondMoment = BendingStiffness;
-    BendingStiffness * Curvature = Moment;
-    Curvature * Length = Strain;
-    Density * Area = LineMass;
-    LineMass * Length = Mass;
+    whole {
+        Area * Length = FirstMoment;
+        FirstMoment * Length = SecondMoment;
+        Force * Length = Moment;
+        LineLoad * Length = Force;
+        AreaLoad * Length = LineLoad;
+        Modulus * Strain = Stress;
+        Stress * Area = Force;
+        Modulus * Area = AxialStiffness;
+        AxialStiffness * Strain = Force;
+        Modulus * SecondMoment = BendingStiffness;
+        BendingStiffness * Curvature = Moment;
+        Curvature * Length = Strain;
+        Density * Area = LineMass;
+        LineMass * Length = Mass;
+        ThermalExpansion * TemperatureChange = Strain;
+        SlipModulus * Length = ShearFlow;
+        RotationalStiffness * Angle = Moment;
+    }
+    half {
+        ShearFlow * Length = Force;
+        FastenerStiffness * Length = Force;
+        SpringStiffness * Length = Force;
+    }
+    quotients {
+        FastenerStiffness / Length = SlipModulus;
+    }
 }
 
 #[cfg(test)]
 mod tests {
     use super::super::*;
-    use super::PRODUCTS;
+    use super::{HALF_PRODUCTS, PRODUCTS, QUOTIENTS};
 
     #[test]
     fn products_have_the_dimension_of_their_factors() {
@@ -69,12 +102,22 @@ mod tests {
                 .unwrap()
                 .dimension
         };
-        assert_eq!(PRODUCTS.len(), 15);
-        for [a, b, c] in PRODUCTS {
+        assert_eq!(
+            (PRODUCTS.len(), HALF_PRODUCTS.len(), QUOTIENTS.len()),
+            (18, 3, 1)
+        );
+        for [a, b, c] in PRODUCTS.iter().chain(HALF_PRODUCTS) {
             assert_eq!(
                 dimension(a).times(dimension(b)),
                 Some(dimension(c)),
                 "{a} * {b} = {c}"
+            );
+        }
+        for [a, b, c] in QUOTIENTS {
+            assert_eq!(
+                dimension(a).per(dimension(b)),
+                Some(dimension(c)),
+                "{a} / {b} = {c}"
             );
         }
     }
@@ -90,6 +133,14 @@ mod tests {
         assert_eq!(stress, 5.5.MPa());
         let mass: Mass = 420.kg_per_m3() * (0.1.m() * 0.2.m()) * 5.m();
         assert_eq!(mass.si(), 420.0 * (0.1 * 0.2) * 5.0);
+        let joint: SlipModulus = 2.0 * 4.kN_per_mm() / 160.mm();
+        assert_eq!(joint, SlipModulus::from_N_per_mm2(50.0));
+        let flow: ShearFlow = joint * 0.2.mm();
+        assert_eq!(flow, ShearFlow::from_N_per_mm(10.0));
+        assert_eq!(flow * 160.mm(), 1.6.kN());
+        let strain: Strain = 12e-6.per_K() * 30.K();
+        assert_eq!(strain, 0.000_36.ratio());
+        assert_eq!(9.degF(), 5.K());
 
         assert_eq!(2.0 * 3.m() - 1.m() + -(2.m()), 3.m());
         assert_eq!(6.m() / 2.0, 3.m());

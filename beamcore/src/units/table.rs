@@ -159,6 +159,48 @@ macro_rules! with_table {
                 "d" (86_400.0, 1.0) from_d to_d d;
                 "year" (31_557_600.0, 1.0) from_year to_year year;
             }
+            /// A joint's stiffness per length, k: the force per length that one length of slip makes.
+            SlipModulus "slip modulus" [1, -1, -2] prints ["N/mm2", "N/m2"] {
+                "N/m2" (1.0, 1.0) from_N_per_m2 to_N_per_m2;
+                "kN/m2" (1000.0, 1.0) from_kN_per_m2 to_kN_per_m2;
+                "N/mm2" (1e6, 1.0) from_N_per_mm2 to_N_per_mm2;
+            }
+            /// A shear flow of a joint, T: the force per length that it passes on.
+            ShearFlow "shear flow" [1, 0, -2] prints ["kN/m", "N/m"] {
+                "N/m" (1.0, 1.0) from_N_per_m to_N_per_m;
+                "kN/m" (1000.0, 1.0) from_kN_per_m to_kN_per_m;
+                "N/mm" (1000.0, 1.0) from_N_per_mm to_N_per_mm;
+            }
+            /// The slip modulus K of one fastener in one shear plane: force per slip.
+            FastenerStiffness "slip modulus of a fastener" [1, 0, -2] prints ["N/mm", "N/m"] {
+                "N/m" (1.0, 1.0) from_N_per_m to_N_per_m;
+                "N/mm" (1000.0, 1.0) from_N_per_mm to_N_per_mm;
+                "kN/mm" (1e6, 1.0) from_kN_per_mm to_kN_per_mm kN_per_mm;
+            }
+            /// The stiffness of a spring: force per displacement.
+            SpringStiffness "spring stiffness" [1, 0, -2] prints ["kN/m", "N/m"] {
+                "N/m" (1.0, 1.0) from_N_per_m to_N_per_m;
+                "kN/m" (1000.0, 1.0) from_kN_per_m to_kN_per_m;
+                "N/mm" (1000.0, 1.0) from_N_per_mm to_N_per_mm;
+                "kN/mm" (1e6, 1.0) from_kN_per_mm to_kN_per_mm;
+            }
+            /// The stiffness of a spring against rotation: moment per angle.
+            RotationalStiffness "rotational stiffness" [1, 2, -2] prints ["kN m/rad", "N m/rad"] {
+                "N m/rad" (1.0, 1.0) from_N_m_per_rad to_N_m_per_rad N_m_per_rad;
+                "kN m/rad" (1000.0, 1.0) from_kN_m_per_rad to_kN_m_per_rad kN_m_per_rad;
+            }
+            /// A shear stiffness, kGA: shear force per shear angle.
+            ShearStiffness "shear stiffness" [1, 1, -2] prints ["MN", "kN", "N"] {
+                "N" (1.0, 1.0) from_N to_N;
+                "kN" (1000.0, 1.0) from_kN to_kN;
+                "MN" (1e6, 1.0) from_MN to_MN;
+            }
+            /// A change of temperature, positive for warmer; it is a difference and no reading of a
+            /// thermometer.
+            TemperatureChange "temperature change" [0, 0, 0, 1] prints ["K"] {
+                "K" (1.0, 1.0) from_K to_K K;
+                "degF" (5.0, 9.0) from_degF to_degF degF;
+            }
         }
     };
 }

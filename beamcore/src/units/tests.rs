@@ -87,8 +87,7 @@ mod conversion {
                 .fold(AnyUnit::ONE, |unit, f| unit.times(factor(f)).unwrap())
         };
         let mut composites = 0;
-        // The kelvin alone is no unit of the table, so that "/K" has no parts to be built from.
-        let built_up = |(_, unit): &(_, &Unit)| !["1", "/K"].contains(&unit.symbol);
+        let built_up = |(_, unit): &(_, &Unit)| unit.symbol != "1";
         for (row, unit) in all_units().filter(built_up) {
             let (above, below) = unit.symbol.split_once('/').unwrap_or((unit.symbol, ""));
             let built = side(above).per(side(below)).unwrap();
