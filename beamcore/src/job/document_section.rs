@@ -1,5 +1,6 @@
 //! The section as it is written.
 
+use super::document_joint::{JointDocument, LayerDocument};
 use super::written::Written;
 use crate::units::{Curvature, Force, Length, LineMass, Moment, Strain};
 use schemars::JsonSchema;
@@ -9,8 +10,14 @@ use serde::{Deserialize, Serialize};
 #[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
 #[serde(deny_unknown_fields)]
 pub(crate) struct SectionDocument {
-    /// The parts, rigidly joined.
+    /// The parts.
     pub(crate) parts: Vec<PartDocument>,
+    /// The layers; without them, all parts are one layer.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(crate) layers: Vec<LayerDocument>,
+    /// The joints between the layers.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(crate) joints: Vec<JointDocument>,
     /// Forces under which the stresses of the section are asked for.
     #[serde(default, skip_serializing_if = "Vec::is_empty")]
     pub(crate) forces: Vec<ForcesDocument>,

@@ -4,6 +4,7 @@ use super::document_section::{
     AxisDocument, ForcesDocument, InitialStrainDocument, OutlineDocument, PartDocument,
     PlaceDocument, SectionDocument,
 };
+use super::lower_joint;
 use super::written::Written;
 use crate::check;
 use crate::error::{ErrorKind, Problem};
@@ -65,14 +66,33 @@ pub(super) fn section(
             None => known = false,
         }
     }
+    let layers = lower_joint::layers(&document.layers, problems);
+    let joints = lower_joint::joints(&document.joints, problems);
     if !known && parts.is_empty() {
         return None;
     }
-    match Section::of(parts) {
+    let (all_layers, all_joints) = (
+        layers.len() == document.layers.len(),
+        joints.len() == document.joints.len(),
+    );
+    let made = if document.layers.is_empty() && document.joints.is_empty() {
+        Section::of(parts)
+    } else {
+        Section::layered(parts, layers, joints)
+    };
+    known &= all_layers && all_joints;
+    match made {
         Ok(section) => known.then_some(section),
         Err(error) => {
-            // A part that is left out here must not be missed by its neighbours.
-            let missed = |p: &Problem| !known && p.found().starts_with("the unknown part");
+            // What is left out here must not be missed by what speaks of it.
+            let missed = |p: &Problem| {
+                let found = |text: &str| p.found().starts_with(text);
+                !known && found("the unknown part")
+                    || !all_layers
+                        && (found("the unknown layer") || found("a part that belongs to no layer"))
+                    || !(all_layers && all_joints) && found("a layer that no joint")
+                    || !all_layers && p.path() == "section.layers"
+            };
             problems.extend(error.problems().iter().filter(|p| !missed(p)).cloned());
             None
         }

@@ -2,8 +2,8 @@
 
 use crate::error::Problem;
 use crate::units::{
-    AreaLoad, Curvature, Density, Duration, Force, Length, LineLoad, LineMass, Modulus, Moment,
-    Quantity, Strain, Stress, ThermalExpansion,
+    AreaLoad, Curvature, Density, Duration, FastenerStiffness, Force, Length, LineLoad, LineMass,
+    Modulus, Moment, Quantity, SlipModulus, Strain, Stress, ThermalExpansion,
 };
 use schemars::{JsonSchema, Schema, SchemaGenerator};
 use serde::{Deserialize, Serialize};
@@ -75,6 +75,8 @@ pub(super) fn problem(name: &str, text: &str, path: &str) -> Option<Problem> {
         (Density::NAME, of::<Density>),
         (Duration::NAME, of::<Duration>),
         (ThermalExpansion::NAME, of::<ThermalExpansion>),
+        (SlipModulus::NAME, of::<SlipModulus>),
+        (FastenerStiffness::NAME, of::<FastenerStiffness>),
     ]
     .into_iter()
     .find_map(|(type_name, check)| (type_name == name).then_some(check));

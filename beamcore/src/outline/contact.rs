@@ -23,10 +23,36 @@ pub fn touches(a: &Region, b: &Region, slack: f64) -> bool {
             .any(|one| b.edges().any(|other| share(one, other, slack)))
 }
 
-/// Whether a stretch of one edge, cut beside the ends of the other, runs along the other: a
+/// The stretches of the boundary of `a` that are also boundary of `b`, to within `slack` (in m), as
+/// [`touches`] looks for them.
+///
+/// # Examples
+/// ```
+/// use beamcore::outline::{Point, common_boundary, rectangle};
+/// use beamcore::units::Number;
+/// let plate = rectangle(4.m(), 2.m()).region();
+/// let shared = common_boundary(&plate, &plate.moved(Point::new(4.0, 1.0)), 1e-9);
+/// assert_eq!(shared.iter().map(|edge| edge.length()).sum::<f64>(), 1.0);
+/// ```
+#[must_use]
+pub fn common_boundary(a: &Region, b: &Region, slack: f64) -> Vec<Edge> {
+    if !a.bounds().meets(&b.bounds(), slack) {
+        return Vec::new();
+    }
+    a.edges()
+        .flat_map(|one| b.edges().flat_map(|other| shared(one, other, slack)))
+        .collect()
+}
+
+/// Whether two edges have a stretch in common.
+fn share(one: &Edge, other: &Edge, slack: f64) -> bool {
+    !shared(one, other, slack).is_empty()
+}
+
+/// The stretches of one edge, cut beside the ends of the other, that run along the other: a
 /// stretch with both ends and its middle on the other edge lies on it, since two lines or circles
 /// that are not the same meet at two points at the most.
-fn share(one: &Edge, other: &Edge, slack: f64) -> bool {
+fn shared(one: &Edge, other: &Edge, slack: f64) -> Vec<Edge> {
     let mut stretches = vec![*one];
     for end in [other.from(), other.to()] {
         let cut = one.nearest(end);
@@ -44,10 +70,11 @@ fn share(one: &Edge, other: &Edge, slack: f64) -> bool {
             .flatten()
             .collect();
     }
-    stretches.iter().any(|stretch| {
+    stretches.retain(|stretch| {
         (stretch.to() - stretch.from()).norm() > slack
             && [stretch.from(), stretch.middle(), stretch.to()]
                 .into_iter()
                 .all(|p| other.distance(p) <= slack)
-    })
+    });
+    stretches
 }

@@ -23,6 +23,7 @@ mod contact;
 mod contour;
 mod contour_problems;
 mod crossing;
+mod distance;
 mod edge;
 mod extent;
 mod flank;
@@ -42,8 +43,9 @@ mod shape_values;
 #[cfg(test)]
 mod tests;
 
-pub use contact::touches;
+pub use contact::{common_boundary, touches};
 pub use contour::Contour;
+pub use distance::{Closest, closest};
 pub use edge::{Edge, Turn};
 pub use extent::{Bounds, Extreme};
 pub use inside::{Location, point_in_region};

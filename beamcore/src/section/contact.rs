@@ -44,7 +44,7 @@ pub(super) fn overlaps(parts: &[PlacedPart]) -> Vec<Problem> {
 }
 
 /// Whether `insert` is set into `host`.
-fn is_within(insert: &PlacedPart, host: &PlacedPart) -> bool {
+pub(super) fn is_within(insert: &PlacedPart, host: &PlacedPart) -> bool {
     insert.host() == Some(host.name())
 }
 
@@ -97,15 +97,15 @@ fn touch(a: &PlacedPart, b: &PlacedPart) -> bool {
     }
 }
 
-/// A note that names the parts which no chain of contacts joins to the first part.
-pub(super) fn notes(parts: &[PlacedPart]) -> Vec<String> {
+/// A note that names the parts of one layer which no chain of contacts joins to its first part.
+pub(super) fn notes(parts: &[&PlacedPart]) -> Vec<String> {
     let mut joined = vec![false; parts.len()];
     let mut waiting = vec![0];
     while let Some(i) = waiting.pop() {
         if std::mem::replace(&mut joined[i], true) {
             continue;
         }
-        waiting.extend((0..parts.len()).filter(|&j| !joined[j] && touch(&parts[i], &parts[j])));
+        waiting.extend((0..parts.len()).filter(|&j| !joined[j] && touch(parts[i], parts[j])));
     }
     let apart: Vec<_> = parts
         .iter()

@@ -1,33 +1,56 @@
-//! Sections: parts of several materials, rigidly joined, and what follows from them.
+//! Sections: parts of several materials in layers with joints between them, and what follows.
 
 mod contact;
+mod facing;
+mod gather;
 mod initial;
+mod joint;
+mod joint_creep;
+mod joint_problems;
+#[cfg(test)]
+mod joint_tests;
+mod layer;
+#[cfg(test)]
+mod layer_tests;
+mod layered;
+mod layering;
+mod layering_problems;
 mod part;
 mod place;
 mod placed;
+mod placed_joint;
 mod plane;
+mod slip;
 mod stiffness;
 #[cfg(test)]
 mod tests;
 mod transformed;
+mod tree;
 
 pub use crate::outline::{
     Outline, angle, channel, disc, hollow_box, i_shape, polygon, rectangle, ring, tee,
 };
 pub use initial::InitialStrain;
+pub use joint::{Joint, JointKind};
+pub use layer::Layer;
+pub use layering::MergedLayer;
 pub use part::Part;
 pub use place::{MirrorAxis, PartName, Placement, Side};
 pub use placed::PlacedPart;
+pub use placed_joint::PlacedJoint;
 pub use plane::{PointStress, Principal, SectionForces, Sideways, StrainPlane};
+pub use slip::{Band, Slip, Spacing};
 pub use stiffness::Stiffness;
 pub use transformed::{TransformedPart, TransformedSection};
 
-use crate::error::{Error, ErrorKind, Problem, Result};
+use crate::error::{Error, Result};
+use crate::lookup;
 use crate::time::Time;
 use crate::units::LineMass;
-use crate::{check, lookup, path};
+use layering::Layering;
 
-/// Parts joined rigidly: at one place along the member all of them share one plane of strain.
+/// The layers and joints at one place along the member. The parts of a layer, and the layers that
+/// rigid joints hold together, share one plane of strain; a section of parts alone is one layer.
 ///
 /// # Examples
 /// ```
@@ -46,11 +69,12 @@ use crate::{check, lookup, path};
 pub struct Section {
     parts: Vec<Part>,
     placed: Vec<PlacedPart>,
+    layering: Layering,
     notes: Vec<String>,
 }
 
 impl Section {
-    /// A section of the given parts.
+    /// A section of the given parts, as one layer named "section".
     ///
     /// # Errors
     /// All of: no part at all, values of a material or outline that are impossible, two parts of
@@ -59,39 +83,76 @@ impl Section {
     pub fn of(parts: impl IntoIterator<Item = Part>) -> Result<Self> {
         let parts: Vec<Part> = parts.into_iter().collect();
         let mut problems = Vec::new();
-        if parts.is_empty() {
-            problems.push(no_parts());
-        }
-        for part in &parts {
-            problems.extend(part.problems());
-        }
-        check::unique(
-            &mut problems,
-            parts.iter().map(Part::name),
-            "parts",
-            "section.parts",
-        );
-        problems.extend(materials(&parts));
-        let placed = place::resolve(&parts, &mut problems);
-        // Outlines that are not whole have no region to compare.
-        if problems.is_empty() {
-            problems.extend(contact::overlaps(&placed));
-        }
+        let placed = gather::placed(&parts, &mut problems);
         Error::check(problems)?;
-        let placed = displaced(placed);
-        let notes = contact::notes(&placed);
-        Ok(Self {
-            parts,
-            placed,
-            notes,
-        })
+        let layering = Layering::single(&placed);
+        Ok(Self::new(parts, placed, layering))
     }
 
-    /// The section of some of the parts alone, each where it stands in the whole section.
+    /// A section of parts in layers, with joints between the layers.
     ///
     /// # Errors
-    /// [`ErrorKind::Lookup`] for a name that is not that of a part; [`ErrorKind::Missing`] if there
-    /// are no names.
+    /// All of: what [`Section::of`] tells; names that are empty or stand twice; a part in no layer
+    /// or in two, a name of a part or layer that is not there; layers that no chain of joints
+    /// holds together, joints that close a loop; layers that do not touch without a stated gap, or
+    /// with another one; values of a joint that are impossible or that a joint of its kind has no
+    /// use for; a joint beside other than wood-based layers without a creep factor.
+    ///
+    /// # Examples
+    /// ```
+    /// use beamcore::material::{Creep, ServiceClass, concrete, timber};
+    /// use beamcore::section::{Joint, Layer, Part, Section, Slip, rectangle};
+    /// use beamcore::time::Time;
+    /// use beamcore::units::{Number, SlipModulus};
+    /// let wood = timber("C24", ServiceClass::One)?;
+    /// let stone = concrete("C30/37", &Creep::factor(2.5))?;
+    /// let joist = Part::new("joist", rectangle(100.mm(), 220.mm()), wood);
+    /// let slab = Part::new("slab", rectangle(600.mm(), 70.mm()), stone).above(&joist);
+    /// let modulus = Slip::Modulus(SlipModulus::from_N_per_mm2(133.0));
+    /// let section = Section::layered(
+    ///     [joist, slab],
+    ///     [Layer::new("lower", ["joist"]), Layer::new("upper", ["slab"])],
+    ///     [Joint::slipping("screws", "lower", "upper", modulus).creep(1.2)],
+    /// )?;
+    /// let screws = section.joint("screws")?;
+    /// assert_eq!((screws.z(), screws.width()), (110.mm(), 100.mm()));
+    /// let lasting = screws.slip_modulus_at(1.m(), Time::Final).unwrap();
+    /// assert_eq!(format!("{lasting:.3}"), "60.455 N/mm2"); // 133/(1 + 1.2)
+    /// # Ok::<(), beamcore::Error>(())
+    /// ```
+    pub fn layered(
+        parts: impl IntoIterator<Item = Part>,
+        layers: impl IntoIterator<Item = Layer>,
+        joints: impl IntoIterator<Item = Joint>,
+    ) -> Result<Self> {
+        let parts: Vec<Part> = parts.into_iter().collect();
+        let layers: Vec<Layer> = layers.into_iter().collect();
+        let joints: Vec<Joint> = joints.into_iter().collect();
+        let mut problems = Vec::new();
+        let placed = gather::placed(&parts, &mut problems);
+        problems.extend(layering_problems::problems(&parts, &layers, &joints));
+        Error::check(problems)?;
+        let layering = Layering::of(layers, &joints, &placed)?;
+        Ok(Self::new(parts, placed, layering))
+    }
+
+    fn new(parts: Vec<Part>, placed: Vec<PlacedPart>, layering: Layering) -> Self {
+        let placed = gather::displaced(placed);
+        let notes = layering.notes(&placed);
+        Self {
+            parts,
+            placed,
+            layering,
+            notes,
+        }
+    }
+
+    /// The section of some of the parts alone, each where it stands in the whole section, with
+    /// the layers that they belong to and the joints between these.
+    ///
+    /// # Errors
+    /// [`crate::ErrorKind::Lookup`] for a name that is not that of a part; [`crate::ErrorKind::Missing`] if there
+    /// are no names; [`crate::ErrorKind::Geometry`] if what held the layers together is left out.
     pub fn only(&self, names: &[String]) -> Result<Self> {
         for name in names {
             self.index(name)?;
@@ -110,14 +171,10 @@ impl Section {
             .cloned()
             .collect();
         if parts.is_empty() {
-            return Err(no_parts().into());
+            return Err(gather::no_parts().into());
         }
-        let notes = contact::notes(&placed);
-        Ok(Self {
-            parts,
-            placed: displaced(placed),
-            notes,
-        })
+        let layering = self.layering.of_kept(&placed)?;
+        Ok(Self::new(parts, placed, layering))
     }
 
     /// The parts as given.
@@ -135,7 +192,7 @@ impl Section {
     /// The part of a name, at its place.
     ///
     /// # Errors
-    /// [`ErrorKind::Lookup`] if there is none.
+    /// [`crate::ErrorKind::Lookup`] if there is none.
     pub fn part(&self, name: &str) -> Result<&PlacedPart> {
         Ok(&self.placed[self.index(name)?])
     }
@@ -151,7 +208,7 @@ impl Section {
             })
     }
 
-    /// The stiffness at a time.
+    /// The stiffness at a time of all parts as one piece, as if every joint were rigid.
     #[must_use]
     pub fn stiffness(&self, time: Time) -> Stiffness {
         Stiffness::new(&self.placed, time)
@@ -169,7 +226,7 @@ impl Section {
     /// The section as if made of the material of one part, at a time.
     ///
     /// # Errors
-    /// [`ErrorKind::Lookup`] if no part has that material.
+    /// [`crate::ErrorKind::Lookup`] if no part has that material.
     pub fn transformed_to(&self, material: &str, time: Time) -> Result<TransformedSection> {
         TransformedSection::new(&self.placed, material, time)
     }
@@ -188,51 +245,4 @@ impl Section {
     pub fn notes(&self) -> &[String] {
         &self.notes
     }
-}
-
-fn no_parts() -> Problem {
-    Problem::new(
-        ErrorKind::Missing,
-        "section.parts",
-        "an empty section",
-        "at least one part",
-    )
-}
-
-/// The hosts without what is set into them.
-fn displaced(mut placed: Vec<PlacedPart>) -> Vec<PlacedPart> {
-    for i in 0..placed.len() {
-        let name = placed[i].name().to_owned();
-        let inserts = placed
-            .iter()
-            .filter(|part| part.host() == Some(name.as_str()));
-        let inserts: Vec<_> = inserts.map(|insert| *insert.whole()).collect();
-        placed[i].displace(&inserts);
-    }
-    placed
-}
-
-/// Problems of the materials, each material once; one name must mean one material.
-fn materials(parts: &[Part]) -> Vec<Problem> {
-    let mut problems = Vec::new();
-    for (i, part) in parts.iter().enumerate() {
-        let material = part.material();
-        let earlier = parts[..i]
-            .iter()
-            .find(|p| p.material().name() == material.name());
-        match earlier {
-            None => problems.extend(material.problems()),
-            Some(other) if other.material() != material => problems.push(Problem::new(
-                ErrorKind::Duplicate,
-                path::named("materials", material.name()),
-                format!(
-                    "two materials named \"{}\" with different values",
-                    material.name()
-                ),
-                "a different name for each material",
-            )),
-            Some(_) => {}
-        }
-    }
-    problems
 }

@@ -20,13 +20,17 @@ pub struct Stiffness {
 }
 
 impl Stiffness {
-    pub(super) fn new(parts: &[PlacedPart], time: Time) -> Self {
+    pub(super) fn new<'a>(
+        parts: impl IntoIterator<Item = &'a PlacedPart, IntoIter: Clone>,
+        time: Time,
+    ) -> Self {
+        let parts = parts.into_iter();
         let moduli: Vec<_> = parts
-            .iter()
+            .clone()
             .map(|part| part.material().modulus_at(time))
             .collect();
         let (mut ea, mut es_y, mut es_z) = (0.0, 0.0, 0.0);
-        for (part, modulus) in parts.iter().zip(&moduli) {
+        for (part, modulus) in parts.clone().zip(&moduli) {
             let e_a = modulus.si() * part.net().area;
             ea += e_a;
             es_y += e_a * part.net().y;
@@ -34,8 +38,8 @@ impl Stiffness {
         }
         let (y0, z0) = (es_y / ea, es_z / ea);
         let (mut yy, mut zz, mut yz) = (0.0, 0.0, 0.0);
-        let mut own = Vec::with_capacity(parts.len());
-        for (part, modulus) in parts.iter().zip(&moduli) {
+        let mut own = Vec::with_capacity(moduli.len());
+        for (part, modulus) in parts.clone().zip(&moduli) {
             let (e, own_part) = (modulus.si(), part.net());
             let (dy, dz) = (own_part.y - y0, own_part.z - z0);
             let part_yy = e * (own_part.iyy + own_part.area * dz * dz);
