@@ -21,8 +21,8 @@ fn lower_layer(document: &LayerDocument, problems: &mut Vec<Problem>) -> Option<
         problems.push(Problem::new(
             ErrorKind::Missing,
             path::key(&path::named("section.layers", &document.name), key),
-            format!("{other} alone"),
-            "from and to, or neither for the whole length",
+            format!("\"{other}\" without \"{key}\""),
+            "both of them, or neither for the whole length",
         ));
     };
     match (&document.from, &document.to) {

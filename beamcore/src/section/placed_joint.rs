@@ -166,7 +166,7 @@ fn nowhere(joint: &Joint) -> Problem {
         ErrorKind::Position,
         Joint::path(joint.name()),
         format!(
-            "the layers \"{}\" and \"{}\", which are nowhere there together",
+            "the layers \"{}\" and \"{}\", of which one is only where the other is not",
             joint.lower(),
             joint.upper()
         ),
