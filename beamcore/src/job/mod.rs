@@ -41,6 +41,8 @@ mod document_camber;
 mod document_joint;
 mod document_material;
 mod document_section;
+#[cfg(test)]
+mod joint_tests;
 mod lower;
 mod lower_action;
 mod lower_camber;
