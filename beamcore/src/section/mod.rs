@@ -20,6 +20,7 @@ mod place;
 mod placed;
 mod placed_joint;
 mod plane;
+mod shear;
 mod slip;
 mod stiffness;
 #[cfg(test)]
@@ -39,6 +40,7 @@ pub use place::{MirrorAxis, PartName, Placement, Side};
 pub use placed::PlacedPart;
 pub use placed_joint::PlacedJoint;
 pub use plane::{PointStress, Principal, SectionForces, Sideways, StrainPlane};
+pub use shear::SHEAR_STIFFNESS_DEFINITION;
 pub use slip::{Band, Slip, Spacing};
 pub use stiffness::Stiffness;
 pub use transformed::{TransformedPart, TransformedSection};
