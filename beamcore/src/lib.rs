@@ -48,6 +48,7 @@ mod path;
 pub mod plain;
 pub mod response;
 pub mod section;
+pub mod simplified;
 mod solve;
 pub mod stress;
 pub mod time;
