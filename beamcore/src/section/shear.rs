@@ -34,7 +34,8 @@ impl Section {
     ///
     /// # Errors
     /// All of: a material without a shear modulus, an outline with a sloping or curved edge, a
-    /// height at which there is no material.
+    /// height at which there is no material; layers that may slip on each other, of which each has a
+    /// shear stiffness of its own.
     ///
     /// # Examples
     /// ```
@@ -49,6 +50,16 @@ impl Section {
     /// # Ok::<(), beamcore::Error>(())
     /// ```
     pub fn shear_stiffness(&self, time: Time) -> Result<ShearStiffness> {
+        let layers = self.merged_layers().len();
+        if layers > 1 {
+            return Err(Problem::new(
+                ErrorKind::Geometry,
+                "section.joints",
+                format!("joints that let {layers} layers slip on each other"),
+                "rigid joints, for one shear stiffness of the whole section",
+            )
+            .into());
+        }
         layer_shear_stiffness(&self.placed.iter().collect::<Vec<_>>(), time)
     }
 
@@ -77,7 +88,7 @@ impl Section {
                     ),
                 ));
             }
-            bending.push(stiffness_of(&[part], time).bending_yy().si());
+            bending.push(Stiffness::new([part], time).bending_yy().si());
             match layer_shear_stiffness(&[part], time) {
                 Ok(stiffness) => own.push(stiffness.si()),
                 Err(error) => problems.extend(error.problems().iter().cloned()),
@@ -127,7 +138,7 @@ pub(crate) fn layer_shear_stiffness(parts: &[&PlacedPart], time: Time) -> Result
     }
     Error::check(distinct(problems))?;
     let slabs = slabs(&edges).map_err(|(from, to)| gap(from, to))?;
-    let stiffness = stiffness_of(parts, time);
+    let stiffness = Stiffness::new(parts.iter().copied(), time);
     let bending = stiffness.bending_yy().si();
     let energy = energy(&slabs, stiffness.centroid_z().si());
     Ok(ShearStiffness::from_si(bending * bending / energy))
@@ -163,12 +174,6 @@ fn energy(slabs: &[Slab], centroid: f64) -> f64 {
         below = first(2.0 * half);
     }
     energy
-}
-
-/// The stiffness of some parts alone.
-fn stiffness_of(parts: &[&PlacedPart], time: Time) -> Stiffness {
-    let parts: Vec<_> = parts.iter().map(|part| (*part).clone()).collect();
-    Stiffness::new(&parts, time)
 }
 
 /// Whether something is set into a part that is not among the given parts.

@@ -3,7 +3,7 @@
 use super::stuff;
 use crate::ErrorKind;
 use crate::material::{Creep, Material};
-use crate::section::{Part, Section, disc, polygon, rectangle};
+use crate::section::{Joint, Layer, Part, Section, disc, polygon, rectangle};
 use crate::time::Time;
 use crate::units::Number;
 
@@ -53,5 +53,29 @@ fn what_cannot_be_worked_out_is_named() {
     assert_eq!(
         error.problems()[0].found(),
         "no material between z = 50 mm and z = 70 mm"
+    );
+}
+
+/// Layers that may slip on each other have no shear stiffness in common; those that a rigid joint
+/// holds together have that of one piece.
+#[test]
+fn layers_must_be_held_together() {
+    let timber = stuff("timber", 11e3, 690.0);
+    let of = |joint: fn(&str, &str, &str) -> Joint| {
+        let outline = || rectangle(50.mm(), 100.mm());
+        let low = Part::new("low", outline(), timber.clone());
+        let high = Part::new("high", outline(), timber.clone()).above("low");
+        let layers = [Layer::new("lower", ["low"]), Layer::new("upper", ["high"])];
+        let joint = joint("glue", "lower", "upper");
+        let section = Section::layered([low, high], layers, [joint]).unwrap();
+        section.shear_stiffness(Time::Initial)
+    };
+    let whole = of(|name, lower, upper| Joint::rigid(name, lower, upper));
+    let expected = 5.0 / 6.0 * 690e6 * 0.05 * 0.2;
+    assert!((whole.unwrap().si() - expected).abs() <= 1e-13 * expected);
+    let error = of(|name, lower, upper| Joint::loose(name, lower, upper)).unwrap_err();
+    assert_eq!(
+        (error.kind(), error.path()),
+        (ErrorKind::Geometry, "section.joints")
     );
 }
