@@ -98,9 +98,9 @@ fn loads() -> impl Strategy<Value = Vec<Load>> {
 }
 
 fn permanent(name: &str, loads: &[Load]) -> Action {
-    loads
-        .iter()
-        .fold(Action::permanent(name), |action, load| action.load(*load))
+    loads.iter().fold(Action::permanent(name), |action, load| {
+        action.load(load.clone())
+    })
 }
 
 fn deflection_at(response: &Response, time: Time, x: Length) -> f64 {
@@ -210,7 +210,7 @@ proptest! {
     /// The response to two actions together is the sum of the responses to each.
     #[test]
     fn actions_superpose(stack in stack(), a in loads(), b in loads(), x in 0.0..6.0f64) {
-        let both: Vec<_> = a.iter().chain(&b).copied().collect();
+        let both: Vec<_> = a.iter().chain(&b).cloned().collect();
         let solve = |loads: &[Load]| member(stack.section(), &[permanent("g", loads)]).solve();
         let (ra, rb, rc) = (solve(&a), solve(&b), solve(&both));
         for time in Time::ALL {

@@ -12,9 +12,12 @@ use crate::material::concrete::{Cement, ConcreteCreep};
 use crate::material::{Creep, Material};
 use crate::member::SAME_PLACE;
 use crate::section::{Part, Section, Stiffness, rectangle};
-use crate::solve::beam::{Beam, LoadCase};
-use crate::solve::condition::Holds;
-use crate::solve::polynomial::PieceLoad;
+use crate::solve::beam::Beam;
+use crate::solve::law::{Law, PlainLayer};
+use crate::solve::load::LoadCase;
+use crate::solve::piece::PieceLaw;
+use crate::solve::states::States;
+use crate::solve::station::{Hold, Station};
 use crate::time::Time;
 use crate::units::{AnyUnit, BendingStiffness, Duration, Force, Length, LineLoad, Modulus, Stress};
 use std::sync::Arc;
@@ -115,14 +118,12 @@ pub fn simple_span_uniform_deflection(
     let load = LineLoad::from_N_per_m(load_N_per_m);
     check::finite(&mut problems, load, "load_N_per_m");
     Error::check(problems)?;
-    let case = LoadCase {
-        pieces: vec![PieceLoad {
-            line: [load_N_per_m; 2],
-            curvature: 0.0,
-        }],
-        ..LoadCase::none(2)
-    };
-    greatest_deflection(vec![0.0, span_m], bending_stiffness_Nm2, &case)
+    greatest_deflection(vec![0.0, span_m], bending_stiffness_Nm2, |case| {
+        let deflection = States::BENDING.deflection(0);
+        let half = States::BENDING.half();
+        case.line[deflection] = load_N_per_m;
+        case.line[half + deflection] = load_N_per_m;
+    })
 }
 
 /// The greatest deflection in m of a beam on two supports at its ends under a point load at a
@@ -151,18 +152,17 @@ pub fn simple_span_point_deflection(
     Error::check(problems)?;
     // A load as close as this to a support stands on it, as in a member.
     let slack = span_m * SAME_PLACE;
-    let (stations, point) = if at_m <= slack {
-        (vec![0.0, span_m], vec![load_N, 0.0])
+    let (stations, loaded) = if at_m <= slack {
+        (vec![0.0, span_m], 0)
     } else if span_m - at_m <= slack {
-        (vec![0.0, span_m], vec![0.0, load_N])
+        (vec![0.0, span_m], 1)
     } else {
-        (vec![0.0, at_m, span_m], vec![0.0, load_N, 0.0])
+        (vec![0.0, at_m, span_m], 1)
     };
-    let case = LoadCase {
-        point,
-        ..LoadCase::none(stations.len())
-    };
-    greatest_deflection(stations, bending_stiffness_Nm2, &case)
+    greatest_deflection(stations, bending_stiffness_Nm2, |case| {
+        let states = States::BENDING;
+        case.outside[loaded * states.half() + states.deflection(0)] = load_N;
+    })
 }
 
 fn span_problems(span_m: f64, bending_stiffness_Nm2: f64) -> Vec<Problem> {
@@ -173,23 +173,46 @@ fn span_problems(span_m: f64, bending_stiffness_Nm2: f64) -> Vec<Problem> {
     problems
 }
 
-/// The greatest deflection of a beam that is held at its two ends.
-fn greatest_deflection(stations: Vec<f64>, bending_stiffness: f64, case: &LoadCase) -> Result<f64> {
-    let pieces = vec![bending_stiffness; stations.len() - 1];
-    let mut holds = vec![Holds::NOTHING; stations.len()];
-    holds[0] = Holds::DEFLECTION;
-    holds[pieces.len()] = Holds::DEFLECTION;
-    let beam = Beam::new(stations, holds, &pieces).map_err(|motion| {
+/// The greatest deflection of a beam that is held at its two ends, under the loads that `load` sets.
+fn greatest_deflection(
+    stations: Vec<f64>,
+    bending_stiffness: f64,
+    load: impl FnOnce(&mut LoadCase),
+) -> Result<f64> {
+    let states = States::BENDING;
+    let layer = PlainLayer {
+        // The axial stiffness does not count where no axial force acts.
+        axial: 1.0,
+        bending: bending_stiffness,
+        z: 0.0,
+        shear_flexibility: 0.0,
+        strand: 0,
+    };
+    let law = PieceLaw::Prismatic(Arc::new(Law::new(states, vec![layer], &[])));
+    let laws = vec![law; stations.len() - 1];
+    let mut held = vec![Station::default(); stations.len()];
+    for end in [0, laws.len()] {
+        let mut direction = vec![0.0; states.half()];
+        direction[states.deflection(0)] = 1.0;
+        held[end].holds.push(Hold {
+            direction,
+            stiffness: f64::INFINITY,
+        });
+    }
+    let beam = Beam::new(states, stations, held, &laws).map_err(|_| {
         Problem::new(
             ErrorKind::Mechanism,
             "span_m",
-            format!("a beam that is {motion}"),
+            "a beam that is free to move",
             "a beam on two supports",
         )
     })?;
-    let mut line = Piecewise::zero(Arc::from(beam.stations()));
-    let solved = beam.solve(case);
-    line.add(solved.fields.iter().map(|piece| &piece.deflection), 1.0);
+    let mut case = beam.no_load();
+    load(&mut case);
+    let solved = beam.solve(&case);
+    let mut line = Piecewise::zero(Arc::clone(beam.stations()));
+    let pieces = (0..laws.len()).map(|k| beam.field(&solved, k, states.deflection(0)));
+    line.add_coefficients(beam.terms(), beam.decays(), pieces, 1.0);
     Ok(line.greatest().value)
 }
 

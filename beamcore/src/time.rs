@@ -18,6 +18,14 @@ impl Time {
     /// Both times, in order.
     pub const ALL: [Self; 2] = [Self::Initial, Self::Final];
 
+    /// Its position in [`Time::ALL`].
+    pub(crate) const fn index(self) -> usize {
+        match self {
+            Self::Initial => 0,
+            Self::Final => 1,
+        }
+    }
+
     /// The word used in documents: `initial` or `final`.
     #[must_use]
     pub const fn name(self) -> &'static str {

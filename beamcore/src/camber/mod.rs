@@ -12,7 +12,6 @@ pub use shape::Shape;
 
 use crate::error::{Error, ErrorKind, Problem, Result};
 use crate::field::{Field, Piecewise};
-use crate::math::polynomial::Coefficients;
 use crate::member::Support;
 use crate::response::Response;
 use crate::time::Time;
@@ -101,7 +100,7 @@ impl Response {
         camber: &Camber,
     ) -> Result<Field<Length>> {
         let mut line = self.deflection_line(combination, time)?;
-        line.add(camber.line(line.stations()).iter(), -1.0);
+        line.add(&camber.line(&line), -1.0);
         Ok(Field::new(line))
     }
 }
@@ -128,8 +127,8 @@ fn least_gap(fraction: f64, line: &Piecewise, (from, length): (f64, f64)) -> f64
     let gap = |rise: f64| {
         let arc = Line::Arc { from, length, rise };
         let mut gap = stretch.zeroed();
-        gap.add(stretch.pieces(), fraction);
-        gap.add(arc.polynomials(stretch.stations()).iter(), -1.0);
+        gap.add(&stretch, fraction);
+        gap.add(&arc.over(&stretch), -1.0);
         gap.greatest().value.abs()
     };
     let size = stretch.greatest().value.abs() * fraction * 2.0;
@@ -228,8 +227,8 @@ impl Camber {
         Ok(Length::from_si(self.line.height(at.si())))
     }
 
-    /// The camber line as polynomials over the pieces between stations.
-    pub(crate) fn line(&self, stations: &[f64]) -> Vec<Coefficients> {
-        self.line.polynomials(stations)
+    /// The camber line as a field, over the pieces of another field where it has none of its own.
+    pub(crate) fn line(&self, pieces_of: &Piecewise) -> Piecewise {
+        self.line.over(pieces_of)
     }
 }

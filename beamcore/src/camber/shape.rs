@@ -86,20 +86,24 @@ impl Line {
         }
     }
 
-    /// The line as polynomials over the pieces between stations, to be taken off a deflection line.
+    /// The line as a field over the pieces of another, to be taken off a deflection line.
     ///
-    /// A parabola and a mirror image are polynomials; the arc is one but for terms of the sixth
-    /// order, some nanometres for arcs as flat as cambers are.
-    pub(super) fn polynomials(&self, stations: &[f64]) -> Vec<Coefficients> {
+    /// A parabola is a polynomial; the arc is one but for terms of the sixth order, some nanometres
+    /// for arcs as flat as cambers are. A mirror image keeps the pieces of its own line.
+    pub(super) fn over(&self, pieces_of: &Piecewise) -> Piecewise {
         match self {
             Self::Mirror { line, factor } => {
-                let scaled = |c: &Coefficients| c.map(|term| factor * term);
-                line.pieces().iter().map(scaled).collect()
+                let mut image = line.zeroed();
+                image.add(line, *factor);
+                image
             }
-            Self::Parabola { .. } | Self::Arc { .. } => stations
-                .windows(2)
-                .map(|ends| self.interpolated(ends[0], ends[1]))
-                .collect(),
+            Self::Parabola { .. } | Self::Arc { .. } => {
+                let mut field = pieces_of.zeroed();
+                for (k, ends) in pieces_of.stations().windows(2).enumerate() {
+                    field.add_to_piece(k, &self.interpolated(ends[0], ends[1]));
+                }
+                field
+            }
         }
     }
 
@@ -141,7 +145,6 @@ fn slope_at_end(beyond: f64, rise: f64, length: f64) -> f64 {
 #[cfg(test)]
 mod tests {
     use super::*;
-    use crate::math::polynomial::value;
 
     const FOOT: f64 = 0.3048;
 
@@ -193,13 +196,13 @@ mod tests {
                 rise: -0.05,
             },
         ] {
-            let stations = [0.0, 1.0, 4.0, 11.0, 12.5];
-            for (ends, c) in stations.windows(2).zip(line.polynomials(&stations)) {
-                for i in 0..=20 {
-                    let t = f64::from(i) / 20.0;
-                    let height = line.height(ends[0] + (ends[1] - ends[0]) * t);
-                    assert!((value(&c, t) - height).abs() < 1e-10, "{ends:?} {t}");
-                }
+            let pieces = Piecewise::zero(std::sync::Arc::from([0.0, 1.0, 4.0, 11.0, 12.5]));
+            let field = line.over(&pieces);
+            for i in 0..=100 {
+                let x = 0.125 * f64::from(i);
+                let (left, right) = field.sides(x).unwrap();
+                assert!((left - line.height(x)).abs() < 1e-10, "{x}");
+                assert!((right - line.height(x)).abs() < 1e-10, "{x}");
             }
         }
     }

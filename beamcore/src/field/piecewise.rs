@@ -1,16 +1,29 @@
-//! A quantity along the member as one polynomial per piece.
+//! A quantity along the member as one curve per piece.
 
+use crate::math::curve::{Curve, Decaying};
 use crate::math::polynomial::{self, Coefficients, TERMS};
 use std::sync::Arc;
 
 /// Values closer than this, relative to the peak, count as a tie, and the leftmost of them wins.
 const TIE: f64 = 1e-12;
 
-/// Polynomials over the pieces between `stations`; a station may have two values.
+/// Curves over the pieces between `stations`; a station may have two values.
 #[derive(Clone, Debug, PartialEq)]
 pub(crate) struct Piecewise {
     stations: Arc<[f64]>,
-    pieces: Vec<Coefficients>,
+    /// The number of polynomial coefficients per piece, at least [`TERMS`].
+    terms: usize,
+    polynomials: Vec<f64>,
+    tails: Vec<Tail>,
+}
+
+/// Exponentials that decay from the ends of the pieces.
+#[derive(Clone, Debug, PartialEq)]
+struct Tail {
+    /// Per piece and mode.
+    decays: Arc<[f64]>,
+    /// Per piece and mode: the factors from the left and from the right.
+    factors: Vec<f64>,
 }
 
 /// A value and the place where it stands.
@@ -33,8 +46,13 @@ impl Peak {
 impl Piecewise {
     /// A field of zeros over the pieces between the stations.
     pub(crate) fn zero(stations: Arc<[f64]>) -> Self {
-        let pieces = vec![[0.0; TERMS]; stations.len() - 1];
-        Self { stations, pieces }
+        let polynomials = vec![0.0; (stations.len() - 1) * TERMS];
+        Self {
+            stations,
+            terms: TERMS,
+            polynomials,
+            tails: Vec::new(),
+        }
     }
 
     /// A field of zeros over the same pieces.
@@ -42,23 +60,131 @@ impl Piecewise {
         Self::zero(Arc::clone(&self.stations))
     }
 
-    /// Adds `factor` times another set of polynomials over the same stations.
-    pub(crate) fn add<'a>(
+    /// The number of pieces.
+    pub(crate) fn len(&self) -> usize {
+        self.stations.len() - 1
+    }
+
+    /// Makes room for so many polynomial coefficients per piece.
+    fn widen(&mut self, terms: usize) {
+        if terms > self.terms {
+            let mut wide = vec![0.0; self.len() * terms];
+            for (new, old) in wide
+                .chunks_exact_mut(terms)
+                .zip(self.polynomials.chunks_exact(self.terms))
+            {
+                new[..self.terms].copy_from_slice(old);
+            }
+            self.polynomials = wide;
+            self.terms = terms;
+        }
+    }
+
+    /// Adds polynomials, one per piece with `terms` coefficients each, times the factor of the
+    /// piece.
+    fn add_polynomials<'a>(
         &mut self,
-        pieces: impl IntoIterator<Item = &'a Coefficients>,
-        factor: f64,
+        terms: usize,
+        pieces: impl Iterator<Item = &'a [f64]>,
+        factor: impl Fn(usize) -> f64,
     ) {
-        for (mine, theirs) in self.pieces.iter_mut().zip(pieces) {
+        self.widen(terms);
+        for (k, (mine, theirs)) in self
+            .polynomials
+            .chunks_exact_mut(self.terms)
+            .zip(pieces)
+            .enumerate()
+        {
+            let factor = factor(k);
             for (a, b) in mine.iter_mut().zip(theirs) {
                 *a += factor * b;
             }
         }
     }
 
-    /// Adds the same value everywhere.
-    pub(crate) fn shift(&mut self, value: f64) {
-        for piece in &mut self.pieces {
-            piece[0] += value;
+    /// The factors of the exponentials with these decays, which are made if they are not there.
+    fn tail(&mut self, decays: &Arc<[f64]>) -> &mut Vec<f64> {
+        let known = self
+            .tails
+            .iter()
+            .position(|tail| Arc::ptr_eq(&tail.decays, decays));
+        let at = known.unwrap_or_else(|| {
+            self.tails.push(Tail {
+                decays: Arc::clone(decays),
+                factors: vec![0.0; 2 * decays.len()],
+            });
+            self.tails.len() - 1
+        });
+        &mut self.tails[at].factors
+    }
+
+    /// Adds coefficients as the solver gives them: per piece `terms` of the polynomial and a pair
+    /// for each decay.
+    pub(crate) fn add_coefficients<'a>(
+        &mut self,
+        terms: usize,
+        decays: &Arc<[f64]>,
+        pieces: impl Iterator<Item = &'a [f64]> + Clone,
+        factor: f64,
+    ) {
+        self.add_polynomials(terms, pieces.clone().map(|c| &c[..terms]), |_| factor);
+        if !decays.is_empty() {
+            let pairs = 2 * decays.len() / self.len();
+            for (mine, theirs) in self.tail(decays).chunks_exact_mut(pairs).zip(pieces) {
+                for (a, b) in mine.iter_mut().zip(&theirs[terms..]) {
+                    *a += factor * b;
+                }
+            }
+        }
+    }
+
+    /// Adds `factor` times another field. Both are cut at the stations of both, if they differ.
+    pub(crate) fn add(&mut self, other: &Self, factor: f64) {
+        self.add_by_piece(other, |_| factor);
+    }
+
+    /// Adds another field times a factor that each piece has for itself; both fields must then
+    /// have the same stations.
+    pub(crate) fn add_by_piece(&mut self, other: &Self, factor: impl Fn(usize) -> f64) {
+        if !Arc::ptr_eq(&self.stations, &other.stations) && self.stations != other.stations {
+            let both = merged(&self.stations, &other.stations);
+            *self = self.recut(&both);
+            self.add_by_piece(&other.recut(&both), factor);
+            return;
+        }
+        self.add_polynomials(
+            other.terms,
+            other.polynomials.chunks_exact(other.terms),
+            &factor,
+        );
+        for tail in &other.tails {
+            let pairs = 2 * tail.decays.len() / self.len();
+            let mine = self.tail(&tail.decays);
+            let pieces = mine
+                .chunks_exact_mut(pairs)
+                .zip(tail.factors.chunks_exact(pairs));
+            for (k, (mine, theirs)) in pieces.enumerate() {
+                let factor = factor(k);
+                for (a, b) in mine.iter_mut().zip(theirs) {
+                    *a += factor * b;
+                }
+            }
+        }
+    }
+
+    /// Adds a value to each piece.
+    pub(crate) fn shift_by_piece(&mut self, value: impl Fn(usize) -> f64) {
+        for (k, piece) in self.polynomials.chunks_exact_mut(self.terms).enumerate() {
+            piece[0] += value(k);
+        }
+    }
+
+    /// Adds a polynomial to a piece.
+    pub(crate) fn add_to_piece(&mut self, k: usize, polynomial: &[f64]) {
+        self.widen(polynomial.len());
+        let piece = &mut self.polynomials[k * self.terms..(k + 1) * self.terms];
+        for (sum, term) in piece.iter_mut().zip(polynomial) {
+            *sum += term;
         }
     }
 
@@ -66,15 +192,82 @@ impl Piecewise {
     pub(crate) fn between(&self, from: f64, to: f64) -> Self {
         let first = self.stations.partition_point(|&x| x < from);
         let last = self.stations.partition_point(|&x| x < to);
+        let tails = self.tails.iter().map(|tail| {
+            let modes = tail.decays.len() / self.len();
+            Tail {
+                decays: Arc::from(&tail.decays[first * modes..last * modes]),
+                factors: tail.factors[2 * first * modes..2 * last * modes].to_vec(),
+            }
+        });
         Self {
             stations: Arc::from(&self.stations[first..=last]),
-            pieces: self.pieces[first..last].to_vec(),
+            terms: self.terms,
+            polynomials: self.polynomials[first * self.terms..last * self.terms].to_vec(),
+            tails: tails.collect(),
         }
     }
 
-    /// The polynomials, one per piece.
-    pub(crate) fn pieces(&self) -> &[Coefficients] {
-        &self.pieces
+    /// The same field over the pieces between these stations, all of its own among them.
+    fn recut(&self, stations: &Arc<[f64]>) -> Self {
+        let pieces = stations.len() - 1;
+        let mut new = Self {
+            stations: Arc::clone(stations),
+            terms: self.terms,
+            polynomials: Vec::with_capacity(pieces * self.terms),
+            tails: Vec::new(),
+        };
+        let mut cuts = Vec::with_capacity(pieces);
+        for ends in stations.windows(2) {
+            let own = self.stations.partition_point(|&s| s <= ends[0]) - 1;
+            let (from, length) = (
+                self.stations[own],
+                self.stations[own + 1] - self.stations[own],
+            );
+            let (start, end) = ((ends[0] - from) / length, (ends[1] - from) / length);
+            cuts.push((own, start, end));
+            let c = &self.polynomials[own * self.terms..(own + 1) * self.terms];
+            new.polynomials.extend(polynomial::stretch(c, start, end));
+        }
+        for tail in &self.tails {
+            let modes = tail.decays.len() / self.len();
+            let (mut decays, mut factors) = (Vec::new(), Vec::new());
+            for &(own, start, end) in &cuts {
+                for mode in own * modes..(own + 1) * modes {
+                    let decay = tail.decays[mode];
+                    decays.push(decay * (end - start));
+                    factors.push(tail.factors[2 * mode] * crate::math::exp(-decay * start));
+                    let behind = decay * (1.0 - end);
+                    factors.push(tail.factors[2 * mode + 1] * crate::math::exp(-behind));
+                }
+            }
+            new.tails.push(Tail {
+                decays: decays.into(),
+                factors,
+            });
+        }
+        new
+    }
+
+    /// The derivative along x.
+    pub(crate) fn derivative(&self) -> Self {
+        let mut new = self.clone();
+        for (k, ends) in self.stations.windows(2).enumerate() {
+            let length = ends[1] - ends[0];
+            let piece = &mut new.polynomials[k * self.terms..(k + 1) * self.terms];
+            for i in 1..self.terms {
+                piece[i - 1] = piece[i] * i as f64 / length;
+            }
+            piece[self.terms - 1] = 0.0;
+            for tail in &mut new.tails {
+                let modes = tail.decays.len() / (self.stations.len() - 1);
+                for mode in k * modes..(k + 1) * modes {
+                    let rate = tail.decays[mode] / length;
+                    tail.factors[2 * mode] *= -rate;
+                    tail.factors[2 * mode + 1] *= rate;
+                }
+            }
+        }
+        new
     }
 
     /// The stations, from the left end to the right end.
@@ -103,39 +296,89 @@ impl Piecewise {
         Some((self.value_on(left, x), self.value_on(right, x)))
     }
 
-    fn value_on(&self, piece: usize, x: f64) -> f64 {
+    /// The value at `x`, which lies on the piece.
+    pub(crate) fn value_on(&self, piece: usize, x: f64) -> f64 {
         let (from, to) = (self.stations[piece], self.stations[piece + 1]);
-        let c = &self.pieces[piece];
-        if x == to {
-            polynomial::value_at_one(c)
+        let t = if x == to {
+            1.0
         } else {
-            polynomial::value(c, (x - from) / (to - from))
-        }
+            (x - from) / (to - from)
+        };
+        let c = &self.polynomials[piece * self.terms..(piece + 1) * self.terms];
+        let polynomial = c.iter().rev().fold(0.0, |sum, &term| sum * t + term);
+        self.pairs(piece).fold(polynomial, |sum, pair| {
+            sum + pair.from_left * crate::math::exp(-pair.decay * t)
+                + pair.from_right * crate::math::exp(-pair.decay * (1.0 - t))
+        })
     }
 
-    /// The candidate for an extreme that `better(new, best)` prefers, leftmost first.
-    fn find(&self, score: impl Fn(f64) -> f64) -> Peak {
-        let mut best = Peak {
-            value: self.pieces[0][0],
-            at: self.stations[0],
-        };
-        let mut best_score = score(best.value);
-        let mut consider = |value: f64, at: f64| {
-            let s = score(value);
-            if s - best_score > TIE * best_score.abs().max(s.abs()) {
-                best = Peak { value, at };
-                best_score = s;
-            }
-        };
-        for (i, c) in self.pieces.iter().enumerate() {
-            let (from, to) = (self.stations[i], self.stations[i + 1]);
+    /// The exponentials of a piece that are there.
+    fn pairs(&self, piece: usize) -> impl Iterator<Item = Decaying> {
+        self.tails.iter().flat_map(move |tail| {
+            let modes = tail.decays.len() / self.len();
+            (piece * modes..(piece + 1) * modes).filter_map(|mode| {
+                let [from_left, from_right] = [tail.factors[2 * mode], tail.factors[2 * mode + 1]];
+                (from_left != 0.0 || from_right != 0.0).then(|| Decaying {
+                    decay: tail.decays[mode],
+                    from_left,
+                    from_right,
+                })
+            })
+        })
+    }
+
+    /// The places where a piece turns, with the values there and at its ends.
+    fn turning(&self, piece: usize, mut consider: impl FnMut(f64, f64)) {
+        let (from, to) = (self.stations[piece], self.stations[piece + 1]);
+        let c = &self.polynomials[piece * self.terms..(piece + 1) * self.terms];
+        if self.tails.is_empty() && self.terms == TERMS {
+            let c: &Coefficients = c.try_into().expect("a piece of so many terms");
             consider(c[0], from);
             for &t in polynomial::sign_changes(&polynomial::derivative(c)).as_slice() {
                 consider(polynomial::value(c, t), from + (to - from) * t);
             }
             consider(polynomial::value_at_one(c), to);
+            return;
         }
-        best
+        let curve = Curve {
+            polynomial: c.to_vec(),
+            decaying: self.pairs(piece).collect(),
+        };
+        consider(curve.value(0.0), from);
+        for t in curve.derivative().sign_changes() {
+            consider(curve.value(t), from + (to - from) * t);
+        }
+        consider(curve.value(1.0), to);
+    }
+
+    /// The places where the field changes its sign inside a piece.
+    pub(crate) fn sign_changes(&self) -> Vec<f64> {
+        let mut places = Vec::new();
+        for (k, ends) in self.stations.windows(2).enumerate() {
+            let curve = Curve {
+                polynomial: self.polynomials[k * self.terms..(k + 1) * self.terms].to_vec(),
+                decaying: self.pairs(k).collect(),
+            };
+            let changes = curve.sign_changes();
+            places.extend(changes.iter().map(|t| ends[0] + (ends[1] - ends[0]) * t));
+        }
+        places
+    }
+
+    /// The candidate for an extreme that `better(new, best)` prefers, leftmost first.
+    fn find(&self, score: impl Fn(f64) -> f64) -> Peak {
+        let mut best: Option<(Peak, f64)> = None;
+        for piece in 0..self.len() {
+            self.turning(piece, |value, at| {
+                let s = score(value);
+                let is_better =
+                    best.is_none_or(|(_, known)| s - known > TIE * f64::max(known.abs(), s.abs()));
+                if is_better {
+                    best = Some((Peak { value, at }, s));
+                }
+            });
+        }
+        best.expect("a field has at least one piece").0
     }
 
     /// The algebraically greatest value with its place.
@@ -154,6 +397,14 @@ impl Piecewise {
     }
 }
 
+/// All stations of two members of one length, each once.
+fn merged(a: &[f64], b: &[f64]) -> Arc<[f64]> {
+    let mut both: Vec<f64> = a.iter().chain(b).copied().collect();
+    both.sort_by(f64::total_cmp);
+    both.dedup();
+    both.into()
+}
+
 #[cfg(test)]
 mod tests {
     use super::*;
@@ -161,13 +412,8 @@ mod tests {
     fn two_pieces() -> Piecewise {
         let mut field = Piecewise::zero(Arc::from([0.0, 1.0, 3.0]));
         // t - t^2 on the first piece, then 5 falling to -5.
-        field.add(
-            &[
-                [0.0, 1.0, -1.0, 0.0, 0.0, 0.0],
-                [5.0, -10.0, 0.0, 0.0, 0.0, 0.0],
-            ],
-            1.0,
-        );
+        field.add_to_piece(0, &[0.0, 1.0, -1.0]);
+        field.add_to_piece(1, &[5.0, -10.0]);
         field
     }
 
@@ -220,5 +466,35 @@ mod tests {
                 at: 1.0
             }
         );
+    }
+
+    #[test]
+    fn fields_of_different_stations_add_up() {
+        let mut field = two_pieces();
+        let mut other = Piecewise::zero(Arc::from([0.0, 0.5, 3.0]));
+        other.add_to_piece(0, &[1.0, 1.0]);
+        other.add_to_piece(1, &[2.0, -2.0]);
+        let decays: Arc<[f64]> = Arc::from([3.0, 4.0]);
+        let zeros = [0.0; TERMS];
+        let coefficients = |pair: [f64; 2]| [zeros.as_slice(), &pair].concat();
+        let (a, b) = (coefficients([1.0, 0.5]), coefficients([0.25, 2.0]));
+        other.add_coefficients(TERMS, &decays, [&a[..], &b[..]].into_iter(), 1.0);
+        let expected: Vec<f64> = [0.3, 0.7, 1.9]
+            .iter()
+            .map(|&x| field.sides(x).unwrap().1 - 2.0 * other.sides(x).unwrap().1)
+            .collect();
+        field.add(&other, -2.0);
+        assert_eq!(field.stations(), [0.0, 0.5, 1.0, 3.0]);
+        for (x, expected) in [0.3, 0.7, 1.9].into_iter().zip(expected) {
+            let found = field.sides(x).unwrap().1;
+            assert!((found - expected).abs() < 1e-14, "{x}: {found} {expected}");
+        }
+    }
+
+    #[test]
+    fn a_derivative_follows_the_chain_rule() {
+        let slope = two_pieces().derivative();
+        assert_eq!(slope.sides(0.25), Some((0.5, 0.5)));
+        assert_eq!(slope.sides(2.0), Some((-5.0, -5.0)));
     }
 }

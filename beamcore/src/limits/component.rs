@@ -3,6 +3,7 @@
 use crate::camber::Camber;
 use crate::error::Result;
 use crate::field::{Field, Piecewise};
+use crate::member::{Member, Span};
 use crate::response::Response;
 use crate::time::Time;
 use crate::units::Length;
@@ -71,21 +72,22 @@ impl Response {
             Component::Permanent => line("permanent", Time::Initial)?,
             Component::Creep => {
                 let mut creep = line("permanent", Time::Final)?;
-                creep.add(line("permanent", Time::Initial)?.pieces(), -1.0);
+                creep.add(&line("permanent", Time::Initial)?, -1.0);
                 creep
             }
             Component::Variable => {
                 let mut variable = line(combination, Time::Final)?;
-                variable.add(line("permanent", Time::Final)?.pieces(), -1.0);
+                variable.add(&line("permanent", Time::Final)?, -1.0);
                 variable
             }
             Component::Total | Component::Remaining => line(combination, Time::Final)?,
         };
         if let (Component::Remaining, Some(camber)) = (component, camber) {
-            sum.add(camber.line(sum.stations()).iter(), -1.0);
+            sum.add(&camber.line(&sum), -1.0);
         }
         let span = self.member().span(span)?;
-        Ok(Field::new(sum.between(span.from().si(), span.to().si())))
+        let own = sum.between(span.from().si(), span.to().si());
+        Ok(Field::new(from_chord(self.member(), span, own)))
     }
 
     /// w_c: the camber line over a span, positive upward; zero everywhere without a camber.
@@ -101,7 +103,7 @@ impl Response {
         let span = self.member().span(span)?;
         let mut line = self.deflection_line("permanent", Time::Initial)?.zeroed();
         if let Some(camber) = camber {
-            line.add(camber.line(line.stations()).iter(), 1.0);
+            line.add(&camber.line(&line), 1.0);
         }
         Ok(Field::new(line.between(span.from().si(), span.to().si())))
     }
@@ -117,9 +119,32 @@ impl Response {
         time: Time,
         span: &str,
     ) -> Result<Field<Length>> {
-        // The supports do not move, so that every chord lies at zero.
         let span = self.member().span(span)?;
         let line: Piecewise = self.deflection_line(combination, time)?;
-        Ok(Field::new(line.between(span.from().si(), span.to().si())))
+        let (from, to) = (span.from().si(), span.to().si());
+        let own = line.between(from, to);
+        Ok(Field::new(from_chord(self.member(), span, own)))
     }
+}
+
+/// A line over a span, counted from the chord between its two supports, or from the support of an
+/// overhang: supports on springs, and those that settle, move. Rigid ones leave it as it is.
+fn from_chord(member: &Member, span: &Span, mut line: Piecewise) -> Piecewise {
+    if !member.has_moving_supports() {
+        return line;
+    }
+    let at = |x: f64| line.sides(x).map_or(0.0, |sides| sides.0);
+    let (from, to) = (span.from().si(), span.to().si());
+    let (left, right) = match (span.is_cantilever(), span.from() == Length::ZERO) {
+        (false, _) => (at(from), at(to)),
+        (true, true) => (at(to), at(to)),
+        (true, false) => (at(from), at(from)),
+    };
+    let places = line.stations().to_vec();
+    for (k, ends) in places.windows(2).enumerate() {
+        let chord = |x: f64| left + (right - left) * ((x - from) / (to - from));
+        let (start, end) = (chord(ends[0]), chord(ends[1]));
+        line.add_to_piece(k, &[-start, start - end]);
+    }
+    line
 }

@@ -4,6 +4,8 @@
 //! with it. These are computed by one portable implementation, so that one build gives the same
 //! bits everywhere.
 
+pub(crate) mod curve;
+pub(crate) mod eigen;
 pub(crate) mod polynomial;
 
 /// e to the power `x`.
@@ -19,4 +21,19 @@ pub(crate) fn pow(base: f64, exponent: f64) -> f64 {
 /// The angle of the point (x, y), from -pi to pi.
 pub(crate) fn atan2(y: f64, x: f64) -> f64 {
     libm::atan2(y, x)
+}
+
+/// The sine of an angle in radians.
+pub(crate) fn sin(x: f64) -> f64 {
+    libm::sin(x)
+}
+
+/// The cosine of an angle in radians.
+pub(crate) fn cos(x: f64) -> f64 {
+    libm::cos(x)
+}
+
+/// The cube root.
+pub(crate) fn cbrt(x: f64) -> f64 {
+    libm::cbrt(x)
 }

@@ -24,6 +24,21 @@ pub(crate) fn derivative(c: &Coefficients) -> Coefficients {
     [c[1], 2.0 * c[2], 3.0 * c[3], 4.0 * c[4], 5.0 * c[5], 0.0]
 }
 
+/// The polynomial of s with t = start + (end - start) s.
+pub(crate) fn stretch(c: &[f64], start: f64, end: f64) -> Vec<f64> {
+    let width = end - start;
+    let mut result = vec![0.0; c.len()];
+    // Horner's rule with the line in the place of t.
+    for (n, &term) in c.iter().rev().enumerate() {
+        for i in (0..=n.min(c.len() - 1)).rev() {
+            let lower = if i > 0 { result[i - 1] } else { 0.0 };
+            result[i] = result[i] * start + lower * width;
+        }
+        result[0] += term;
+    }
+    result
+}
+
 /// The roots inside an interval, in rising order.
 #[derive(Clone, Copy, Debug, Default)]
 pub(crate) struct Roots {
@@ -53,10 +68,11 @@ pub(crate) fn sign_changes(c: &Coefficients) -> Roots {
     if keeps_its_sign(c) {
         return roots;
     }
-    let turning = sign_changes(&derivative(c));
+    let slope = derivative(c);
+    let turning = sign_changes(&slope);
     let mut left = 0.0;
     for &right in turning.as_slice().iter().chain(std::iter::once(&1.0)) {
-        if let Some(root) = enclosed_root(c, left, right) {
+        if let Some(root) = enclosed_root(|t| value(c, t), |t| value(&slope, t), left, right) {
             roots.push(root);
         }
         left = right;
@@ -85,19 +101,23 @@ fn keeps_its_sign(c: &Coefficients) -> bool {
 }
 
 /// The sign change of a function that is monotone on the interval, if it has one inside.
-fn enclosed_root(c: &Coefficients, left: f64, right: f64) -> Option<f64> {
-    let at_left = value(c, left);
-    let at_right = value(c, right);
+pub(super) fn enclosed_root(
+    function: impl Fn(f64) -> f64,
+    slope: impl Fn(f64) -> f64,
+    left: f64,
+    right: f64,
+) -> Option<f64> {
+    let at_left = function(left);
+    let at_right = function(right);
     // A root at an end belongs to the end, where the caller looks anyway.
     if at_left == 0.0 || at_right == 0.0 || (at_left > 0.0) == (at_right > 0.0) {
         return None;
     }
-    let slope = derivative(c);
     let (mut low, mut high) = (left, right);
     let mut t = left + (right - left) * (at_left / (at_left - at_right));
     // Newton steps, kept inside the enclosure; halving where they would leave it.
     for _ in 0..200 {
-        let v = value(c, t);
+        let v = function(t);
         if v == 0.0 {
             return Some(t);
         }
@@ -106,7 +126,7 @@ fn enclosed_root(c: &Coefficients, left: f64, right: f64) -> Option<f64> {
         } else {
             high = t;
         }
-        let newton = t - v / value(&slope, t);
+        let newton = t - v / slope(t);
         let next = if newton > low && newton < high {
             newton
         } else {

@@ -69,6 +69,7 @@ pub struct Action {
     effect: Effect,
     duration: Option<LoadDuration>,
     start: Option<Duration>,
+    layer: Option<String>,
     loads: Vec<Load>,
 }
 
@@ -81,6 +82,7 @@ impl Action {
             effect: Effect::Unfavourable,
             duration: None,
             start: None,
+            layer: None,
             loads: Vec::new(),
         }
     }
@@ -116,6 +118,15 @@ impl Action {
     #[must_use]
     pub const fn starting(mut self, start: Duration) -> Self {
         self.start = Some(start);
+        self
+    }
+
+    /// The same action with all its loads entering the layer of this name; without it, transverse
+    /// loads enter the first layer. It matters where layers have deflections of their own, and
+    /// where forces act along the member.
+    #[must_use]
+    pub fn on(mut self, layer: impl Into<String>) -> Self {
+        self.layer = Some(layer.into());
         self
     }
 
@@ -201,6 +212,12 @@ impl Action {
     #[must_use]
     pub fn loads(&self) -> &[Load] {
         &self.loads
+    }
+
+    /// The layer that its loads enter, if one was named.
+    #[must_use]
+    pub fn layer(&self) -> Option<&str> {
+        self.layer.as_deref()
     }
 
     /// Whether it makes things worse or better.

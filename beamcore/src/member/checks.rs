@@ -67,6 +67,7 @@ fn check_supports(
         return;
     }
     for support in supports {
+        problems.extend(support.problems());
         check::name(problems, support.name(), all);
         inside(problems, length, support.at(), &at(support));
     }
@@ -95,7 +96,7 @@ fn check_supports(
     }
     if supports
         .iter()
-        .all(|support| support.kind() == SupportKind::Roller)
+        .all(|support| support.kind() == SupportKind::Roller && !support.holds_axis())
     {
         problems.push(Problem::new(
             ErrorKind::Mechanism,
@@ -180,7 +181,7 @@ fn check_actions(
 
 fn check_load(problems: &mut Vec<Problem>, length: Option<Length>, load: &Load, base: &str) {
     let field = |name: &str| path::key(base, name);
-    match *load {
+    match load.clone() {
         Load::SelfWeight => {}
         Load::Uniform { load } => check::finite(problems, load, &field("load")),
         Load::Partial { load, from, to } => {
@@ -216,6 +217,36 @@ fn check_load(problems: &mut Vec<Problem>, length: Option<Length>, load: &Load, 
             check::finite(problems, couple, &field("couple"));
             inside(problems, length, at, &field("at"));
         }
+        Load::Plan { load, stretch } => {
+            check::finite(problems, load, &field("load"));
+            if let Some((from, to)) = stretch {
+                check_stretch(problems, length, from, to, base);
+            }
+        }
+        Load::Axial { load, at, height } => {
+            check::finite(problems, load, &field("load"));
+            inside(problems, length, at, &field("at"));
+            check::finite(problems, height, &field("height"));
+        }
+        Load::Prestress { force, tendon } => {
+            check::finite(problems, force, &field("force"));
+            for (i, (at, height)) in tendon.points().iter().enumerate() {
+                let base = path::indexed(&field("points"), i);
+                inside(problems, length, *at, &path::key(&base, "at"));
+                check::finite(problems, *height, &path::key(&base, "height"));
+            }
+        }
+        Load::Settlement { settlement, .. } => {
+            check::finite(problems, settlement, &field("settlement"));
+        }
+        Load::ImposedRotation { rotation, .. } => {
+            check::finite(problems, rotation, &field("rotation"));
+        }
+        Load::Temperature { change, .. } => check::finite(problems, change, &field("change")),
+        Load::TemperatureDifference { difference } => {
+            check::finite(problems, difference, &field("difference"));
+        }
+        Load::Strain { strain, .. } => problems.extend(strain.problems(base)),
     }
 }
 

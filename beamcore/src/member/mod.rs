@@ -3,38 +3,53 @@
 mod action;
 mod category;
 mod checks;
+mod checks_sections;
 mod combination;
+mod hinge;
 mod layout;
 mod load;
 mod load_case;
+mod mesh;
+mod node;
 mod plan;
 mod plausible;
+mod sections;
+mod settle;
+mod shear;
 mod span;
 mod support;
 
 pub use action::{Action, ActionKind, Effect, LoadDuration};
 pub use category::{Category, CombinationFactors};
 pub use combination::{Combination, CombinationKind, OwnCombination, PartialFactors};
-pub use load::Load;
+pub use hinge::{Anchor, Hinge, Release};
+pub use load::{Load, Tendon};
 pub use plan::MemberPlan;
+pub use sections::SectionChange;
+pub use shear::ShearModel;
 pub use span::Span;
-pub use support::{Support, SupportKind};
+pub use support::{LayerHold, Support, SupportKind};
 
 #[cfg(feature = "document")]
 pub(crate) use checks::{Known, problems_of};
 #[cfg(feature = "document")]
 pub(crate) use combination::{all as combinations_of, problems as combination_problems};
 pub(crate) use layout::SAME_PLACE;
-pub(crate) use load_case::{curvature_case, load_case};
+pub(crate) use layout::{Held, HeldBy, Layout, merged_layer, slip_of};
+pub(crate) use load_case::{Case, initial_strains, load_case};
+pub(crate) use node::Node;
+pub(crate) use settle::{Settled, settle};
 #[cfg(feature = "document")]
 pub(crate) use span::all as spans_of;
 
-use crate::error::Result;
+use crate::error::{Error, ErrorKind, Problem, Result};
 use crate::lookup;
-use crate::section::{Section, Sideways, Stiffness, StrainPlane};
+use crate::section::{PlacedPart, Section, Sideways};
 use crate::solve::beam::Beam;
 use crate::time::Time;
-use crate::units::Length;
+use crate::units::{Angle, Length};
+use layout::Situation;
+use sections::Stretch;
 use std::sync::Arc;
 
 /// A member that has passed all checks and is ready to be solved.
@@ -48,19 +63,12 @@ pub struct Member {
 #[derive(Debug)]
 struct Data {
     plan: MemberPlan,
+    sections: Vec<Stretch>,
     combinations: Vec<Combination>,
-    states: [MemberState; 2],
+    layout: Arc<Layout>,
+    beams: [Arc<Beam>; 2],
     spans: Vec<Span>,
     notes: Vec<String>,
-}
-
-/// What the solver needs of a member at one time.
-#[derive(Clone, Debug)]
-pub(crate) struct MemberState {
-    pub(crate) stiffness: Stiffness,
-    pub(crate) beam: Beam,
-    /// The strain that the section takes freely under the initial strains of its parts.
-    pub(crate) free: StrainPlane,
 }
 
 impl Member {
@@ -95,30 +103,30 @@ impl Member {
     }
 
     pub(crate) fn from_plan(plan: MemberPlan) -> Result<Self> {
-        let layout = layout::Layout::new(&plan);
-        let states = Time::ALL.map(|time| {
-            let stiffness = plan.section().stiffness(time);
-            layout
-                .beam(stiffness.against_bending(plan.is_held()).0)
-                .map(|beam| MemberState {
-                    free: plan.section().free_plane(time, plan.is_held()),
-                    stiffness,
-                    beam,
-                })
-        });
-        let [initial, end] = states;
+        let sections = sections::stretches(plan.section(), plan.length(), plan.changes())?;
+        Error::check(checks_sections::problems(&plan, &sections))?;
+        let layout = Layout::new(&plan, &sections, &[])?;
+        let initial = Arc::new(layout.beam(Time::Initial, &Situation::default(), &plan)?);
+        // Where nothing creeps the end is as the beginning, and is solved once.
+        let end = if layout.lasts() {
+            Arc::clone(&initial)
+        } else {
+            Arc::new(layout.beam(Time::Final, &Situation::default(), &plan)?)
+        };
         let combinations =
             combination::all(plan.actions(), plan.factors(), plan.own_combinations());
         let spans = span::all(plan.length(), plan.supports());
         let data = Data {
             spans,
             combinations,
-            states: [initial?, end?],
+            beams: [initial, end],
             notes: layout
                 .notes()
                 .into_iter()
                 .chain(plausible::notes(&plan))
                 .collect(),
+            sections,
+            layout: Arc::new(layout),
             plan,
         };
         Ok(Self {
@@ -126,7 +134,7 @@ impl Member {
         })
     }
 
-    /// The section.
+    /// The section at the left end.
     #[must_use]
     pub fn section(&self) -> &Section {
         self.data.plan.section()
@@ -196,10 +204,118 @@ impl Member {
         &self.data.notes
     }
 
-    pub(crate) fn state(&self, time: Time) -> &MemberState {
-        match time {
-            Time::Initial => &self.data.states[0],
-            Time::Final => &self.data.states[1],
+    /// The changes of the section along the member, from left to right.
+    #[must_use]
+    pub fn changes(&self) -> &[SectionChange] {
+        self.data.plan.changes()
+    }
+
+    /// The internal hinges.
+    #[must_use]
+    pub fn hinges(&self) -> &[Hinge] {
+        self.data.plan.hinges()
+    }
+
+    /// What stops the slip of joints.
+    #[must_use]
+    pub fn anchors(&self) -> &[Anchor] {
+        self.data.plan.anchors()
+    }
+
+    /// How shear deformation is taken.
+    #[must_use]
+    pub fn shear_model(&self) -> ShearModel {
+        self.data.plan.shear_model()
+    }
+
+    /// The pitch, if the member has one.
+    #[must_use]
+    pub fn pitch(&self) -> Option<Angle> {
+        self.data.plan.pitch_angle()
+    }
+
+    /// The section just right of a place (at the right end, just left of it).
+    ///
+    /// # Errors
+    /// [`crate::ErrorKind::Position`] if the place is not on the member.
+    pub fn section_at(&self, at: Length) -> Result<Section> {
+        let (x, length) = (at.si(), self.length());
+        if !(x >= 0.0 && at <= length) {
+            return Err(Problem::new(
+                ErrorKind::Position,
+                "at",
+                at.to_string(),
+                format!("a place on the member, from 0 m to {length}"),
+            )
+            .into());
         }
+        let sections = &self.data.sections;
+        let own = sections.iter().find(|stretch| x < stretch.to);
+        let stretch = own.unwrap_or(&sections[sections.len() - 1]);
+        Ok((*stretch.at(x)?).clone())
+    }
+
+    pub(crate) fn plan(&self) -> &MemberPlan {
+        &self.data.plan
+    }
+
+    pub(crate) fn stretches(&self) -> &[Stretch] {
+        &self.data.sections
+    }
+
+    pub(crate) fn layout(&self) -> &Arc<Layout> {
+        &self.data.layout
+    }
+
+    pub(crate) fn beam(&self, time: Time) -> &Arc<Beam> {
+        &self.data.beams[time.index()]
+    }
+
+    /// The parts of all sections along the member, each name once, at its place where it comes
+    /// first from the left.
+    #[must_use]
+    pub fn parts(&self) -> Vec<&PlacedPart> {
+        let mut parts: Vec<&PlacedPart> = Vec::new();
+        for stretch in self.stretches() {
+            for part in stretch.start().placed() {
+                if !parts.iter().any(|known| known.name() == part.name()) {
+                    parts.push(part);
+                }
+            }
+        }
+        parts
+    }
+
+    /// The first part of a name from the left, and its merged layer.
+    pub(crate) fn part(&self, name: &str) -> Result<(&PlacedPart, usize)> {
+        for stretch in self.stretches() {
+            let section = stretch.start();
+            if let Ok(index) = section.index(name) {
+                return Ok((&section.placed()[index], section.layer_of_part(index)));
+            }
+        }
+        let names: Vec<_> = self.parts().iter().map(|part| part.name()).collect();
+        Err(lookup::unknown("part", name, &names).into())
+    }
+
+    /// Whether supports can move: on springs, one-way, or by loads that move them.
+    pub(crate) fn has_moving_supports(&self) -> bool {
+        let gives = |s: &Support| s.given_spring().is_some() || s.is_one_way();
+        let moves = |load: &Load| matches!(load, Load::Settlement { .. });
+        self.supports().iter().any(gives)
+            || self
+                .actions()
+                .iter()
+                .any(|action| action.loads().iter().any(moves))
+    }
+
+    /// Whether superposition fails: supports that the member may leave, joints with clearance.
+    pub(crate) fn is_one_way(&self) -> bool {
+        self.supports().iter().any(Support::is_one_way)
+            || self
+                .section()
+                .slips()
+                .iter()
+                .any(|joint| joint.clearance() > 0.0)
     }
 }

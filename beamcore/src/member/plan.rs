@@ -1,9 +1,12 @@
 //! The plan of a member: everything given, nothing checked yet.
 
-use super::{Action, Member, OwnCombination, PartialFactors, Support, checks, combination};
+use super::{
+    Action, Anchor, Hinge, Member, OwnCombination, PartialFactors, SectionChange, ShearModel,
+    Support, checks, checks_sections, combination,
+};
 use crate::error::{Error, Result};
-use crate::section::{Section, Sideways};
-use crate::units::Length;
+use crate::section::{JointKind, Section, Sideways};
+use crate::units::{Angle, Length};
 
 /// A member as it is being described. [`MemberPlan::check`] makes a [`Member`] of it.
 #[derive(Clone, Debug, PartialEq)]
@@ -15,6 +18,11 @@ pub struct MemberPlan {
     factors: PartialFactors,
     own: Vec<OwnCombination>,
     sideways: Sideways,
+    changes: Vec<SectionChange>,
+    hinges: Vec<Hinge>,
+    anchors: Vec<Anchor>,
+    shear: ShearModel,
+    pitch: Option<Angle>,
 }
 
 impl MemberPlan {
@@ -27,6 +35,11 @@ impl MemberPlan {
             factors: PartialFactors::default(),
             own: Vec::new(),
             sideways: Sideways::Held,
+            changes: Vec::new(),
+            hinges: Vec::new(),
+            anchors: Vec::new(),
+            shear: ShearModel::Rigid,
+            pitch: None,
         }
     }
 
@@ -67,6 +80,52 @@ impl MemberPlan {
         self
     }
 
+    /// The same plan with another section from a place on, to the right of all changes before.
+    #[must_use]
+    pub fn step(mut self, at: Length, section: Section) -> Self {
+        self.changes.push(SectionChange::Step { at, section });
+        self
+    }
+
+    /// The same plan with a section that changes linearly between two places, to the right of all
+    /// changes before, to a like one: the same parts, shapes and materials with other sizes.
+    #[must_use]
+    pub fn taper(mut self, from: Length, to: Length, section: Section) -> Self {
+        self.changes
+            .push(SectionChange::Taper { from, to, section });
+        self
+    }
+
+    /// The same plan with an internal hinge.
+    #[must_use]
+    pub fn hinge(mut self, hinge: Hinge) -> Self {
+        self.hinges.push(hinge);
+        self
+    }
+
+    /// The same plan with something that stops the slip of a joint at a place.
+    #[must_use]
+    pub fn anchor(mut self, anchor: Anchor) -> Self {
+        self.anchors.push(anchor);
+        self
+    }
+
+    /// The same plan with shear deformation taken as told; without this it is left out.
+    #[must_use]
+    pub const fn shear(mut self, shear: ShearModel) -> Self {
+        self.shear = shear;
+        self
+    }
+
+    /// The same plan of a member that rises to the right by an angle. Its length and all places are
+    /// measured along it, gravity loads act downward, supports hold the vertical movement (a pin
+    /// the level one too), and the deflection is square to the member.
+    #[must_use]
+    pub const fn pitch(mut self, angle: Angle) -> Self {
+        self.pitch = Some(angle);
+        self
+    }
+
     /// Checks the plan and prepares the member for solving.
     ///
     /// # Errors
@@ -84,6 +143,8 @@ impl MemberPlan {
             &self.actions.as_slice().into(),
         );
         problems.extend(checks::strains_held(&self.section, self.sideways));
+        problems.extend(checks_sections::order_of_changes(&self));
+        problems.extend(checks_sections::places(&self));
         problems.extend(combination::problems(
             &self.actions,
             &self.factors,
@@ -119,5 +180,38 @@ impl MemberPlan {
 
     pub(super) const fn is_held(&self) -> Sideways {
         self.sideways
+    }
+
+    pub(super) fn changes(&self) -> &[SectionChange] {
+        &self.changes
+    }
+
+    pub(super) fn hinges(&self) -> &[Hinge] {
+        &self.hinges
+    }
+
+    pub(super) fn anchors(&self) -> &[Anchor] {
+        &self.anchors
+    }
+
+    pub(super) const fn shear_model(&self) -> ShearModel {
+        self.shear
+    }
+
+    pub(super) const fn pitch_angle(&self) -> Option<Angle> {
+        self.pitch
+    }
+
+    /// The same plan with all joints of its sections of one kind, without anchors, gaps kept.
+    pub(crate) fn with_joints(&self, kind: &JointKind) -> Result<Self> {
+        let mut plan = self.clone();
+        plan.section = self.section.with_joints(kind)?;
+        plan.anchors = Vec::new();
+        for change in &mut plan.changes {
+            let (SectionChange::Step { section, .. } | SectionChange::Taper { section, .. }) =
+                change;
+            *section = section.with_joints(kind)?;
+        }
+        Ok(plan)
     }
 }

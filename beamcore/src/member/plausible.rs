@@ -82,8 +82,17 @@ pub(super) fn notes(plan: &MemberPlan) -> Vec<String> {
         let loads = path::key(&path::named("actions", action.name()), "loads");
         for (i, load) in action.loads().iter().enumerate() {
             let at = path::key(&path::indexed(&loads, i), load.name());
-            match *load {
-                Load::SelfWeight => {}
+            match load.clone() {
+                Load::SelfWeight
+                | Load::Settlement { .. }
+                | Load::ImposedRotation { .. }
+                | Load::Temperature { .. }
+                | Load::TemperatureDifference { .. }
+                | Load::Strain { .. } => {}
+                Load::Plan { load, .. } => look(&mut notes, load, &at),
+                Load::Axial { load, .. } | Load::Prestress { force: load, .. } => {
+                    look(&mut notes, load, &at);
+                }
                 Load::Uniform { load } | Load::Partial { load, .. } => look(&mut notes, load, &at),
                 Load::Trapezoidal {
                     load_from, load_to, ..

@@ -19,6 +19,7 @@
 //! assert!(!touches(&stem.region(), &bar, 1e-9));
 //! ```
 
+mod between;
 mod contact;
 mod contour;
 mod contour_problems;

@@ -1,28 +1,24 @@
-//! The response of a member: deflection, slope, shear force, moment and reactions along x.
+//! The response of a member: deflection, slope, forces, slips and reactions along x.
 
+mod composite;
+mod layers;
+mod reaction;
 mod share;
+mod solutions;
+
+pub use composite::CompositeAction;
+pub use layers::{JointResponse, LayerForces};
+pub use reaction::Reaction;
 
 use crate::error::{Error, Result};
 use crate::field::{Field, Piecewise};
 use crate::lookup;
-use crate::math::polynomial::Coefficients;
 use crate::member::{Combination, Member};
-use crate::solve::beam::{Reaction as PlainReaction, Solved};
-use crate::solve::polynomial::PieceFields;
+use crate::section::{InitialStrain, Sideways};
 use crate::time::Time;
-use crate::units::{Angle, Force, Length, Moment, Quantity};
-use share::Share;
+use crate::units::{Angle, Curvature, Force, Length, Moment};
+use solutions::{Linear, OneWay, Term};
 use std::sync::Arc;
-
-/// The reaction of one support on the member.
-#[derive(Clone, Copy, Debug, PartialEq)]
-pub struct Reaction {
-    /// The force, positive upward.
-    pub force: Force,
-    /// The couple, positive clockwise with x to the right and z up; zero unless the support holds
-    /// the rotation.
-    pub couple: Moment,
-}
 
 /// The solved member: every field under every combination, at both times.
 ///
@@ -32,14 +28,17 @@ pub struct Reaction {
 #[derive(Clone, Debug)]
 pub struct Response {
     member: Member,
-    stations: Arc<[f64]>,
-    /// One solution per action and a last one for the initial strains of the parts, for the initial
-    /// and the final stiffness.
-    solved: [Vec<Solved>; 2],
+    /// Solutions for the initial and the final stiffness.
+    linear: [Arc<Linear>; 2],
+    /// Of a member where superposition fails, per combination and time.
+    one_way: Option<Arc<Vec<[Result<OneWay>; 2]>>>,
 }
 
 impl Member {
     /// Solves the member for each action at each time.
+    ///
+    /// A member that may lift off supports, or whose joints have clearance, is solved for each
+    /// combination; where no equilibrium is found the results of that combination are errors.
     #[must_use]
     pub fn solve(&self) -> Response {
         Response::of(self.clone())
@@ -48,27 +47,22 @@ impl Member {
 
 impl Response {
     fn of(member: Member) -> Self {
-        let solved = Time::ALL.map(|time| {
-            let state = member.state(time);
-            let beam = &state.beam;
-            let case = |action| crate::member::load_case(beam, member.section(), action);
-            let actions = member
-                .actions()
-                .iter()
-                .map(|action| beam.solve(&case(action)));
-            let free = state.free.curvature_y.si();
-            let strains = if free == 0.0 {
-                Solved::at_rest(beam.stations().len())
-            } else {
-                beam.solve(&crate::member::curvature_case(beam, free))
-            };
-            actions.chain(std::iter::once(strains)).collect()
+        let initial = Arc::new(Linear::of(&member, Time::Initial));
+        let lasts = Arc::ptr_eq(member.beam(Time::Initial), member.beam(Time::Final));
+        let end = if lasts {
+            Arc::clone(&initial)
+        } else {
+            Arc::new(Linear::of(&member, Time::Final))
+        };
+        let one_way = member.is_one_way().then(|| {
+            let combinations = member.combinations().iter();
+            let solved = combinations.map(|c| Time::ALL.map(|t| solutions::one_way(&member, c, t)));
+            Arc::new(solved.collect())
         });
-        let stations = Arc::from(member.state(Time::Initial).beam.stations());
         Self {
             member,
-            stations,
-            solved,
+            linear: [initial, end],
+            one_way,
         }
     }
 
@@ -78,12 +72,82 @@ impl Response {
         &self.member
     }
 
-    /// The deflection w along the member, positive downward.
+    /// The solutions that make up a combination.
+    fn terms(&self, combination: &str, time: Time) -> Result<Vec<Term<'_>>> {
+        let combination = self.combination(combination)?;
+        match &self.one_way {
+            None => Ok(solutions::linear_terms(
+                &self.member,
+                &self.linear,
+                combination,
+                time,
+            )),
+            Some(solved) => {
+                let all = self.member.combinations();
+                let at = all.iter().position(|c| c.name() == combination.name());
+                let solved = &solved[at.unwrap_or_default()][time.index()];
+                let solved = solved.as_ref().map_err(Clone::clone)?;
+                Ok(solutions::one_way_terms(solved))
+            }
+        }
+    }
+
+    /// A field of zeros over the pieces of the member.
+    fn zero(&self) -> Piecewise {
+        Piecewise::zero(Arc::clone(self.member.beam(Time::Initial).stations()))
+    }
+
+    /// The sum over the terms of one line each.
+    fn sum(
+        &self,
+        combination: &str,
+        time: Time,
+        line: impl Fn(&Term<'_>) -> Piecewise,
+    ) -> Result<Piecewise> {
+        let mut sum = self.zero();
+        for term in self.terms(combination, time)? {
+            sum.add(&line(&term), 1.0);
+        }
+        Ok(sum)
+    }
+
+    /// The sum over the terms of one field of the solver.
+    fn summed(&self, combination: &str, time: Time, field: usize, sign: f64) -> Result<Piecewise> {
+        let mut sum = self.zero();
+        for term in self.terms(combination, time)? {
+            if term.settled.is_none() {
+                term.add_field(field, sign * term.factor, &mut sum);
+            } else {
+                sum.add(&term.field(field), sign);
+            }
+        }
+        Ok(sum)
+    }
+
+    /// The deflection w along the member, positive downward (square to a pitched member); of
+    /// layers with deflections of their own, that of the first layer.
     ///
     /// # Errors
-    /// [`crate::ErrorKind::Lookup`] if there is no such combination.
+    /// [`crate::ErrorKind::Lookup`] if there is no such combination; [`crate::ErrorKind::Numerical`]
+    /// if one-way supports or clearances find no equilibrium under it. So do all results.
     pub fn deflection(&self, combination: &str, time: Time) -> Result<Field<Length>> {
-        self.field(combination, time, |piece| &piece.deflection)
+        Ok(Field::new(self.deflection_line(combination, time)?))
+    }
+
+    /// The deflection of a layer; that of the member unless a transverse modulus gives the layer
+    /// one of its own.
+    ///
+    /// # Errors
+    /// As for [`Response::deflection`]; [`crate::ErrorKind::Name`] if there is no such layer.
+    pub fn layer_deflection(
+        &self,
+        combination: &str,
+        time: Time,
+        layer: &str,
+    ) -> Result<Field<Length>> {
+        let strand = self.member.layout().strands[self.merged(layer)?];
+        let index = self.member.layout().states.deflection(strand);
+        Ok(Field::new(self.summed(combination, time, index, 1.0)?))
     }
 
     /// The movement sideways along the member, positive towards positive y; zero unless the member
@@ -92,79 +156,133 @@ impl Response {
     /// v = w `EI_yz`/`EI_zz`, each share of the load with its own moduli.
     ///
     /// # Errors
-    /// [`crate::ErrorKind::Lookup`] if there is no such combination.
+    /// As for [`Response::deflection`].
     pub fn sideways(&self, combination: &str, time: Time) -> Result<Field<Length>> {
-        let shares = self.parted(combination, time, |piece| &piece.deflection)?;
-        let mut line = shares[0].zeroed();
-        for (share, time) in shares.iter().zip(Time::ALL) {
-            let stiffness = &self.member.state(time).stiffness;
-            let (_, ratio) = stiffness.against_bending(self.member.sideways());
-            line.add(share.pieces(), -ratio);
+        if self.member.sideways() == Sideways::Held {
+            return Ok(Field::new(self.zero()));
+        }
+        let line = self.sum(combination, time, |term| {
+            let w = term.field(term.layout.states.deflection(0));
+            term.mixed([&w], |node, _| ([-node.at(term.time)[0].ratio], 0.0))
+        })?;
+        Ok(Field::new(line))
+    }
+
+    /// The slope dw/dx along the member, positive where the deflection grows to the right. With
+    /// shear it is not the rotation of the section.
+    ///
+    /// # Errors
+    /// As for [`Response::deflection`].
+    pub fn slope(&self, combination: &str, time: Time) -> Result<Field<Angle>> {
+        let deflection = self.deflection_line(combination, time)?;
+        Ok(Field::new(deflection.derivative()))
+    }
+
+    /// The rotation of the section along the member, positive clockwise; theta = dw/dx - V/kGA.
+    ///
+    /// # Errors
+    /// As for [`Response::deflection`].
+    pub fn rotation(&self, combination: &str, time: Time) -> Result<Field<Angle>> {
+        let index = self.member.layout().states.rotation(0);
+        Ok(Field::new(self.summed(combination, time, index, 1.0)?))
+    }
+
+    /// The curvature along the member, positive sagging, with its free part.
+    ///
+    /// # Errors
+    /// As for [`Response::deflection`].
+    pub fn curvature(&self, combination: &str, time: Time) -> Result<Field<Curvature>> {
+        let index = self.member.layout().states.all();
+        Ok(Field::new(self.summed(combination, time, index, 1.0)?))
+    }
+
+    /// The shear force V = dM/dx along the member, that of all layers.
+    ///
+    /// # Errors
+    /// As for [`Response::deflection`].
+    pub fn shear(&self, combination: &str, time: Time) -> Result<Field<Force>> {
+        let states = self.member.layout().states;
+        let mut line = self.zero();
+        for strand in 0..states.strands {
+            let index = states.force(states.deflection(strand));
+            line.add(&self.summed(combination, time, index, 1.0)?, 1.0);
         }
         Ok(Field::new(line))
     }
 
-    /// The slope dw/dx along the member, positive where the deflection grows to the right.
+    /// The moment M along the member, positive where it stretches the bottom (sagging), about the
+    /// elastic centroid that the section has on the first day.
     ///
     /// # Errors
-    /// [`crate::ErrorKind::Lookup`] if there is no such combination.
-    pub fn slope(&self, combination: &str, time: Time) -> Result<Field<Angle>> {
-        self.field(combination, time, |piece| &piece.slope)
-    }
-
-    /// The shear force V = dM/dx along the member.
-    ///
-    /// # Errors
-    /// [`crate::ErrorKind::Lookup`] if there is no such combination.
-    pub fn shear(&self, combination: &str, time: Time) -> Result<Field<Force>> {
-        self.field(combination, time, |piece| &piece.shear)
-    }
-
-    /// The moment M along the member, positive where it stretches the bottom (sagging).
-    ///
-    /// # Errors
-    /// [`crate::ErrorKind::Lookup`] if there is no such combination.
+    /// As for [`Response::deflection`].
     pub fn moment(&self, combination: &str, time: Time) -> Result<Field<Moment>> {
-        self.field(combination, time, |piece| &piece.moment)
+        let states = self.member.layout().states;
+        let mut line = self.zero();
+        for strand in 0..states.strands {
+            let index = states.force(states.rotation(strand));
+            line.add(&self.summed(combination, time, index, -1.0)?, 1.0);
+        }
+        if states.has_axial {
+            // From the axis of the solver to the centroid.
+            line.add(
+                &self.sum(combination, time, |term| {
+                    let n = term.field(states.force(states.axial()));
+                    let axis = term.layout.axis;
+                    term.mixed([&n], |node, _| {
+                        ([node.centroid_z(Time::Initial) - axis], 0.0)
+                    })
+                })?,
+                1.0,
+            );
+        }
+        Ok(Field::new(line))
     }
 
-    /// The reaction of a support.
+    /// The axial force N along the member, tension positive.
     ///
     /// # Errors
-    /// [`crate::ErrorKind::Lookup`] if there is no such combination or support.
-    pub fn reaction(&self, combination: &str, time: Time, support: &str) -> Result<Reaction> {
-        let supports = self.member.supports();
-        let at = supports
-            .iter()
-            .find(|s| s.name() == support)
-            .map(|s| s.at().si());
-        let Some(at) = at else {
-            let names: Vec<_> = supports.iter().map(|s| s.name()).collect();
-            return Err(lookup::unknown("support", support, &names).into());
-        };
-        let station = self.stations.partition_point(|&x| x < at);
-        let mut total = PlainReaction::default();
-        for (share, [initial, end]) in self.shares(combination, time)?.into_iter().zip(self.both())
-        {
-            let (a, b) = (initial.reactions[station], end.reactions[station]);
-            total.force += share.short_term * a.force + share.effective * b.force;
-            total.couple += share.short_term * a.couple + share.effective * b.couple;
-        }
-        Ok(Reaction {
-            force: Force::from_si(total.force),
-            couple: Moment::from_si(total.couple),
-        })
+    /// As for [`Response::deflection`].
+    pub fn axial(&self, combination: &str, time: Time) -> Result<Field<Force>> {
+        Ok(Field::new(self.axial_line(combination, time)?))
     }
 
-    /// What is left of equilibrium and continuity in the solutions, relative to their greatest
-    /// terms: the error estimate of exact polynomial pieces.
+    fn axial_line(&self, combination: &str, time: Time) -> Result<Piecewise> {
+        let states = self.member.layout().states;
+        if states.has_axial {
+            self.summed(combination, time, states.force(states.axial()), 1.0)
+        } else {
+            self.combination(combination)?;
+            Ok(self.zero())
+        }
+    }
+
+    /// The error estimate of the solutions, relative to the peak of each field: what is left of
+    /// equilibrium and continuity at the stations, and of the equations between the points of
+    /// pieces whose section changes.
     #[must_use]
     pub fn residual(&self) -> f64 {
-        self.solved
+        let linear = self.linear.iter().flat_map(|linear| &linear.solved);
+        let one_way = self
+            .one_way
             .iter()
-            .flatten()
+            .flat_map(|solved| solved.iter().flatten());
+        let one_way = one_way.filter_map(|solved| solved.as_ref().ok());
+        let one_way = one_way.flatten().map(|(_, settled, _)| &settled.solved);
+        linear
+            .chain(one_way)
             .map(|solved| solved.residual)
             .fold(0.0, f64::max)
+    }
+
+    /// How many linear solutions a combination took: one, unless the member may lift off supports
+    /// or its joints have clearance.
+    ///
+    /// # Errors
+    /// As for [`Response::deflection`].
+    pub fn steps(&self, combination: &str, time: Time) -> Result<usize> {
+        let terms = self.terms(combination, time)?;
+        let steps = terms.iter().map(|term| term.settled.map_or(1, |s| s.steps));
+        Ok(steps.max().unwrap_or(1))
     }
 
     /// The combination of a name.
@@ -181,59 +299,53 @@ impl Response {
             })
     }
 
-    fn field<Q: Quantity>(
-        &self,
-        combination: &str,
-        time: Time,
-        of: impl Fn(&PieceFields) -> &Coefficients,
-    ) -> Result<Field<Q>> {
-        let [mut line, effective] = self.parted(combination, time, of)?;
-        line.add(effective.pieces(), 1.0);
-        Ok(Field::new(line))
-    }
-
-    /// A field in its two shares: under short-term moduli and under effective moduli.
-    fn parted(
-        &self,
-        combination: &str,
-        time: Time,
-        of: impl Fn(&PieceFields) -> &Coefficients,
-    ) -> Result<[Piecewise; 2]> {
-        let mut lines = [(); 2].map(|()| Piecewise::zero(Arc::clone(&self.stations)));
-        for (share, [initial, end]) in self.shares(combination, time)?.into_iter().zip(self.both())
-        {
-            lines[0].add(initial.fields.iter().map(&of), share.short_term);
-            lines[1].add(end.fields.iter().map(&of), share.effective);
-        }
-        Ok(lines)
-    }
-
     /// The deflection line under a combination.
     pub(crate) fn deflection_line(&self, combination: &str, time: Time) -> Result<Piecewise> {
-        let [mut line, effective] = self.parted(combination, time, |piece| &piece.deflection)?;
-        line.add(effective.pieces(), 1.0);
-        Ok(line)
+        let index = self.member.layout().states.deflection(0);
+        self.summed(combination, time, index, 1.0)
     }
 
-    /// The moment in its two shares, from which stresses follow.
-    pub(crate) fn parted_moment(&self, combination: &str, time: Time) -> Result<[Piecewise; 2]> {
-        self.parted(combination, time, |piece| &piece.moment)
+    /// The normal stress along the fibre of a part that lies where `fibre` tells, which goes with
+    /// the section; zero where the part is not there.
+    ///
+    /// sigma = `E_p` (N_i/EA_i + eps_i* - kappa ((z - z_i) + r (y - y_i)) - eps_p*), with the axial
+    /// force and free strain of the part's layer and the free strain of the part.
+    pub(crate) fn fibre_stress(
+        &self,
+        combination: &str,
+        time: Time,
+        part: &str,
+        fibre: impl Fn(&crate::section::PlacedPart) -> crate::outline::Point,
+    ) -> Result<Piecewise> {
+        let (_, merged) = self.member.part(part)?;
+        self.sum(combination, time, |term| {
+            let force = layers::axial_of(term, self.member.section(), merged);
+            let strand = term.layout.strands[merged];
+            let curvature = term.field(term.layout.states.all() + strand);
+            term.mixed([&force, &curvature], |node, strains| {
+                let parts = node.section.placed();
+                let index = parts.iter().position(|p| p.name() == part);
+                let Some(index) = index.filter(|&p| node.section.is_there(p, node.x)) else {
+                    return ([0.0; 2], 0.0);
+                };
+                let placed = &parts[index];
+                let layer = &node.at(term.time)[merged];
+                let point = fibre(placed);
+                let e = placed.material().modulus_at(term.time).si();
+                let arm = (point.z - layer.z) + layer.ratio * (point.y - layer.y);
+                let constant = strains.get(index).map_or(0.0, |strain: &InitialStrain| {
+                    let (y, z) = (Length::from_si(point.y), Length::from_si(point.z));
+                    let centroid = (placed.centroid_y(), placed.centroid_z());
+                    let of_layer = node.free_strain(term.time, strains, merged);
+                    e * (of_layer - strain.at(centroid, y, z).si())
+                });
+                ([e / layer.axial, -e * arm], constant)
+            })
+        })
     }
 
-    fn shares(&self, combination: &str, time: Time) -> Result<Vec<Share>> {
-        Ok(share::of(
-            self.combination(combination)?,
-            self.member.actions(),
-            time,
-        ))
-    }
-
-    /// For each action, and last for the initial strains, its solution with short-term and with
-    /// effective moduli.
-    fn both(&self) -> impl Iterator<Item = [&Solved; 2]> {
-        self.solved[0]
-            .iter()
-            .zip(&self.solved[1])
-            .map(|(initial, end)| [initial, end])
+    /// The position of the merged layer that a named layer is in.
+    fn merged(&self, layer: &str) -> Result<usize> {
+        crate::member::merged_layer(self.member.section(), layer, "layer")
     }
 }

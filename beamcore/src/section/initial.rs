@@ -29,7 +29,7 @@ impl InitialStrain {
         curvature_z: Curvature::ZERO,
     };
 
-    pub(super) fn problems(&self, base: &str) -> Vec<Problem> {
+    pub(crate) fn problems(&self, base: &str) -> Vec<Problem> {
         let mut problems = Vec::new();
         check::finite(&mut problems, self.axial, &path::key(base, "axial"));
         check::finite(
@@ -43,6 +43,24 @@ impl InitialStrain {
             &path::key(base, "curvature_z"),
         );
         problems
+    }
+
+    /// This strain and another one together.
+    pub(crate) fn plus(&self, other: &Self) -> Self {
+        Self {
+            axial: self.axial + other.axial,
+            curvature_y: self.curvature_y + other.curvature_y,
+            curvature_z: self.curvature_z + other.curvature_z,
+        }
+    }
+
+    /// A multiple of this strain.
+    pub(crate) fn times(&self, factor: f64) -> Self {
+        Self {
+            axial: self.axial * factor,
+            curvature_y: self.curvature_y * factor,
+            curvature_z: self.curvature_z * factor,
+        }
     }
 
     /// The strain at a point, given the part's own centroid.

@@ -173,6 +173,15 @@ impl Joint {
         self.creep
     }
 
+    /// The same joint of another kind, with nothing but its gap kept.
+    pub(super) fn of_kind(&self, kind: JointKind) -> Self {
+        let joint = Self::new(&self.name, &self.lower, &self.upper, kind);
+        Self {
+            gap: self.gap,
+            ..joint
+        }
+    }
+
     /// Whether the joint has any stiffness that can creep.
     pub(super) const fn has_modulus(&self) -> bool {
         matches!(self.kind, JointKind::Slipping(_)) || self.transverse.is_some()

@@ -3,6 +3,7 @@
 use super::joint::Joint;
 use super::layer::Layer;
 use super::layering::{MergedLayer, ResolvedJoint, unknown_joint};
+use super::placed::PlacedPart;
 use super::placed_joint::{PlacedJoint, in_order};
 use super::slip::{Slip, Spacing};
 use super::stiffness::Stiffness;
@@ -64,7 +65,6 @@ impl Section {
     }
 }
 
-#[cfg_attr(not(test), expect(dead_code, reason = "for the solver of members"))]
 impl Section {
     /// The stiffness of each merged layer with all its parts.
     pub(crate) fn layer_stiffness(&self, time: Time) -> Vec<LayerStiffness> {
@@ -99,6 +99,29 @@ impl Section {
             y: stiffness.centroid_y().si(),
             z: stiffness.centroid_z().si(),
         }
+    }
+
+    /// The same section with all its joints of one kind.
+    pub(crate) fn with_joints(&self, kind: &JointKind) -> Result<Self> {
+        let joints = self
+            .joints()
+            .iter()
+            .map(|joint| joint.of_kind(kind.clone()));
+        Self::layered(
+            self.parts().to_vec(),
+            self.layers().to_vec(),
+            joints.collect::<Vec<_>>(),
+        )
+    }
+
+    /// The stiffness of some of the parts, as if they were all.
+    pub(crate) fn stiffness_of_parts(&self, parts: &[&PlacedPart], time: Time) -> Stiffness {
+        Stiffness::new(parts.iter().copied(), time)
+    }
+
+    /// Whether the part at a position is there at x along the member.
+    pub(crate) fn is_there(&self, part: usize, x: f64) -> bool {
+        self.layering.is_there(part, x)
     }
 
     /// The merged layer of the part at a position.

@@ -49,7 +49,6 @@ pub(crate) struct ResolvedJoint {
     placed: PlacedJoint,
 }
 
-#[cfg_attr(not(test), expect(dead_code, reason = "for the solver of members"))]
 impl ResolvedJoint {
     /// The slip modulus at x in N/m2: 0 of a loose joint, outside of all bands and of the layers.
     pub(crate) fn modulus_at(&self, x: f64, time: Time) -> f64 {

@@ -1,5 +1,6 @@
 //! Sections: parts of several materials in layers with joints between them, and what follows.
 
+mod between;
 mod contact;
 mod facing;
 mod gather;
@@ -41,6 +42,7 @@ pub use placed::PlacedPart;
 pub use placed_joint::PlacedJoint;
 pub use plane::{PointStress, Principal, SectionForces, Sideways, StrainPlane};
 pub use shear::SHEAR_STIFFNESS_DEFINITION;
+pub(crate) use shear::{layer_shear_stiffness, side_by_side};
 pub use slip::{Band, Slip, Spacing};
 pub use stiffness::Stiffness;
 pub use transformed::{TransformedPart, TransformedSection};

@@ -1,182 +1,411 @@
-//! A member as a chain of pieces on supports, solved for any number of load cases.
+//! A member as a chain of pieces on stations, solved for any number of load cases.
 
-use super::condition::{self, Holds};
+use super::law::Law;
+use super::load::LoadCase;
 use super::mechanism::Motion;
-use super::polynomial::{PieceFields, PieceLoad, PolynomialPiece};
-use super::relation::Piece;
+use super::modes::Modes;
+use super::piece::{Piece, PieceLaw};
+use super::relation::Relation;
 use super::residual;
-use super::state::{HALF, STATES, Scale};
+use super::states::{Scale, States};
+use super::station::{Conditions, Station};
 use super::sweep::{ChainLoad, Sweep};
-use nalgebra::SVector;
+use std::sync::Arc;
 
 /// A member ready to be solved: its equations are factored once.
 #[derive(Clone, Debug)]
 pub(crate) struct Beam {
-    stations: Vec<f64>,
-    holds: Vec<Holds>,
-    pieces: Vec<PolynomialPiece>,
-    scale: Scale,
-    sweep: Sweep<STATES, HALF>,
+    pub(super) states: States,
+    pub(super) places: Arc<[f64]>,
+    pub(super) pieces: Vec<Piece>,
+    pub(super) conditions: Vec<Conditions>,
+    /// Per station the number of its first hold.
+    first_hold: Vec<usize>,
+    /// Per inner station how it is tied into the chain.
+    ties: Vec<Tie>,
+    pub(super) units: Vec<f64>,
+    pub(super) scale: Scale,
+    divisors: Vec<Vec<f64>>,
+    /// Where joints slip, the right half of the relation of each piece.
+    rights: Vec<Vec<f64>>,
+    sweep: Sweep,
+    /// The number of polynomial coefficients of a field over a piece.
+    terms: usize,
+    /// The decay over each piece of each mode of slip.
+    decays: Arc<[f64]>,
+    /// Joints whose slip nothing holds: they are held at zero mean slip.
+    loose: Vec<usize>,
 }
 
-/// The loads of one case.
-#[derive(Clone, Debug, Default, PartialEq)]
-pub(crate) struct LoadCase {
-    /// What acts on each piece.
-    pub(crate) pieces: Vec<PieceLoad>,
-    /// The point load at each station; N, positive downward.
-    pub(crate) point: Vec<f64>,
-    /// The couple at each station; N m, positive clockwise.
-    pub(crate) couple: Vec<f64>,
+/// How an inner station is tied into the chain.
+#[derive(Clone, Debug, PartialEq)]
+enum Tie {
+    /// One node; these displacements are held rigidly.
+    Shared(Vec<usize>),
+    /// Two nodes with equations between them.
+    Parted,
 }
 
-/// The reaction at a station: force in N, positive upward; couple in N m, positive clockwise.
-#[derive(Clone, Copy, Debug, Default, PartialEq)]
-pub(crate) struct Reaction {
-    pub(crate) force: f64,
-    pub(crate) couple: f64,
+/// Why a member cannot be solved.
+#[derive(Clone, Copy, Debug, PartialEq)]
+pub(crate) enum Unsolvable {
+    /// Something is free to move.
+    Free(Motion),
+    /// The station of this number is held twice in one direction.
+    HeldTwice(usize),
 }
 
-/// The fields over all pieces and the reactions at all stations, under one load case.
+/// The fields over all pieces and the forces of all holds, under one load case.
 #[derive(Clone, Debug)]
 pub(crate) struct Solved {
-    pub(crate) fields: Vec<PieceFields>,
-    pub(crate) reactions: Vec<Reaction>,
-    /// What is left of equilibrium and continuity, relative to the greatest terms.
+    /// Per piece and field (the states, then the curvature of each strand) its coefficients.
+    pub(crate) coefficients: Vec<f64>,
+    /// Per hold the force with which it resists its direction.
+    pub(crate) reactions: Vec<f64>,
+    /// The error estimate, relative to the peak of each field.
     pub(crate) residual: f64,
 }
 
-impl Solved {
-    /// The solution of a member with so many stations on which nothing acts.
-    pub(crate) fn at_rest(stations: usize) -> Self {
-        Self {
-            fields: vec![PieceFields::default(); stations - 1],
-            reactions: vec![Reaction::default(); stations],
-            residual: 0.0,
-        }
-    }
-}
-
-impl LoadCase {
-    /// No load on a member with so many stations.
-    pub(crate) fn none(stations: usize) -> Self {
-        Self {
-            pieces: vec![PieceLoad::default(); stations - 1],
-            point: vec![0.0; stations],
-            couple: vec![0.0; stations],
-        }
-    }
-}
-
 impl Beam {
-    /// Factors the equations of a member.
-    ///
-    /// `stations` rise from the left end to the right end, `holds` has one entry per station and
-    /// `bending_stiffness` one per piece (N m2). A member that is free to move is an error that
-    /// holds its motion.
+    /// Factors the equations of a member: `places` rise from the left end to the right end,
+    /// `stations` has one entry per place and `laws` one per piece between them.
     pub(crate) fn new(
-        stations: Vec<f64>,
-        holds: Vec<Holds>,
-        bending_stiffness: &[f64],
-    ) -> Result<Self, Motion> {
-        let (first, last) = (stations[0], stations[stations.len() - 1]);
-        let held = holds.iter().filter(|h| **h != Holds::NOTHING).count();
-        let spans = u32::try_from(held.saturating_sub(1).max(1)).unwrap_or(u32::MAX);
-        let scale = Scale {
-            length: (last - first) / f64::from(spans),
-            stiffness: bending_stiffness[0],
-        };
-        let pieces: Vec<_> = stations
+        states: States,
+        places: Vec<f64>,
+        mut stations: Vec<Station>,
+        laws: &[PieceLaw],
+    ) -> Result<Self, Unsolvable> {
+        let half = states.half();
+        let scale = scale(states, &places, &stations, laws);
+        let units: Vec<f64> = (0..2 * half).map(|i| scale.unit(i)).collect();
+        let loose = loose(states, &stations, laws);
+        for &joint in &loose {
+            let mut direction = vec![0.0; half];
+            direction[states.slip(joint)] = 1.0;
+            let last = stations.len() - 1;
+            stations[last].holds.push(super::station::Hold {
+                direction,
+                stiffness: f64::INFINITY,
+            });
+        }
+        let mut modes: Vec<(*const Law, Arc<Modes>)> = Vec::new();
+        let pieces: Vec<Piece> = places
             .windows(2)
-            .zip(bending_stiffness)
-            .map(|(ends, &stiffness)| PolynomialPiece::new(ends[1] - ends[0], stiffness, scale))
+            .zip(laws)
+            .map(|(ends, law)| Piece::new(states, ends[1] - ends[0], law, &units, &mut modes))
             .collect();
-        let mut relations: Vec<_> = pieces.iter().map(Piece::relation).collect();
-        let inner = relations.len() - 1;
-        for (relation, &holds) in relations[..inner].iter_mut().zip(&holds[1..]) {
-            condition::across(relation, holds);
+        let mut conditions = Vec::with_capacity(stations.len());
+        let mut first_hold = Vec::with_capacity(stations.len());
+        let mut holds = 0;
+        for (k, station) in stations.iter().enumerate() {
+            let made = Conditions::new(station, states, &scale);
+            conditions.push(made.map_err(|_| Unsolvable::HeldTwice(k))?);
+            first_hold.push(holds);
+            holds += station.holds.len();
         }
-        let (left, right) = (
-            condition::end(holds[0]),
-            condition::end(holds[holds.len() - 1]),
-        );
-        match Sweep::factor(left, &relations, &right) {
-            Ok(sweep) => Ok(Self {
-                stations,
-                holds,
-                pieces,
-                scale,
-                sweep,
-            }),
-            Err(singular) => Err(Motion::new(&stations, &singular.motion, scale)),
+        let last = pieces.len();
+        let mut relations = Vec::with_capacity(last);
+        let mut ties = Vec::with_capacity(last - 1);
+        let mut rights = Vec::new();
+        let mut node_places = vec![places[0]];
+        for (k, piece) in pieces.iter().enumerate() {
+            let mut relation = piece.relation();
+            relation.scale(&units);
+            if states.slips > 0 {
+                rights.push(relation.right.clone());
+            }
+            if k + 1 == last {
+                relations.push(relation);
+                break;
+            }
+            // Only these forces have an equation of their own in the relation of a piece.
+            let axes = if piece.is_prismatic() {
+                half - states.slips
+            } else {
+                0
+            };
+            node_places.push(places[k + 1]);
+            match conditions[k + 1].simple(axes) {
+                Some(held) => {
+                    for &displacement in &held {
+                        hold_in(&mut relation, half, displacement);
+                    }
+                    relations.push(relation);
+                    ties.push(Tie::Shared(held));
+                }
+                None => {
+                    node_places.push(places[k + 1]);
+                    relations.push(relation);
+                    relations.push(conditions[k + 1].relation());
+                    ties.push(Tie::Parted);
+                }
+            }
         }
+        node_places.push(places[last]);
+        let (left, right) = (conditions[0].end(1.0), conditions[last].end(-1.0));
+        let sweep = Sweep::factor(half, &left, &relations, &right).map_err(|singular| {
+            let motion = Motion::new(&node_places, &singular.motion, states, &scale);
+            Unsolvable::Free(motion)
+        })?;
+        Ok(Self {
+            states,
+            terms: pieces.iter().map(Piece::terms).max().unwrap_or_default(),
+            decays: pieces.iter().flat_map(|p| p.decays(states.slips)).collect(),
+            divisors: relations.into_iter().map(|r| r.divisors).collect(),
+            rights,
+            places: places.into(),
+            pieces,
+            conditions,
+            first_hold,
+            ties,
+            units,
+            scale,
+            sweep,
+            loose,
+        })
+    }
+
+    /// The states that the member has.
+    pub(crate) const fn states(&self) -> States {
+        self.states
     }
 
     /// The places of the stations in m.
-    pub(crate) fn stations(&self) -> &[f64] {
-        &self.stations
+    pub(crate) fn stations(&self) -> &Arc<[f64]> {
+        &self.places
     }
 
-    /// The fields and reactions under one load case.
+    /// The number of polynomial coefficients of each field over each piece.
+    pub(crate) const fn terms(&self) -> usize {
+        self.terms
+    }
+
+    /// The decay over each piece of each mode of slip.
+    pub(crate) const fn decays(&self) -> &Arc<[f64]> {
+        &self.decays
+    }
+
+    /// The number of the first hold of a station.
+    pub(crate) fn first_hold(&self, station: usize) -> usize {
+        self.first_hold[station]
+    }
+
+    /// No load.
+    pub(crate) fn no_load(&self) -> LoadCase {
+        let holds: usize = self.conditions.iter().map(Conditions::count).sum();
+        LoadCase::none(self.states, self.pieces.len(), holds)
+    }
+
+    /// The number of fields: the states and the curvature of each strand.
+    const fn fields(&self) -> usize {
+        self.states.all() + self.states.strands
+    }
+
+    const fn width(&self) -> usize {
+        self.terms + 2 * self.states.slips
+    }
+
+    /// The coefficients of a field over a piece.
+    pub(crate) fn field<'a>(&self, solved: &'a Solved, piece: usize, field: usize) -> &'a [f64] {
+        let first = (piece * self.fields() + field) * self.width();
+        &solved.coefficients[first..first + self.width()]
+    }
+
+    /// The fields and the forces of the holds under one load case.
     pub(crate) fn solve(&self, load: &LoadCase) -> Solved {
-        let units = self.scale.units();
-        let jump = |k: usize| {
-            let jump = condition::jump(load.point[k], load.couple[k]);
-            SVector::<f64, STATES>::from_fn(|i, _| jump[i] / units[i])
-        };
+        let half = self.states.half();
+        let all = 2 * half;
         let last = self.pieces.len();
-        let sides: Vec<_> = self
-            .pieces
-            .iter()
-            .zip(&load.pieces)
-            .map(|(piece, load)| piece.load_side(load))
-            .collect();
-        let mut relations = sides;
-        for (k, side) in relations.iter_mut().enumerate().take(last - 1) {
-            *side = condition::across_side(side, self.holds[k + 1], &jump(k + 1));
+        let in_units = |k: usize| -> Vec<f64> {
+            let forces = load.at_station(k).iter().enumerate();
+            forces
+                .map(|(i, force)| force / self.units[half + i])
+                .collect()
+        };
+        let moved = |k: usize| &load.moved[self.first_hold[k]..];
+        let mut relations = Vec::with_capacity(self.divisors.len() * all);
+        for (k, piece) in self.pieces.iter().enumerate() {
+            let divisors = &self.divisors[relations.len() / all];
+            let first = relations.len();
+            relations.resize(first + all, 0.0);
+            let side = &mut relations[first..];
+            piece.load_side(&load.piece(k), side);
+            for (number, divisor) in side.iter_mut().zip(divisors) {
+                *number /= divisor;
+            }
+            if k + 1 == last {
+                break;
+            }
+            let outside = in_units(k + 1);
+            match &self.ties[k] {
+                Tie::Shared(held) => {
+                    // The relation ends right of the station: y- = y+ + F.
+                    if outside.iter().any(|force| *force != 0.0) {
+                        self.take_jump(k, &outside, divisors, side);
+                    }
+                    for &displacement in held {
+                        let index = held_index(&self.conditions[k + 1], displacement);
+                        side[half + displacement] = moved(k + 1)[index] / self.units[displacement];
+                    }
+                }
+                Tie::Parted => {
+                    let condition = &self.conditions[k + 1];
+                    relations.extend(condition.relation_side(&outside, moved(k + 1)));
+                }
+            }
         }
         let chain = ChainLoad {
-            left: condition::end_side(self.holds[0], &jump(0)),
+            left: self.conditions[0].end_side(&in_units(0), moved(0)),
+            right: self.conditions[last].end_side(&in_units(last), moved(last)),
             relations,
-            right: condition::end_side(self.holds[last], &-jump(last)),
         };
-        let states = self.sweep.solve(&chain);
-        let fields: Vec<_> = (0..last)
-            .map(|k| self.pieces[k].fields(&states[k], &load.pieces[k]))
-            .collect();
-        let reactions = (0..=last)
-            .map(|k| {
-                let before = if k == 0 {
-                    [0.0; 2]
-                } else {
-                    fields[k - 1].forces_at_end()
-                };
-                let after = if k == last {
-                    [0.0; 2]
-                } else {
-                    fields[k].forces_at_start()
-                };
-                let Holds([deflection, rotation]) = self.holds[k];
-                Reaction {
-                    force: if deflection {
-                        after[0] - before[0] + load.point[k]
-                    } else {
-                        0.0
-                    },
-                    couple: if rotation {
-                        after[1] - before[1] - load.couple[k]
-                    } else {
-                        0.0
-                    },
+        let mut states = self.sweep.solve(&chain);
+        for state in states.chunks_exact_mut(all) {
+            for (number, unit) in state.iter_mut().zip(&self.units) {
+                *number *= unit;
+            }
+        }
+        self.fields_of(load, &states)
+    }
+
+    /// Takes what a jump of the forces at the right end of a piece brings off its load side.
+    fn take_jump(&self, k: usize, outside: &[f64], divisors: &[f64], side: &mut [f64]) {
+        let half = self.states.half();
+        let all = 2 * half;
+        match self.rights.get(k) {
+            Some(right) => {
+                for (number, row) in side.iter_mut().zip(right.chunks_exact(all)) {
+                    for (factor, force) in row[half..].iter().zip(outside) {
+                        *number -= factor * force;
+                    }
                 }
-            })
-            .collect();
+            }
+            // Without slip each force at the right end stands alone in its own equation.
+            None => {
+                for (i, force) in outside.iter().enumerate() {
+                    let force = force * self.units[half + i];
+                    side[half + i] -= force / divisors[half + i];
+                }
+            }
+        }
+    }
+
+    /// The fields from the states at the nodes.
+    fn fields_of(&self, load: &LoadCase, nodes: &[f64]) -> Solved {
+        let half = self.states.half();
+        let all = 2 * half;
+        let last = self.pieces.len();
+        let per_piece = self.fields() * self.width();
+        let mut coefficients = vec![0.0; last * per_piece];
+        let mut defects = vec![0.0; all];
+        let mut node = 0;
+        for (k, piece) in self.pieces.iter().enumerate() {
+            let start = &nodes[node * all..(node + 1) * all];
+            let mut end = nodes[(node + 1) * all..(node + 2) * all].to_vec();
+            node += 1;
+            match self.ties.get(k) {
+                Some(Tie::Shared(_)) => {
+                    for (force, outside) in end[half..].iter_mut().zip(load.at_station(k + 1)) {
+                        *force += outside;
+                    }
+                }
+                Some(Tie::Parted) => node += 1,
+                None => {}
+            }
+            let out = &mut coefficients[k * per_piece..(k + 1) * per_piece];
+            let defect = piece.fields([start, &end], &load.piece(k), self.terms, self.width(), out);
+            for (sum, more) in defects.iter_mut().zip(defect) {
+                *sum += more;
+            }
+        }
         let mut solved = Solved {
-            fields,
-            reactions,
+            coefficients,
+            reactions: Vec::new(),
             residual: 0.0,
         };
-        solved.residual = residual::of(&self.stations, load, &solved);
+        self.centre_loose(&mut solved);
+        residual::complete(self, load, &mut solved, &defects);
         solved
     }
+
+    /// Shifts the slip of joints that nothing holds to zero mean.
+    fn centre_loose(&self, solved: &mut Solved) {
+        let length = self.places[self.places.len() - 1] - self.places[0];
+        for &joint in &self.loose {
+            let slip = self.states.slip(joint);
+            let mut sum = 0.0;
+            for k in 0..self.pieces.len() {
+                let h = self.places[k + 1] - self.places[k];
+                let line = &self.field(solved, k, slip)[..self.terms];
+                let terms = line.iter().enumerate();
+                sum += h * terms.map(|(i, c)| c / (i as f64 + 1.0)).sum::<f64>();
+            }
+            for k in 0..self.pieces.len() {
+                let first = (k * self.fields() + slip) * self.width();
+                solved.coefficients[first] -= sum / length;
+            }
+        }
+    }
+}
+
+/// The position among the holds of a station of the one along a displacement.
+fn held_index(conditions: &Conditions, displacement: usize) -> usize {
+    conditions
+        .axis_holds()
+        .position(|axis| axis == displacement)
+        .expect("a displacement that was found held")
+}
+
+/// Replaces the equation of a force by the condition that its displacement is held.
+fn hold_in(relation: &mut Relation, half: usize, displacement: usize) {
+    let all = 2 * half;
+    let row = half + displacement;
+    relation.left[row * all..(row + 1) * all].fill(0.0);
+    relation.right[row * all..(row + 1) * all].fill(0.0);
+    relation.right[row * all + displacement] = 1.0;
+}
+
+/// Joints that carry nothing anywhere and whose slip no hold touches.
+fn loose(states: States, stations: &[Station], laws: &[PieceLaw]) -> Vec<usize> {
+    let touched = |slip: usize| {
+        let mut holds = stations.iter().flat_map(|station| &station.holds);
+        holds.any(|hold| hold.direction[slip] != 0.0 && hold.stiffness > 0.0)
+    };
+    let carries = |slip: usize| {
+        laws.iter()
+            .flat_map(PieceLaw::laws)
+            .any(|law| law.joints[(slip, slip)] > 0.0)
+    };
+    (0..states.slips)
+        .filter(|&j| !touched(states.slip(j)) && !carries(states.slip(j)))
+        .collect()
+}
+
+/// Units in which the states are near one.
+fn scale(states: States, places: &[f64], stations: &[Station], laws: &[PieceLaw]) -> Scale {
+    let held = stations.iter().filter(|s| !s.holds.is_empty()).count();
+    let length = (places[places.len() - 1] - places[0]) / held.saturating_sub(1).max(1) as f64;
+    let law = laws[0].laws().next().expect("a piece has a law");
+    let flexibility = super::modes::inverse(&law.stiffness);
+    let bending = 1.0 / flexibility[(0, 0)];
+    let energy = bending / length;
+    let mut units = vec![1.0; states.half()];
+    units[..states.strands].fill(length);
+    if states.has_axial {
+        let axial = states.axial();
+        let gradient = axial - states.strands;
+        units[axial] = (bending * flexibility[(gradient, gradient)]).sqrt();
+    }
+    for j in 0..states.slips {
+        let slip = states.slip(j);
+        let f = flexibility[(slip - states.strands, slip - states.strands)];
+        let k = laws
+            .iter()
+            .flat_map(PieceLaw::laws)
+            .map(|law| law.joints[(slip, slip)])
+            .fold(0.0, f64::max);
+        let rate = (k * f).sqrt().max(1.0 / length);
+        units[slip] = (energy * f / rate).sqrt();
+    }
+    Scale::new(units, energy)
 }

@@ -2,109 +2,107 @@
 
 use super::link::greatest;
 use super::sweep::SMALLEST_PIVOT;
-use nalgebra::{SMatrix, SVector};
 
-/// The conditions on the last state, reduced with row and column pivots.
+/// The conditions on the last state, reduced with row and column pivots; matrices row by row.
 #[derive(Clone, Debug)]
-pub(super) struct Last<const D: usize> {
+pub(super) struct Last {
+    all: usize,
     /// One over the greatest number of each equation.
-    row_scale: SVector<f64, D>,
-    rows: SMatrix<f64, D, D>,
-    factors: SMatrix<f64, D, D>,
-    swaps: [usize; D],
-    columns: [usize; D],
+    row_scale: Vec<f64>,
+    rows: Vec<f64>,
+    factors: Vec<f64>,
+    swaps: Vec<usize>,
+    columns: Vec<u32>,
 }
 
-impl<const D: usize> Last<D> {
+impl Last {
     /// Reduces the carried conditions and those of the right end together; also gives a state that
     /// is free to move, if there is one.
-    pub(super) fn reduce<const H: usize>(
-        carried: &SMatrix<f64, H, D>,
-        end: &SMatrix<f64, H, D>,
-    ) -> (Self, Option<SVector<f64, D>>) {
-        let mut rows = SMatrix::<f64, D, D>::from_fn(|i, j| {
-            if i < H {
-                carried[(i, j)]
-            } else {
-                end[(i - H, j)]
-            }
-        });
-        let row_scale = SVector::<f64, D>::from_fn(|i, _| 1.0 / rows.row(i).amax());
-        for i in 0..D {
-            for j in 0..D {
-                rows[(i, j)] *= row_scale[i];
-            }
+    pub(super) fn reduce(half: usize, carried: &[f64], end: &[f64]) -> (Self, Option<Vec<f64>>) {
+        let all = 2 * half;
+        let mut rows = carried.to_vec();
+        rows.extend_from_slice(end);
+        let mut row_scale = Vec::with_capacity(all);
+        for row in rows.chunks_exact_mut(all) {
+            let scale = 1.0 / row.iter().fold(0.0_f64, |size, n| size.max(n.abs()));
+            row.iter_mut().for_each(|number| *number *= scale);
+            row_scale.push(scale);
         }
-        let mut factors = SMatrix::<f64, D, D>::zeros();
-        let mut swaps = [0; D];
-        let mut columns = std::array::from_fn(|c| c);
-        let mut missing = None;
-        for s in 0..D {
-            let (row, column) = greatest(&rows, s, s, &columns);
-            swaps[s] = row;
-            columns.swap(s, column);
-            rows.swap_rows(s, row);
-            factors.swap_rows(s, row);
-            let c = columns[s];
-            let pivot = rows[(s, c)];
-            if pivot.abs() < SMALLEST_PIVOT {
-                missing = Some(s);
-                break;
-            }
-            for r in s + 1..D {
-                let factor = rows[(r, c)] / pivot;
-                factors[(r, s)] = factor;
-                for &j in &columns[s..] {
-                    rows[(r, j)] -= factor * rows[(s, j)];
-                }
-            }
-        }
-        let last = Self {
+        let mut last = Self {
+            all,
             row_scale,
             rows,
-            factors,
-            swaps,
-            columns,
+            factors: vec![0.0; all * all],
+            swaps: vec![0; all],
+            columns: (0..all as u32).collect(),
         };
+        let missing = (0..all).find(|&s| !last.eliminate(s));
         let free = missing.map(|rank| last.free_state(rank));
         (last, free)
     }
 
-    /// The state under a load side: the carried right-hand sides, then those of the right end.
-    pub(super) fn solve(&self, mut side: SVector<f64, D>) -> SVector<f64, D> {
-        for i in 0..D {
-            side[i] *= self.row_scale[i];
+    /// One step of the elimination; whether there is a pivot.
+    fn eliminate(&mut self, s: usize) -> bool {
+        let all = self.all;
+        let (row, position) = greatest(&self.rows, all, s..all, &self.columns[s..]);
+        self.swaps[s] = row;
+        self.columns.swap(s, s + position);
+        for column in 0..all {
+            self.rows.swap(s * all + column, row * all + column);
+            self.factors.swap(s * all + column, row * all + column);
         }
-        for s in 0..D {
-            side.swap_rows(s, self.swaps[s]);
+        let c = self.columns[s] as usize;
+        let pivot = self.rows[s * all + c];
+        if pivot.abs() < SMALLEST_PIVOT {
+            return false;
         }
-        for s in 0..D {
-            for r in s + 1..D {
-                side[r] -= self.factors[(r, s)] * side[s];
+        for r in s + 1..all {
+            let factor = self.rows[r * all + c] / pivot;
+            self.factors[r * all + s] = factor;
+            for &j in &self.columns[s..] {
+                self.rows[r * all + j as usize] -= factor * self.rows[s * all + j as usize];
             }
         }
-        let mut state = SVector::zeros();
-        for s in (0..D).rev() {
+        true
+    }
+
+    /// The state under a load side: the carried right-hand sides, then those of the right end.
+    pub(super) fn solve(&self, mut side: Vec<f64>) -> Vec<f64> {
+        let all = self.all;
+        for (number, scale) in side.iter_mut().zip(&self.row_scale) {
+            *number *= scale;
+        }
+        for s in 0..all {
+            side.swap(s, self.swaps[s]);
+        }
+        for s in 0..all {
+            for r in s + 1..all {
+                side[r] -= self.factors[r * all + s] * side[s];
+            }
+        }
+        let mut state = vec![0.0; all];
+        for s in (0..all).rev() {
             self.eliminate_back(s, side[s], &mut state);
         }
         state
     }
 
-    fn free_state(&self, rank: usize) -> SVector<f64, D> {
-        let mut state = SVector::zeros();
-        state[self.columns[rank]] = 1.0;
+    fn free_state(&self, rank: usize) -> Vec<f64> {
+        let mut state = vec![0.0; self.all];
+        state[self.columns[rank] as usize] = 1.0;
         for s in (0..rank).rev() {
             self.eliminate_back(s, 0.0, &mut state);
         }
         state
     }
 
-    fn eliminate_back(&self, s: usize, side: f64, state: &mut SVector<f64, D>) {
-        let c = self.columns[s];
+    fn eliminate_back(&self, s: usize, side: f64, state: &mut [f64]) {
+        let row = &self.rows[s * self.all..(s + 1) * self.all];
         let mut sum = side;
         for &j in &self.columns[s + 1..] {
-            sum -= self.rows[(s, j)] * state[j];
+            sum -= row[j as usize] * state[j as usize];
         }
-        state[c] = sum / self.rows[(s, c)];
+        let c = self.columns[s] as usize;
+        state[c] = sum / row[c];
     }
 }

@@ -1,72 +1,90 @@
-//! The error estimate of polynomial pieces: what is left of equilibrium and continuity.
+//! The forces of the holds, and the error estimate: what is left of equilibrium and continuity at
+//! the stations, and, over varying pieces, of the equations between the points.
 
-use super::beam::{LoadCase, Solved};
-use crate::math::polynomial::value_at_one;
+use super::beam::{Beam, Solved};
+use super::load::LoadCase;
 
-/// The greatest of three remainders, each relative to the sum of the magnitudes in it:
-/// vertical forces, moments about the left end, and jumps of deflection and slope between pieces
-/// (relative to the peak of the field).
-pub(super) fn of(stations: &[f64], load: &LoadCase, solved: &Solved) -> f64 {
-    let mut forces = Sum::default();
-    let mut moments = Sum::default();
-    for (k, &x) in stations.iter().enumerate() {
-        let arm = x - stations[0];
-        let reaction = solved.reactions[k];
-        forces.add(load.point[k] - reaction.force);
-        moments.add(arm * load.point[k]);
-        moments.add(-arm * reaction.force);
-        moments.add(reaction.couple);
-        moments.add(load.couple[k]);
-    }
-    for (ends, piece) in stations.windows(2).zip(&load.pieces) {
-        let [left, right] = piece.line;
-        // A line load is two triangles, each with its force at a third of the length.
-        let third = (ends[1] - ends[0]) / 3.0;
-        for (line, arm) in [(left, third), (right, 2.0 * third)] {
-            let force = line * 1.5 * third;
-            forces.add(force);
-            moments.add(force * (ends[0] + arm - stations[0]));
-        }
-    }
-    let (mut w_jump, mut w_peak) = (0.0_f64, 0.0_f64);
-    let (mut slope_jump, mut slope_peak) = (0.0_f64, 0.0_f64);
-    for (k, piece) in solved.fields.iter().enumerate() {
-        w_peak = w_peak
-            .max(piece.deflection[0].abs())
-            .max(value_at_one(&piece.deflection).abs());
-        // Over a span on two supports the deflection is zero at both ends: its slope measures it.
-        w_peak = w_peak.max(piece.deflection[1].abs());
-        slope_peak = slope_peak.max(piece.slope[0].abs());
-        if let Some(next) = solved.fields.get(k + 1) {
-            w_jump = w_jump.max((value_at_one(&piece.deflection) - next.deflection[0]).abs());
-            slope_jump = slope_jump.max((value_at_one(&piece.slope) - next.slope[0]).abs());
-        }
-    }
-    let relative = |jump: f64, peak: f64| if peak > 0.0 { jump / peak } else { 0.0 };
-    forces
-        .relative()
-        .max(moments.relative())
-        .max(relative(w_jump, w_peak))
-        .max(relative(slope_jump, slope_peak))
-}
-
-#[derive(Default)]
-struct Sum {
-    sum: f64,
-    size: f64,
-}
-
-impl Sum {
-    fn add(&mut self, term: f64) {
-        self.sum += term;
-        self.size += term.abs();
-    }
-
-    fn relative(&self) -> f64 {
-        if self.size > 0.0 {
-            self.sum.abs() / self.size
+/// Completes a solution: the force of each hold, and the estimate relative to the peaks.
+pub(super) fn complete(beam: &Beam, load: &LoadCase, solved: &mut Solved, defects: &[f64]) {
+    let all = beam.states.all();
+    let half = all / 2;
+    let last = beam.pieces.len();
+    let decays = beam.states.slips;
+    let value = |solved: &Solved, piece: usize, state: usize, at_end: bool| {
+        let line = beam.field(solved, piece, state);
+        let (polynomial, exponentials) = line.split_at(beam.terms());
+        let decay = &beam.decays()[piece * decays..(piece + 1) * decays];
+        let near: f64 = if at_end {
+            polynomial.iter().rev().sum()
         } else {
-            0.0
+            polynomial[0]
+        };
+        exponentials
+            .chunks_exact(2)
+            .zip(decay)
+            .fold(near, |sum, (pair, decay)| {
+                let (near, far) = if at_end { (1, 0) } else { (0, 1) };
+                if pair == [0.0, 0.0] {
+                    sum
+                } else {
+                    sum + pair[near] + pair[far] * crate::math::exp(-decay)
+                }
+            })
+    };
+    let mut before = vec![0.0; all];
+    let mut after = vec![0.0; all];
+    let mut outside = vec![0.0; half];
+    let mut peaks = vec![0.0_f64; all];
+    let mut left_over = (0.0_f64, 0.0_f64);
+    let mut reactions = Vec::with_capacity(load.moved.len());
+    for k in 0..=last {
+        for i in 0..all {
+            before[i] = if k > 0 {
+                value(solved, k - 1, i, true) / beam.units[i]
+            } else {
+                0.0
+            };
+            after[i] = if k < last {
+                value(solved, k, i, false) / beam.units[i]
+            } else {
+                0.0
+            };
+            peaks[i] = peaks[i].max(before[i].abs()).max(after[i].abs());
+            if k < last && i < half {
+                // A span on two supports has no deflection at its ends: its growth measures it.
+                let line = beam.field(solved, k, i);
+                peaks[i] = peaks[i].max((line[1] / beam.units[i]).abs());
+            }
         }
+        for (force, at) in outside.iter_mut().zip(0..half) {
+            *force = load.at_station(k)[at] / beam.units[half + at];
+        }
+        let conditions = &beam.conditions[k];
+        let jump: Vec<f64> = (0..half)
+            .map(|i| after[half + i] - before[half + i] + outside[i])
+            .collect();
+        reactions.extend(conditions.held_forces(&jump, &beam.scale));
+        let is_end = k == 0 || k == last;
+        let inside = if k == last { &before } else { &after };
+        let moved = &load.moved[beam.first_hold(k)..];
+        let sides = if k == last {
+            // The displacements of the last station are those on its left.
+            let mut right = after.clone();
+            right[..half].copy_from_slice(&inside[..half]);
+            conditions.left_over([&before, &right], &outside, moved, is_end)
+        } else {
+            conditions.left_over([&before, &after], &outside, moved, is_end)
+        };
+        left_over = (left_over.0.max(sides.0), left_over.1.max(sides.1));
     }
+    solved.reactions = reactions;
+    let greatest =
+        |range: std::ops::Range<usize>| peaks[range].iter().fold(0.0, |a, b| f64::max(a, *b));
+    let relative = |left: f64, peak: f64| if peak > 0.0 { left / peak } else { left };
+    let mut residual = relative(left_over.0, greatest(0..half));
+    residual = residual.max(relative(left_over.1, greatest(half..all)));
+    for (i, defect) in defects.iter().enumerate() {
+        residual = residual.max(relative(defect / beam.units[i], peaks[i]));
+    }
+    solved.residual = residual;
 }

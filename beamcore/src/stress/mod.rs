@@ -34,6 +34,8 @@ pub struct StressExtreme {
 /// the life the sum of two such terms, one per share of the load, each with its own moduli.
 #[derive(Clone, Debug)]
 pub struct PartStress {
+    response: Response,
+    part: String,
     fibres: Vec<Fibre>,
     centroid: Piecewise,
 }
@@ -41,7 +43,7 @@ pub struct PartStress {
 /// A fibre and the stress along it.
 #[derive(Clone, Debug)]
 struct Fibre {
-    point: Point,
+    at: FibreAt,
     line: Piecewise,
 }
 
@@ -51,72 +53,70 @@ impl Response {
     /// # Errors
     /// [`crate::ErrorKind::Lookup`] if there is no such combination or part.
     pub fn stress(&self, combination: &str, time: Time, part: &str) -> Result<PartStress> {
-        let member = self.member();
-        let index = member.section().index(part)?;
-        let placed = &member.section().placed()[index];
-        let moments = self.parted_moment(combination, time)?;
-        let line = |point: Point| {
-            let mut line = moments[0].zeroed();
-            for (moment, share) in moments.iter().zip(Time::ALL) {
-                let stiffness = &member.state(share).stiffness;
-                let (bending, ratio) = stiffness.against_bending(member.sideways());
-                let arm = (point.z - stiffness.centroid_z().si())
-                    + ratio * (point.y - stiffness.centroid_y().si());
-                let modulus = stiffness.moduli()[index].si();
-                line.add(moment.pieces(), -modulus * arm / bending.si());
-            }
-            line.shift(self.self_stress(index, point, time));
-            line
+        let (placed, _) = self.member().part(part)?;
+        let line = |fibre: &FibreAt| {
+            self.fibre_stress(combination, time, part, |placed| fibre.point(placed))
         };
         let fibres = fibres(placed, &self.directions());
         Ok(PartStress {
+            response: self.clone(),
+            part: part.into(),
             fibres: fibres
                 .into_iter()
-                .map(|point| Fibre {
-                    point,
-                    line: line(point),
+                .map(|at| {
+                    Ok(Fibre {
+                        line: line(&at)?,
+                        at,
+                    })
                 })
-                .collect(),
-            centroid: line(Point::new(placed.net().y, placed.net().z)),
+                .collect::<Result<_>>()?,
+            centroid: line(&FibreAt::Centroid)?,
         })
-    }
-
-    /// The stress that the initial strains of the parts make without any load or restraint:
-    /// E (eps of the free section - eps* of the part), with the moduli of the time.
-    fn self_stress(&self, part: usize, point: Point, time: Time) -> f64 {
-        let state = self.member().state(time);
-        let placed = &self.member().section().placed()[part];
-        let strain = placed.initial_strain();
-        let (y, z) = (Length::from_si(point.y), Length::from_si(point.z));
-        let centroid = (placed.centroid_y(), placed.centroid_z());
-        let elastic = state.free.strain_at(y, z) - strain.at(centroid, y, z);
-        (state.stiffness.moduli()[part] * elastic).si()
     }
 
     /// The directions in which the strain grows: r for each of the two shares of the load.
     fn directions(&self) -> [f64; 2] {
         let member = self.member();
         Time::ALL.map(|time| {
-            let stiffness = &member.state(time).stiffness;
+            let stiffness = member.section().stiffness(time);
             stiffness.against_bending(member.sideways()).1
         })
+    }
+}
+
+/// Where a fibre runs in its part.
+#[derive(Clone, Copy, Debug, PartialEq)]
+enum FibreAt {
+    Bottom,
+    Top,
+    Centroid,
+    Point(Point),
+}
+
+impl FibreAt {
+    fn point(self, placed: &PlacedPart) -> Point {
+        let middle = ((placed.left() + placed.right()) / 2.0).si();
+        match self {
+            Self::Bottom => Point::new(middle, placed.bottom().si()),
+            Self::Top => Point::new(middle, placed.top().si()),
+            Self::Centroid => Point::new(placed.net().y, placed.net().z),
+            Self::Point(point) => point,
+        }
     }
 }
 
 /// The points of a part that can be stressed most: the bottom, then the top, for members that bend
 /// about the level axis only; for others every corner, and where arcs reach farthest in the
 /// directions of the two shares of the load.
-fn fibres(placed: &PlacedPart, directions: &[f64; 2]) -> Vec<Point> {
-    let middle = ((placed.left() + placed.right()) / 2.0).si();
+fn fibres(placed: &PlacedPart, directions: &[f64; 2]) -> Vec<FibreAt> {
     if directions.iter().all(|r| *r == 0.0) {
-        let at = |z: Length| Point::new(middle, z.si());
-        return vec![at(placed.bottom()), at(placed.top())];
+        return vec![FibreAt::Bottom, FibreAt::Top];
     }
     let region = placed.region();
-    let mut points: Vec<Point> = Vec::new();
+    let mut points: Vec<FibreAt> = Vec::new();
     let mut add = |point: Point| {
-        if !points.contains(&point) {
-            points.push(point);
+        if !points.contains(&FibreAt::Point(point)) {
+            points.push(FibreAt::Point(point));
         }
     };
     for r in directions {
@@ -169,19 +169,31 @@ impl PartStress {
         of: fn(&Piecewise) -> Peak,
         is_better: fn(f64, f64) -> bool,
     ) -> StressExtreme {
-        let mut best = (of(&self.fibres[0].line), self.fibres[0].point);
+        let mut best = (of(&self.fibres[0].line), self.fibres[0].at);
         for fibre in &self.fibres[1..] {
             let peak = of(&fibre.line);
             if is_better(peak.value, best.0.value) {
-                best = (peak, fibre.point);
+                best = (peak, fibre.at);
             }
         }
-        let (peak, point) = best;
+        let (peak, at) = best;
+        let point = self.point(at, Length::from_si(peak.at));
         StressExtreme {
             value: Stress::from_si(peak.value),
             at: Length::from_si(peak.at),
             y: Length::from_si(point.y),
             z: Length::from_si(point.z),
         }
+    }
+
+    /// Where a fibre lies at a place along the member.
+    fn point(&self, fibre: FibreAt, at: Length) -> Point {
+        let member = self.response.member();
+        let here = member.section_at(at).ok();
+        let here = here.as_ref().and_then(|s| s.part(&self.part).ok());
+        // Where the part has just ended, it lies as at its beginning.
+        let first = member.part(&self.part).ok().map(|(part, _)| part);
+        here.or(first)
+            .map_or(Point::new(0.0, 0.0), |placed| fibre.point(placed))
     }
 }

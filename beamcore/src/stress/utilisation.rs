@@ -32,7 +32,7 @@ impl Response {
         part: &str,
     ) -> Result<Option<Utilisation>> {
         let stress = self.stress(combination, time, part)?;
-        let material = self.member().section().part(part)?.material();
+        let material = self.member().part(part)?.0.material();
         Ok(material
             .strength()
             .map(|strength| greatest(&stress, strength)))
@@ -84,8 +84,8 @@ fn timber(stress: &PartStress, bending: Stress, tension: Stress, compression: St
             (-compression.si(), -bending.si()),
         ] {
             let mut line = stress.centroid.zeroed();
-            line.add(stress.centroid.pieces(), 1.0 / axial - 1.0 / remainder);
-            line.add(edge.pieces(), 1.0 / remainder);
+            line.add(&stress.centroid, 1.0 / axial - 1.0 / remainder);
+            line.add(edge, 1.0 / remainder);
             best = larger(best, line.maximum());
         }
     }
