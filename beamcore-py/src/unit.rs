@@ -39,13 +39,8 @@ impl Unit {
     }
 
     fn named(symbol: &str) -> Result<Self, Problem> {
-        let any = match symbol {
-            // The core only has what is per kelvin; as 1 / (1/K) it has K too.
-            "K" => AnyUnit::ONE.per(AnyUnit::named("/K")?)?,
-            symbol => AnyUnit::named(symbol)?,
-        };
         Ok(Self {
-            any,
+            any: AnyUnit::named(symbol)?,
             factors: vec![(symbol.to_owned(), 1)],
         })
     }

@@ -40,5 +40,5 @@ __all__ = [
     # Units
     "m", "mm", "cm", "inch", "ft", "N", "kN", "MN", "lbf", "kip", "plf", "psf", "Pa", "kPa", "MPa",
     "psi", "ksi", "GPa", "permille", "rad", "mrad", "deg", "kg", "t", "lb", "s", "h", "day",
-    "year", "K",
+    "year", "K", "degF",
 ]
