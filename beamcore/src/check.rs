@@ -2,6 +2,7 @@
 
 use crate::error::{ErrorKind, Problem};
 use crate::units::Quantity;
+use std::collections::BTreeSet;
 
 /// A problem unless the quantity is finite and greater than zero.
 pub(crate) fn positive<Q: Quantity>(problems: &mut Vec<Problem>, value: Q, path: &str) {
@@ -78,9 +79,9 @@ pub(crate) fn unique<'a>(
     what: &str,
     path: &str,
 ) {
-    let mut seen = Vec::new();
+    let mut seen = BTreeSet::new();
     for name in names {
-        if seen.contains(&name) {
+        if !seen.insert(name) {
             problems.push(Problem::new(
                 ErrorKind::Duplicate,
                 path,
@@ -88,6 +89,5 @@ pub(crate) fn unique<'a>(
                 format!("a different name for each of the {what}"),
             ));
         }
-        seen.push(name);
     }
 }

@@ -327,6 +327,23 @@ impl Piecewise {
         })
     }
 
+    /// Bounds of the values over a piece.
+    fn bounds(&self, piece: usize) -> (f64, f64) {
+        let c = &self.polynomials[piece * self.terms..(piece + 1) * self.terms];
+        let polynomial = match <&Coefficients>::try_from(c) {
+            Ok(c) => polynomial::bounds(c),
+            Err(_) => crate::math::curve::bounds(c),
+        };
+        self.pairs(piece)
+            .fold(polynomial, |(least, greatest), pair| {
+                let [a, b] = [pair.from_left, pair.from_right];
+                (
+                    least + a.min(0.0) + b.min(0.0),
+                    greatest + a.max(0.0) + b.max(0.0),
+                )
+            })
+    }
+
     /// The places where a piece turns, with the values there and at its ends.
     fn turning(&self, piece: usize, mut consider: impl FnMut(f64, f64)) {
         let (from, to) = (self.stations[piece], self.stations[piece + 1]);
@@ -365,15 +382,18 @@ impl Piecewise {
         places
     }
 
-    /// The candidate for an extreme that `better(new, best)` prefers, leftmost first.
-    fn find(&self, score: impl Fn(f64) -> f64) -> Peak {
+    /// The value of the greatest score, the leftmost of equals. `most` gives a bound of the score
+    /// from bounds of the values, by which most pieces are passed over.
+    fn find(&self, score: impl Fn(f64) -> f64, most: impl Fn((f64, f64)) -> f64) -> Peak {
+        let is_better = |new: f64, known: f64| new - known > TIE * f64::max(known.abs(), new.abs());
         let mut best: Option<(Peak, f64)> = None;
         for piece in 0..self.len() {
+            if best.is_some_and(|(_, known)| !is_better(most(self.bounds(piece)), known)) {
+                continue;
+            }
             self.turning(piece, |value, at| {
                 let s = score(value);
-                let is_better =
-                    best.is_none_or(|(_, known)| s - known > TIE * f64::max(known.abs(), s.abs()));
-                if is_better {
+                if best.is_none_or(|(_, known)| is_better(s, known)) {
                     best = Some((Peak { value, at }, s));
                 }
             });
@@ -383,17 +403,17 @@ impl Piecewise {
 
     /// The algebraically greatest value with its place.
     pub(crate) fn maximum(&self) -> Peak {
-        self.find(|v| v)
+        self.find(|v| v, |(_, greatest)| greatest)
     }
 
     /// The algebraically least value with its place.
     pub(crate) fn minimum(&self) -> Peak {
-        self.find(|v| -v)
+        self.find(|v| -v, |(least, _)| -least)
     }
 
     /// The value of greatest magnitude, with its sign and place.
     pub(crate) fn greatest(&self) -> Peak {
-        self.find(f64::abs)
+        self.find(f64::abs, |(least, greatest)| f64::max(-least, greatest))
     }
 }
 

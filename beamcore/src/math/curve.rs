@@ -34,6 +34,21 @@ impl Curve {
         })
     }
 
+    /// The value and df/dt at `t`, with each exponential once.
+    fn value_and_slope(&self, t: f64) -> (f64, f64) {
+        let polynomial = self.polynomial.iter().rev();
+        let polynomial = polynomial.fold((0.0, 0.0), |(value, slope), &term| {
+            (value * t + term, slope * t + value)
+        });
+        self.decaying
+            .iter()
+            .fold(polynomial, |(value, slope), pair| {
+                let left = pair.from_left * exp(-pair.decay * t);
+                let right = pair.from_right * exp(-pair.decay * (1.0 - t));
+                (value + left + right, slope + pair.decay * (right - left))
+            })
+    }
+
     /// df/dt + `factor` f.
     fn derivative_plus(&self, factor: f64) -> Self {
         let n = self.polynomial.len();
@@ -85,14 +100,14 @@ impl Curve {
             }
         });
         let turning = self.derivative_plus(factor).sign_changes();
-        let slope = self.derivative();
         let mut roots = Vec::new();
-        let mut left = 0.0;
+        let (mut left, mut at_left) = (0.0, self.value(0.0));
         for &right in turning.iter().chain(std::iter::once(&1.0)) {
-            let root =
-                polynomial::enclosed_root(|t| self.value(t), |t| slope.value(t), left, right);
+            let at_right = self.value(right);
+            let both = |t| self.value_and_slope(t);
+            let root = polynomial::enclosed_root(both, [left, right], [at_left, at_right]);
             roots.extend(root);
-            left = right;
+            (left, at_left) = (right, at_right);
         }
         roots
     }
@@ -107,23 +122,29 @@ impl Curve {
                 low += factor.min(0.0);
             }
         }
-        let n = self.polynomial.len();
-        let (mut least, mut greatest) = (f64::INFINITY, f64::NEG_INFINITY);
-        for j in 0..n {
-            // b_j = sum over i <= j of C(j, i)/C(n - 1, i) c_i.
-            let (mut ratio, mut sum) = (1.0, 0.0);
-            for (i, c) in self.polynomial[..=j].iter().enumerate() {
-                sum += ratio * c;
-                ratio *= (j - i) as f64 / (n - 1 - i).max(1) as f64;
-            }
-            least = least.min(sum);
-            greatest = greatest.max(sum);
-        }
-        if n == 0 {
-            (least, greatest) = (0.0, 0.0);
-        }
+        let (least, greatest) = bounds(&self.polynomial);
         least + low >= 0.0 || greatest + high <= 0.0
     }
+}
+
+/// Bounds of a polynomial on the unit interval: its least and greatest Bernstein coefficient.
+pub(crate) fn bounds(c: &[f64]) -> (f64, f64) {
+    let n = c.len();
+    let (mut least, mut greatest) = match c.first() {
+        Some(&c0) => (c0, c0),
+        None => return (0.0, 0.0),
+    };
+    for j in 1..n {
+        // b_j = sum over i <= j of C(j, i)/C(n - 1, i) c_i.
+        let (mut ratio, mut sum) = (1.0, 0.0);
+        for (i, term) in c[..=j].iter().enumerate() {
+            sum += ratio * term;
+            ratio *= (j - i) as f64 / (n - 1 - i).max(1) as f64;
+        }
+        least = least.min(sum);
+        greatest = greatest.max(sum);
+    }
+    (least, greatest)
 }
 
 /// Takes highest terms away that are nothing beside the others.

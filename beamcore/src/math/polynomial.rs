@@ -68,47 +68,83 @@ pub(crate) fn sign_changes(c: &Coefficients) -> Roots {
     if keeps_its_sign(c) {
         return roots;
     }
+    if c[3..].iter().all(|term| *term == 0.0) {
+        return quadratic(c);
+    }
     let slope = derivative(c);
     let turning = sign_changes(&slope);
-    let mut left = 0.0;
+    let (mut left, mut at_left) = (0.0, c[0]);
     for &right in turning.as_slice().iter().chain(std::iter::once(&1.0)) {
-        if let Some(root) = enclosed_root(|t| value(c, t), |t| value(&slope, t), left, right) {
+        let at_right = value(c, right);
+        let both = |t| (value(c, t), value(&slope, t));
+        if let Some(root) = enclosed_root(both, [left, right], [at_left, at_right]) {
             roots.push(root);
         }
-        left = right;
+        (left, at_left) = (right, at_right);
     }
     roots
 }
 
 /// Whether the Bernstein coefficients on \[0, 1\] prove that the sign does not change.
 fn keeps_its_sign(c: &Coefficients) -> bool {
-    // BINOMIAL[j][i] = C(j, i) / C(5, i): b_j = sum over i <= j of that times c_i.
-    const BINOMIAL: [[f64; TERMS]; TERMS] = [
-        [1.0, 0.0, 0.0, 0.0, 0.0, 0.0],
-        [1.0, 1.0 / 5.0, 0.0, 0.0, 0.0, 0.0],
-        [1.0, 2.0 / 5.0, 1.0 / 10.0, 0.0, 0.0, 0.0],
-        [1.0, 3.0 / 5.0, 3.0 / 10.0, 1.0 / 10.0, 0.0, 0.0],
-        [1.0, 4.0 / 5.0, 6.0 / 10.0, 4.0 / 10.0, 1.0 / 5.0, 0.0],
-        [1.0, 1.0, 1.0, 1.0, 1.0, 1.0],
-    ];
-    let (mut above, mut below) = (true, true);
-    for row in &BINOMIAL {
-        let b: f64 = row.iter().zip(c).map(|(factor, term)| factor * term).sum();
-        above &= b >= 0.0;
-        below &= b <= 0.0;
-    }
-    above || below
+    let (least, greatest) = bounds(c);
+    least >= 0.0 || greatest <= 0.0
 }
 
-/// The sign change of a function that is monotone on the interval, if it has one inside.
+/// Bounds of the values on \[0, 1\]: the least and the greatest Bernstein coefficient.
+#[inline]
+pub(crate) fn bounds(c: &Coefficients) -> (f64, f64) {
+    // b_j = sum over i <= j of C(j, i)/C(5, i) c_i.
+    let b = [
+        c[0],
+        c[0] + c[1] / 5.0,
+        c[0] + c[1] * (2.0 / 5.0) + c[2] / 10.0,
+        c[0] + c[1] * (3.0 / 5.0) + c[2] * (3.0 / 10.0) + c[3] / 10.0,
+        c[0] + c[1] * (4.0 / 5.0) + c[2] * (6.0 / 10.0) + c[3] * (4.0 / 10.0) + c[4] / 5.0,
+        c[0] + c[1] + c[2] + c[3] + c[4] + c[5],
+    ];
+    b.iter().fold((b[0], b[0]), |(least, greatest), &b| {
+        (f64::min(least, b), f64::max(greatest, b))
+    })
+}
+
+/// The places inside (0, 1) where c0 + c1 t + c2 t^2 changes its sign.
+fn quadratic(c: &Coefficients) -> Roots {
+    let mut roots = Roots::default();
+    let inside = |t: f64| t > 0.0 && t < 1.0;
+    if c[2] == 0.0 {
+        let t = -c[0] / c[1];
+        if inside(t) {
+            roots.push(t);
+        }
+        return roots;
+    }
+    let half = -c[1] / 2.0;
+    let square = half * half - c[2] * c[0];
+    if square <= 0.0 {
+        return roots;
+    }
+    // The root that does not cancel, then the other by their product.
+    let sum = half + half.signum() * square.sqrt();
+    let (a, b) = (sum / c[2], c[0] / sum);
+    for t in [a.min(b), a.max(b)] {
+        if inside(t) {
+            roots.push(t);
+        }
+    }
+    roots
+}
+
+/// A step of Newton's method so small that the next one would not change the place any more.
+const LAST_STEP: f64 = 1e-10;
+
+/// The sign change of a function that is monotone on the interval, if it has one inside;
+/// `function` gives the value and the slope, `ends` the values at both ends of the interval.
 pub(super) fn enclosed_root(
-    function: impl Fn(f64) -> f64,
-    slope: impl Fn(f64) -> f64,
-    left: f64,
-    right: f64,
+    function: impl Fn(f64) -> (f64, f64),
+    [left, right]: [f64; 2],
+    [at_left, at_right]: [f64; 2],
 ) -> Option<f64> {
-    let at_left = function(left);
-    let at_right = function(right);
     // A root at an end belongs to the end, where the caller looks anyway.
     if at_left == 0.0 || at_right == 0.0 || (at_left > 0.0) == (at_right > 0.0) {
         return None;
@@ -117,7 +153,7 @@ pub(super) fn enclosed_root(
     let mut t = left + (right - left) * (at_left / (at_left - at_right));
     // Newton steps, kept inside the enclosure; halving where they would leave it.
     for _ in 0..200 {
-        let v = function(t);
+        let (v, slope) = function(t);
         if v == 0.0 {
             return Some(t);
         }
@@ -126,8 +162,9 @@ pub(super) fn enclosed_root(
         } else {
             high = t;
         }
-        let newton = t - v / slope(t);
-        let next = if newton > low && newton < high {
+        let newton = t - v / slope;
+        let is_inside = newton > low && newton < high;
+        let next = if is_inside {
             newton
         } else {
             low + (high - low) / 2.0
@@ -135,7 +172,7 @@ pub(super) fn enclosed_root(
         if next == t || next <= low || next >= high {
             return Some(t);
         }
-        if (next - t).abs() <= f64::EPSILON * t.abs() {
+        if is_inside && (next - t).abs() <= LAST_STEP * t.abs() {
             return Some(next);
         }
         t = next;

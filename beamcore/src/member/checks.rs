@@ -77,23 +77,11 @@ fn check_supports(
         "supports",
         all,
     );
-    for (i, support) in supports.iter().enumerate() {
-        for earlier in &supports[..i] {
-            let apart = (support.at() - earlier.at()).abs();
-            if length.is_some_and(|length| apart <= length * SAME_PLACE) {
-                problems.push(Problem::new(
-                    ErrorKind::Duplicate,
-                    at(support),
-                    format!(
-                        "{}, where the support \"{}\" stands",
-                        support.at(),
-                        earlier.name()
-                    ),
-                    "a place of its own for each support",
-                ));
-            }
-        }
-    }
+    problems.extend(
+        length
+            .into_iter()
+            .flat_map(|length| same_place(supports, length)),
+    );
     if supports
         .iter()
         .all(|support| support.kind() == SupportKind::Roller && !support.holds_axis())
@@ -105,6 +93,32 @@ fn check_supports(
             "at least one pin or fixed support",
         ));
     }
+}
+
+/// A problem for each support at the place of an earlier one, in the order of the list.
+fn same_place(supports: &[Support], length: Length) -> Vec<Problem> {
+    let mut order: Vec<usize> = (0..supports.len()).collect();
+    order.sort_by(|&a, &b| supports[a].at().si().total_cmp(&supports[b].at().si()));
+    let mut found: Vec<(usize, Problem)> = Vec::new();
+    for pair in order.windows(2) {
+        let (earlier, later) = (pair[0].min(pair[1]), pair[0].max(pair[1]));
+        let (earlier, support) = (&supports[earlier], &supports[later]);
+        if (support.at() - earlier.at()).abs() <= length * SAME_PLACE {
+            let problem = Problem::new(
+                ErrorKind::Duplicate,
+                at(support),
+                format!(
+                    "{}, where the support \"{}\" stands",
+                    support.at(),
+                    earlier.name()
+                ),
+                "a place of its own for each support",
+            );
+            found.push((later, problem));
+        }
+    }
+    found.sort_by_key(|(later, _)| *later);
+    found.into_iter().map(|(_, problem)| problem).collect()
 }
 
 fn at(support: &Support) -> String {

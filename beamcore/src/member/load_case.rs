@@ -17,7 +17,7 @@ pub(crate) struct Case {
     pub(crate) loads: LoadCase,
     /// Per piece, node of it and part of its section; empty if no part strains.
     pub(crate) strains: Vec<Vec<Vec<InitialStrain>>>,
-    /// Per piece and merged layer, the load per length square to the member that enters the layer,
+    /// Per merged layer and piece, the load per length square to the member that enters the layer,
     /// at the left and the right end of the piece.
     pub(crate) entered: Vec<Vec<[f64; 2]>>,
 }
@@ -57,11 +57,12 @@ impl Case {
 
     /// The load per length that enters any of the given layers, per piece.
     pub(crate) fn entering(&self, layers: &[usize]) -> Vec<[f64; 2]> {
-        self.entered
-            .iter()
-            .map(|piece| {
+        let pieces = self.entered.first().map_or(0, Vec::len);
+        (0..pieces)
+            .map(|k| {
                 layers.iter().fold([0.0; 2], |sum, &layer| {
-                    [sum[0] + piece[layer][0], sum[1] + piece[layer][1]]
+                    let [left, right] = self.entered[layer][k];
+                    [sum[0] + left, sum[1] + right]
                 })
             })
             .collect()
@@ -98,19 +99,24 @@ pub(crate) fn load_case(
     builder.finish()
 }
 
-/// The initial strains of the parts.
-pub(crate) fn initial_strains(layout: &Layout, plan: &MemberPlan, beam: &Beam, time: Time) -> Case {
-    let mut builder = Builder::new(layout, plan, beam, time);
+/// The initial strains of the parts; `None` if there are none.
+pub(crate) fn initial_strains(
+    layout: &Layout,
+    plan: &MemberPlan,
+    beam: &Beam,
+    time: Time,
+) -> Option<Case> {
     let strained = layout.pieces.iter().any(|piece| {
         let parts = piece.nodes[0].section.placed();
         parts
             .iter()
             .any(|p| p.initial_strain() != InitialStrain::NONE)
     });
-    if strained {
+    strained.then(|| {
+        let mut builder = Builder::new(layout, plan, beam, time);
         builder.strain(|_, part| part.initial_strain());
-    }
-    builder.finish()
+        builder.finish()
+    })
 }
 
 /// What the clearances of joints take off the forces where they carry: k c, with the sign of slip.
@@ -152,7 +158,7 @@ impl<'a> Builder<'a> {
             case: Case {
                 loads,
                 strains: Vec::new(),
-                entered: vec![vec![[0.0; 2]; layout.strands.len()]; layout.pieces.len()],
+                entered: vec![vec![[0.0; 2]; layout.pieces.len()]; layout.strands.len()],
             },
         }
     }
@@ -270,7 +276,7 @@ impl<'a> Builder<'a> {
 
     /// Notes that a load enters a layer.
     fn enter(&mut self, piece: usize, layer: usize, [left, right]: [f64; 2]) {
-        let [a, b] = &mut self.case.entered[piece][layer];
+        let [a, b] = &mut self.case.entered[layer][piece];
         *a += left;
         *b += right;
     }

@@ -12,7 +12,8 @@ use crate::solve::gauss::RULE;
 use crate::time::Time;
 use std::sync::Arc;
 
-/// The linear solutions at one time: one per action, and last that of the parts' initial strains.
+/// The linear solutions at one time: one per action, and last that of the parts' initial strains,
+/// if there are any.
 #[derive(Debug)]
 pub(super) struct Linear {
     pub(super) solved: Vec<Solved>,
@@ -25,9 +26,7 @@ impl Linear {
         let actions = member.actions().iter();
         let cases: Vec<Case> = actions
             .map(|action| load_case(layout, member.plan(), beam, action, time))
-            .chain(std::iter::once_with(|| {
-                initial_strains(layout, member.plan(), beam, time)
-            }))
+            .chain(initial_strains(layout, member.plan(), beam, time))
             .collect();
         Self {
             solved: cases.iter().map(|case| beam.solve(&case.loads)).collect(),
@@ -68,9 +67,7 @@ fn summed(member: &Member, layout: &Layout, beam: &Beam, time: Time, factors: &[
     let actions = member.actions().iter();
     let cases = actions
         .map(|action| load_case(layout, member.plan(), beam, action, time))
-        .chain(std::iter::once_with(|| {
-            initial_strains(layout, member.plan(), beam, time)
-        }));
+        .chain(initial_strains(layout, member.plan(), beam, time));
     for (case, &factor) in cases.zip(factors) {
         sum.add(&case, factor);
     }
@@ -174,8 +171,8 @@ pub(super) fn linear_terms<'a>(
     ) in shares.into_iter().enumerate()
     {
         for (time, factor) in [(Time::Initial, short_term), (Time::Final, effective)] {
-            if factor != 0.0 {
-                let solutions = &linear[time.index()];
+            let solutions = &linear[time.index()];
+            if factor != 0.0 && i < solutions.solved.len() {
                 terms.push(Term {
                     time,
                     layout: member.layout(),

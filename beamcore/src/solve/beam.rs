@@ -216,12 +216,12 @@ impl Beam {
         let half = self.states.half();
         let all = 2 * half;
         let last = self.pieces.len();
-        let in_units = |k: usize| -> Vec<f64> {
-            let forces = load.at_station(k).iter().enumerate();
-            forces
-                .map(|(i, force)| force / self.units[half + i])
-                .collect()
+        let in_units = |k: usize, outside: &mut Vec<f64>| {
+            outside.clear();
+            let forces = load.at_station(k).iter().zip(&self.units[half..]);
+            outside.extend(forces.map(|(force, unit)| force / unit));
         };
+        let mut outside = Vec::with_capacity(half);
         let moved = |k: usize| &load.moved[self.first_hold[k]..];
         let mut relations = Vec::with_capacity(self.divisors.len() * all);
         for (k, piece) in self.pieces.iter().enumerate() {
@@ -236,7 +236,7 @@ impl Beam {
             if k + 1 == last {
                 break;
             }
-            let outside = in_units(k + 1);
+            in_units(k + 1, &mut outside);
             match &self.ties[k] {
                 Tie::Shared(held) => {
                     // The relation ends right of the station: y- = y+ + F.
@@ -254,12 +254,16 @@ impl Beam {
                 }
             }
         }
+        in_units(0, &mut outside);
+        let left = self.conditions[0].end_side(&outside, moved(0));
+        in_units(last, &mut outside);
+        let right = self.conditions[last].end_side(&outside, moved(last));
         let chain = ChainLoad {
-            left: self.conditions[0].end_side(&in_units(0), moved(0)),
-            right: self.conditions[last].end_side(&in_units(last), moved(last)),
+            left,
+            right,
             relations,
         };
-        let mut states = self.sweep.solve(&chain);
+        let mut states = self.sweep.solve(chain);
         for state in states.chunks_exact_mut(all) {
             for (number, unit) in state.iter_mut().zip(&self.units) {
                 *number *= unit;
@@ -299,9 +303,10 @@ impl Beam {
         let mut coefficients = vec![0.0; last * per_piece];
         let mut defects = vec![0.0; all];
         let mut node = 0;
+        let mut end = vec![0.0; all];
         for (k, piece) in self.pieces.iter().enumerate() {
             let start = &nodes[node * all..(node + 1) * all];
-            let mut end = nodes[(node + 1) * all..(node + 2) * all].to_vec();
+            end.copy_from_slice(&nodes[(node + 1) * all..(node + 2) * all]);
             node += 1;
             match self.ties.get(k) {
                 Some(Tie::Shared(_)) => {

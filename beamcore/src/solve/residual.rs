@@ -34,6 +34,7 @@ pub(super) fn complete(beam: &Beam, load: &LoadCase, solved: &mut Solved, defect
     let mut before = vec![0.0; all];
     let mut after = vec![0.0; all];
     let mut outside = vec![0.0; half];
+    let mut jump = vec![0.0; half];
     let mut peaks = vec![0.0_f64; all];
     let mut left_over = (0.0_f64, 0.0_f64);
     let mut reactions = Vec::with_capacity(load.moved.len());
@@ -60,21 +61,16 @@ pub(super) fn complete(beam: &Beam, load: &LoadCase, solved: &mut Solved, defect
             *force = load.at_station(k)[at] / beam.units[half + at];
         }
         let conditions = &beam.conditions[k];
-        let jump: Vec<f64> = (0..half)
-            .map(|i| after[half + i] - before[half + i] + outside[i])
-            .collect();
+        for (i, number) in jump.iter_mut().enumerate() {
+            *number = after[half + i] - before[half + i] + outside[i];
+        }
         reactions.extend(conditions.held_forces(&jump, &beam.scale));
         let is_end = k == 0 || k == last;
-        let inside = if k == last { &before } else { &after };
         let moved = &load.moved[beam.first_hold(k)..];
-        let sides = if k == last {
-            // The displacements of the last station are those on its left.
-            let mut right = after.clone();
-            right[..half].copy_from_slice(&inside[..half]);
-            conditions.left_over([&before, &right], &outside, moved, is_end)
-        } else {
-            conditions.left_over([&before, &after], &outside, moved, is_end)
-        };
+        let (left, right) = before.split_at(half);
+        let displacements = if k == last { left } else { &after[..half] };
+        let gap = (!is_end).then_some((left, right));
+        let sides = conditions.left_over(displacements, gap, &jump, moved);
         left_over = (left_over.0.max(sides.0), left_over.1.max(sides.1));
     }
     solved.reactions = reactions;

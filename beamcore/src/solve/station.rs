@@ -208,47 +208,43 @@ impl Conditions {
 
     /// The force of each hold, in the unit of the forces over the direction's length: b . jump,
     /// with `jump` = f+ - f- + F in units.
-    pub(super) fn held_forces(&self, jump: &[f64], scale: &Scale) -> Vec<f64> {
+    pub(super) fn held_forces(&self, jump: &[f64], scale: &Scale) -> impl Iterator<Item = f64> {
         let energy = scale.unit(0) * scale.unit(self.half);
         self.holds
             .iter()
-            .map(|hold| dot(&hold.dual, jump) * energy / hold.length)
-            .collect()
+            .map(move |hold| dot(&hold.dual, jump) * energy / hold.length)
     }
 
-    /// What is left of the conditions, each against the units: of the directions that no hold
-    /// resists, of the holds, and of the releases.
+    /// What is left of the conditions in units, of displacements and of forces: `displacements`
+    /// are those right of the station, `before` displacements and forces left of it (none at an
+    /// end of the member), `jump` = f+ - f- + F.
     pub(super) fn left_over(
         &self,
-        [before, after]: [&[f64]; 2],
-        outside: &[f64],
+        displacements: &[f64],
+        before: Option<(&[f64], &[f64])>,
+        jump: &[f64],
         moved: &[f64],
-        is_end: bool,
     ) -> (f64, f64) {
-        let half = self.half;
-        let jump: Vec<f64> = (0..half)
-            .map(|i| after[half + i] - before[half + i] + outside[i])
-            .collect();
         let mut forces = 0.0_f64;
-        let mut displacements = 0.0_f64;
+        let mut gaps = 0.0_f64;
         for free in &self.free {
-            forces = forces.max(dot(free, &jump).abs());
+            forces = forces.max(dot(free, jump).abs());
         }
         for (hold, moved) in self.holds.iter().zip(moved) {
-            let d = dot(&hold.direction, &after[..half]) - moved / hold.length;
-            let left = (hold.soft * dot(&hold.dual, &jump) - hold.stiff * d).abs();
-            displacements = displacements.max(left);
+            let d = dot(&hold.direction, displacements) - moved / hold.length;
+            let left = (hold.soft * dot(&hold.dual, jump) - hold.stiff * d).abs();
+            gaps = gaps.max(left);
         }
-        if !is_end {
+        if let Some((left, left_forces)) = before {
             for direction in &self.continuous {
-                let gap: Vec<f64> = (0..half).map(|i| after[i] - before[i]).collect();
-                displacements = displacements.max(dot(direction, &gap).abs());
+                let gap = dot(direction, displacements) - dot(direction, left);
+                gaps = gaps.max(gap.abs());
             }
             for direction in &self.releases {
-                forces = forces.max(dot(direction, &before[half..]).abs());
+                forces = forces.max(dot(direction, left_forces).abs());
             }
         }
-        (displacements, forces)
+        (gaps, forces)
     }
 }
 

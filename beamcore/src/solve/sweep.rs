@@ -71,10 +71,9 @@ impl Sweep {
     }
 
     /// The states at all nodes under one load case, one node after the other.
-    pub(crate) fn solve(&self, load: &ChainLoad) -> Vec<f64> {
+    pub(crate) fn solve(&self, load: ChainLoad) -> Vec<f64> {
         let (half, all) = (self.half, 2 * self.half);
-        let mut carried = load.left.clone();
-        let mut reduced = load.relations.clone();
+        let (mut carried, mut reduced) = (load.left, load.relations);
         for (link, side) in self.links.iter().zip(reduced.chunks_exact_mut(all)) {
             link.reduce_side(half, &mut carried, side);
         }

@@ -87,7 +87,6 @@ fn uniform(beam: &Beam, q: f64) -> LoadCase {
 
 const W: usize = 0;
 const THETA: usize = 1;
-const V: usize = 2;
 const B: usize = 3;
 
 #[test]
