@@ -1,6 +1,8 @@
 //! Results along the member, exact between stations, with their extremes.
 
+mod extremes;
 mod piecewise;
+mod recut;
 
 pub(crate) use piecewise::{Peak, Piecewise};
 
@@ -51,6 +53,11 @@ impl<Q: Quantity> Field<Q> {
             line,
             quantity: PhantomData,
         }
+    }
+
+    /// The curves of the field.
+    pub(crate) const fn piecewise(&self) -> &Piecewise {
+        &self.line
     }
 
     /// The values on both sides of the place `at`.

@@ -1,29 +1,27 @@
 //! A quantity along the member as one curve per piece.
 
-use crate::math::curve::{Curve, Decaying};
-use crate::math::polynomial::{self, Coefficients, TERMS};
+use super::recut::merged;
+use crate::math::curve::Decaying;
+use crate::math::polynomial::TERMS;
 use std::sync::Arc;
-
-/// Values closer than this, relative to the peak, count as a tie, and the leftmost of them wins.
-const TIE: f64 = 1e-12;
 
 /// Curves over the pieces between `stations`; a station may have two values.
 #[derive(Clone, Debug, PartialEq)]
 pub(crate) struct Piecewise {
-    stations: Arc<[f64]>,
+    pub(super) stations: Arc<[f64]>,
     /// The number of polynomial coefficients per piece, at least [`TERMS`].
-    terms: usize,
-    polynomials: Vec<f64>,
-    tails: Vec<Tail>,
+    pub(super) terms: usize,
+    pub(super) polynomials: Vec<f64>,
+    pub(super) tails: Vec<Tail>,
 }
 
 /// Exponentials that decay from the ends of the pieces.
 #[derive(Clone, Debug, PartialEq)]
-struct Tail {
+pub(super) struct Tail {
     /// Per piece and mode.
-    decays: Arc<[f64]>,
+    pub(super) decays: Arc<[f64]>,
     /// Per piece and mode: the factors from the left and from the right.
-    factors: Vec<f64>,
+    pub(super) factors: Vec<f64>,
 }
 
 /// A value and the place where it stands.
@@ -207,47 +205,6 @@ impl Piecewise {
         }
     }
 
-    /// The same field over the pieces between these stations, all of its own among them.
-    fn recut(&self, stations: &Arc<[f64]>) -> Self {
-        let pieces = stations.len() - 1;
-        let mut new = Self {
-            stations: Arc::clone(stations),
-            terms: self.terms,
-            polynomials: Vec::with_capacity(pieces * self.terms),
-            tails: Vec::new(),
-        };
-        let mut cuts = Vec::with_capacity(pieces);
-        for ends in stations.windows(2) {
-            let own = self.stations.partition_point(|&s| s <= ends[0]) - 1;
-            let (from, length) = (
-                self.stations[own],
-                self.stations[own + 1] - self.stations[own],
-            );
-            let (start, end) = ((ends[0] - from) / length, (ends[1] - from) / length);
-            cuts.push((own, start, end));
-            let c = &self.polynomials[own * self.terms..(own + 1) * self.terms];
-            new.polynomials.extend(polynomial::stretch(c, start, end));
-        }
-        for tail in &self.tails {
-            let modes = tail.decays.len() / self.len();
-            let (mut decays, mut factors) = (Vec::new(), Vec::new());
-            for &(own, start, end) in &cuts {
-                for mode in own * modes..(own + 1) * modes {
-                    let decay = tail.decays[mode];
-                    decays.push(decay * (end - start));
-                    factors.push(tail.factors[2 * mode] * crate::math::exp(-decay * start));
-                    let behind = decay * (1.0 - end);
-                    factors.push(tail.factors[2 * mode + 1] * crate::math::exp(-behind));
-                }
-            }
-            new.tails.push(Tail {
-                decays: decays.into(),
-                factors,
-            });
-        }
-        new
-    }
-
     /// The derivative along x.
     pub(crate) fn derivative(&self) -> Self {
         let mut new = self.clone();
@@ -313,7 +270,7 @@ impl Piecewise {
     }
 
     /// The exponentials of a piece that are there.
-    fn pairs(&self, piece: usize) -> impl Iterator<Item = Decaying> {
+    pub(super) fn pairs(&self, piece: usize) -> impl Iterator<Item = Decaying> {
         self.tails.iter().flat_map(move |tail| {
             let modes = tail.decays.len() / self.len();
             (piece * modes..(piece + 1) * modes).filter_map(|mode| {
@@ -326,103 +283,6 @@ impl Piecewise {
             })
         })
     }
-
-    /// Bounds of the values over a piece.
-    fn bounds(&self, piece: usize) -> (f64, f64) {
-        let c = &self.polynomials[piece * self.terms..(piece + 1) * self.terms];
-        let polynomial = match <&Coefficients>::try_from(c) {
-            Ok(c) => polynomial::bounds(c),
-            Err(_) => crate::math::curve::bounds(c),
-        };
-        self.pairs(piece)
-            .fold(polynomial, |(least, greatest), pair| {
-                let [a, b] = [pair.from_left, pair.from_right];
-                (
-                    least + a.min(0.0) + b.min(0.0),
-                    greatest + a.max(0.0) + b.max(0.0),
-                )
-            })
-    }
-
-    /// The places where a piece turns, with the values there and at its ends.
-    fn turning(&self, piece: usize, mut consider: impl FnMut(f64, f64)) {
-        let (from, to) = (self.stations[piece], self.stations[piece + 1]);
-        let c = &self.polynomials[piece * self.terms..(piece + 1) * self.terms];
-        if self.tails.is_empty() && self.terms == TERMS {
-            let c: &Coefficients = c.try_into().expect("a piece of so many terms");
-            consider(c[0], from);
-            for &t in polynomial::sign_changes(&polynomial::derivative(c)).as_slice() {
-                consider(polynomial::value(c, t), from + (to - from) * t);
-            }
-            consider(polynomial::value_at_one(c), to);
-            return;
-        }
-        let curve = Curve {
-            polynomial: c.to_vec(),
-            decaying: self.pairs(piece).collect(),
-        };
-        consider(curve.value(0.0), from);
-        for t in curve.derivative().sign_changes() {
-            consider(curve.value(t), from + (to - from) * t);
-        }
-        consider(curve.value(1.0), to);
-    }
-
-    /// The places where the field changes its sign inside a piece.
-    pub(crate) fn sign_changes(&self) -> Vec<f64> {
-        let mut places = Vec::new();
-        for (k, ends) in self.stations.windows(2).enumerate() {
-            let curve = Curve {
-                polynomial: self.polynomials[k * self.terms..(k + 1) * self.terms].to_vec(),
-                decaying: self.pairs(k).collect(),
-            };
-            let changes = curve.sign_changes();
-            places.extend(changes.iter().map(|t| ends[0] + (ends[1] - ends[0]) * t));
-        }
-        places
-    }
-
-    /// The value of the greatest score, the leftmost of equals. `most` gives a bound of the score
-    /// from bounds of the values, by which most pieces are passed over.
-    fn find(&self, score: impl Fn(f64) -> f64, most: impl Fn((f64, f64)) -> f64) -> Peak {
-        let is_better = |new: f64, known: f64| new - known > TIE * f64::max(known.abs(), new.abs());
-        let mut best: Option<(Peak, f64)> = None;
-        for piece in 0..self.len() {
-            if best.is_some_and(|(_, known)| !is_better(most(self.bounds(piece)), known)) {
-                continue;
-            }
-            self.turning(piece, |value, at| {
-                let s = score(value);
-                if best.is_none_or(|(_, known)| is_better(s, known)) {
-                    best = Some((Peak { value, at }, s));
-                }
-            });
-        }
-        best.expect("a field has at least one piece").0
-    }
-
-    /// The algebraically greatest value with its place.
-    pub(crate) fn maximum(&self) -> Peak {
-        self.find(|v| v, |(_, greatest)| greatest)
-    }
-
-    /// The algebraically least value with its place.
-    pub(crate) fn minimum(&self) -> Peak {
-        self.find(|v| -v, |(least, _)| -least)
-    }
-
-    /// The value of greatest magnitude, with its sign and place.
-    pub(crate) fn greatest(&self) -> Peak {
-        self.find(f64::abs, |(least, greatest)| f64::max(-least, greatest))
-    }
-}
-
-/// All stations of two members of one length, each once.
-fn merged(a: &[f64], b: &[f64]) -> Arc<[f64]> {
-    let mut both: Vec<f64> = a.iter().chain(b).copied().collect();
-    both.sort_by(f64::total_cmp);
-    both.dedup();
-    both.into()
 }
 
 #[cfg(test)]

@@ -1,8 +1,8 @@
 //! What can be wrong with sections along a member, its layers and what refers to them.
 
-use super::layout::{merged_layer, slip_of};
 use super::load::{Load, Tendon};
 use super::plan::MemberPlan;
+use super::references::{merged_layer, slip_of};
 use super::sections::Stretch;
 use super::shear::ShearModel;
 use super::{Release, node};
@@ -274,7 +274,7 @@ pub(super) fn order_of_changes(plan: &MemberPlan) -> Vec<Problem> {
                     plan.length()
                 ),
             ));
-        } else if !(change.to() <= plan.length()) {
+        } else if !change.to().is_finite() || change.to() > plan.length() {
             problems.push(Problem::new(
                 ErrorKind::Position,
                 &at,

@@ -1,11 +1,11 @@
 //! The member laid out for the solver: stations, what each holds, sections over the pieces.
 
-use super::hinge::Release;
 use super::mesh;
 use super::node::Node;
+use super::places::{Merged, places};
 use super::plan::MemberPlan;
+use super::references::{has_axial, strands};
 use super::sections::Stretch;
-use super::support::{Support, SupportKind};
 use crate::error::{ErrorKind, Problem, Result};
 use crate::path;
 use crate::section::Section;
@@ -63,9 +63,17 @@ impl PieceNodes {
 pub(crate) struct Situation {
     /// The positions of supports that the member has lifted off.
     pub(crate) lifted: Vec<usize>,
-    /// Per joint with clearance, its position and where it carries: stretches with the sign of the
-    /// slip. A joint that is not listed carries everywhere.
-    pub(crate) engaged: Vec<(usize, Vec<(f64, f64, f64)>)>,
+    /// Per joint with clearance, its position and where it carries. A joint that is not listed carries everywhere.
+    pub(crate) engaged: Vec<(usize, Vec<Engaged>)>,
+}
+
+/// A stretch over which a joint with clearance carries.
+#[derive(Clone, Copy, Debug, PartialEq)]
+pub(crate) struct Engaged {
+    pub(crate) from: f64,
+    pub(crate) to: f64,
+    /// The sign of the slip.
+    pub(crate) sign: f64,
 }
 
 impl Situation {
@@ -76,8 +84,8 @@ impl Situation {
             None => 1.0,
             Some((_, stretches)) => stretches
                 .iter()
-                .find(|(from, to, _)| *from <= x && x <= *to)
-                .map_or(0.0, |(_, _, sign)| *sign),
+                .find(|stretch| stretch.from <= x && x <= stretch.to)
+                .map_or(0.0, |stretch| stretch.sign),
         }
     }
 }
@@ -95,9 +103,9 @@ pub(crate) struct Layout {
     pub(crate) places: Vec<f64>,
     pub(crate) pieces: Vec<PieceNodes>,
     /// Per station its holds, and what each belongs to.
-    holds: Vec<Vec<(Hold, HeldBy)>>,
-    releases: Vec<Vec<Vec<f64>>>,
-    merged: Vec<(f64, f64)>,
+    pub(super) holds: Vec<Vec<(Hold, HeldBy)>>,
+    pub(super) releases: Vec<Vec<Vec<f64>>>,
+    merged: Vec<Merged>,
 }
 
 impl Layout {
@@ -168,83 +176,6 @@ impl Layout {
         Ok(layout)
     }
 
-    /// Sets what supports and anchors hold and what hinges release.
-    fn hold(&mut self, plan: &MemberPlan, section: &Section) -> Result<()> {
-        for (i, support) in plan.supports().iter().enumerate() {
-            let station = nearest(&self.places, support.at().si());
-            for (hold, held) in self.support_holds(support, section)? {
-                self.holds[station].push((hold, HeldBy::Support(i, held)));
-            }
-        }
-        for (i, anchor) in plan.anchors().iter().enumerate() {
-            let station = nearest(&self.places, anchor.at.si());
-            let joint = slip_of(
-                section,
-                &anchor.joint,
-                &path::named("member.anchors", &anchor.name),
-            )?;
-            let mut direction = vec![0.0; self.states.half()];
-            direction[self.states.slip(joint)] = 1.0;
-            let stiffness = anchor.stiffness.map_or(f64::INFINITY, |k| k.si());
-            let hold = Hold {
-                direction,
-                stiffness,
-            };
-            self.holds[station].push((hold, HeldBy::Anchor(i)));
-        }
-        for (i, hinge) in plan.hinges().iter().enumerate() {
-            let station = nearest(&self.places, hinge.at().si());
-            let at = path::indexed("member.hinges", i);
-            let mut direction = vec![0.0; self.states.half()];
-            match hinge.release() {
-                Release::Shear => {
-                    for strand in 0..self.states.strands {
-                        let mut direction = direction.clone();
-                        direction[self.states.deflection(strand)] = 1.0;
-                        self.releases[station].push(direction);
-                    }
-                }
-                Release::Moment(None) => {
-                    for strand in 0..self.states.strands {
-                        let mut direction = direction.clone();
-                        direction[self.states.rotation(strand)] = 1.0;
-                        self.releases[station].push(direction);
-                    }
-                }
-                Release::Moment(Some(layer)) => {
-                    let layer = merged_layer(section, layer, &at)?;
-                    direction[self.states.rotation(self.strands[layer])] = 1.0;
-                    self.releases[station].push(direction);
-                }
-                Release::Butt(layer) => {
-                    let layer = merged_layer(section, layer, &at)?;
-                    let butt = self.butt(section, layer);
-                    self.releases[station].push(butt);
-                }
-            }
-        }
-        Ok(())
-    }
-
-    /// The displacements that part where a layer is butted: its own along the member.
-    fn butt(&self, section: &Section, layer: usize) -> Vec<f64> {
-        let mut direction = vec![0.0; self.states.half()];
-        let mut is_reference = true;
-        for (j, joint) in section.slips().iter().enumerate() {
-            if joint.upper == layer {
-                direction[self.states.slip(j)] += 1.0;
-            }
-            if joint.lower == layer {
-                direction[self.states.slip(j)] -= 1.0;
-            }
-            is_reference &= !joint.above.contains(&layer);
-        }
-        if is_reference && self.states.has_axial {
-            direction[self.states.axial()] = 1.0;
-        }
-        direction
-    }
-
     /// The direction in which a layer moves along the member at a height.
     pub(crate) fn along(&self, section: &Section, layer: usize, z: f64) -> Vec<f64> {
         let mut direction = vec![0.0; self.states.half()];
@@ -258,81 +189,6 @@ impl Layout {
             }
         }
         direction
-    }
-
-    fn support_holds(&self, support: &Support, section: &Section) -> Result<Vec<(Hold, Held)>> {
-        let base = path::named("member.supports", support.name());
-        let named = path::key(&base, "under");
-        let layers: Vec<usize> = support
-            .layers()
-            .iter()
-            .map(|name| merged_layer(section, name, &named))
-            .collect::<Result<_>>()?;
-        let mut strands: Vec<usize> = layers.iter().map(|&layer| self.strands[layer]).collect();
-        if strands.is_empty() {
-            strands = (0..self.states.strands).collect();
-        }
-        strands.sort_unstable();
-        strands.dedup();
-        let (sine, cosine) = self.pitch;
-        let mut holds = Vec::new();
-        for &strand in &strands {
-            let mut direction = vec![0.0; self.states.half()];
-            direction[self.states.deflection(strand)] = cosine;
-            if self.states.has_axial && sine != 0.0 {
-                direction[self.states.axial()] = -sine;
-            }
-            let stiffness = support.given_spring().map_or(f64::INFINITY, |k| k.si());
-            holds.push((
-                Hold {
-                    direction,
-                    stiffness,
-                },
-                Held::Deflection,
-            ));
-        }
-        if self.states.has_axial && support.holds_axis() {
-            let layer = layers.first().copied().unwrap_or(0);
-            let height = support.given_height().map_or(self.axis, |z| z.si());
-            let mut direction = self.along(section, layer, height);
-            for number in &mut direction {
-                *number *= cosine;
-            }
-            direction[self.states.deflection(strands[0])] += sine;
-            let stiffness = support.given_axial_spring();
-            holds.push((
-                Hold {
-                    direction,
-                    stiffness: stiffness.map_or(f64::INFINITY, |k| k.si()),
-                },
-                Held::Axis,
-            ));
-        }
-        if support.holds_rotation() {
-            for &strand in &strands {
-                let mut direction = vec![0.0; self.states.half()];
-                direction[self.states.rotation(strand)] = 1.0;
-                let stiffness = match (support.kind(), support.given_rotational_spring()) {
-                    (_, Some(k)) => k.si(),
-                    (SupportKind::Fixed, None) => f64::INFINITY,
-                    (SupportKind::Pin | SupportKind::Roller, None) => 0.0,
-                };
-                let hold = Hold {
-                    direction,
-                    stiffness,
-                };
-                holds.push((hold, Held::Rotation));
-            }
-        }
-        for (i, held) in support.held_layers().iter().enumerate() {
-            let layer = merged_layer(section, &held.layer, &path::key(&base, "holding"))?;
-            let hold = Hold {
-                direction: self.along(section, layer, held.height.si()),
-                stiffness: f64::INFINITY,
-            };
-            holds.push((hold, Held::Layer(i)));
-        }
-        Ok(holds)
     }
 
     /// The law at a node with all joints carrying.
@@ -459,7 +315,24 @@ impl Layout {
         PieceLaw::Prismatic(law)
     }
 
-    fn unsolvable(&self, why: Unsolvable, plan: &MemberPlan) -> Problem {
+    /// What the stations demand of deflection and rotation, for a member of one strand.
+    pub(crate) fn bending_stations(&self) -> Vec<Station> {
+        let half = States::BENDING.half();
+        let cut = |direction: &[f64]| direction[..half].to_vec();
+        let hold = |(hold, _): &(Hold, HeldBy)| Hold {
+            direction: cut(&hold.direction),
+            stiffness: hold.stiffness,
+        };
+        let stations = self.holds.iter().zip(&self.releases);
+        stations
+            .map(|(holds, releases)| Station {
+                holds: holds.iter().map(hold).collect(),
+                releases: releases.iter().map(|r| cut(r)).collect(),
+            })
+            .collect()
+    }
+
+    pub(crate) fn unsolvable(&self, why: Unsolvable, plan: &MemberPlan) -> Problem {
         match why {
             Unsolvable::Free(motion) => Problem::new(
                 ErrorKind::Mechanism,
@@ -503,153 +376,4 @@ fn law(node: &Node, time: Time, states: States, axis: f64, strands: &[usize]) ->
     let layers = node.plain_layers(time, axis, strands);
     let joints = node.plain_joints(time, axis, strands, |_| true);
     Law::new(states, layers, &joints)
-}
-
-/// Whether axial force takes part.
-fn has_axial(plan: &MemberPlan) -> bool {
-    let holds = plan
-        .supports()
-        .iter()
-        .filter(|support| support.holds_axis());
-    let loads = plan.actions().iter().flat_map(|action| action.loads());
-    holds.count() > 1
-        || plan.pitch_angle().is_some_and(|angle| angle.si() != 0.0)
-        || loads.into_iter().any(super::Load::is_axial)
-        || plan
-            .supports()
-            .iter()
-            .any(|s| !s.held_layers().is_empty() || s.given_axial_spring().is_some())
-}
-
-/// The strands: merged layers that share a deflection. The first layer's is the first.
-fn strands(section: &Section) -> (usize, Vec<usize>) {
-    let count = section.merged_layers().len();
-    let mut strand: Vec<usize> = (0..count).collect();
-    for joint in section.slips() {
-        if joint.transverse_at(0.0, Time::Initial).is_none() {
-            let (a, b) = (strand[joint.lower], strand[joint.upper]);
-            let (low, high) = (a.min(b), a.max(b));
-            for s in &mut strand {
-                if *s == high {
-                    *s = low;
-                }
-            }
-        }
-    }
-    let mut found: Vec<usize> = strand.clone();
-    found.sort_unstable();
-    found.dedup();
-    let position = |s: &usize| found.binary_search(s).unwrap_or_default();
-    (found.len(), strand.iter().map(position).collect())
-}
-
-/// The merged layer that a named layer is in.
-pub(crate) fn merged_layer(section: &Section, name: &str, at: &str) -> Result<usize> {
-    let merged = section.merged_layers();
-    let found = merged
-        .iter()
-        .position(|layer| layer.layers().iter().any(|own| own == name));
-    found.ok_or_else(|| {
-        let names: Vec<_> = section
-            .layers()
-            .iter()
-            .map(crate::section::Layer::name)
-            .collect();
-        Problem::new(
-            ErrorKind::Name,
-            at,
-            format!("the unknown layer \"{name}\""),
-            format!("one of the layers {}", crate::lookup::listed(&names)),
-        )
-        .into()
-    })
-}
-
-/// The slip of a named joint.
-pub(crate) fn slip_of(section: &Section, name: &str, at: &str) -> Result<usize> {
-    let joints = section.joints();
-    let found = section
-        .slips()
-        .iter()
-        .position(|slip| joints[slip.joint].name() == name);
-    found.ok_or_else(|| {
-        let names: Vec<_> = section
-            .slips()
-            .iter()
-            .map(|slip| joints[slip.joint].name())
-            .collect();
-        let expected = if names.is_empty() {
-            "a section with a joint that slips".into()
-        } else {
-            format!(
-                "one of the joints that slip: {}",
-                crate::lookup::listed(&names)
-            )
-        };
-        Problem::new(
-            ErrorKind::Name,
-            at,
-            format!("the joint \"{name}\", which does not slip or is not there"),
-            expected,
-        )
-        .into()
-    })
-}
-
-/// All places where something changes, and those that were merged.
-fn places(plan: &MemberPlan, sections: &[Stretch], more: &[f64]) -> (Vec<f64>, Vec<(f64, f64)>) {
-    let length = plan.length().si();
-    let slack = length * SAME_PLACE;
-    let supports = plan.supports().iter().map(|support| support.at().si());
-    let changes = sections.iter().flat_map(|s| [s.from, s.to]);
-    let own = sections.iter().flat_map(|s| s.start().places());
-    let hinges = plan.hinges().iter().map(|hinge| hinge.at().si());
-    let anchors = plan.anchors().iter().map(|anchor| anchor.at.si());
-    let loads = plan
-        .actions()
-        .iter()
-        .flat_map(|action| action.loads())
-        .flat_map(super::Load::places)
-        .map(|place| place.si());
-    // Ends and supports keep their exact places; others give way to them.
-    let lasting = [0.0, length]
-        .into_iter()
-        .chain(supports)
-        .map(|place| (place, false));
-    let rest = changes.chain(own).chain(hinges).chain(anchors).chain(loads);
-    let rest = rest.chain(more.iter().copied()).map(|place| (place, true));
-    let mut places: Vec<_> = lasting.chain(rest).collect();
-    places.sort_by(|a, b| a.0.total_cmp(&b.0));
-    let mut merged = Vec::new();
-    let mut kept: Vec<(f64, bool)> = Vec::with_capacity(places.len());
-    for place in places {
-        match kept.last_mut() {
-            Some(last) if place.0 - last.0 <= slack => {
-                let (stays, goes) = if last.1 {
-                    (place, *last)
-                } else {
-                    (*last, place)
-                };
-                if stays.0 != goes.0 {
-                    merged.push((goes.0, stays.0));
-                }
-                *last = stays;
-            }
-            _ => kept.push(place),
-        }
-    }
-    (kept.into_iter().map(|place| place.0).collect(), merged)
-}
-
-/// The index of the station nearest to a place.
-pub(super) fn nearest(stations: &[f64], place: f64) -> usize {
-    let after = stations
-        .partition_point(|&station| station < place)
-        .min(stations.len() - 1);
-    let before = after.saturating_sub(1);
-    if place - stations[before] < stations[after] - place {
-        before
-    } else {
-        after
-    }
 }

@@ -1,80 +1,23 @@
 //! The loads of an action, laid out on the stations of a member.
 
 use super::action::Action;
-use super::layout::{Held, HeldBy, Layout, Situation, nearest};
-use super::load::{Load, Tendon};
+use super::case::Case;
+use super::layout::{Held, HeldBy, Layout, Situation};
+use super::load::Load;
+use super::places::nearest;
 use super::plan::MemberPlan;
 use crate::constants::GRAVITY;
-use crate::section::{InitialStrain, PlacedPart};
+use crate::section::InitialStrain;
 use crate::solve::beam::Beam;
-use crate::solve::load::LoadCase;
 use crate::time::Time;
-use crate::units::{Curvature, Length, Strain, TemperatureChange};
-
-/// A load case with the free strains that act in it.
-#[derive(Clone, Debug)]
-pub(crate) struct Case {
-    pub(crate) loads: LoadCase,
-    /// Per piece, node of it and part of its section; empty if no part strains.
-    pub(crate) strains: Vec<Vec<Vec<InitialStrain>>>,
-    /// Per merged layer and piece, the load per length square to the member that enters the layer,
-    /// at the left and the right end of the piece.
-    pub(crate) entered: Vec<Vec<[f64; 2]>>,
-}
-
-impl Case {
-    /// No load.
-    pub(crate) fn none(beam: &Beam) -> Self {
-        Self {
-            loads: beam.no_load(),
-            strains: Vec::new(),
-            entered: Vec::new(),
-        }
-    }
-
-    /// Adds `factor` times another case on the same member.
-    pub(crate) fn add(&mut self, other: &Self, factor: f64) {
-        self.loads.add(&other.loads, factor);
-        if self.strains.is_empty() {
-            let none = |parts: &Vec<InitialStrain>| vec![InitialStrain::NONE; parts.len()];
-            let pieces = other.strains.iter();
-            self.strains = pieces
-                .map(|nodes| nodes.iter().map(none).collect())
-                .collect();
-        }
-        let mine = self.strains.iter_mut().flatten().flatten();
-        for (sum, strain) in mine.zip(other.strains.iter().flatten().flatten()) {
-            *sum = sum.plus(&strain.times(factor));
-        }
-        self.entered.resize(other.entered.len(), Vec::new());
-        for (mine, theirs) in self.entered.iter_mut().zip(&other.entered) {
-            mine.resize(theirs.len(), [0.0; 2]);
-            for (sum, load) in mine.iter_mut().flatten().zip(theirs.iter().flatten()) {
-                *sum += factor * load;
-            }
-        }
-    }
-
-    /// The load per length that enters any of the given layers, per piece.
-    pub(crate) fn entering(&self, layers: &[usize]) -> Vec<[f64; 2]> {
-        let pieces = self.entered.first().map_or(0, Vec::len);
-        (0..pieces)
-            .map(|k| {
-                layers.iter().fold([0.0; 2], |sum, &layer| {
-                    let [left, right] = self.entered[layer][k];
-                    [sum[0] + left, sum[1] + right]
-                })
-            })
-            .collect()
-    }
-}
+use crate::units::Length;
 
 /// Builds a case on a laid out member.
-struct Builder<'a> {
-    layout: &'a Layout,
+pub(super) struct Builder<'a> {
+    pub(super) layout: &'a Layout,
     plan: &'a MemberPlan,
-    time: Time,
-    case: Case,
+    pub(super) time: Time,
+    pub(super) case: Case,
 }
 
 /// The loads of one action at a time.
@@ -232,20 +175,20 @@ impl<'a> Builder<'a> {
     }
 
     /// Adds to the load per length on a displacement over a piece, at its two ends.
-    fn line(&mut self, piece: usize, displacement: usize, [left, right]: [f64; 2]) {
+    pub(super) fn line(&mut self, piece: usize, displacement: usize, [left, right]: [f64; 2]) {
         let half = self.layout.states.half();
         self.case.loads.line[2 * half * piece + displacement] += left;
         self.case.loads.line[2 * half * piece + half + displacement] += right;
     }
 
     /// Adds to the outside force on a displacement at a station.
-    fn outside(&mut self, station: usize, displacement: usize, force: f64) {
+    pub(super) fn outside(&mut self, station: usize, displacement: usize, force: f64) {
         let half = self.layout.states.half();
         self.case.loads.outside[half * station + displacement] += force;
     }
 
     /// A force along the member on a layer at a height.
-    fn push(&mut self, station: usize, layer: usize, z: f64, force: f64) {
+    pub(super) fn push(&mut self, station: usize, layer: usize, z: f64, force: f64) {
         let direction = self.layout.along(self.plan.section(), layer, z);
         for (i, factor) in direction.into_iter().enumerate() {
             self.outside(station, i, force * factor);
@@ -336,50 +279,6 @@ impl<'a> Builder<'a> {
         }
     }
 
-    /// Equivalent forces of a tendon: P along it on each anchor, P times each change of its slope.
-    /// Slopes are small: the force along the member is P everywhere.
-    fn prestress(&mut self, layer: usize, force: f64, tendon: &Tendon) {
-        let points: Vec<(f64, f64)> = tendon
-            .points()
-            .iter()
-            .map(|(x, z)| (x.si(), z.si()))
-            .collect();
-        let last = points.len() - 1;
-        let slope = |i: usize| {
-            let ((x, z), (u, v)) = (points[i], points[i + 1]);
-            (v - z) / (u - x)
-        };
-        let w = self.layout.states.deflection(self.layout.strands[layer]);
-        let (start, end) = match tendon {
-            Tendon::Draped(_) => {
-                for i in 1..last {
-                    let station = nearest(&self.layout.places, points[i].0);
-                    self.outside(station, w, -force * (slope(i) - slope(i - 1)));
-                }
-                (slope(0), slope(last - 1))
-            }
-            Tendon::Parabolic(_) => {
-                // z'' by divided differences.
-                let bend = 2.0 * (slope(1) - slope(0)) / (points[2].0 - points[0].0);
-                let ends = [points[0].0, points[2].0];
-                let [first, to] = ends.map(|x| nearest(&self.layout.places, x));
-                for piece in first..to {
-                    self.line(piece, w, [-force * bend; 2]);
-                }
-                let half = bend / 2.0;
-                (
-                    slope(0) - half * (points[1].0 - points[0].0),
-                    slope(1) + half * (points[2].0 - points[1].0),
-                )
-            }
-        };
-        let [left, right] = [points[0].0, points[last].0].map(|x| nearest(&self.layout.places, x));
-        self.push(left, layer, points[0].1, force);
-        self.outside(left, w, -force * start);
-        self.push(right, layer, points[last].1, -force);
-        self.outside(right, w, force * end);
-    }
-
     /// Moves what a support holds.
     fn moved(&mut self, support: &str, held: Held, by: f64) {
         let supports = self.plan.supports();
@@ -390,68 +289,6 @@ impl<'a> Builder<'a> {
                 && supports[i].name() == support
             {
                 self.case.loads.moved[hold] += by;
-            }
-        }
-    }
-
-    fn warm(&mut self, change: TemperatureChange, parts: &[String]) {
-        self.strain(|_, part| {
-            let is_named = parts.is_empty() || parts.iter().any(|name| name == part.name());
-            let alpha = part.material().expansion().filter(|_| is_named);
-            InitialStrain {
-                axial: alpha.map_or(Strain::ZERO, |alpha| alpha * change),
-                ..InitialStrain::NONE
-            }
-        });
-    }
-
-    /// Every part strains by alpha dT (z - middle)/height at each height z.
-    fn gradient(&mut self, difference: TemperatureChange) {
-        self.strain(|placed, part| {
-            let bottoms = placed.iter().map(|p| p.bottom().si());
-            let tops = placed.iter().map(|p| p.top().si());
-            let (bottom, top) = (
-                bottoms.fold(f64::INFINITY, f64::min),
-                tops.fold(f64::NEG_INFINITY, f64::max),
-            );
-            let alpha = part.material().expansion();
-            let whole = alpha.map_or(Strain::ZERO, |alpha| alpha * difference);
-            let slope = whole.si() / (top - bottom);
-            InitialStrain {
-                axial: Strain::from_si(slope * (part.net().z - f64::midpoint(bottom, top))),
-                curvature_y: Curvature::from_si(-slope),
-                ..InitialStrain::NONE
-            }
-        });
-    }
-
-    /// Adds free strains, told for each part among the parts of its section.
-    fn strain(&mut self, of: impl Fn(&[PlacedPart], &PlacedPart) -> InitialStrain) {
-        let layout = self.layout;
-        let (half, strands) = (layout.states.half(), layout.states.strands);
-        let gradients = half - strands;
-        self.case.strains.resize(layout.pieces.len(), Vec::new());
-        for (k, piece) in layout.pieces.iter().enumerate() {
-            self.case.strains[k].resize(piece.nodes.len(), Vec::new());
-            for (n, node) in piece.nodes.iter().enumerate() {
-                let placed = node.section.placed();
-                let strains: Vec<_> = placed.iter().map(|part| of(placed, part)).collect();
-                let known = &mut self.case.strains[k][n];
-                known.resize(placed.len(), InitialStrain::NONE);
-                for (sum, strain) in known.iter_mut().zip(&strains) {
-                    *sum = sum.plus(strain);
-                }
-                let law = layout.law_of(node, self.time);
-                let forces = law.free_forces(&node.free(self.time, &strains));
-                let target = if piece.is_prismatic() {
-                    &mut self.case.loads.free[gradients * k..gradients * (k + 1)]
-                } else {
-                    let first = n * (half + gradients) + half;
-                    &mut self.case.loads.at_nodes[k][first..first + gradients]
-                };
-                for (sum, force) in target.iter_mut().zip(forces) {
-                    *sum += force;
-                }
             }
         }
     }

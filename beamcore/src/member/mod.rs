@@ -1,23 +1,29 @@
 //! Members: a section along a length, on supports, under actions.
 
 mod action;
+mod case;
 mod category;
 mod checks;
 mod checks_sections;
 mod combination;
+mod free_strain;
 mod hinge;
+mod holds;
 mod layout;
 mod load;
 mod load_case;
 mod mesh;
 mod node;
+mod places;
 mod plan;
 mod plausible;
+mod references;
 mod sections;
 mod settle;
 mod shear;
 mod span;
 mod support;
+mod tendon;
 
 pub use action::{Action, ActionKind, Effect, LoadDuration};
 pub use category::{Category, CombinationFactors};
@@ -30,14 +36,16 @@ pub use shear::ShearModel;
 pub use span::Span;
 pub use support::{LayerHold, Support, SupportKind};
 
+pub(crate) use case::Case;
 #[cfg(feature = "document")]
 pub(crate) use checks::{Known, problems_of};
 #[cfg(feature = "document")]
 pub(crate) use combination::{all as combinations_of, problems as combination_problems};
 pub(crate) use layout::SAME_PLACE;
-pub(crate) use layout::{Held, HeldBy, Layout, merged_layer, slip_of};
-pub(crate) use load_case::{Case, initial_strains, load_case};
+pub(crate) use layout::{Held, HeldBy, Layout};
+pub(crate) use load_case::{initial_strains, load_case};
 pub(crate) use node::Node;
+pub(crate) use references::{merged_layer, slip_of};
 pub(crate) use settle::{Settled, settle};
 #[cfg(feature = "document")]
 pub(crate) use span::all as spans_of;

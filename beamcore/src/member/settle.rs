@@ -7,8 +7,9 @@
 //! the slip, so a step is a linear solution with the stretches cut where the last slip meets the
 //! clearance.
 
-use super::layout::{Held, HeldBy, Layout, Situation};
-use super::load_case::{Case, clearance_case};
+use super::case::Case;
+use super::layout::{Engaged, Held, HeldBy, Layout, Situation};
+use super::load_case::clearance_case;
 use super::{Member, SAME_PLACE};
 use crate::error::{ErrorKind, Problem, Result};
 use crate::field::Piecewise;
@@ -104,7 +105,7 @@ fn stand(member: &Member, time: Time, situation: &Situation) -> Result<(Arc<Layo
     let cuts: Vec<f64> = situation
         .engaged
         .iter()
-        .flat_map(|(_, stretches)| stretches.iter().flat_map(|(from, to, _)| [*from, *to]))
+        .flat_map(|(_, stretches)| stretches.iter().flat_map(|s| [s.from, s.to]))
         .collect();
     let layout = if cuts.is_empty() {
         Arc::clone(member.layout())
@@ -177,7 +178,7 @@ fn stretches(
     solved: &Solved,
     joint: usize,
     clearance: f64,
-) -> Vec<(f64, f64, f64)> {
+) -> Vec<Engaged> {
     let slip = layout.states.slip(joint);
     let mut line = Piecewise::zero(Arc::clone(beam.stations()));
     let pieces = (0..layout.pieces.len()).map(|k| beam.field(solved, k, slip));
@@ -189,7 +190,7 @@ fn stretches(
         cuts.extend(shifted.sign_changes());
     }
     cuts.sort_by(f64::total_cmp);
-    let mut found: Vec<(f64, f64, f64)> = Vec::new();
+    let mut found: Vec<Engaged> = Vec::new();
     for ends in cuts.windows(2) {
         let middle = f64::midpoint(ends[0], ends[1]);
         let value = line.sides(middle).map_or(0.0, |sides| sides.1);
@@ -197,8 +198,12 @@ fn stretches(
             continue;
         }
         match found.last_mut() {
-            Some(last) if last.1 == ends[0] && last.2 == value.signum() => last.1 = ends[1],
-            _ => found.push((ends[0], ends[1], value.signum())),
+            Some(last) if last.to == ends[0] && last.sign == value.signum() => last.to = ends[1],
+            _ => found.push(Engaged {
+                from: ends[0],
+                to: ends[1],
+                sign: value.signum(),
+            }),
         }
     }
     found
@@ -206,10 +211,10 @@ fn stretches(
 
 /// Whether two situations carry over the same stretches.
 fn near(a: &Situation, b: &Situation, length: f64) -> bool {
-    let same = |a: &(f64, f64, f64), b: &(f64, f64, f64)| {
-        (a.0 - b.0).abs() <= SAME_PLACE * length
-            && (a.1 - b.1).abs() <= SAME_PLACE * length
-            && a.2 == b.2
+    let same = |a: &Engaged, b: &Engaged| {
+        (a.from - b.from).abs() <= SAME_PLACE * length
+            && (a.to - b.to).abs() <= SAME_PLACE * length
+            && a.sign == b.sign
     };
     a.engaged.len() == b.engaged.len()
         && a.engaged

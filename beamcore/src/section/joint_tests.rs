@@ -123,8 +123,7 @@ fn slip_moduli_by_hand() {
     assert_eq!(slip.modulus_at(0.2, Time::Initial), 0.0);
     assert_eq!(slip.transverse_at(2.0, Time::Final), Some(200e6));
     assert_eq!(slip.clearance(), 0.001);
-    assert_eq!(slip.places(), [0.0, 0.5, 1.5, 3.5, 4.5, 5.0]);
-    assert_eq!(section.places(), slip.places());
+    assert_eq!(section.places(), [0.0, 0.5, 1.5, 3.5, 4.5, 5.0]);
     let alone = section.layer_stiffness_at(0.2, Time::Initial);
     assert!(alone[0].is_some() && alone[1].is_none());
     assert!(section.layer_stiffness_at(1.0, Time::Initial)[1].is_some());

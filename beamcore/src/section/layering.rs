@@ -66,15 +66,6 @@ impl ResolvedJoint {
     pub(crate) fn clearance(&self) -> f64 {
         self.placed.clearance().si()
     }
-
-    /// Where its moduli change along the member.
-    pub(crate) fn places(&self) -> Vec<f64> {
-        self.placed
-            .places()
-            .iter()
-            .map(|place| place.si())
-            .collect()
-    }
 }
 
 /// The layers and joints of a section.

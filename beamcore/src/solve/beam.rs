@@ -6,7 +6,7 @@ use super::mechanism::Motion;
 use super::modes::Modes;
 use super::piece::{Piece, PieceLaw};
 use super::relation::Relation;
-use super::residual;
+use super::scaling::scale;
 use super::states::{Scale, States};
 use super::station::{Conditions, Station};
 use super::sweep::{ChainLoad, Sweep};
@@ -22,7 +22,7 @@ pub(crate) struct Beam {
     /// Per station the number of its first hold.
     first_hold: Vec<usize>,
     /// Per inner station how it is tied into the chain.
-    ties: Vec<Tie>,
+    pub(super) ties: Vec<Tie>,
     pub(super) units: Vec<f64>,
     pub(super) scale: Scale,
     divisors: Vec<Vec<f64>>,
@@ -30,16 +30,16 @@ pub(crate) struct Beam {
     rights: Vec<Vec<f64>>,
     sweep: Sweep,
     /// The number of polynomial coefficients of a field over a piece.
-    terms: usize,
+    pub(super) terms: usize,
     /// The decay over each piece of each mode of slip.
     decays: Arc<[f64]>,
     /// Joints whose slip nothing holds: they are held at zero mean slip.
-    loose: Vec<usize>,
+    pub(super) loose: Vec<usize>,
 }
 
 /// How an inner station is tied into the chain.
 #[derive(Clone, Debug, PartialEq)]
-enum Tie {
+pub(super) enum Tie {
     /// One node; these displacements are held rigidly.
     Shared(Vec<usize>),
     /// Two nodes with equations between them.
@@ -166,6 +166,7 @@ impl Beam {
     }
 
     /// The states that the member has.
+    #[cfg(test)]
     pub(crate) const fn states(&self) -> States {
         self.states
     }
@@ -197,11 +198,11 @@ impl Beam {
     }
 
     /// The number of fields: the states and the curvature of each strand.
-    const fn fields(&self) -> usize {
+    pub(super) const fn fields(&self) -> usize {
         self.states.all() + self.states.strands
     }
 
-    const fn width(&self) -> usize {
+    pub(super) const fn width(&self) -> usize {
         self.terms + 2 * self.states.slips
     }
 
@@ -293,64 +294,6 @@ impl Beam {
             }
         }
     }
-
-    /// The fields from the states at the nodes.
-    fn fields_of(&self, load: &LoadCase, nodes: &[f64]) -> Solved {
-        let half = self.states.half();
-        let all = 2 * half;
-        let last = self.pieces.len();
-        let per_piece = self.fields() * self.width();
-        let mut coefficients = vec![0.0; last * per_piece];
-        let mut defects = vec![0.0; all];
-        let mut node = 0;
-        let mut end = vec![0.0; all];
-        for (k, piece) in self.pieces.iter().enumerate() {
-            let start = &nodes[node * all..(node + 1) * all];
-            end.copy_from_slice(&nodes[(node + 1) * all..(node + 2) * all]);
-            node += 1;
-            match self.ties.get(k) {
-                Some(Tie::Shared(_)) => {
-                    for (force, outside) in end[half..].iter_mut().zip(load.at_station(k + 1)) {
-                        *force += outside;
-                    }
-                }
-                Some(Tie::Parted) => node += 1,
-                None => {}
-            }
-            let out = &mut coefficients[k * per_piece..(k + 1) * per_piece];
-            let defect = piece.fields([start, &end], &load.piece(k), self.terms, self.width(), out);
-            for (sum, more) in defects.iter_mut().zip(defect) {
-                *sum += more;
-            }
-        }
-        let mut solved = Solved {
-            coefficients,
-            reactions: Vec::new(),
-            residual: 0.0,
-        };
-        self.centre_loose(&mut solved);
-        residual::complete(self, load, &mut solved, &defects);
-        solved
-    }
-
-    /// Shifts the slip of joints that nothing holds to zero mean.
-    fn centre_loose(&self, solved: &mut Solved) {
-        let length = self.places[self.places.len() - 1] - self.places[0];
-        for &joint in &self.loose {
-            let slip = self.states.slip(joint);
-            let mut sum = 0.0;
-            for k in 0..self.pieces.len() {
-                let h = self.places[k + 1] - self.places[k];
-                let line = &self.field(solved, k, slip)[..self.terms];
-                let terms = line.iter().enumerate();
-                sum += h * terms.map(|(i, c)| c / (i as f64 + 1.0)).sum::<f64>();
-            }
-            for k in 0..self.pieces.len() {
-                let first = (k * self.fields() + slip) * self.width();
-                solved.coefficients[first] -= sum / length;
-            }
-        }
-    }
 }
 
 /// The position among the holds of a station of the one along a displacement.
@@ -384,33 +327,4 @@ fn loose(states: States, stations: &[Station], laws: &[PieceLaw]) -> Vec<usize> 
     (0..states.slips)
         .filter(|&j| !touched(states.slip(j)) && !carries(states.slip(j)))
         .collect()
-}
-
-/// Units in which the states are near one.
-fn scale(states: States, places: &[f64], stations: &[Station], laws: &[PieceLaw]) -> Scale {
-    let held = stations.iter().filter(|s| !s.holds.is_empty()).count();
-    let length = (places[places.len() - 1] - places[0]) / held.saturating_sub(1).max(1) as f64;
-    let law = laws[0].laws().next().expect("a piece has a law");
-    let flexibility = super::modes::inverse(&law.stiffness);
-    let bending = 1.0 / flexibility[(0, 0)];
-    let energy = bending / length;
-    let mut units = vec![1.0; states.half()];
-    units[..states.strands].fill(length);
-    if states.has_axial {
-        let axial = states.axial();
-        let gradient = axial - states.strands;
-        units[axial] = (bending * flexibility[(gradient, gradient)]).sqrt();
-    }
-    for j in 0..states.slips {
-        let slip = states.slip(j);
-        let f = flexibility[(slip - states.strands, slip - states.strands)];
-        let k = laws
-            .iter()
-            .flat_map(PieceLaw::laws)
-            .map(|law| law.joints[(slip, slip)])
-            .fold(0.0, f64::max);
-        let rate = (k * f).sqrt().max(1.0 / length);
-        units[slip] = (energy * f / rate).sqrt();
-    }
-    Scale::new(units, energy)
 }

@@ -47,9 +47,9 @@ impl Motion {
         }
         let slope = |node: usize| state(node, theta) * scale.unit(theta);
         let greatest = peak(theta) * scale.unit(theta);
-        for node in 1..places.len() {
+        for (node, place) in places.iter().enumerate().skip(1) {
             if (slope(node) - slope(node - 1)).abs() > 1e-6 * greatest {
-                return Self::Folding(places[node]);
+                return Self::Folding(*place);
             }
         }
         let (x, length) = (places[0], places[places.len() - 1] - places[0]);

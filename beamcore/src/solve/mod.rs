@@ -8,6 +8,8 @@
 //! number of load cases.
 
 pub(crate) mod beam;
+mod directions;
+mod fields;
 pub(crate) mod gauss;
 mod last;
 pub(crate) mod law;
@@ -18,8 +20,10 @@ mod mode;
 pub(crate) mod modes;
 pub(crate) mod piece;
 mod prismatic;
+mod prismatic_fields;
 mod relation;
 mod residual;
+mod scaling;
 pub(crate) mod states;
 pub(crate) mod station;
 mod sweep;

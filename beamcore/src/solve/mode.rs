@@ -200,8 +200,8 @@ impl ModePiece {
         let (h, squared) = (self.length, self.rate * self.rate);
         let mut lines = ModeLines::default();
         let gradient = &mut lines.slip_gradient.polynomial;
-        for i in 0..TERMS - 2 {
-            gradient[i] = -drive.strain[i + 2] * count(i + 2) * count(i + 1) / (h * h) / squared;
+        for (i, (term, g)) in gradient.iter_mut().zip(&drive.strain[2..]).enumerate() {
+            *term = -g * count(i + 2) * count(i + 1) / (h * h) / squared;
         }
         gradient[0] += drive.axial[1] / h / squared;
         let gradient = *gradient;

@@ -16,23 +16,23 @@ use std::sync::Arc;
 /// A piece of constant section.
 #[derive(Clone, Debug)]
 pub(crate) struct PrismaticPiece {
-    states: States,
-    length: f64,
-    modes: Arc<Modes>,
-    slip: Vec<ModePiece>,
+    pub(super) states: States,
+    pub(super) length: f64,
+    pub(super) modes: Arc<Modes>,
+    pub(super) slip: Vec<ModePiece>,
 }
 
 /// Polynomials of t.
-type Polynomial = [f64; TERMS];
+pub(super) type Polynomial = [f64; TERMS];
 
 /// Values over the base gradients: theta', and u' where axial force takes part.
-type Base<T> = [T; 2];
+pub(super) type Base<T> = [T; 2];
 
 /// The forces of the base and their integrals over a piece.
 #[derive(Clone, Copy, Default)]
-struct Statics {
-    shear: Polynomial,
-    forces: Base<Polynomial>,
+pub(super) struct Statics {
+    pub(super) shear: Polynomial,
+    pub(super) forces: Base<Polynomial>,
 }
 
 impl PrismaticPiece {
@@ -66,7 +66,7 @@ impl PrismaticPiece {
     }
 
     /// V, B and N along the piece from their values at its left end and the loads on it.
-    fn statics(&self, start: [f64; 3], line: Option<&[f64]>) -> Statics {
+    pub(super) fn statics(&self, start: [f64; 3], line: Option<&[f64]>) -> Statics {
         let h = self.length;
         let mut statics = Statics::default();
         let [v, b, n] = start;
@@ -93,23 +93,28 @@ impl PrismaticPiece {
     }
 
     /// C_bb^-1 (f_b + f_b*) along the piece.
-    fn strains(&self, statics: &Statics, free: &[f64]) -> Base<Polynomial> {
+    pub(super) fn strains(&self, statics: &Statics, free: &[f64]) -> Base<Polynomial> {
         let base = self.modes.base;
         let mut strains = [[0.0; TERMS]; 2];
-        for i in 0..base {
-            for j in 0..base {
+        for (i, strain) in strains[..base].iter_mut().enumerate() {
+            for (j, force) in statics.forces[..base].iter().enumerate() {
                 let factor = self.modes.flexibility[i * base + j];
-                for (sum, term) in strains[i].iter_mut().zip(&statics.forces[j]) {
+                for (sum, term) in strain.iter_mut().zip(force) {
                     *sum += factor * term;
                 }
-                strains[i][0] += factor * free.get(j).copied().unwrap_or(0.0);
+                strain[0] += factor * free.get(j).copied().unwrap_or(0.0);
             }
         }
         strains
     }
 
     /// What drives a mode: g and p of [`super::modes`] along the piece.
-    fn drive(&self, mode: usize, statics: &Statics, load: Option<&PieceLoad<'_>>) -> Drive {
+    pub(super) fn drive(
+        &self,
+        mode: usize,
+        statics: &Statics,
+        load: Option<&PieceLoad<'_>>,
+    ) -> Drive {
         let Modes { base, slips, .. } = *self.modes;
         let mut drive = Drive::default();
         for j in 0..base {
@@ -173,13 +178,11 @@ impl PrismaticPiece {
             relation.left[column] -= polynomial::value_at_one(&integral(&integrals[0], h))
                 + self.modes.shear_flexibility
                     * polynomial::value_at_one(&integral(&statics.shear, h));
-            for i in 0..self.modes.base {
-                relation.left[(1 + i) * all + column] -= polynomial::value_at_one(&integrals[i]);
+            for (i, integral) in integrals[..self.modes.base].iter().enumerate() {
+                relation.left[(1 + i) * all + column] -= polynomial::value_at_one(integral);
             }
-            for row in [half + 1] {
-                relation.left[row * all + column] -=
-                    polynomial::value_at_one(&statics.forces[0]) - statics.forces[0][0];
-            }
+            relation.left[(half + 1) * all + column] -=
+                polynomial::value_at_one(&statics.forces[0]) - statics.forces[0][0];
         }
         for mode in 0..slips {
             self.mode_rows(mode, &mut relation);
@@ -255,110 +258,10 @@ impl PrismaticPiece {
             side[0] += self.rotation_of_mode(mode) * own.integral;
         }
     }
-
-    /// The fields along the piece from the states at its ends: for each state, and last for the
-    /// curvature -theta', `terms` coefficients of t and two of each mode.
-    pub(crate) fn fields(
-        &self,
-        ends: [&[f64]; 2],
-        load: &PieceLoad<'_>,
-        terms: usize,
-        out: &mut [f64],
-    ) {
-        let (states, half) = (self.states, self.states.half());
-        let h = self.length;
-        let width = terms + 2 * states.slips;
-        let start = ends[0];
-        let axial = if states.has_axial {
-            start[half + states.axial()]
-        } else {
-            0.0
-        };
-        let statics = self.statics([start[half], start[half + 1], axial], Some(load.line));
-        let strains = self.strains(&statics, &load.free[..self.modes.base]);
-        let mut put = |field: usize, polynomial: &[f64]| {
-            let place = &mut out[field * width..field * width + polynomial.len()];
-            for (sum, term) in place.iter_mut().zip(polynomial) {
-                *sum += term;
-            }
-        };
-        put(half, &statics.shear);
-        for i in 0..self.modes.base {
-            put(half + 1 + i, &statics.forces[i]);
-            let mut line = integral(&strains[i], h);
-            line[0] += start[1 + i];
-            put(1 + i, &line);
-        }
-        let mut deflection = integral(&integral(&strains[0], h), h);
-        let shear = integral(&statics.shear, h);
-        for (sum, term) in deflection.iter_mut().zip(&shear) {
-            *sum += self.modes.shear_flexibility * term;
-        }
-        deflection[0] += start[0];
-        deflection[1] += start[1] * h;
-        put(0, &deflection);
-        put(2 * half, &strains[0].map(|term| -term));
-        for mode in 0..states.slips {
-            self.add_mode(mode, ends, load, &statics, terms, out);
-        }
-    }
-
-    /// Adds what a mode brings to all fields.
-    fn add_mode(
-        &self,
-        mode: usize,
-        ends: [&[f64]; 2],
-        load: &PieceLoad<'_>,
-        statics: &Statics,
-        terms: usize,
-        out: &mut [f64],
-    ) {
-        let (states, half) = (self.states, self.states.half());
-        let slips = states.slips;
-        let width = terms + 2 * slips;
-        let in_mode = |end: &[f64]| {
-            (0..slips).fold((0.0, 0.0), |(x, y), j| {
-                let slip = states.slip(j);
-                (
-                    x + self.modes.duals[j * slips + mode] * end[slip],
-                    y + self.modes.shapes[j * slips + mode] * end[half + slip],
-                )
-            })
-        };
-        let drive = self.drive(mode, statics, Some(load));
-        let lines = self.slip[mode].lines(in_mode(ends[0]), in_mode(ends[1]), &drive);
-        let mut put = |field: usize, factor: f64, line: &super::mode::ModeLine| {
-            let place = &mut out[field * width..(field + 1) * width];
-            for (sum, term) in place[..terms].iter_mut().zip(&line.polynomial) {
-                *sum += factor * term;
-            }
-            place[terms + 2 * mode] += factor * line.decaying[0];
-            place[terms + 2 * mode + 1] += factor * line.decaying[1];
-        };
-        for j in 0..slips {
-            let slip = states.slip(j);
-            put(slip, self.modes.shapes[j * slips + mode], &lines.slip);
-            put(
-                half + slip,
-                self.modes.duals[j * slips + mode],
-                &lines.force,
-            );
-        }
-        for i in 0..self.modes.base {
-            let factor: f64 = (0..slips)
-                .map(|j| self.modes.coupling[i * slips + j] * self.modes.shapes[j * slips + mode])
-                .sum();
-            put(1 + i, factor, &lines.slip_gained);
-            if i == 0 {
-                put(0, factor, &lines.slip_gained_integral);
-                put(2 * half, -factor, &lines.slip_gradient);
-            }
-        }
-    }
 }
 
 /// h times the integral from 0 of a polynomial of t; its highest term is zero.
-fn integral(polynomial: &Polynomial, h: f64) -> Polynomial {
+pub(super) fn integral(polynomial: &Polynomial, h: f64) -> Polynomial {
     let mut result = [0.0; TERMS];
     for i in 1..TERMS {
         result[i] = h * polynomial[i - 1] / f64::from(i as u8);

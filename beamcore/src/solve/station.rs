@@ -9,6 +9,7 @@
 //!
 //! so that a stiffness of nothing and one without bound are ordinary.
 
+use super::directions::{dot, duals, scaled, split};
 use super::relation::Relation;
 use super::states::{Scale, States};
 
@@ -177,9 +178,9 @@ impl Conditions {
         let mut relation = Relation::zero(all);
         let mut row = 0;
         for direction in &self.continuous {
-            for i in 0..half {
-                relation.left[row * all + i] = -direction[i];
-                relation.right[row * all + i] = direction[i];
+            for (i, c) in direction.iter().enumerate() {
+                relation.left[row * all + i] = -c;
+                relation.right[row * all + i] = *c;
             }
             row += 1;
         }
@@ -246,82 +247,4 @@ impl Conditions {
         }
         (gaps, forces)
     }
-}
-
-fn dot(a: &[f64], b: &[f64]) -> f64 {
-    a.iter().zip(b).map(|(a, b)| a * b).sum()
-}
-
-fn scaled(direction: &[f64], factor: f64) -> Vec<f64> {
-    direction.iter().map(|c| c * factor).collect()
-}
-
-/// Unit directions along the given ones, and an orthonormal set of all that is perpendicular to
-/// them; `None` if one of the given ones is the sum of others.
-fn split(half: usize, given: &[Vec<f64>]) -> Option<(Vec<Vec<f64>>, Vec<Vec<f64>>)> {
-    let mut units = Vec::new();
-    let mut basis: Vec<Vec<f64>> = Vec::new();
-    for direction in given {
-        let unit = scaled(direction, 1.0 / dot(direction, direction).sqrt());
-        let rest = perpendicular(&unit, &basis);
-        let size = dot(&rest, &rest).sqrt();
-        if size < 1e-9 {
-            return None;
-        }
-        basis.push(scaled(&rest, 1.0 / size));
-        units.push(unit);
-    }
-    let first = basis.len();
-    while basis.len() < half {
-        let mut best = Vec::new();
-        let mut size = -1.0;
-        for i in 0..half {
-            let mut axis = vec![0.0; half];
-            axis[i] = 1.0;
-            let rest = perpendicular(&axis, &basis);
-            if dot(&rest, &rest) > size + 1e-9 {
-                size = dot(&rest, &rest);
-                best = rest;
-            }
-        }
-        basis.push(scaled(&best, 1.0 / size.sqrt()));
-    }
-    Some((units, basis.split_off(first)))
-}
-
-/// What is left of a direction beside an orthonormal set.
-fn perpendicular(direction: &[f64], basis: &[Vec<f64>]) -> Vec<f64> {
-    let mut rest = direction.to_vec();
-    // Twice, so that rounding of the first time is taken off too.
-    for _ in 0..2 {
-        for axis in basis {
-            let along = dot(&rest, axis);
-            for (c, a) in rest.iter_mut().zip(axis) {
-                *c -= along * a;
-            }
-        }
-    }
-    rest
-}
-
-/// Directions b within the span of unit directions c, with b_i . c_i = 1 and b_i . c_j = 0.
-fn duals(units: &[Vec<f64>]) -> Vec<Vec<f64>> {
-    (0..units.len())
-        .map(|i| {
-            let mut basis = Vec::new();
-            for unit in units
-                .iter()
-                .enumerate()
-                .filter(|(j, _)| *j != i)
-                .map(|(_, u)| u)
-            {
-                let rest = perpendicular(unit, &basis);
-                let size = dot(&rest, &rest).sqrt();
-                basis.push(scaled(&rest, 1.0 / size));
-            }
-            let rest = perpendicular(&units[i], &basis);
-            let length = dot(&rest, &units[i]);
-            scaled(&rest, 1.0 / length)
-        })
-        .collect()
 }
