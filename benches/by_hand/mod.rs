@@ -1,5 +1,9 @@
 //! What a user would write by hand: plain arithmetic, no checks.
 
+mod slip;
+
+pub use slip::{equal_layers, two_layers};
+
 /// EA, z of the centroid and EI of rectangles given as E, b, h, z of the middle.
 pub fn stiffness(layers: &[[f64; 4]]) -> (f64, f64, f64) {
     let (mut ea, mut es) = (0.0, 0.0);

@@ -10,6 +10,7 @@ use crate::error::Result;
 use crate::path;
 use crate::section::Section;
 use crate::solve::station::Hold;
+use crate::time::Time;
 
 impl Layout {
     /// Sets what supports and anchors hold and what hinges release.
@@ -89,6 +90,25 @@ impl Layout {
         direction
     }
 
+    /// The direction in which the elastic centroid moves along the member: the mean of all layers,
+    /// weighted with EA. Held there, a member without axial load has no axial force.
+    fn mean_along(&self, section: &Section) -> Vec<f64> {
+        let layers = section.layer_stiffness(Time::Initial);
+        let total: f64 = layers.iter().map(|layer| layer.axial).sum();
+        let mut mean = vec![0.0; self.states.half()];
+        for (i, layer) in layers.iter().enumerate() {
+            let share = layer.axial / total;
+            for (sum, c) in mean.iter_mut().zip(self.along(section, i, layer.z)) {
+                *sum += share * c;
+            }
+        }
+        if self.states.strands == 1 {
+            // The arms of all layers about the centroid cancel.
+            mean[self.states.rotation(0)] = 0.0;
+        }
+        mean
+    }
+
     fn support_holds(&self, support: &Support, section: &Section) -> Result<Vec<(Hold, Held)>> {
         let base = path::named("member.supports", support.name());
         let named = path::key(&base, "under");
@@ -121,9 +141,13 @@ impl Layout {
             ));
         }
         if self.states.has_axial && support.holds_axis() {
-            let layer = layers.first().copied().unwrap_or(0);
-            let height = support.given_height().map_or(self.axis, |z| z.si());
-            let mut direction = self.along(section, layer, height);
+            let mut direction = match (support.given_height(), layers.first()) {
+                (None, None) => self.mean_along(section),
+                (height, layer) => {
+                    let height = height.map_or(self.axis, |z| z.si());
+                    self.along(section, layer.copied().unwrap_or(0), height)
+                }
+            };
             for number in &mut direction {
                 *number *= cosine;
             }

@@ -120,15 +120,17 @@ impl Support {
         self
     }
 
-    /// The same support with its hold along the axis at a height of the section; without it, at
-    /// the elastic centroid of the first section.
+    /// The same support with its hold along the axis at a height of the section, on the first of
+    /// the layers that bear on it. Without it, all layers together are held at the elastic centroid
+    /// of the section at the left end.
     #[must_use]
     pub const fn at_height(mut self, z: Length) -> Self {
         self.height = Some(z);
         self
     }
 
-    /// The same support as a bearing of these layers only; without it, of all.
+    /// The same support as a bearing of these layers only; without it, of all. Its hold along the
+    /// axis, if it has one, is then on the first of them.
     #[must_use]
     pub fn under(mut self, layers: impl IntoIterator<Item = impl Into<String>>) -> Self {
         self.layers = layers.into_iter().map(Into::into).collect();
