@@ -1,9 +1,9 @@
 //! One calculation core for beams of more than one material.
 //!
-//! Data flows one way: [`units`] and errors, then [`material`]s and outlines make [`section`]s;
-//! sections, supports and actions make [`member`]s; a member is solved to a [`response`], from
-//! which follow [`stress`] and [`camber`]. A `job` document holds all inputs, an `outcome`
-//! document all results.
+//! Data flows one way: [`units`] and errors, then [`material`]s and outlines make [`section`]s of
+//! layers; sections, supports and actions make [`member`]s; a member is solved to a [`response`],
+//! from which follow [`stress`] and [`camber`]. A `job` document holds all inputs, an `outcome`
+//! document all results. [`simplified`] holds hand methods for layers that slip.
 //!
 //! Signs: x runs left to right, z up; a section is drawn as seen against x, with y to the right.
 //! Deflection and loads are positive downward, slope is dw/dx, V = dM/dx, a positive (sagging)
