@@ -522,7 +522,7 @@ fn has_axial(plan: &MemberPlan) -> bool {
 }
 
 /// The strands: merged layers that share a deflection. The first layer's is the first.
-fn strands(section: &Section) -> (usize, Vec<usize>) {
+pub(super) fn strands(section: &Section) -> (usize, Vec<usize>) {
     let count = section.merged_layers().len();
     let mut strand: Vec<usize> = (0..count).collect();
     for joint in section.slips() {

@@ -3,6 +3,8 @@
 mod action;
 mod category;
 mod checks;
+mod checks_parts;
+mod checks_places;
 mod checks_sections;
 mod combination;
 mod hinge;
@@ -42,7 +44,7 @@ pub(crate) use settle::{Settled, settle};
 #[cfg(feature = "document")]
 pub(crate) use span::all as spans_of;
 
-use crate::error::{Error, ErrorKind, Problem, Result};
+use crate::error::{ErrorKind, Problem, Result};
 use crate::lookup;
 use crate::section::{PlacedPart, Section, Sideways};
 use crate::solve::beam::Beam;
@@ -104,7 +106,6 @@ impl Member {
 
     pub(crate) fn from_plan(plan: MemberPlan) -> Result<Self> {
         let sections = sections::stretches(plan.section(), plan.length(), plan.changes())?;
-        Error::check(checks_sections::problems(&plan, &sections))?;
         let layout = Layout::new(&plan, &sections, &[])?;
         let initial = Arc::new(layout.beam(Time::Initial, &Situation::default(), &plan)?);
         // Where nothing creeps the end is as the beginning, and is solved once.
@@ -253,6 +254,13 @@ impl Member {
         let own = sections.iter().find(|stretch| x < stretch.to);
         let stretch = own.unwrap_or(&sections[sections.len() - 1]);
         Ok((*stretch.at(x)?).clone())
+    }
+
+    /// Whether axial force takes part: more than one support holds the axis, something acts along
+    /// the member, or it is pitched.
+    #[must_use]
+    pub fn has_axial_force(&self) -> bool {
+        self.data.layout.states.has_axial
     }
 
     pub(crate) fn plan(&self) -> &MemberPlan {
