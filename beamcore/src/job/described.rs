@@ -55,6 +55,13 @@ pub(super) fn quoted(names: &[String]) -> String {
 }
 
 impl ChangeDocument {
+    /// The name of the section after it.
+    pub(crate) fn section(&self) -> &str {
+        match self {
+            Self::Step { section, .. } | Self::Taper { section, .. } => section,
+        }
+    }
+
     /// For example `step at 2 m to the section "deep"`.
     pub(crate) fn described(&self) -> String {
         match self {

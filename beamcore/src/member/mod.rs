@@ -40,6 +40,8 @@ pub(crate) use layout::SAME_PLACE;
 pub(crate) use layout::{Held, HeldBy, Layout, merged_layer, slip_of};
 pub(crate) use load_case::{Case, initial_strains, load_case};
 pub(crate) use node::Node;
+#[cfg(feature = "document")]
+pub(crate) use node::shear_stiffness;
 pub(crate) use settle::{Settled, settle};
 #[cfg(feature = "document")]
 pub(crate) use span::all as spans_of;
@@ -256,6 +258,12 @@ impl Member {
         Ok((*stretch.at(x)?).clone())
     }
 
+    /// Whether layers have deflections of their own, by transverse moduli of their joints.
+    #[must_use]
+    pub fn has_deflections_of_layers(&self) -> bool {
+        self.data.layout.states.strands > 1
+    }
+
     /// Whether axial force takes part: more than one support holds the axis, something acts along
     /// the member, or it is pitched.
     #[must_use]
@@ -267,6 +275,7 @@ impl Member {
         &self.data.plan
     }
 
+    /// The sections along the member, from left to right.
     pub(crate) fn stretches(&self) -> &[Stretch] {
         &self.data.sections
     }
