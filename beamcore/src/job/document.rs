@@ -3,9 +3,8 @@
 use super::document_action::{ActionDocument, CombinationDocument, PartialFactorsDocument};
 use super::document_camber::{CamberDocument, LimitDocument};
 use super::document_material::MaterialDocument;
-use super::document_section::SectionDocument;
-use super::written::Written;
-use crate::units::Length;
+use super::document_member::MemberDocument;
+use super::document_section::{ChangedSectionDocument, SectionDocument};
 use schemars::JsonSchema;
 use serde::{Deserialize, Serialize};
 use std::collections::BTreeMap;
@@ -28,8 +27,11 @@ pub(crate) struct JobDocument {
     pub(crate) quantity: Option<u32>,
     /// The materials by name.
     pub(crate) materials: BTreeMap<String, MaterialDocument>,
-    /// The section.
+    /// The section with which the member begins.
     pub(crate) section: SectionDocument,
+    /// Other sections along the member by name, for its changes.
+    #[serde(default, skip_serializing_if = "BTreeMap::is_empty")]
+    pub(crate) sections: BTreeMap<String, ChangedSectionDocument>,
     /// The member.
     pub(crate) member: MemberDocument,
     /// The actions with their loads.
@@ -46,46 +48,4 @@ pub(crate) struct JobDocument {
     /// The camber to be worked out, if any.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(crate) camber: Option<CamberDocument>,
-}
-
-/// The member.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(crate) struct MemberDocument {
-    /// The length from end to end.
-    pub(crate) length: Written<Length>,
-    /// The supports.
-    pub(crate) supports: Vec<SupportDocument>,
-    /// Whether the member is held sideways or free; without it, held.
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(crate) sideways: Option<SidewaysDocument>,
-}
-
-/// A support.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(crate) struct SupportDocument {
-    /// The name of the support.
-    pub(crate) name: String,
-    /// What the support holds.
-    pub(crate) kind: SupportKindDocument,
-    /// The distance from the left end of the member.
-    pub(crate) at: Written<Length>,
-}
-
-/// What a support holds.
-#[derive(Clone, Copy, Debug, PartialEq, Eq, Serialize, Deserialize, JsonSchema)]
-#[serde(rename_all = "snake_case")]
-pub(crate) enum SupportKindDocument {
-    Pin,
-    Roller,
-    Fixed,
-}
-
-/// Whether a member is held sideways.
-#[derive(Clone, Copy, Debug, PartialEq, Eq, Serialize, Deserialize, JsonSchema)]
-#[serde(rename_all = "snake_case")]
-pub(crate) enum SidewaysDocument {
-    Held,
-    Free,
 }

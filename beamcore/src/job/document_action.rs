@@ -1,7 +1,9 @@
 //! Actions, loads and combinations as they are written.
 
+use super::document_load::LoadDocument;
+use super::document_member::is_false;
 use super::written::Written;
-use crate::units::{AreaLoad, Duration, Force, Length, LineLoad, Moment};
+use crate::units::Duration;
 use schemars::JsonSchema;
 use serde::{Deserialize, Serialize};
 use std::collections::BTreeMap;
@@ -23,6 +25,10 @@ pub(crate) struct ActionDocument {
     /// When the action starts; kept with the action, no result depends on it.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(crate) start: Option<Written<Duration>>,
+    /// The layer that the loads enter; without it, the highest layer, or the first one where layers
+    /// have deflections of their own.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(crate) on: Option<String>,
     /// The loads.
     pub(crate) loads: Vec<LoadDocument>,
 }
@@ -61,66 +67,6 @@ pub(crate) enum ActionKindDocument {
     },
 }
 
-/// A load, positive downward.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(rename_all = "snake_case", deny_unknown_fields)]
-pub(crate) enum LoadDocument {
-    /// The weight of the section.
-    SelfWeight,
-    /// A line load over the whole member.
-    Uniform {
-        /// The load per length.
-        load: Written<LineLoad>,
-    },
-    /// A line load over a stretch.
-    Partial {
-        /// The load per length.
-        load: Written<LineLoad>,
-        /// The left end of the stretch.
-        from: Written<Length>,
-        /// The right end of the stretch.
-        to: Written<Length>,
-    },
-    /// A line load over a stretch that changes linearly.
-    Trapezoidal {
-        /// The load per length at the left end of the stretch.
-        load_from: Written<LineLoad>,
-        /// The load per length at its right end.
-        load_to: Written<LineLoad>,
-        /// The left end of the stretch.
-        from: Written<Length>,
-        /// The right end of the stretch.
-        to: Written<Length>,
-    },
-    /// A load per area of floor.
-    Area {
-        /// The load per area.
-        load: Written<AreaLoad>,
-        /// The width of floor that the member carries.
-        tributary_width: Written<Length>,
-        /// The left end of the stretch; without it, the whole member.
-        #[serde(default, skip_serializing_if = "Option::is_none")]
-        from: Option<Written<Length>>,
-        /// The right end of the stretch.
-        #[serde(default, skip_serializing_if = "Option::is_none")]
-        to: Option<Written<Length>>,
-    },
-    /// A point load.
-    Point {
-        /// The force.
-        load: Written<Force>,
-        /// The place.
-        at: Written<Length>,
-    },
-    /// A couple, positive clockwise.
-    Couple {
-        /// The couple.
-        couple: Written<Moment>,
-        /// The place.
-        at: Written<Length>,
-    },
-}
-
 /// The partial factors of the fundamental combination.
 #[derive(Clone, Copy, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
 #[serde(deny_unknown_fields)]
@@ -143,12 +89,4 @@ pub(crate) struct CombinationDocument {
     pub(crate) factors: BTreeMap<String, f64>,
     /// Whether design strengths are compared under it.
     pub(crate) ultimate: bool,
-}
-
-#[expect(
-    clippy::trivially_copy_pass_by_ref,
-    reason = "serde asks for this form"
-)]
-const fn is_false(value: &bool) -> bool {
-    !*value
 }

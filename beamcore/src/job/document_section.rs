@@ -23,6 +23,20 @@ pub(crate) struct SectionDocument {
     pub(crate) forces: Vec<ForcesDocument>,
 }
 
+/// A section with which the member goes on after a change.
+#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
+#[serde(deny_unknown_fields)]
+pub(crate) struct ChangedSectionDocument {
+    /// The parts.
+    pub(crate) parts: Vec<PartDocument>,
+    /// The layers; without them, all parts are one layer.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(crate) layers: Vec<LayerDocument>,
+    /// The joints between the layers.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(crate) joints: Vec<JointDocument>,
+}
+
 /// Forces on the section.
 #[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
 #[serde(deny_unknown_fields)]

@@ -1,13 +1,13 @@
 //! Actions, loads and combinations of the document.
 
 use super::document_action::{
-    ActionDocument, ActionKindDocument, CombinationDocument, DurationDocument, LoadDocument,
+    ActionDocument, ActionKindDocument, CombinationDocument, DurationDocument,
     PartialFactorsDocument,
 };
+use super::lower_load;
 use crate::error::{ErrorKind, Problem};
 use crate::member::{
-    Action, ActionKind, Category, CombinationFactors, Load, LoadDuration, OwnCombination,
-    PartialFactors,
+    Action, ActionKind, Category, CombinationFactors, LoadDuration, OwnCombination, PartialFactors,
 };
 use crate::path;
 
@@ -27,7 +27,7 @@ fn action(document: &ActionDocument, problems: &mut Vec<Problem>) -> Option<Acti
         .iter()
         .enumerate()
         .map(|(i, document)| {
-            load(
+            lower_load::load(
                 document,
                 &path::indexed(&path::key(&base, "loads"), i),
                 problems,
@@ -51,6 +51,10 @@ fn action(document: &ActionDocument, problems: &mut Vec<Problem>) -> Option<Acti
     let action = match &document.start {
         None => action,
         Some(start) => action.starting(start.value()?),
+    };
+    let action = match &document.on {
+        None => action,
+        Some(layer) => action.on(layer),
     };
     Some(loads?.into_iter().fold(action, Action::load))
 }
@@ -95,61 +99,6 @@ fn kind(kind: &ActionKindDocument, base: &str, problems: &mut Vec<Problem>) -> O
             None
         }
     }
-}
-
-fn load(document: &LoadDocument, base: &str, problems: &mut Vec<Problem>) -> Option<Load> {
-    Some(match document {
-        LoadDocument::SelfWeight => Load::SelfWeight,
-        LoadDocument::Uniform { load } => Load::Uniform {
-            load: load.value()?,
-        },
-        LoadDocument::Partial { load, from, to } => Load::Partial {
-            load: load.value()?,
-            from: from.value()?,
-            to: to.value()?,
-        },
-        LoadDocument::Trapezoidal {
-            load_from,
-            load_to,
-            from,
-            to,
-        } => Load::Trapezoidal {
-            load_from: load_from.value()?,
-            load_to: load_to.value()?,
-            from: from.value()?,
-            to: to.value()?,
-        },
-        LoadDocument::Area {
-            load,
-            tributary_width,
-            from,
-            to,
-        } => Load::Area {
-            load: load.value()?,
-            tributary_width: tributary_width.value()?,
-            stretch: match (from, to) {
-                (None, None) => None,
-                (Some(from), Some(to)) => Some((from.value()?, to.value()?)),
-                (Some(_), None) | (None, Some(_)) => {
-                    problems.push(Problem::new(
-                        ErrorKind::Missing,
-                        path::key(base, "area"),
-                        "only one of from and to",
-                        "both, or neither for the whole member",
-                    ));
-                    return None;
-                }
-            },
-        },
-        LoadDocument::Point { load, at } => Load::Point {
-            load: load.value()?,
-            at: at.value()?,
-        },
-        LoadDocument::Couple { couple, at } => Load::Couple {
-            couple: couple.value()?,
-            at: at.value()?,
-        },
-    })
 }
 
 /// The partial factors as given, or the recommended ones.

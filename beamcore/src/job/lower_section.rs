@@ -1,19 +1,26 @@
 //! The section of the document.
 
+use super::document_joint::{JointDocument, LayerDocument};
 use super::document_section::{
-    AxisDocument, ForcesDocument, InitialStrainDocument, OutlineDocument, PartDocument,
-    PlaceDocument, SectionDocument,
+    AxisDocument, ChangedSectionDocument, ForcesDocument, PartDocument, PlaceDocument,
+    SectionDocument,
 };
-use super::lower_joint;
 use super::written::Written;
+use super::{lower_joint, lower_outline};
 use crate::check;
 use crate::error::{ErrorKind, Problem};
 use crate::lookup;
 use crate::material::Material;
-use crate::outline::{Outline, Vertex};
 use crate::path;
 use crate::section::{InitialStrain, MirrorAxis, Part, Section, SectionForces, Side};
-use crate::units::{Curvature, Length};
+use crate::units::{Curvature, Strain};
+use std::collections::BTreeMap;
+
+/// The name under which changes speak of the section with which the member begins.
+const MAIN: &str = "main";
+
+/// A section by its name; `None` where it is wrong, which is told.
+pub(super) type NamedSection = (String, Option<Section>);
 
 /// The named forces on the section that are known; a name that stands twice is a problem.
 pub(super) fn forces(
@@ -34,15 +41,67 @@ pub(super) fn forces(
     document.forces.iter().filter_map(lowered).collect()
 }
 
-/// The section, if all its parts are known and fit together.
+/// The section with which the member begins, if all its parts are known and fit together.
 pub(super) fn section(
     document: &SectionDocument,
     materials: &[(String, Option<Material>)],
     problems: &mut Vec<Problem>,
 ) -> Option<Section> {
+    let written = (&*document.parts, &*document.layers, &*document.joints);
+    assembled(written, materials, problems)
+}
+
+/// All sections that changes can name: that with which the member begins, and the others.
+pub(super) fn all(
+    main: Option<&Section>,
+    documents: &BTreeMap<String, ChangedSectionDocument>,
+    materials: &[(String, Option<Material>)],
+    problems: &mut Vec<Problem>,
+) -> Vec<NamedSection> {
+    let mut sections = vec![(MAIN.to_owned(), main.cloned())];
+    for (name, document) in documents {
+        let base = path::named("sections", name);
+        check::name(problems, name, "sections");
+        if name == MAIN {
+            problems.push(Problem::new(
+                ErrorKind::Duplicate,
+                &base,
+                format!("another section named \"{MAIN}\""),
+                format!("another name, for \"{MAIN}\" is the section with which the member begins"),
+            ));
+            continue;
+        }
+        let written = (&*document.parts, &*document.layers, &*document.joints);
+        let mut own = Vec::new();
+        let section = assembled(written, materials, &mut own);
+        problems.extend(own.iter().map(|problem| moved(problem, &base)));
+        sections.push((name.clone(), section));
+    }
+    sections
+}
+
+/// A problem of a section told where that section stands in the document.
+fn moved(problem: &Problem, base: &str) -> Problem {
+    let at = match problem.path().strip_prefix("section") {
+        Some(rest) => format!("{base}{rest}"),
+        None => problem.path().to_owned(),
+    };
+    Problem::new(problem.kind(), at, problem.found(), problem.expected())
+}
+
+/// A section of written parts, layers and joints.
+fn assembled(
+    (part_documents, layer_documents, joint_documents): (
+        &[PartDocument],
+        &[LayerDocument],
+        &[JointDocument],
+    ),
+    materials: &[(String, Option<Material>)],
+    problems: &mut Vec<Problem>,
+) -> Option<Section> {
     let mut parts = Vec::new();
     let mut known = true;
-    for part in &document.parts {
+    for part in part_documents {
         let found = materials
             .iter()
             .find(|material| material.0 == part.material);
@@ -66,16 +125,16 @@ pub(super) fn section(
             None => known = false,
         }
     }
-    let layers = lower_joint::layers(&document.layers, problems);
-    let joints = lower_joint::joints(&document.joints, problems);
+    let layers = lower_joint::layers(layer_documents, problems);
+    let joints = lower_joint::joints(joint_documents, problems);
     if !known && parts.is_empty() {
         return None;
     }
     let (all_layers, all_joints) = (
-        layers.len() == document.layers.len(),
-        joints.len() == document.joints.len(),
+        layers.len() == layer_documents.len(),
+        joints.len() == joint_documents.len(),
     );
-    let made = if document.layers.is_empty() && document.joints.is_empty() {
+    let made = if layer_documents.is_empty() && joint_documents.is_empty() {
         Section::of(parts)
     } else {
         Section::layered(parts, layers, joints)
@@ -100,13 +159,20 @@ pub(super) fn section(
 }
 
 fn lower_part(part: &PartDocument, material: &Material) -> Option<Part> {
-    let lowered = Part::new(&part.name, outline(&part.outline)?, material.clone());
+    let lowered = Part::new(
+        &part.name,
+        lower_outline::outline(&part.outline)?,
+        material.clone(),
+    );
     let lowered = match &part.line_mass {
         Some(mass) => lowered.line_mass(mass.value()?),
         None => lowered,
     };
     let lowered = match &part.initial_strain {
-        Some(strain) => lowered.initial_strain(initial_strain(strain)?),
+        Some(written) => {
+            let (y, z) = (written.curvature_y.as_ref(), written.curvature_z.as_ref());
+            lowered.initial_strain(strain(&written.axial, y, z)?)
+        }
         None => lowered,
     };
     Some(match &part.place {
@@ -129,105 +195,19 @@ fn lower_part(part: &PartDocument, material: &Material) -> Option<Part> {
     })
 }
 
-/// A curvature that is not given is none.
-fn initial_strain(document: &InitialStrainDocument) -> Option<InitialStrain> {
-    let curvature = |given: &Option<Written<Curvature>>| match given {
+/// The free strain of a part. A curvature that is not given is none.
+pub(super) fn strain(
+    axial: &Written<Strain>,
+    curvature_y: Option<&Written<Curvature>>,
+    curvature_z: Option<&Written<Curvature>>,
+) -> Option<InitialStrain> {
+    let curvature = |given: Option<&Written<Curvature>>| match given {
         Some(curvature) => curvature.value(),
         None => Some(Curvature::ZERO),
     };
     Some(InitialStrain {
-        axial: document.axial.value()?,
-        curvature_y: curvature(&document.curvature_y)?,
-        curvature_z: curvature(&document.curvature_z)?,
+        axial: axial.value()?,
+        curvature_y: curvature(curvature_y)?,
+        curvature_z: curvature(curvature_z)?,
     })
-}
-
-fn outline(document: &OutlineDocument) -> Option<Outline> {
-    Some(match document {
-        OutlineDocument::Rectangle { width, height } => Outline::Rectangle {
-            width: width.value()?,
-            height: height.value()?,
-        },
-        OutlineDocument::Polygon { points, holes } => Outline::Polygon {
-            points: vertices(points)?,
-            holes: holes
-                .iter()
-                .map(|hole| vertices(hole))
-                .collect::<Option<_>>()?,
-        },
-        OutlineDocument::Disc { diameter } => Outline::Disc {
-            diameter: diameter.value()?,
-        },
-        OutlineDocument::Ring {
-            diameter,
-            wall_thickness,
-        } => Outline::Ring {
-            diameter: diameter.value()?,
-            wall_thickness: wall_thickness.value()?,
-        },
-        OutlineDocument::IShape {
-            height,
-            top_width,
-            top_thickness,
-            bottom_width,
-            bottom_thickness,
-            web_thickness,
-        } => Outline::IShape {
-            height: height.value()?,
-            top_width: top_width.value()?,
-            top_thickness: top_thickness.value()?,
-            bottom_width: bottom_width.value()?,
-            bottom_thickness: bottom_thickness.value()?,
-            web_thickness: web_thickness.value()?,
-        },
-        OutlineDocument::Tee {
-            height,
-            width,
-            flange_thickness,
-            web_thickness,
-        } => Outline::Tee {
-            height: height.value()?,
-            width: width.value()?,
-            flange_thickness: flange_thickness.value()?,
-            web_thickness: web_thickness.value()?,
-        },
-        OutlineDocument::Channel {
-            height,
-            width,
-            flange_thickness,
-            web_thickness,
-        } => Outline::Channel {
-            height: height.value()?,
-            width: width.value()?,
-            flange_thickness: flange_thickness.value()?,
-            web_thickness: web_thickness.value()?,
-        },
-        OutlineDocument::Angle {
-            height,
-            width,
-            thickness,
-        } => Outline::Angle {
-            height: height.value()?,
-            width: width.value()?,
-            thickness: thickness.value()?,
-        },
-        OutlineDocument::Box {
-            width,
-            height,
-            side_thickness,
-            plate_thickness,
-        } => Outline::HollowBox {
-            width: width.value()?,
-            height: height.value()?,
-            side_thickness: side_thickness.value()?,
-            plate_thickness: plate_thickness.value()?,
-        },
-    })
-}
-
-fn vertices(points: &[[Written<Length>; 2]]) -> Option<Vec<Vertex>> {
-    points
-        .iter()
-        .map(|[y, z]| Some((y.value()?, z.value()?)))
-        .collect()
 }

@@ -35,11 +35,14 @@
 //! ```
 
 mod described;
+mod described_load;
 mod document;
 mod document_action;
 mod document_camber;
 mod document_joint;
+mod document_load;
 mod document_material;
+mod document_member;
 mod document_section;
 #[cfg(test)]
 mod joint_tests;
@@ -47,7 +50,10 @@ mod lower;
 mod lower_action;
 mod lower_camber;
 mod lower_joint;
+mod lower_load;
 mod lower_material;
+mod lower_member;
+mod lower_outline;
 mod lower_section;
 mod lower_strength;
 mod reader;

@@ -2,8 +2,9 @@
 
 use crate::error::Problem;
 use crate::units::{
-    AreaLoad, Curvature, Density, Duration, FastenerStiffness, Force, Length, LineLoad, LineMass,
-    Modulus, Moment, Quantity, SlipModulus, Strain, Stress, ThermalExpansion,
+    Angle, AreaLoad, Curvature, Density, Duration, FastenerStiffness, Force, Length, LineLoad,
+    LineMass, Modulus, Moment, Quantity, RotationalStiffness, ShearStiffness, SlipModulus,
+    SpringStiffness, Strain, Stress, TemperatureChange, ThermalExpansion,
 };
 use schemars::{JsonSchema, Schema, SchemaGenerator};
 use serde::{Deserialize, Serialize};
@@ -77,6 +78,11 @@ pub(super) fn problem(name: &str, text: &str, path: &str) -> Option<Problem> {
         (ThermalExpansion::NAME, of::<ThermalExpansion>),
         (SlipModulus::NAME, of::<SlipModulus>),
         (FastenerStiffness::NAME, of::<FastenerStiffness>),
+        (Angle::NAME, of::<Angle>),
+        (SpringStiffness::NAME, of::<SpringStiffness>),
+        (RotationalStiffness::NAME, of::<RotationalStiffness>),
+        (ShearStiffness::NAME, of::<ShearStiffness>),
+        (TemperatureChange::NAME, of::<TemperatureChange>),
     ]
     .into_iter()
     .find_map(|(type_name, check)| (type_name == name).then_some(check));

@@ -1,13 +1,14 @@
 //! What can be wrong with a member, beside its section.
 
 use super::action::{Action, ActionKind};
+use super::checks_parts::check_self_weight;
 use super::layout::SAME_PLACE;
 use super::load::Load;
 use super::support::{Support, SupportKind};
 use crate::check;
 use crate::error::{ErrorKind, Problem};
 use crate::path;
-use crate::section::{InitialStrain, PlacedPart, Section, Sideways};
+use crate::section::Section;
 use crate::units::Length;
 
 /// A list as far as it is known: an entry whose text cannot be read is left out of it.
@@ -244,8 +245,9 @@ fn check_load(problems: &mut Vec<Problem>, length: Option<Length>, load: &Load, 
         }
         Load::Prestress { force, tendon } => {
             check::finite(problems, force, &field("force"));
+            let base = path::key(&field("tendon"), tendon.name());
             for (i, (at, height)) in tendon.points().iter().enumerate() {
-                let base = path::indexed(&field("points"), i);
+                let base = path::indexed(&base, i);
                 inside(problems, length, *at, &path::key(&base, "at"));
                 check::finite(problems, *height, &path::key(&base, "height"));
             }
@@ -299,43 +301,4 @@ fn inside(problems: &mut Vec<Problem>, length: Option<Length>, place: Length, pa
             format!("a place on the member, from 0 m to {length}"),
         ));
     }
-}
-
-/// Self-weight needs the density of each part.
-fn check_self_weight(problems: &mut Vec<Problem>, section: &Section, actions: &[Action]) {
-    let carries = |action: &&Action| action.loads().contains(&Load::SelfWeight);
-    let Some(action) = actions.iter().find(carries) else {
-        return;
-    };
-    let mut told: Vec<&str> = Vec::new();
-    for part in section.placed() {
-        let material = part.material();
-        if material.mean_density().is_none() && !told.contains(&material.name()) {
-            told.push(material.name());
-            problems.push(Problem::new(
-                ErrorKind::Missing,
-                path::key(&path::named("materials", material.name()), "density"),
-                "no density",
-                format!(
-                    "a density, since the action \"{}\" carries the self-weight",
-                    action.name()
-                ),
-            ));
-        }
-    }
-}
-
-/// Initial strains are followed for members that are held sideways only.
-pub(super) fn strains_held(section: &Section, sideways: Sideways) -> Option<Problem> {
-    let strained = |part: &&PlacedPart| part.initial_strain() != InitialStrain::NONE;
-    let part = section.placed().iter().find(strained)?;
-    (sideways == Sideways::Free).then(|| {
-        let base = path::named("section.parts", part.name());
-        Problem::new(
-            ErrorKind::Value,
-            path::key(&base, "initial_strain"),
-            "an initial strain in a member that is free sideways",
-            "a member that is held sideways",
-        )
-    })
 }

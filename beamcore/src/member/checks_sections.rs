@@ -1,16 +1,16 @@
 //! What can be wrong with sections along a member, its layers and what refers to them.
 
+use super::checks_parts::check_self_weight;
 use super::load::{Load, Tendon};
 use super::plan::MemberPlan;
-use super::references::{merged_layer, slip_of};
+use super::references::{merged_layer, slip_of, strands};
 use super::sections::Stretch;
 use super::shear::ShearModel;
 use super::{Release, node};
 use crate::check;
 use crate::error::{ErrorKind, Problem};
 use crate::path;
-use crate::section::Sideways;
-use crate::units::Length;
+use crate::section::{Section, Sideways};
 
 /// Problems of a plan whose changes of section are in order.
 pub(super) fn problems(plan: &MemberPlan, sections: &[Stretch]) -> Vec<Problem> {
@@ -19,7 +19,7 @@ pub(super) fn problems(plan: &MemberPlan, sections: &[Stretch]) -> Vec<Problem> 
     problems.extend(first.position_problems(plan.length()));
     for stretch in sections.iter().skip(1) {
         let section = stretch.start();
-        let layers = |s: &crate::section::Section| -> Vec<Vec<String>> {
+        let layers = |s: &Section| -> Vec<Vec<String>> {
             s.merged_layers()
                 .iter()
                 .map(|m| m.layers().to_vec())
@@ -50,10 +50,15 @@ pub(super) fn problems(plan: &MemberPlan, sections: &[Stretch]) -> Vec<Problem> 
         }
     }
     for (i, hinge) in plan.hinges().iter().enumerate() {
-        let at = path::indexed("member.hinges", i);
+        let at = hinge.path(i);
+        let layer_at = path::key(&at, "layer");
         match hinge.release() {
-            Release::Moment(Some(layer)) | Release::Butt(layer) => {
-                problems.extend(references(merged_layer(first, layer, &at)));
+            Release::Moment(Some(layer)) => match merged_layer(first, layer, &layer_at) {
+                Ok(merged) => problems.extend(shared_deflection(first, layer, merged, &layer_at)),
+                Err(error) => problems.extend(error.problems().iter().cloned()),
+            },
+            Release::Butt(layer) => {
+                problems.extend(references(merged_layer(first, layer, &layer_at)));
             }
             Release::Moment(None) | Release::Shear => {}
         }
@@ -79,24 +84,38 @@ pub(super) fn problems(plan: &MemberPlan, sections: &[Stretch]) -> Vec<Problem> 
     }
     for support in plan.supports() {
         let base = path::named("member.supports", support.name());
-        let held = support
-            .held_layers()
-            .iter()
-            .map(|hold| (&hold.layer, "holding"));
-        let under = support.layers().iter().map(|layer| (layer, "under"));
-        for (layer, key) in under.chain(held) {
-            problems.extend(references(merged_layer(
-                first,
-                layer,
-                &path::key(&base, key),
-            )));
+        let under = path::key(&base, "under");
+        for layer in support.layers() {
+            problems.extend(references(merged_layer(first, layer, &under)));
+        }
+        for (i, hold) in support.held_layers().iter().enumerate() {
+            let at = path::indexed(&path::key(&base, "holding"), i);
+            let at = path::key(&at, "layer");
+            problems.extend(references(merged_layer(first, &hold.layer, &at)));
         }
     }
     if plan.is_held() == Sideways::Free {
         problems.extend(free_sideways(plan));
     }
-    problems.extend(loads(plan));
+    for stretch in sections.iter().skip(1) {
+        check_self_weight(&mut problems, stretch.start(), plan.actions());
+    }
+    problems.extend(loads(plan, sections));
     problems
+}
+
+/// A hinge in one layer turns nothing but that layer only where it has a deflection of its own.
+fn shared_deflection(section: &Section, name: &str, merged: usize, at: &str) -> Option<Problem> {
+    let (_, strands) = strands(section);
+    let sharing = strands.iter().filter(|strand| **strand == strands[merged]);
+    (sharing.count() > 1).then(|| {
+        Problem::new(
+            ErrorKind::Value,
+            at,
+            format!("a hinge in the layer \"{name}\", which shares its deflection with others"),
+            "a layer whose joints have a transverse modulus, or a hinge through all layers",
+        )
+    })
 }
 
 /// A member that is free sideways has one section in one layer, without axial force.
@@ -126,7 +145,7 @@ fn free_sideways(plan: &MemberPlan) -> Option<Problem> {
 }
 
 /// What loads refer to.
-fn loads(plan: &MemberPlan) -> Vec<Problem> {
+fn loads(plan: &MemberPlan, sections: &[Stretch]) -> Vec<Problem> {
     let mut problems = Vec::new();
     let section = plan.section();
     for action in plan.actions() {
@@ -147,17 +166,19 @@ fn loads(plan: &MemberPlan) -> Vec<Problem> {
                 }
                 Load::Temperature { parts, .. } => {
                     for name in parts {
-                        problems.extend(part_problem(section, name, &path::key(&at, "parts")));
+                        problems.extend(part_problem(sections, name, &path::key(&at, "parts")));
                     }
-                    problems.extend(expansion_problems(section, parts, action.name()));
+                    problems.extend(expansion_problems(sections, parts, action.name()));
                 }
                 Load::TemperatureDifference { .. } => {
-                    problems.extend(expansion_problems(section, &[], action.name()));
+                    problems.extend(expansion_problems(sections, &[], action.name()));
                 }
                 Load::Strain { part, .. } => {
-                    problems.extend(part_problem(section, part, &path::key(&at, "part")));
+                    problems.extend(part_problem(sections, part, &path::key(&at, "part")));
                 }
-                Load::Prestress { tendon, .. } => problems.extend(order(tendon, &at)),
+                Load::Prestress { tendon, .. } => {
+                    problems.extend(order(tendon, &path::key(&at, "tendon")));
+                }
                 _ => {}
             }
         }
@@ -188,12 +209,14 @@ fn moved(plan: &MemberPlan, name: &str, load: &Load, at: &str) -> Option<Problem
     })
 }
 
-fn part_problem(section: &crate::section::Section, name: &str, at: &str) -> Option<Problem> {
-    let names: Vec<_> = section
-        .parts()
-        .iter()
-        .map(crate::section::Part::name)
-        .collect();
+fn part_problem(sections: &[Stretch], name: &str, at: &str) -> Option<Problem> {
+    let parts = sections.iter().flat_map(|stretch| stretch.start().parts());
+    let mut names: Vec<&str> = Vec::new();
+    for part in parts {
+        if !names.contains(&part.name()) {
+            names.push(part.name());
+        }
+    }
     (!names.contains(&name)).then(|| {
         Problem::new(
             ErrorKind::Name,
@@ -205,14 +228,10 @@ fn part_problem(section: &crate::section::Section, name: &str, at: &str) -> Opti
 }
 
 /// Warming needs the thermal expansion of each part that becomes warmer.
-fn expansion_problems(
-    section: &crate::section::Section,
-    parts: &[String],
-    action: &str,
-) -> Vec<Problem> {
+fn expansion_problems(sections: &[Stretch], parts: &[String], action: &str) -> Vec<Problem> {
     let mut told: Vec<&str> = Vec::new();
     let mut problems = Vec::new();
-    for part in section.placed() {
+    for part in sections.iter().flat_map(|s| s.start().placed()) {
         let material = part.material();
         let is_warm = parts.is_empty() || parts.iter().any(|name| name == part.name());
         if is_warm && material.expansion().is_none() && !told.contains(&material.name()) {
@@ -234,7 +253,7 @@ fn expansion_problems(
 /// The points of a tendon go from left to right.
 fn order(tendon: &Tendon, at: &str) -> Vec<Problem> {
     let points = tendon.points();
-    let base = path::key(at, "points");
+    let base = path::key(at, tendon.name());
     if points.len() < 2 {
         return vec![Problem::new(
             ErrorKind::Missing,
@@ -248,94 +267,11 @@ fn order(tendon: &Tendon, at: &str) -> Vec<Problem> {
         if pair[1].0 <= pair[0].0 {
             problems.push(Problem::new(
                 ErrorKind::Position,
-                path::indexed(&base, i + 1),
+                path::key(&path::indexed(&base, i + 1), "at"),
                 pair[1].0.to_string(),
                 format!("a place to the right of the point before, at {}", pair[0].0),
             ));
         }
     }
-    problems
-}
-
-/// Changes of the section go from left to right, inside the member.
-pub(super) fn order_of_changes(plan: &MemberPlan) -> Vec<Problem> {
-    let mut problems = Vec::new();
-    let mut reached = Length::ZERO;
-    for (i, change) in plan.changes().iter().enumerate() {
-        let at = path::indexed("member.changes", i);
-        let slack = plan.length() * super::SAME_PLACE;
-        if !(change.from() >= reached && change.from() < plan.length()) {
-            problems.push(Problem::new(
-                ErrorKind::Position,
-                &at,
-                change.from().to_string(),
-                format!(
-                    "a place from {reached} on, left of the end at {}",
-                    plan.length()
-                ),
-            ));
-        } else if !change.to().is_finite() || change.to() > plan.length() {
-            problems.push(Problem::new(
-                ErrorKind::Position,
-                &at,
-                change.to().to_string(),
-                format!("a place on the member, up to {}", plan.length()),
-            ));
-        } else if matches!(change, super::SectionChange::Taper { .. })
-            && change.to() - change.from() <= slack
-        {
-            problems.push(Problem::new(
-                ErrorKind::Position,
-                &at,
-                format!("a taper from {} to {}", change.from(), change.to()),
-                "a taper that ends right of where it begins",
-            ));
-        }
-        reached = change.to();
-    }
-    problems
-}
-
-/// Hinges and anchors stand inside the member, each at a place of its own.
-pub(super) fn places(plan: &MemberPlan) -> Vec<Problem> {
-    let mut problems = Vec::new();
-    let slack = plan.length() * super::SAME_PLACE;
-    for (i, hinge) in plan.hinges().iter().enumerate() {
-        let at = path::key(&path::indexed("member.hinges", i), "at");
-        let place = hinge.at();
-        if !(place > slack && place < plan.length() - slack) {
-            problems.push(Problem::new(
-                ErrorKind::Position,
-                &at,
-                format!("a hinge at {place}, at an end of the member or beyond it"),
-                format!("a place between the ends, 0 m and {}", plan.length()),
-            ));
-        }
-        let same = |other: &super::Hinge| {
-            other.release() == hinge.release() && (other.at() - place).abs() <= slack
-        };
-        if plan.hinges()[..i].iter().any(same) {
-            problems.push(Problem::new(
-                ErrorKind::Duplicate,
-                &at,
-                format!("two hinges of one kind at {place}"),
-                "one hinge at each place",
-            ));
-        }
-    }
-    for anchor in plan.anchors() {
-        let at = path::key(&path::named("member.anchors", &anchor.name), "at");
-        if !(anchor.at >= Length::ZERO && anchor.at <= plan.length()) {
-            problems.push(Problem::new(
-                ErrorKind::Position,
-                at,
-                anchor.at.to_string(),
-                format!("a place on the member, from 0 m to {}", plan.length()),
-            ));
-        }
-        check::name(&mut problems, &anchor.name, "member.anchors");
-    }
-    let names = plan.anchors().iter().map(|anchor| anchor.name.as_str());
-    check::unique(&mut problems, names, "anchors", "member.anchors");
     problems
 }

@@ -1,5 +1,6 @@
 //! Hinges: where a member is cut in one way.
 
+use crate::path;
 use crate::units::Length;
 
 /// What a hinge releases.
@@ -12,6 +13,18 @@ pub enum Release {
     /// The layer of this name is butted: no axial force of its own passes. Its curvature goes on
     /// with that of the others.
     Butt(String),
+}
+
+impl Release {
+    /// The word used in documents.
+    #[must_use]
+    pub const fn name(&self) -> &'static str {
+        match self {
+            Self::Moment(_) => "moment",
+            Self::Shear => "shear",
+            Self::Butt(_) => "butt",
+        }
+    }
 }
 
 /// An internal hinge of a member.
@@ -56,6 +69,11 @@ impl Hinge {
     #[must_use]
     pub const fn at(&self) -> Length {
         self.at
+    }
+
+    /// Its path, given its position among the hinges.
+    pub(super) fn path(&self, index: usize) -> String {
+        path::key(&path::indexed("member.hinges", index), self.release.name())
     }
 
     /// What it releases.

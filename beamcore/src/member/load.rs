@@ -187,6 +187,15 @@ impl Load {
 }
 
 impl Tendon {
+    /// The word used in documents.
+    #[must_use]
+    pub const fn name(&self) -> &'static str {
+        match self {
+            Self::Draped(_) => "draped",
+            Self::Parabolic(_) => "parabolic",
+        }
+    }
+
     /// Its points.
     #[must_use]
     pub fn points(&self) -> &[(Length, Length)] {

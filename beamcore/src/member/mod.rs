@@ -4,6 +4,8 @@ mod action;
 mod case;
 mod category;
 mod checks;
+mod checks_parts;
+mod checks_places;
 mod checks_sections;
 mod combination;
 mod free_strain;
@@ -45,12 +47,14 @@ pub(crate) use layout::SAME_PLACE;
 pub(crate) use layout::{Held, HeldBy, Layout};
 pub(crate) use load_case::{initial_strains, load_case};
 pub(crate) use node::Node;
+#[cfg(feature = "document")]
+pub(crate) use node::shear_stiffness;
 pub(crate) use references::{merged_layer, slip_of};
 pub(crate) use settle::{Settled, settle};
 #[cfg(feature = "document")]
 pub(crate) use span::all as spans_of;
 
-use crate::error::{Error, ErrorKind, Problem, Result};
+use crate::error::{ErrorKind, Problem, Result};
 use crate::lookup;
 use crate::section::{PlacedPart, Section, Sideways};
 use crate::solve::beam::Beam;
@@ -112,7 +116,6 @@ impl Member {
 
     pub(crate) fn from_plan(plan: MemberPlan) -> Result<Self> {
         let sections = sections::stretches(plan.section(), plan.length(), plan.changes())?;
-        Error::check(checks_sections::problems(&plan, &sections))?;
         let layout = Layout::new(&plan, &sections, &[])?;
         let initial = Arc::new(layout.beam(Time::Initial, &Situation::default(), &plan)?);
         // Where nothing creeps the end is as the beginning, and is solved once.
@@ -263,10 +266,24 @@ impl Member {
         Ok((*stretch.at(x)?).clone())
     }
 
+    /// Whether layers have deflections of their own, by transverse moduli of their joints.
+    #[must_use]
+    pub fn has_deflections_of_layers(&self) -> bool {
+        self.data.layout.states.strands > 1
+    }
+
+    /// Whether axial force takes part: more than one support holds the axis, something acts along
+    /// the member, or it is pitched.
+    #[must_use]
+    pub fn has_axial_force(&self) -> bool {
+        self.data.layout.states.has_axial
+    }
+
     pub(crate) fn plan(&self) -> &MemberPlan {
         &self.data.plan
     }
 
+    /// The sections along the member, from left to right.
     pub(crate) fn stretches(&self) -> &[Stretch] {
         &self.data.sections
     }

@@ -8,6 +8,7 @@ use crate::section::{
 };
 use crate::solve::law::{PlainJoint, PlainLayer};
 use crate::time::Time;
+use crate::units::{Length, ShearStiffness};
 use std::sync::Arc;
 
 /// A merged layer at a place and time.
@@ -255,6 +256,30 @@ fn layer_shear(section: &Section, parts: &[usize], x: f64, time: Time) -> Result
     }
     let all: Vec<_> = groups.into_iter().flatten().collect();
     Ok(layer_shear_stiffness(&all, time)?.si())
+}
+
+/// The shear stiffness of a section at x along a member, of layers that slip the sum of theirs;
+/// `None` of a member that does not yield in shear.
+pub(crate) fn shear_stiffness(
+    section: &Section,
+    x: Length,
+    shear: ShearModel,
+    time: Time,
+) -> Result<Option<ShearStiffness>> {
+    let given = match shear {
+        ShearModel::Rigid => return Ok(None),
+        ShearModel::Given(stiffness) => stiffness,
+        ShearModel::Flexible => {
+            let merged = section.merged_layers().iter();
+            let there = section.layer_stiffness_at(x.si(), time);
+            let mut sum = 0.0;
+            for (merged, _) in merged.zip(there).filter(|(_, there)| there.is_some()) {
+                sum += layer_shear(section, merged.parts(), x.si(), time)?;
+            }
+            ShearStiffness::from_si(sum)
+        }
+    };
+    Ok(Some(given))
 }
 
 /// Shear stiffness can be given for a member of one layer only.

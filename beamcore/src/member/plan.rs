@@ -2,9 +2,9 @@
 
 use super::{
     Action, Anchor, Hinge, Member, OwnCombination, PartialFactors, SectionChange, ShearModel,
-    Support, checks, checks_sections, combination,
+    Support, checks, checks_parts, checks_places, checks_sections, combination, sections,
 };
-use crate::error::{Error, Result};
+use crate::error::{Error, Problem, Result};
 use crate::section::{JointKind, Section, Sideways};
 use crate::units::{Angle, Length};
 
@@ -136,22 +136,35 @@ impl MemberPlan {
     /// factors outside 0 to 3, an own combination of unknown actions or of a name that is taken; and a member
     /// that is free to move, with the motion that nothing resists.
     pub fn check(self) -> Result<Member> {
+        Error::check(self.problems())?;
+        Member::from_plan(self)
+    }
+
+    /// Everything that is wrong with the plan, but for a member that is free to move.
+    pub(crate) fn problems(&self) -> Vec<Problem> {
         let mut problems = checks::problems_of(
             Some(&self.section),
             Some(self.length),
             &self.supports.as_slice().into(),
             &self.actions.as_slice().into(),
         );
-        problems.extend(checks::strains_held(&self.section, self.sideways));
-        problems.extend(checks_sections::order_of_changes(&self));
-        problems.extend(checks_sections::places(&self));
+        problems.extend(checks_parts::strains_held(&self.section, self.sideways));
+        problems.extend(checks_places::places(self));
         problems.extend(combination::problems(
             &self.actions,
             &self.factors,
             &self.own,
         ));
-        Error::check(problems)?;
-        Member::from_plan(self)
+        let order = checks_places::order_of_changes(self);
+        // Sections can be looked at one after the other only where their places are in order.
+        if order.is_empty() {
+            match sections::stretches(&self.section, self.length, &self.changes) {
+                Ok(stretches) => problems.extend(checks_sections::problems(self, &stretches)),
+                Err(error) => problems.extend(error.problems().iter().cloned()),
+            }
+        }
+        problems.extend(order);
+        problems
     }
 
     pub(super) const fn section(&self) -> &Section {

@@ -1,6 +1,7 @@
 //! The sections along a member: steps and tapers.
 
-use crate::error::{Error, Result};
+use crate::error::{Error, Problem, Result};
+use crate::path;
 use crate::section::Section;
 use crate::units::Length;
 use std::sync::Arc;
@@ -79,7 +80,7 @@ pub(super) fn stretches(
             });
         }
     };
-    for change in changes {
+    for (i, change) in changes.iter().enumerate() {
         match change {
             SectionChange::Step { at, section } => {
                 push(reached, at.si(), &current, None);
@@ -90,7 +91,9 @@ pub(super) fn stretches(
                 push(reached, from.si(), &current, None);
                 let end = Arc::new(section.clone());
                 // The two ends must be alike.
-                current.between(&end, 0.5)?;
+                if let Err(error) = current.between(&end, 0.5) {
+                    return Err(unlike(&error, i));
+                }
                 push(from.si(), to.si(), &current, Some(Arc::clone(&end)));
                 current = end;
                 reached = to.si();
@@ -101,7 +104,36 @@ pub(super) fn stretches(
     Ok(stretches)
 }
 
+/// What keeps two sections from being the ends of a taper, told at that change.
+fn unlike(error: &Error, index: usize) -> Error {
+    let base = path::indexed("member.changes", index);
+    let at = path::key(&path::key(&base, "taper"), "section");
+    let told = |p: &Problem| {
+        let found = format!("{} ({})", p.found(), p.path());
+        Problem::new(p.kind(), &at, found, p.expected())
+    };
+    let problems = error.problems().iter().map(told).collect();
+    Error::from_problems(problems).unwrap_or_else(|| error.clone())
+}
+
 impl SectionChange {
+    /// The word used in documents.
+    #[must_use]
+    pub const fn name(&self) -> &'static str {
+        match self {
+            Self::Step { .. } => "step",
+            Self::Taper { .. } => "taper",
+        }
+    }
+
+    /// The key of the place where it begins.
+    pub(super) const fn first_key(&self) -> &'static str {
+        match self {
+            Self::Step { .. } => "at",
+            Self::Taper { .. } => "from",
+        }
+    }
+
     /// Where it begins.
     #[must_use]
     pub const fn from(&self) -> Length {

@@ -240,8 +240,11 @@ impl Support {
         if let Some(height) = self.height {
             key("height", &mut |p, at| check::finite(p, height, at));
         }
-        for hold in &self.held_layers {
-            key("holding", &mut |p, at| check::finite(p, hold.height, at));
+        for (i, hold) in self.held_layers.iter().enumerate() {
+            key("holding", &mut |p, at| {
+                let at = path::key(&path::indexed(at, i), "height");
+                check::finite(p, hold.height, &at);
+            });
         }
         problems
     }

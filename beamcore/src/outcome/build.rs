@@ -1,19 +1,18 @@
 //! From the solved member to the outcome document.
 
 use super::document::{
-    AccuracyOutcome, CombinationOutcome, FactorOutcome, FibreOutcome, MaterialOutcome,
-    MemberOutcome, OutcomeDocument, PartOutcome, PartStiffnessOutcome, ReactionOutcome,
-    ResultsOutcome, SectionOutcome, StiffnessOutcome, StrengthOutcome, StressOutcome,
-    TransformedOutcome, TransformedPartOutcome, TransformedStateOutcome, UtilisationOutcome,
+    AccuracyOutcome, CombinationOutcome, FactorOutcome, FibreOutcome, LayerReactionOutcome,
+    MaterialOutcome, OutcomeDocument, ReactionOutcome, ResultsOutcome, StrengthOutcome,
+    StressOutcome, UtilisationOutcome,
 };
-use super::document_deflection::{SpanDeflectionOutcome, SpanOutcome};
-use super::{build_deflection, build_forces, notes};
+use super::document_deflection::SpanDeflectionOutcome;
+use super::{build_deflection, build_layers, build_section, notes};
 use crate::error::Result;
 use crate::job::Job;
 use crate::material::{DesignStrength, Material};
-use crate::member::{Combination, Member, Span};
+use crate::member::{Combination, Member, ShearModel, Support};
 use crate::response::Response;
-use crate::section::{PlacedPart, Section};
+use crate::section::PlacedPart;
 use crate::stress::StressExtreme;
 use crate::time::Time;
 
@@ -32,9 +31,9 @@ pub(super) fn outcome(job: &Job) -> Result<OutcomeDocument> {
         beamcore: crate::VERSION.into(),
         job: job.document().clone(),
         rules: notes::rules(member),
-        materials: materials(member.section()),
-        section: section(job)?,
-        member: member_outcome(job),
+        materials: materials(member),
+        section: build_section::section(job)?,
+        member: build_section::member(job)?,
         combinations: combinations?,
         components: build_deflection::components(&response, camber.as_ref())?,
         limits: build_deflection::limits(&response, job.limits(), camber.as_ref())?,
@@ -53,29 +52,10 @@ pub(super) fn outcome(job: &Job) -> Result<OutcomeDocument> {
     Ok(document)
 }
 
-fn member_outcome(job: &Job) -> MemberOutcome {
-    let member = job.member();
-    let span = |span: &Span| SpanOutcome {
-        name: span.name().into(),
-        from_m: span.from().to_m(),
-        to_m: span.to().to_m(),
-        cantilever: span.is_cantilever(),
-    };
-    MemberOutcome {
-        length_m: member.length().to_m(),
-        quantity: job.document().quantity.unwrap_or(1),
-        spans: member.spans().iter().map(span).collect(),
-        mass_kg: member
-            .section()
-            .line_mass()
-            .map(|mass| (mass * member.length()).to_kg()),
-    }
-}
-
 /// Each material once, in the order of the parts.
-pub(super) fn distinct(section: &Section) -> Vec<&Material> {
+pub(super) fn distinct<'a>(parts: impl IntoIterator<Item = &'a PlacedPart>) -> Vec<&'a Material> {
     let mut materials: Vec<&Material> = Vec::new();
-    for part in section.placed() {
+    for part in parts {
         if !materials
             .iter()
             .any(|known| known.name() == part.material().name())
@@ -86,7 +66,7 @@ pub(super) fn distinct(section: &Section) -> Vec<&Material> {
     materials
 }
 
-fn materials(section: &Section) -> Vec<MaterialOutcome> {
+fn materials(member: &Member) -> Vec<MaterialOutcome> {
     let outcome = |material: &Material| MaterialOutcome {
         name: material.name().into(),
         origin: material.origin().unwrap_or("values as given").into(),
@@ -102,7 +82,7 @@ fn materials(section: &Section) -> Vec<MaterialOutcome> {
             .mean_density()
             .map(|density| density.to_kg_per_m3()),
     };
-    distinct(section).into_iter().map(outcome).collect()
+    distinct(member.parts()).into_iter().map(outcome).collect()
 }
 
 fn strength(strength: &DesignStrength) -> StrengthOutcome {
@@ -120,98 +100,6 @@ fn strength(strength: &DesignStrength) -> StrengthOutcome {
             yield_Pa: yield_stress.to_Pa(),
         },
     }
-}
-
-fn section(job: &Job) -> Result<SectionOutcome> {
-    let member = job.member();
-    let section = member.section();
-    let transformed = distinct(section).into_iter().map(|material| {
-        let name = material.name();
-        Ok(TransformedOutcome {
-            name: name.into(),
-            initial: transformed(section, name, Time::Initial)?,
-            end: transformed(section, name, Time::Final)?,
-        })
-    });
-    Ok(SectionOutcome {
-        initial: stiffness(section, Time::Initial),
-        end: stiffness(section, Time::Final),
-        parts: section
-            .placed()
-            .iter()
-            .enumerate()
-            .map(|(i, p)| part(member, p, i))
-            .collect(),
-        forces: build_forces::forces(job)?,
-        transformed: transformed.collect::<Result<_>>()?,
-    })
-}
-
-fn stiffness(section: &Section, time: Time) -> StiffnessOutcome {
-    let stiffness = section.stiffness(time);
-    let principal = stiffness.principal();
-    StiffnessOutcome {
-        principal_greater_Nm2: principal.greater.to_N_m2(),
-        principal_smaller_Nm2: principal.smaller.to_N_m2(),
-        principal_angle_rad: principal.angle.to_rad(),
-        axial_stiffness_N: stiffness.axial().to_N(),
-        centroid_y_m: stiffness.centroid_y().to_m(),
-        centroid_z_m: stiffness.centroid_z().to_m(),
-        bending_stiffness_yy_Nm2: stiffness.bending_yy().to_N_m2(),
-        bending_stiffness_zz_Nm2: stiffness.bending_zz().to_N_m2(),
-        bending_stiffness_yz_Nm2: stiffness.bending_yz().to_N_m2(),
-    }
-}
-
-fn part(member: &Member, part: &PlacedPart, index: usize) -> PartOutcome {
-    let section = member.section();
-    let state = |time| {
-        let stiffness = section.stiffness(time);
-        PartStiffnessOutcome {
-            modulus_Pa: stiffness.moduli()[index].to_Pa(),
-            share: stiffness.shares()[index],
-        }
-    };
-    PartOutcome {
-        name: part.name().into(),
-        material: part.material().name().into(),
-        outline: part.outline().name().into(),
-        left_m: part.left().to_m(),
-        right_m: part.right().to_m(),
-        bottom_m: part.bottom().to_m(),
-        top_m: part.top().to_m(),
-        area_m2: part.area().to_m2(),
-        line_mass_kg_per_m: part.line_mass().map(|mass| mass.to_kg_per_m()),
-        mass_kg: part
-            .line_mass()
-            .map(|mass| (mass * member.length()).to_kg()),
-        initial: state(Time::Initial),
-        end: state(Time::Final),
-    }
-}
-
-fn transformed(section: &Section, name: &str, time: Time) -> Result<TransformedStateOutcome> {
-    let transformed = section.transformed_to(name, time)?;
-    let parts = transformed
-        .parts()
-        .iter()
-        .map(|part| TransformedPartOutcome {
-            name: part.name.clone(),
-            ratio: part.ratio,
-            width_m: part.width.to_m(),
-            loops_m: part
-                .loops
-                .iter()
-                .map(|corners| corners.iter().map(|(y, z)| [y.to_m(), z.to_m()]).collect())
-                .collect(),
-        });
-    Ok(TransformedStateOutcome {
-        reference_modulus_Pa: transformed.reference_modulus().to_Pa(),
-        area_m2: transformed.area().to_m2(),
-        centroid_z_m: transformed.centroid_z().to_m(),
-        second_moment_m4: transformed.second_moment().to_m4(),
-        parts: parts.collect(),
-    })
 }
 
 fn combination(response: &Response, combination: &Combination) -> Result<CombinationOutcome> {
@@ -239,12 +127,13 @@ fn results(response: &Response, combination: &Combination, time: Time) -> Result
             name: support.name().into(),
             force_N: reaction.force.to_N(),
             couple_Nm: reaction.couple.to_N_m(),
+            along_N: reaction.along.to_N(),
+            layers: layer_reactions(response, name, time, support)?,
         })
     });
     let stresses = member
-        .section()
-        .placed()
-        .iter()
+        .parts()
+        .into_iter()
         .map(|part| stress(response, combination, time, part.name()));
     let spans = member.spans().iter().map(|span| {
         let line = response.span_deflection(name, time, span.name())?;
@@ -258,11 +147,45 @@ fn results(response: &Response, combination: &Combination, time: Time) -> Result
         spans: spans.collect::<Result<_>>()?,
         sideways: (&response.sideways(name, time)?).into(),
         slope: (&response.slope(name, time)?).into(),
+        rotation: match member.shear_model() {
+            ShearModel::Rigid => None,
+            ShearModel::Flexible | ShearModel::Given(_) => {
+                Some((&response.rotation(name, time)?).into())
+            }
+        },
         shear: (&response.shear(name, time)?).into(),
         moment: (&response.moment(name, time)?).into(),
+        axial: (&response.axial(name, time)?).into(),
         reactions: reactions.collect::<Result<_>>()?,
         stresses: stresses.collect::<Result<_>>()?,
+        joints: build_layers::joint_results(response, name, time)?,
+        layers: build_layers::layer_results(response, name, time)?,
+        anchors: build_layers::anchors(response, name, time)?,
+        composite_action: build_layers::composite(response, combination, time)?,
+        lifted: response
+            .lifted(name, time)?
+            .into_iter()
+            .map(Into::into)
+            .collect(),
+        steps: response.steps(name, time)?,
     })
+}
+
+fn layer_reactions(
+    response: &Response,
+    combination: &str,
+    time: Time,
+    support: &Support,
+) -> Result<Vec<LayerReactionOutcome>> {
+    let held = support.held_layers().iter();
+    held.map(|hold| {
+        let force = response.layer_reaction(combination, time, support.name(), &hold.layer)?;
+        Ok(LayerReactionOutcome {
+            name: hold.layer.clone(),
+            along_N: force.to_N(),
+        })
+    })
+    .collect()
 }
 
 fn stress(

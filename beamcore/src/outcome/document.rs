@@ -6,9 +6,13 @@
 )]
 
 use super::document_deflection::{
-    CamberOutcome, ComponentsOutcome, LimitOutcome, SpanDeflectionOutcome, SpanOutcome,
+    CamberOutcome, ComponentsOutcome, LimitOutcome, SpanDeflectionOutcome,
 };
-use super::document_forces::ForcesOutcome;
+use super::document_layers::{
+    AnchorOutcome, CompositeOutcome, JointResultOutcome, LayerResultOutcome,
+};
+use super::document_member::MemberOutcome;
+use super::document_section::SectionOutcome;
 use super::extremes::{AngleExtremes, ForceExtremes, LengthExtremes, MomentExtremes};
 use crate::job::JobDocument;
 use schemars::JsonSchema;
@@ -93,118 +97,6 @@ pub(super) enum StrengthOutcome {
     },
 }
 
-/// The section with its stiffness at both times.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(super) struct SectionOutcome {
-    pub(super) initial: StiffnessOutcome,
-    #[serde(rename = "final")]
-    pub(super) end: StiffnessOutcome,
-    pub(super) parts: Vec<PartOutcome>,
-    /// The stresses under the named forces of the job.
-    #[serde(default, skip_serializing_if = "Vec::is_empty")]
-    pub(super) forces: Vec<ForcesOutcome>,
-    /// The section transformed to each of its materials.
-    pub(super) transformed: Vec<TransformedOutcome>,
-}
-
-/// E-weighted sums of a section.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(super) struct StiffnessOutcome {
-    pub(super) axial_stiffness_N: f64,
-    pub(super) centroid_y_m: f64,
-    pub(super) centroid_z_m: f64,
-    pub(super) bending_stiffness_yy_Nm2: f64,
-    pub(super) bending_stiffness_zz_Nm2: f64,
-    pub(super) bending_stiffness_yz_Nm2: f64,
-    /// The greater principal bending stiffness.
-    pub(super) principal_greater_Nm2: f64,
-    /// The smaller principal bending stiffness.
-    pub(super) principal_smaller_Nm2: f64,
-    /// From the level axis to the axis of the greater one, positive from y towards z.
-    pub(super) principal_angle_rad: f64,
-}
-
-/// A part at its place.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(super) struct PartOutcome {
-    pub(super) name: String,
-    pub(super) material: String,
-    /// The outline by its word in the document.
-    pub(super) outline: String,
-    pub(super) left_m: f64,
-    pub(super) right_m: f64,
-    pub(super) bottom_m: f64,
-    pub(super) top_m: f64,
-    pub(super) area_m2: f64,
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(super) line_mass_kg_per_m: Option<f64>,
-    /// The mass of the part in one member.
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(super) mass_kg: Option<f64>,
-    pub(super) initial: PartStiffnessOutcome,
-    #[serde(rename = "final")]
-    pub(super) end: PartStiffnessOutcome,
-}
-
-/// What a part gives to the bending stiffness.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(super) struct PartStiffnessOutcome {
-    pub(super) modulus_Pa: f64,
-    /// The share of the part in the bending stiffness.
-    pub(super) share: f64,
-}
-
-/// The section as if made of one material.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(super) struct TransformedOutcome {
-    /// The name of the reference material.
-    pub(super) name: String,
-    pub(super) initial: TransformedStateOutcome,
-    #[serde(rename = "final")]
-    pub(super) end: TransformedStateOutcome,
-}
-
-/// The transformed section at one time.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(super) struct TransformedStateOutcome {
-    pub(super) reference_modulus_Pa: f64,
-    pub(super) area_m2: f64,
-    pub(super) centroid_z_m: f64,
-    pub(super) second_moment_m4: f64,
-    pub(super) parts: Vec<TransformedPartOutcome>,
-}
-
-/// A part of the transformed section.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(super) struct TransformedPartOutcome {
-    pub(super) name: String,
-    /// The modular ratio E/E_ref.
-    pub(super) ratio: f64,
-    pub(super) width_m: f64,
-    /// The corners of the transformed outline, loop by loop, as pairs y, z; arcs by short chords.
-    pub(super) loops_m: Vec<Vec<[f64; 2]>>,
-}
-
-/// The member as a whole.
-#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
-#[serde(deny_unknown_fields)]
-pub(super) struct MemberOutcome {
-    pub(super) length_m: f64,
-    /// How many are made.
-    pub(super) quantity: u32,
-    pub(super) spans: Vec<SpanOutcome>,
-    /// The mass of one.
-    #[serde(default, skip_serializing_if = "Option::is_none")]
-    pub(super) mass_kg: Option<f64>,
-}
-
 /// Results under one combination.
 #[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
 #[serde(deny_unknown_fields)]
@@ -235,10 +127,34 @@ pub(super) struct ResultsOutcome {
     /// The movement sideways, positive towards positive y.
     pub(super) sideways: LengthExtremes,
     pub(super) slope: AngleExtremes,
+    /// The rotation of the section, where the member yields in shear; else it is the slope.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(super) rotation: Option<AngleExtremes>,
     pub(super) shear: ForceExtremes,
+    /// About the elastic centroid that the section has on the first day.
     pub(super) moment: MomentExtremes,
+    /// Tension positive.
+    pub(super) axial: ForceExtremes,
     pub(super) reactions: Vec<ReactionOutcome>,
     pub(super) stresses: Vec<StressOutcome>,
+    /// The joints that are not rigid.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(super) joints: Vec<JointResultOutcome>,
+    /// The layers, where they slip.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(super) layers: Vec<LayerResultOutcome>,
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(super) anchors: Vec<AnchorOutcome>,
+    /// The action of layers that slip and share one deflection, under the characteristic and
+    /// quasi-permanent combinations.
+    #[serde(default, skip_serializing_if = "Option::is_none")]
+    pub(super) composite_action: Option<CompositeOutcome>,
+    /// The one-way supports that the member has left.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(super) lifted: Vec<String>,
+    /// How many linear solutions it took: one, unless supports can be left or joints have
+    /// clearance.
+    pub(super) steps: usize,
 }
 
 /// The reaction of a support.
@@ -251,6 +167,21 @@ pub(super) struct ReactionOutcome {
     pub(super) force_N: f64,
     /// Positive clockwise.
     pub(super) couple_Nm: f64,
+    /// The level force, positive to the right; zero where no axial force takes part.
+    pub(super) along_N: f64,
+    /// What it holds layers with along the member by themselves; part of the level force.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(super) layers: Vec<LayerReactionOutcome>,
+}
+
+/// The force with which a support holds one layer along the member by itself.
+#[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
+#[serde(deny_unknown_fields)]
+pub(super) struct LayerReactionOutcome {
+    /// The name of the layer.
+    pub(super) name: String,
+    /// Positive to the right.
+    pub(super) along_N: f64,
 }
 
 /// The normal stress in a part.
@@ -290,6 +221,9 @@ pub(super) struct UtilisationOutcome {
 #[derive(Clone, Debug, PartialEq, Serialize, Deserialize, JsonSchema)]
 #[serde(deny_unknown_fields)]
 pub(super) struct AccuracyOutcome {
-    /// What is left of equilibrium and continuity, relative to the greatest terms.
+    /// An estimate of the relative error, the worst of all solutions: what is left of equilibrium
+    /// and continuity at the stations, relative to the greatest terms there, and of the equations
+    /// between the points of pieces whose section changes. What is left of the equations at the
+    /// stations is a matter of rounding; it is no bound for what the assumptions leave out.
     pub(super) residual: f64,
 }

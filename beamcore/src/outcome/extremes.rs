@@ -63,4 +63,6 @@ extremes! {
     ForceExtremes of ForceExtreme, value_N;
     /// Extremes of the moment.
     MomentExtremes of MomentExtreme, value_Nm;
+    /// Extremes of a force per length.
+    LineExtremes of LineExtreme, value_N_per_m;
 }

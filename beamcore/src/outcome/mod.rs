@@ -3,11 +3,17 @@
 mod build;
 mod build_deflection;
 mod build_forces;
+mod build_layers;
+mod build_section;
 mod document;
 mod document_deflection;
 mod document_forces;
+mod document_layers;
+mod document_member;
+mod document_section;
 mod extremes;
 mod figure;
+mod mass;
 mod notes;
 mod page;
 mod summary;

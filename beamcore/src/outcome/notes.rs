@@ -95,7 +95,7 @@ pub(super) fn assumptions(job: &Job) -> Vec<String> {
             "More than one support holds the axis; small deflections do not stretch it".into(),
         );
     }
-    for material in distinct(member.section()) {
+    for material in distinct(member.parts()) {
         notes.push(format!(
             "Creep of \"{}\": factor {} ({})",
             material.name(),
@@ -157,7 +157,7 @@ pub(super) fn warnings(member: &Member, document: &OutcomeDocument) -> Vec<Strin
                 .into(),
         );
     }
-    for material in distinct(member.section()) {
+    for material in distinct(member.parts()) {
         if let Some(origin) = material.origin() {
             notes.push(format!(
                 "Check before use: E and density of \"{}\" are of class {origin}",
@@ -165,7 +165,7 @@ pub(super) fn warnings(member: &Member, document: &OutcomeDocument) -> Vec<Strin
             ));
         }
     }
-    for material in distinct(member.section()) {
+    for material in distinct(member.parts()) {
         for text in material.overrides() {
             notes.push(format!("Overridden in \"{}\": {text}", material.name()));
         }

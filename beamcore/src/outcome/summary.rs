@@ -122,6 +122,20 @@ fn description(page: &mut Page, outcome: &OutcomeDocument) {
             support.described()
         ));
     }
+    let lines = &outcome.job.member;
+    for change in &lines.changes {
+        page.line(&format!("Change of section: {}", change.described()));
+    }
+    for hinge in &lines.hinges {
+        page.line(&format!("Hinge: {}", hinge.described()));
+    }
+    for anchor in &lines.anchors {
+        page.line(&format!(
+            "Anchor \"{}\": {}",
+            anchor.name,
+            anchor.described()
+        ));
+    }
     page.blank();
     page.line("Part             Material        Outline, width x height  E now E final Share");
     page.line("                                            mm           N/mm2   N/mm2 of EI");

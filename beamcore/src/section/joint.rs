@@ -15,6 +15,20 @@ pub enum JointKind {
     Loose,
 }
 
+impl JointKind {
+    /// The word used in documents.
+    #[must_use]
+    pub const fn name(&self) -> &'static str {
+        match self {
+            Self::Rigid => "rigid",
+            Self::Slipping(Slip::Modulus(_)) => "slipping",
+            Self::Slipping(Slip::Fasteners { .. }) => "fasteners",
+            Self::Slipping(Slip::Glue { .. }) => "glue",
+            Self::Loose => "loose",
+        }
+    }
+}
+
 /// What holds two layers together along the member.
 ///
 /// The slip of a joint is the displacement along x of its upper layer minus that of its lower

@@ -120,6 +120,12 @@ impl PlacedJoint {
         modulus.map(|modulus| self.lasting(modulus, x, time))
     }
 
+    /// Where along the member both layers are there; `None` for the whole length.
+    #[must_use]
+    pub const fn extent(&self) -> Option<(Length, Length)> {
+        self.stretch
+    }
+
     /// Where along the member a modulus of the joint changes: the ends of its bands and of its
     /// layers, from left to right, each once.
     #[must_use]
