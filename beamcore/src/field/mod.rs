@@ -55,11 +55,6 @@ impl<Q: Quantity> Field<Q> {
         }
     }
 
-    /// The curves of the field.
-    pub(crate) const fn piecewise(&self) -> &Piecewise {
-        &self.line
-    }
-
     /// The values on both sides of the place `at`.
     ///
     /// # Errors

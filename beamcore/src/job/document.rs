@@ -45,7 +45,20 @@ pub(crate) struct JobDocument {
     /// Limits of the deflection.
     #[serde(default, skip_serializing_if = "Vec::is_empty")]
     pub(crate) limits: Vec<LimitDocument>,
+    /// Simplified methods whose results are wanted beside the exact ones.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(crate) simplified: Vec<SimplifiedDocument>,
     /// The camber to be worked out, if any.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(crate) camber: Option<CamberDocument>,
+}
+
+/// A simplified method for layers that slip.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, Serialize, Deserialize, JsonSchema)]
+#[serde(rename_all = "snake_case")]
+pub(crate) enum SimplifiedDocument {
+    /// The gamma method of EN 1995-1-1 Annex B, for two or three layers.
+    Gamma,
+    /// The sine-load method, for any number of layers.
+    SineLayers,
 }

@@ -68,7 +68,9 @@ use crate::camber::{CamberPlan, Trestles};
 use crate::error::{Error, ErrorKind, Problem, Result};
 use crate::limits::Limit;
 use crate::member::Member;
+use crate::response::SimplifiedMethod;
 use crate::section::SectionForces;
+use document::SimplifiedDocument;
 use lower::Lowered;
 use reader::{Node, NodeValue};
 use std::path::Path;
@@ -165,6 +167,16 @@ impl Job {
     #[must_use]
     pub const fn camber(&self) -> Option<&CamberPlan> {
         self.lowered.camber.as_ref()
+    }
+
+    /// The simplified methods whose results are wanted beside the exact ones.
+    #[must_use]
+    pub fn simplified(&self) -> Vec<SimplifiedMethod> {
+        let method = |written: &SimplifiedDocument| match written {
+            SimplifiedDocument::Gamma => SimplifiedMethod::Gamma,
+            SimplifiedDocument::SineLayers => SimplifiedMethod::SineLayers,
+        };
+        self.document.simplified.iter().map(method).collect()
     }
 
     /// How the member stands when its camber is measured, if the job says so.

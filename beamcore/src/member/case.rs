@@ -48,6 +48,12 @@ impl Case {
         }
     }
 
+    /// Whether anything but free strains acts.
+    pub(crate) fn has_forces(&self) -> bool {
+        let any = |numbers: &[f64]| numbers.iter().any(|number| *number != 0.0);
+        any(&self.loads.line) || any(&self.loads.outside) || any(&self.loads.moved)
+    }
+
     /// The load per length that enters any of the given layers, per piece.
     pub(crate) fn entering(&self, layers: &[usize]) -> Vec<[f64; 2]> {
         let pieces = self.entered.first().map_or(0, Vec::len);

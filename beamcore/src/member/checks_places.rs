@@ -23,7 +23,7 @@ pub(super) fn order_of_changes(plan: &MemberPlan) -> Vec<Problem> {
                     plan.length()
                 ),
             ));
-        } else if !(change.to() <= plan.length()) {
+        } else if !change.to().is_finite() || change.to() > plan.length() {
             problems.push(Problem::new(
                 ErrorKind::Position,
                 path::key(&base, "to"),

@@ -6,7 +6,7 @@ use super::document::{
     StressOutcome, UtilisationOutcome,
 };
 use super::document_deflection::SpanDeflectionOutcome;
-use super::{build_deflection, build_layers, build_section, notes};
+use super::{build_deflection, build_layers, build_section, build_simplified, notes};
 use crate::error::Result;
 use crate::job::Job;
 use crate::material::{DesignStrength, Material};
@@ -37,6 +37,7 @@ pub(super) fn outcome(job: &Job) -> Result<OutcomeDocument> {
         combinations: combinations?,
         components: build_deflection::components(&response, camber.as_ref())?,
         limits: build_deflection::limits(&response, job.limits(), camber.as_ref())?,
+        simplified: build_simplified::simplified(job, &response)?,
         camber: camber
             .as_ref()
             .map(|camber| build_deflection::camber(&response, camber, job.trestles()))

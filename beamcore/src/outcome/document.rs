@@ -13,6 +13,7 @@ use super::document_layers::{
 };
 use super::document_member::MemberOutcome;
 use super::document_section::SectionOutcome;
+use super::document_simplified::SimplifiedOutcome;
 use super::extremes::{AngleExtremes, ForceExtremes, LengthExtremes, MomentExtremes};
 use crate::job::JobDocument;
 use schemars::JsonSchema;
@@ -42,6 +43,9 @@ pub(crate) struct OutcomeDocument {
     pub(super) components: Vec<ComponentsOutcome>,
     /// The limits of the deflection, compared with the results.
     pub(super) limits: Vec<LimitOutcome>,
+    /// Results of simplified methods beside the exact ones.
+    #[serde(default, skip_serializing_if = "Vec::is_empty")]
+    pub(super) simplified: Vec<SimplifiedOutcome>,
     /// The camber, if it was asked for.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(super) camber: Option<CamberOutcome>,

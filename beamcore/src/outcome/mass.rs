@@ -47,15 +47,14 @@ fn along(
             // Which parts are there is the same all over the piece, and told by its middle.
             let middle = Length::from_si(f64::midpoint(ends[0], ends[1]));
             let length = Length::from_si(ends[1] - ends[0]);
-            total = total
-                + match stretch.constant() {
-                    Some(section) => line_mass(section, middle)? * length,
-                    None => {
-                        let at = |x: f64| line_mass(&*stretch.at(x).ok()?, middle);
-                        let sides = at(ends[0])? + at(ends[1])?;
-                        (sides + at(middle.si())? * 4.0) / 6.0 * length
-                    }
-                };
+            total += match stretch.constant() {
+                Some(section) => line_mass(section, middle)? * length,
+                None => {
+                    let at = |x: f64| line_mass(&*stretch.at(x).ok()?, middle);
+                    let sides = at(ends[0])? + at(ends[1])?;
+                    (sides + at(middle.si())? * 4.0) / 6.0 * length
+                }
+            };
         }
     }
     Some(total)

@@ -28,6 +28,7 @@ pub(super) fn text(outcome: &OutcomeDocument) -> String {
     stresses(&mut page, outcome);
     strengths(&mut page, outcome);
     reactions(&mut page, outcome);
+    super::summary_simplified::table(&mut page, outcome);
     deflection::camber(&mut page, outcome);
     page.list("ASSUMED", &outcome.assumptions);
     page.list("RULES", &outcome.rules);

@@ -46,18 +46,7 @@ impl Response {
         let mut pressure = self.zero();
         for term in self.terms(combination, time)? {
             let own = slip_at_joint(&term, self.member().section(), j);
-            let carried = term.mixed([&own], |node, _| {
-                let joint = &node.section.slips()[j];
-                let sign = term.settled.map_or(1.0, |s| s.situation.sign(j, node.x));
-                let modulus = joint.modulus_at(node.x, term.time) * sign.abs();
-                // What the clearance takes off; `mixed` multiplies it by the factor of the term.
-                let taken = if term.settled.is_some() {
-                    modulus * joint.clearance() * sign
-                } else {
-                    0.0
-                };
-                ([modulus], -taken)
-            });
+            let carried = flow_of(&term, &own, j);
             pressure.add(&pressure_of(self, &term, j, &carried), 1.0);
             slip.add(&own, 1.0);
             flow.add(&carried, 1.0);
@@ -90,7 +79,7 @@ impl Response {
 }
 
 /// The slip at the height of a joint, with the factor of the term.
-fn slip_at_joint(term: &Term<'_>, section: &Section, j: usize) -> Piecewise {
+pub(super) fn slip_at_joint(term: &Term<'_>, section: &Section, j: usize) -> Piecewise {
     let states = term.layout.states;
     let mut line = term.field(states.slip(j));
     let joint = &section.slips()[j];
@@ -101,6 +90,22 @@ fn slip_at_joint(term: &Term<'_>, section: &Section, j: usize) -> Piecewise {
         line.add(&term.field(states.rotation(strands[0])), -arm);
     }
     line
+}
+
+/// The flow of a joint from its slip, with the factor of the term.
+pub(super) fn flow_of(term: &Term<'_>, slip: &Piecewise, j: usize) -> Piecewise {
+    term.mixed([slip], |node, _| {
+        let joint = &node.section.slips()[j];
+        let sign = term.settled.map_or(1.0, |s| s.situation.sign(j, node.x));
+        let modulus = joint.modulus_at(node.x, term.time) * sign.abs();
+        // What the clearance takes off; `mixed` multiplies it by the factor of the term.
+        let taken = if term.settled.is_some() {
+            modulus * joint.clearance() * sign
+        } else {
+            0.0
+        };
+        ([modulus], -taken)
+    })
 }
 
 /// The axial force of a merged layer, with the factor of the term: what the joints next to it and
@@ -126,7 +131,7 @@ pub(super) fn axial_of(term: &Term<'_>, section: &Section, merged: usize) -> Pie
 }
 
 /// The moment of a merged layer about its own centroid, with the factor of the term.
-fn moment_of(term: &Term<'_>, merged: usize) -> Piecewise {
+pub(super) fn moment_of(term: &Term<'_>, merged: usize) -> Piecewise {
     let strand = term.layout.strands[merged];
     let curvature = term.field(term.layout.states.all() + strand);
     term.mixed([&curvature], |node, strains| {

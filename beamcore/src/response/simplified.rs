@@ -1,9 +1,8 @@
 //! The simplified methods beside the exact solution of a member.
 
 use super::Response;
-use super::simplified_setup::{
-    Method, Stack, beam, reference, set_up, stack, transverse, warnings,
-};
+use super::layers::{axial_of, flow_of, moment_of, slip_at_joint};
+use super::simplified_setup::{Method, beam, reference, set_up, stack, transverse, warnings};
 use super::simplified_types::{SimplifiedJoint, SimplifiedLayer, SimplifiedMethod, SimplifiedSpan};
 use super::solutions::Term;
 use crate::error::{ErrorKind, Problem, Result};
@@ -26,7 +25,8 @@ impl Response {
     /// # Errors
     /// As for [`Response::deflection`]; [`ErrorKind::Value`] for what the methods do not cover:
     /// layers that do not lie on each other, a section that changes, layers with a deflection of
-    /// their own, axial forces, free strains, clearances, one-way supports, anchors.
+    /// their own, axial forces, clearances, one-way supports, anchors. Free strains are left out of
+    /// both sides; an action that mixes them with loads is an error.
     pub fn simplified(
         &self,
         combination: &str,
@@ -34,8 +34,8 @@ impl Response {
         method: SimplifiedMethod,
     ) -> Result<Vec<SimplifiedSpan>> {
         let member = self.member();
-        let terms = self.terms(combination, time)?;
-        if let Some(found) = not_covered(member, &terms) {
+        let all = self.terms(combination, time)?;
+        if let Some(found) = not_covered(member, &all) {
             return Err(Problem::new(
                 ErrorKind::Value,
                 "member",
@@ -44,6 +44,16 @@ impl Response {
             )
             .into());
         }
+        let leaves_out_strains = all.iter().any(has_strains);
+        let terms: Vec<_> = all.into_iter().filter(|term| !has_strains(term)).collect();
+        let section = member.section();
+        let summed = |line: &dyn Fn(&Term<'_>) -> Piecewise| {
+            let mut sum = self.zero();
+            for term in &terms {
+                sum.add(&line(term), 1.0);
+            }
+            sum
+        };
         let stack = stack(member)?;
         let methods: Vec<[Method; 2]> = member
             .spans()
@@ -83,7 +93,8 @@ impl Response {
         let deflection = sum(states.deflection(0), 1.0, &|_| 1.0);
         let spans = member.spans().iter().zip(&methods).map(|(span, methods)| {
             let (from, to) = (span.from().si(), span.to().si());
-            let exact = self.deflection_line(combination, time)?.between(from, to);
+            let w = member.layout().states.deflection(0);
+            let exact = summed(&|term| term.field(w)).between(from, to);
             let mut joints = Vec::new();
             for (position, &j) in stack.joints.iter().enumerate() {
                 // The method's flow is positive where the tension below grows: against the slip.
@@ -93,18 +104,30 @@ impl Response {
                 };
                 let shear = states.force(states.deflection(0));
                 let flow = sum(shear, 1.0, &per_shear).between(from, to);
-                let name = member.section().joints()[member.section().slips()[j].joint].name();
-                let own = self.joint(combination, time, name)?.flow;
+                let name = section.joints()[section.slips()[j].joint].name();
+                let own = summed(&|term| flow_of(term, &slip_at_joint(term, section, j), j));
                 joints.push(SimplifiedJoint {
                     joint: name.into(),
                     flow: flow.greatest().into(),
-                    exact_flow: own.piecewise().between(from, to).greatest().into(),
+                    exact_flow: own.between(from, to).greatest().into(),
                 });
             }
             let moment = sum(states.force(states.rotation(0)), -1.0, &|_| 1.0);
             let peak = moment.between(from, to).greatest();
-            let layers =
-                self.stack_stresses(combination, time, &stack, methods, &solved, &beams, peak.at)?;
+            let stresses = stresses_at(methods, &solved, &beams, peak.at)?;
+            let value = |line: Piecewise| line.sides(peak.at).map_or(0.0, |sides| sides.1);
+            let layers = stack.layers.iter().zip(stresses).map(|(&merged, stress)| {
+                let axial = summed(&|term| axial_of(term, section, merged));
+                let moment = summed(&|term| moment_of(term, merged));
+                SimplifiedLayer {
+                    layer: section.merged_layers()[merged].layers()[0].clone(),
+                    at: Length::from_si(peak.at),
+                    stress,
+                    exact_axial: Force::from_si(value(axial)),
+                    exact_moment: Moment::from_si(value(moment)),
+                }
+            });
+            let layers = layers.collect();
             let own = &methods[time.index()];
             Ok(SimplifiedSpan {
                 span: span.name().into(),
@@ -118,58 +141,46 @@ impl Response {
                 exact_deflection: exact.greatest().into(),
                 joints,
                 layers,
+                leaves_out_strains,
                 warnings: warnings(member, own)?,
             })
         });
         spans.collect()
     }
+}
 
-    /// The stresses of the layers at a place, by the method and exactly.
-    #[expect(clippy::too_many_arguments, reason = "all are parts of one comparison")]
-    fn stack_stresses(
-        &self,
-        combination: &str,
-        time: Time,
-        stack: &Stack,
-        methods: &[Method; 2],
-        solved: &[(usize, f64, Solved)],
-        beams: &[Beam; 2],
-        at: f64,
-    ) -> Result<Vec<SimplifiedLayer>> {
-        let mut stresses: Vec<LayerStress> = Vec::new();
-        for (t, factor, solved) in solved {
-            let beam = &beams[*t];
-            let states = States::BENDING;
-            let mut line = Piecewise::zero(Arc::clone(beam.stations()));
-            let index = states.force(states.rotation(0));
-            let pieces = (0..beam.stations().len() - 1).map(|k| beam.field(solved, k, index));
-            line.add_coefficients(beam.terms(), beam.decays(), pieces, -factor);
-            let moment = line.sides(at).map_or(0.0, |sides| sides.1);
-            let own = methods[*t].stresses(Moment::from_si(moment))?;
-            if stresses.is_empty() {
-                stresses = own;
-            } else {
-                for (sum, more) in stresses.iter_mut().zip(own) {
-                    sum.axial += more.axial;
-                    sum.bending += more.bending;
-                }
+/// The stresses of the layers under the moment at a place, by the method.
+fn stresses_at(
+    methods: &[Method; 2],
+    solved: &[(usize, f64, Solved)],
+    beams: &[Beam; 2],
+    at: f64,
+) -> Result<Vec<LayerStress>> {
+    let mut stresses: Vec<LayerStress> = Vec::new();
+    for (t, factor, solved) in solved {
+        let beam = &beams[*t];
+        let states = States::BENDING;
+        let mut line = Piecewise::zero(Arc::clone(beam.stations()));
+        let index = states.force(states.rotation(0));
+        let pieces = (0..beam.stations().len() - 1).map(|k| beam.field(solved, k, index));
+        line.add_coefficients(beam.terms(), beam.decays(), pieces, -factor);
+        let moment = line.sides(at).map_or(0.0, |sides| sides.1);
+        let own = methods[*t].stresses(Moment::from_si(moment))?;
+        if stresses.is_empty() {
+            stresses = own;
+        } else {
+            for (sum, more) in stresses.iter_mut().zip(own) {
+                sum.axial += more.axial;
+                sum.bending += more.bending;
             }
         }
-        let section = self.member().section();
-        let place = Length::from_si(at);
-        let layers = stack.layers.iter().zip(stresses).map(|(&merged, stress)| {
-            let name = &section.merged_layers()[merged].layers()[0];
-            let exact = self.layer(combination, time, name)?;
-            Ok(SimplifiedLayer {
-                layer: name.clone(),
-                at: place,
-                stress,
-                exact_axial: exact.axial.value(place)?,
-                exact_moment: exact.moment.value(place)?,
-            })
-        });
-        layers.collect()
     }
+    Ok(stresses)
+}
+
+/// Whether parts strain freely in a term.
+fn has_strains(term: &Term<'_>) -> bool {
+    !term.case.strains.is_empty()
 }
 
 /// Why the methods do not cover a member and its loads.
@@ -193,8 +204,11 @@ fn not_covered(member: &Member, terms: &[Term<'_>]) -> Option<&'static str> {
         .any(|hinge| matches!(hinge.release(), Release::Butt(_)))
     {
         Some("butt joints")
-    } else if terms.iter().any(|term| !term.case.strains.is_empty()) {
-        Some("free strains")
+    } else if terms
+        .iter()
+        .any(|term| has_strains(term) && term.case.has_forces())
+    {
+        Some("loads and free strains in one action")
     } else {
         None
     }

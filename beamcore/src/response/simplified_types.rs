@@ -44,6 +44,8 @@ pub struct SimplifiedSpan {
     /// The stresses of each layer from the lowest upward at the place of the span's greatest
     /// moment.
     pub layers: Vec<SimplifiedLayer>,
+    /// Whether the combination holds free strains, which are left out of both sides here.
+    pub leaves_out_strains: bool,
     /// The limits of the method.
     pub warnings: Vec<Warning>,
 }
