@@ -272,6 +272,15 @@ impl Member {
         self.data.layout.states.strands > 1
     }
 
+    /// The layer that loads of actions without a named layer enter: the highest one where all
+    /// layers share one deflection, else the first.
+    #[must_use]
+    pub fn entered_layer(&self) -> &str {
+        let section = self.section();
+        let merged = self.data.layout.entered_layer(section);
+        section.merged_layers()[merged].layers()[0].as_str()
+    }
+
     /// Whether axial force takes part: more than one support holds the axis, something acts along
     /// the member, or it is pitched.
     #[must_use]

@@ -6,7 +6,9 @@ use super::document::{
     StressOutcome, UtilisationOutcome,
 };
 use super::document_deflection::SpanDeflectionOutcome;
-use super::{build_deflection, build_layers, build_section, build_simplified, notes};
+use super::{
+    assumptions, build_deflection, build_layers, build_section, build_simplified, notes, warnings,
+};
 use crate::error::Result;
 use crate::job::Job;
 use crate::material::{DesignStrength, Material};
@@ -45,11 +47,11 @@ pub(super) fn outcome(job: &Job) -> Result<OutcomeDocument> {
         accuracy: AccuracyOutcome {
             residual: response.residual(),
         },
-        assumptions: notes::assumptions(job),
+        assumptions: assumptions::assumptions(job),
         warnings: Vec::new(),
         not_checked: notes::not_checked(job),
     };
-    document.warnings = notes::warnings(member, &document);
+    document.warnings = warnings::warnings(member, &document);
     Ok(document)
 }
 

@@ -1,5 +1,8 @@
 //! The outcome: all results of a job as one document, addressed by path.
 
+mod assumptions;
+mod assumptions_layers;
+mod assumptions_loads;
 mod build;
 mod build_deflection;
 mod build_forces;
@@ -20,7 +23,12 @@ mod notes;
 mod page;
 mod summary;
 mod summary_deflection;
+mod summary_layers;
+mod summary_member;
+mod summary_reactions;
 mod summary_simplified;
+mod warnings;
+mod warnings_layers;
 
 use crate::error::{ErrorKind, Problem, Result};
 use crate::job::{Job, Step, steps};

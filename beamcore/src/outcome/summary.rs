@@ -9,7 +9,10 @@ use super::document::{OutcomeDocument, ResultsOutcome, StrengthOutcome};
 use super::figure::figure;
 use super::notes::each;
 use super::page::Page;
-use super::summary_deflection as deflection;
+use super::{
+    summary_deflection as deflection, summary_layers as layers, summary_member as member,
+    summary_reactions as reactions,
+};
 use crate::time::Time;
 
 /// The summary of an outcome.
@@ -21,13 +24,15 @@ pub(super) fn text(outcome: &OutcomeDocument) -> String {
         outcome.beamcore
     ));
     governing(&mut page, outcome);
-    description(&mut page, outcome);
+    member::description(&mut page, outcome);
     deflection::greatest(&mut page, outcome);
     deflection::components(&mut page, outcome);
     deflection::limits(&mut page, outcome);
     stresses(&mut page, outcome);
     strengths(&mut page, outcome);
-    reactions(&mut page, outcome);
+    layers::results(&mut page, outcome);
+    axial(&mut page, outcome);
+    reactions::reactions(&mut page, outcome);
     super::summary_simplified::table(&mut page, outcome);
     deflection::camber(&mut page, outcome);
     page.list("ASSUMED", &outcome.assumptions);
@@ -102,88 +107,12 @@ fn governing(page: &mut Page, outcome: &OutcomeDocument) {
     }
 }
 
-fn description(page: &mut Page, outcome: &OutcomeDocument) {
-    page.heading("MEMBER");
-    let member = &outcome.member;
-    let mass = member
-        .mass_kg
-        .map_or_else(String::new, |mass| format!(", {} kg", figure(mass, 0)));
-    let count = match member.quantity {
-        1 => String::new(),
-        many => format!(", {many} of them"),
-    };
-    page.line(&format!(
-        "Length {} m{mass}{count}",
-        figure(member.length_m, 3)
-    ));
-    for support in &outcome.job.member.supports {
-        page.line(&format!(
-            "Support \"{}\": {}",
-            support.name,
-            support.described()
-        ));
-    }
-    let lines = &outcome.job.member;
-    for change in &lines.changes {
-        page.line(&format!("Change of section: {}", change.described()));
-    }
-    for hinge in &lines.hinges {
-        page.line(&format!("Hinge: {}", hinge.described()));
-    }
-    for anchor in &lines.anchors {
-        page.line(&format!(
-            "Anchor \"{}\": {}",
-            anchor.name,
-            anchor.described()
-        ));
-    }
-    page.blank();
-    page.line("Part             Material        Outline, width x height  E now E final Share");
-    page.line("                                            mm           N/mm2   N/mm2 of EI");
-    for part in &outcome.section.parts {
-        let shape = match part.outline.as_str() {
-            "rectangle" => String::new(),
-            other => format!("{} ", other.replace('_', " ")),
-        };
-        let size = format!(
-            "{shape}{} x {}",
-            trimmed((part.right_m - part.left_m) * 1e3),
-            trimmed((part.top_m - part.bottom_m) * 1e3)
-        );
-        page.line(&format!(
-            "{:<16} {:<15} {size:<22} {:>7} {:>7} {:>3} %",
-            short_to(&part.name, 16),
-            short_to(&part.material, 15),
-            figure(part.initial.modulus_Pa / 1e6, 0),
-            figure(part.end.modulus_Pa / 1e6, 0),
-            figure(part.initial.share * 100.0, 0),
-        ));
-    }
-    let (now, end) = (&outcome.section.initial, &outcome.section.end);
-    page.line(&format!(
-        "Bending stiffness EI {} kN m2 now, {} kN m2 final",
-        figure(now.bending_stiffness_yy_Nm2 / 1e3, 1),
-        figure(end.bending_stiffness_yy_Nm2 / 1e3, 1)
-    ));
-    page.line(&format!(
-        "Elastic centroid at z = {} mm now, {} mm final",
-        figure(now.centroid_z_m * 1e3, 1),
-        figure(end.centroid_z_m * 1e3, 1)
-    ));
-    page.blank();
-    for action in &outcome.job.actions {
-        page.line(&format!(
-            "Action \"{}\": {}",
-            action.name,
-            action.described()
-        ));
-    }
-}
-
 fn stresses(page: &mut Page, outcome: &OutcomeDocument) {
     page.heading("GREATEST NORMAL STRESS, N/mm2 (tension positive)");
     page.line("Part            Combination                Time      Tension Compression   Used");
-    for name in outcome.section.parts.iter().map(|part| &part.name) {
+    // All parts along the member, those of other sections too.
+    let parts = each(outcome).next().map(|(.., results)| &results.stresses);
+    for name in parts.into_iter().flatten().map(|stress| &stress.name) {
         for (combination, time, results) in each(outcome) {
             if matches!(combination.name.as_str(), "permanent" | "frequent") {
                 continue;
@@ -204,6 +133,28 @@ fn stresses(page: &mut Page, outcome: &OutcomeDocument) {
                 figure(stress.compression.value_Pa / 1e6, 2),
             ));
         }
+    }
+}
+
+/// The greatest axial force, where it takes part.
+fn axial(page: &mut Page, outcome: &OutcomeDocument) {
+    if !outcome.member.axial_force {
+        return;
+    }
+    page.heading("GREATEST AXIAL FORCE, kN (tension positive)");
+    page.line("Combination                           instant             final");
+    for combination in &outcome.combinations {
+        let cell = |results: &ResultsOutcome| {
+            let greatest = &results.axial.greatest;
+            let (value, at) = (figure(greatest.value_N / 1e3, 2), figure(greatest.at_m, 2));
+            format!("{value:>7} at {at} m")
+        };
+        page.line(&format!(
+            "{:<30} {:>20} {:>20}",
+            short_to(&combination.name, 30),
+            cell(&combination.initial),
+            cell(&combination.end)
+        ));
     }
 }
 
@@ -232,51 +183,6 @@ fn strengths(page: &mut Page, outcome: &OutcomeDocument) {
             material.name
         ));
     }
-}
-
-fn reactions(page: &mut Page, outcome: &OutcomeDocument) {
-    page.heading("REACTIONS (force upward positive, couple clockwise positive)");
-    page.line("Support         Combination                       instant        final");
-    for support in outcome
-        .job
-        .member
-        .supports
-        .iter()
-        .map(|support| &support.name)
-    {
-        for combination in &outcome.combinations {
-            let of = |results: &ResultsOutcome| {
-                let found = results
-                    .reactions
-                    .iter()
-                    .find(|reaction| reaction.name == *support);
-                found.map_or((0.0, 0.0), |reaction| {
-                    (reaction.force_N, reaction.couple_Nm)
-                })
-            };
-            let (now, end) = (of(&combination.initial), of(&combination.end));
-            let mut row = |now: f64, end: f64, unit: &str| {
-                page.line(&format!(
-                    "{:<15} {:<28} {:>9} {unit} {:>9} {unit}",
-                    short_to(support, 15),
-                    short_to(&combination.name, 28),
-                    figure(now / 1e3, 2),
-                    figure(end / 1e3, 2),
-                ));
-            };
-            row(now.0, end.0, "kN  ");
-            if now.1 != 0.0 || end.1 != 0.0 {
-                row(now.1, end.1, "kN m");
-            }
-        }
-    }
-}
-
-/// A size in mm, with a decimal only where it has one.
-fn trimmed(size: f64) -> String {
-    let text = figure(size, 1);
-    text.strip_suffix(".0")
-        .map_or_else(|| text.clone(), Into::into)
 }
 
 /// A name cut to a width in its middle, with a mark there: what tells names apart is often their
