@@ -138,7 +138,7 @@ fn composite(page: &mut Page, outcome: &OutcomeDocument) {
     if found().next().is_none() {
         return;
     }
-    page.heading("COMPOSITE ACTION (greatest deflection, with all joints loose, with all rigid)");
+    page.heading("COMPOSITE ACTION UNDER LOADS (greatest w; with all joints loose; all rigid)");
     page.line("Combination            Time     Degree   w, mm   loose   rigid  Effective EI");
     for (combination, time, action) in found() {
         page.line(&format!(

@@ -2,12 +2,13 @@
 
 use super::Response;
 use crate::error::{ErrorKind, Problem, Result};
+use crate::field::{Extreme, Field, Piecewise};
 use crate::section::JointKind;
 use crate::time::Time;
 use crate::units::{BendingStiffness, Length};
 
 /// The composite action of a member of layers under one combination, seen at the place of its
-/// greatest deflection.
+/// greatest deflection under its loads; actions of free strains only are left out.
 #[derive(Clone, Copy, Debug, PartialEq)]
 pub struct CompositeAction {
     /// (w loose - w)/(w loose - w rigid): 0 where the joints do nothing, 1 where they do not slip.
@@ -26,6 +27,18 @@ pub struct CompositeAction {
 }
 
 impl Response {
+    /// The deflection under a combination without its actions of free strains only.
+    fn under_loads(&self, combination: &str, time: Time) -> Result<Piecewise> {
+        let deflection = self.member().layout().states.deflection(0);
+        let mut sum = self.zero();
+        for term in self.terms(combination, time)? {
+            if !term.is_strain_only() {
+                sum.add(&term.field(deflection), 1.0);
+            }
+        }
+        Ok(sum)
+    }
+
     /// The degree of composite action and the effective bending stiffness, from the same member
     /// with all its joints loose and with all of them rigid (without anchors).
     ///
@@ -43,11 +56,11 @@ impl Response {
             )
             .into());
         }
-        let peak = self.deflection(combination, time)?.greatest();
+        let peak: Extreme<Length> = self.under_loads(combination, time)?.greatest().into();
         let variant = |kind: JointKind| -> Result<Length> {
             let plan = member.plan().with_joints(&kind)?;
-            let response = plan.check()?.solve();
-            response.deflection(combination, time)?.value(peak.at)
+            let line = plan.check()?.solve().under_loads(combination, time)?;
+            Field::new(line).value(peak.at)
         };
         let (loose, rigid) = (variant(JointKind::Loose)?, variant(JointKind::Rigid)?);
         let section = member.section_at(peak.at)?;

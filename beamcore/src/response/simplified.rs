@@ -44,8 +44,8 @@ impl Response {
             )
             .into());
         }
-        let leaves_out_strains = all.iter().any(has_strains);
-        let terms: Vec<_> = all.into_iter().filter(|term| !has_strains(term)).collect();
+        let leaves_out_strains = all.iter().any(Term::has_strains);
+        let terms: Vec<_> = all.into_iter().filter(|term| !term.has_strains()).collect();
         let section = member.section();
         let summed = |line: &dyn Fn(&Term<'_>) -> Piecewise| {
             let mut sum = self.zero();
@@ -178,11 +178,6 @@ fn stresses_at(
     Ok(stresses)
 }
 
-/// Whether parts strain freely in a term.
-fn has_strains(term: &Term<'_>) -> bool {
-    !term.case.strains.is_empty()
-}
-
 /// Why the methods do not cover a member and its loads.
 fn not_covered(member: &Member, terms: &[Term<'_>]) -> Option<&'static str> {
     let layout = member.layout();
@@ -206,7 +201,7 @@ fn not_covered(member: &Member, terms: &[Term<'_>]) -> Option<&'static str> {
         Some("butt joints")
     } else if terms
         .iter()
-        .any(|term| has_strains(term) && term.case.has_forces())
+        .any(|term| term.has_strains() && term.case.has_forces())
     {
         Some("loads and free strains in one action")
     } else {

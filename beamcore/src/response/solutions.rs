@@ -100,6 +100,16 @@ impl Term<'_> {
         line.add_coefficients(self.beam.terms(), self.beam.decays(), pieces, factor);
     }
 
+    /// Whether parts strain freely.
+    pub(super) fn has_strains(&self) -> bool {
+        !self.case.strains.is_empty()
+    }
+
+    /// Whether nothing but free strains acts.
+    pub(super) fn is_strain_only(&self) -> bool {
+        self.has_strains() && !self.case.has_forces()
+    }
+
     /// The free strains of the parts at a node of a piece; empty where there are none.
     fn strains(&self, piece: usize, node: usize) -> &[InitialStrain] {
         self.case
