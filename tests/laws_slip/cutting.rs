@@ -1,6 +1,7 @@
 //! Cutting a member, or a layer of it, changes nothing; what it does change is told.
 
-use super::drawn::{Drawn, deflection, drawn, lines, moment, nothing, places, solved};
+use super::drawn::{Drawn, drawn, nothing, solved};
+use super::lines::{deflection, lines, moment, places};
 use beamcore::section::JointKind;
 use proptest::prelude::*;
 

@@ -1,6 +1,7 @@
 //! What soft and stiff joints, springs and shear tend to.
 
-use super::drawn::{ALL, Drawn, FIRST, deflection, drawn, moment, places, solved};
+use super::drawn::{ALL, Drawn, FIRST, drawn, solved};
+use super::lines::{deflection, moment, places};
 use beamcore::member::{MemberPlan, Support};
 use beamcore::response::Response;
 use beamcore::section::JointKind;

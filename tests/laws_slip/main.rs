@@ -3,6 +3,7 @@
 mod cutting;
 mod drawn;
 mod limits;
+mod lines;
 mod mirror;
 mod sine;
 mod statics;

@@ -1,6 +1,7 @@
 //! The mirror image of a member bends as the mirror image of its line.
 
-use super::drawn::{Drawn, drawn, lines, places};
+use super::drawn::{Drawn, drawn};
+use super::lines::{lines, places};
 use beamcore::member::{Load, Member, ShearModel, Support};
 use beamcore::response::Response;
 use beamcore::units::Length;

@@ -1,6 +1,7 @@
 //! Under a load in the form of half a sine wave the simplified methods are exact.
 
-use super::drawn::{Drawn, axial_of, deflection, drawn, flow_of, moment};
+use super::drawn::{Drawn, drawn};
+use super::lines::{axial_of, deflection, flow_of, moment};
 use beamcore::member::Load;
 use beamcore::simplified::{Gamma, LayerInput, ReferenceLength, SineLayers};
 use beamcore::units::{Force, Length, LineLoad, Modulus, Moment, SlipModulus};
@@ -19,7 +20,7 @@ fn share_of_wave() -> f64 {
 }
 
 fn wave(q: f64, length: f64) -> Vec<Load> {
-    let at = |i: u32| length * f64::from(i) / f64::from(STRETCHES);
+    let at = |i: u32| (length * f64::from(i) / f64::from(STRETCHES)).min(length);
     let load = |i: u32| {
         let angle = PI * f64::from(i) / f64::from(STRETCHES);
         LineLoad::from_N_per_m(q * libm::sin(angle))

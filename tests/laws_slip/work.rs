@@ -1,9 +1,7 @@
 //! Work: reciprocity, virtual work, superposition.
 
-use super::drawn::{
-    ALL, Drawn, FIRST, axial_of, deflection, drawn, flow_of, lines, moment_of, places, point,
-    rotation, shear, solved,
-};
+use super::drawn::{ALL, Drawn, FIRST, drawn, point, solved};
+use super::lines::{axial_of, deflection, flow_of, lines, moment_of, places, rotation, shear};
 use super::statics::integral;
 use beamcore::member::Load;
 use beamcore::units::{Length, Moment};
