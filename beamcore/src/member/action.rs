@@ -121,9 +121,10 @@ impl Action {
         self
     }
 
-    /// The same action with all its loads entering the layer of this name; without it, transverse
-    /// loads enter the first layer. It matters where layers have deflections of their own, and
-    /// where forces act along the member.
+    /// The same action with all its loads entering the layer of this name. Without it they enter the
+    /// highest layer where all layers share one deflection, else the first layer. It matters where
+    /// layers have deflections of their own, where forces act along the member (pitched members
+    /// too), and for the pressure between layers.
     #[must_use]
     pub fn on(mut self, layer: impl Into<String>) -> Self {
         self.layer = Some(layer.into());

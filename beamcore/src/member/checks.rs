@@ -83,10 +83,11 @@ fn check_supports(
             .into_iter()
             .flat_map(|length| same_place(supports, length)),
     );
-    if supports
-        .iter()
-        .all(|support| support.kind() == SupportKind::Roller && !support.holds_axis())
-    {
+    if supports.iter().all(|support| {
+        support.kind() == SupportKind::Roller
+            && !support.holds_axis()
+            && support.held_layers().is_empty()
+    }) {
         problems.push(Problem::new(
             ErrorKind::Mechanism,
             all,

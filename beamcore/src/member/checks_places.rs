@@ -72,7 +72,7 @@ pub(super) fn places(plan: &MemberPlan) -> Vec<Problem> {
             ));
         }
     }
-    for anchor in plan.anchors() {
+    for (i, anchor) in plan.anchors().iter().enumerate() {
         let at = path::key(&path::named("member.anchors", &anchor.name), "at");
         if !(anchor.at >= Length::ZERO && anchor.at <= plan.length()) {
             problems.push(Problem::new(
@@ -80,6 +80,20 @@ pub(super) fn places(plan: &MemberPlan) -> Vec<Problem> {
                 at,
                 anchor.at.to_string(),
                 format!("a place on the member, from 0 m to {}", plan.length()),
+            ));
+        }
+        let same = |other: &&super::Anchor| {
+            other.joint == anchor.joint && (other.at - anchor.at).abs() <= slack
+        };
+        if let Some(other) = plan.anchors()[..i].iter().find(same) {
+            problems.push(Problem::new(
+                ErrorKind::Duplicate,
+                path::key(&path::named("member.anchors", &anchor.name), "at"),
+                format!(
+                    "{}, where the anchor \"{}\" stops the same joint",
+                    anchor.at, other.name
+                ),
+                "a place of its own for each anchor of a joint",
             ));
         }
         check::name(&mut problems, &anchor.name, "member.anchors");

@@ -17,6 +17,17 @@ pub(super) fn problems(plan: &MemberPlan, sections: &[Stretch]) -> Vec<Problem> 
     let mut problems = Vec::new();
     let first = plan.section();
     problems.extend(first.position_problems(plan.length()));
+    problems.extend(uncovered(plan));
+    if let Some(pitch) = plan.pitch_angle()
+        && (!pitch.is_finite() || pitch.si().abs() >= std::f64::consts::FRAC_PI_2)
+    {
+        problems.push(Problem::new(
+            ErrorKind::Value,
+            "member.pitch",
+            pitch.to_string(),
+            "an angle between -90 and 90 degrees",
+        ));
+    }
     for stretch in sections.iter().skip(1) {
         let section = stretch.start();
         let layers = |s: &Section| -> Vec<Vec<String>> {
@@ -116,6 +127,25 @@ fn shared_deflection(section: &Section, name: &str, merged: usize, at: &str) -> 
             "a layer whose joints have a transverse modulus, or a hinge through all layers",
         )
     })
+}
+
+/// At each place at least one layer must be there.
+fn uncovered(plan: &MemberPlan) -> Option<Problem> {
+    let section = plan.section();
+    let mut ends: Vec<f64> = section.places();
+    ends.extend([0.0, plan.length().si()]);
+    ends.retain(|x| *x >= 0.0 && *x <= plan.length().si());
+    ends.sort_by(f64::total_cmp);
+    let bare = ends.windows(2).find(|ends| {
+        let middle = f64::midpoint(ends[0], ends[1]);
+        ends[1] > ends[0] && (0..section.placed().len()).all(|p| !section.is_there(p, middle))
+    })?;
+    Some(Problem::new(
+        ErrorKind::Position,
+        "section.layers",
+        format!("no layer at all between {} m and {} m", bare[0], bare[1]),
+        "at least one layer at each place of the member",
+    ))
 }
 
 /// A member that is free sideways has one section in one layer, without axial force.

@@ -354,7 +354,7 @@ impl Layout {
                     ErrorKind::Duplicate,
                     at,
                     format!("one movement that is held or released twice at {x} m"),
-                    "each movement held once: rotation, and a layer at no more than one height",
+                    "each movement held, or released, once",
                 )
             }
         }

@@ -133,8 +133,9 @@ impl Response {
     /// layers with deflections of their own, that of the first layer.
     ///
     /// # Errors
-    /// [`crate::ErrorKind::Lookup`] if there is no such combination; [`crate::ErrorKind::Numerical`]
-    /// if one-way supports or clearances find no equilibrium under it. So do all results.
+    /// [`crate::ErrorKind::Lookup`] if there is no such combination. Of one-way supports and
+    /// clearances, [`crate::ErrorKind::Mechanism`] if the member leaves its supports under it and
+    /// [`crate::ErrorKind::Numerical`] if no equilibrium is found. So do all results.
     pub fn deflection(&self, combination: &str, time: Time) -> Result<Field<Length>> {
         Ok(Field::new(self.deflection_line(combination, time)?))
     }

@@ -37,6 +37,9 @@ pub(crate) struct Beam {
     pub(super) loose: Vec<usize>,
 }
 
+/// Below this (lambda L)^2 a joint is loose: its forces are lost in the rounding of all others.
+const LOOSE: f64 = 1e-11;
+
 /// How an inner station is tied into the chain.
 #[derive(Clone, Debug, PartialEq)]
 pub(super) enum Tie {
@@ -78,7 +81,8 @@ impl Beam {
         let half = states.half();
         let scale = scale(states, &places, &stations, laws);
         let units: Vec<f64> = (0..2 * half).map(|i| scale.unit(i)).collect();
-        let loose = loose(states, &stations, laws);
+        let length = places[places.len() - 1] - places[0];
+        let loose = loose(states, length, &stations, laws);
         for &joint in &loose {
             let mut direction = vec![0.0; half];
             direction[states.slip(joint)] = 1.0;
@@ -313,16 +317,20 @@ fn hold_in(relation: &mut Relation, half: usize, displacement: usize) {
     relation.right[row * all + displacement] = 1.0;
 }
 
-/// Joints that carry nothing anywhere and whose slip no hold touches.
-fn loose(states: States, stations: &[Station], laws: &[PieceLaw]) -> Vec<usize> {
+/// Joints that carry nothing that could be told from nothing, and whose slip no hold touches.
+fn loose(states: States, length: f64, stations: &[Station], laws: &[PieceLaw]) -> Vec<usize> {
     let touched = |slip: usize| {
         let mut holds = stations.iter().flat_map(|station| &station.holds);
         holds.any(|hold| hold.direction[slip] != 0.0 && hold.stiffness > 0.0)
     };
     let carries = |slip: usize| {
-        laws.iter()
-            .flat_map(PieceLaw::laws)
-            .any(|law| law.joints[(slip, slip)] > 0.0)
+        laws.iter().flat_map(PieceLaw::laws).any(|law| {
+            let modulus = law.joints[(slip, slip)];
+            let gradient = slip - states.strands;
+            // S of the joint alone: with it (lambda L)^2 = k L^2/S.
+            let own = law.stiffness[(gradient, gradient)];
+            modulus * length * length > LOOSE * own
+        })
     };
     (0..states.slips)
         .filter(|&j| !touched(states.slip(j)) && !carries(states.slip(j)))

@@ -53,8 +53,6 @@ pub(crate) struct PlainJoint {
 pub(crate) struct Law {
     pub(crate) states: States,
     pub(crate) layers: Vec<PlainLayer>,
-    /// Per layer its a_i over the gradients (displacements without deflections).
-    factors: Vec<Vec<f64>>,
     /// C over the gradients.
     pub(crate) stiffness: DMatrix<f64>,
     /// Forces per length for displacements, over all displacements.
@@ -105,7 +103,6 @@ impl Law {
             .collect();
         Self {
             states,
-            factors,
             stiffness,
             joints: joint_stiffness(states, joints),
             shear_flexibility,

@@ -182,9 +182,9 @@ impl ModePiece {
             *sum += term;
         }
         lines.gained.polynomial = series.gained;
-        let integral = &mut lines.gained_integral.polynomial;
-        for i in 1..TAYLOR {
-            integral[i] = self.length * series.gained[i - 1] / count(i);
+        let integral = &mut lines.gained_integral.polynomial[1..];
+        for (i, (sum, term)) in integral.iter_mut().zip(&series.gained).enumerate() {
+            *sum = self.length * term / count(i + 1);
         }
         lines
     }

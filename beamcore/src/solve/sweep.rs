@@ -14,7 +14,7 @@ use super::link::{Link, Room};
 use super::relation::Relation;
 
 /// A pivot smaller than this, against the greatest number in its equations, is a zero.
-pub(super) const SMALLEST_PIVOT: f64 = 1e-11;
+pub(super) const SMALLEST_PIVOT: f64 = 1e-13;
 
 /// The equations do not determine the states; holds a motion that nothing resists: the scaled
 /// states of all nodes, one after the other.

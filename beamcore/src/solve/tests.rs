@@ -99,7 +99,7 @@ fn uniform_load_on_a_simple_span() {
     let m = q * l * l / 8.0;
     near(-at(&beam, &solved, 0, B, 0.5), m, m, "moment");
     near(solved.reactions[0], q * l / 2.0, q * l / 2.0, "reaction");
-    assert!(solved.residual < 1e-14, "{}", solved.residual);
+    assert!(solved.residual < 2e-13, "{}", solved.residual);
 }
 
 #[test]
@@ -122,7 +122,7 @@ fn point_load_on_a_fixed_span() {
         w,
         "deflection under the load",
     );
-    assert!(solved.residual < 1e-13, "{}", solved.residual);
+    assert!(solved.residual < 2e-13, "{}", solved.residual);
 }
 
 #[test]
@@ -146,7 +146,7 @@ fn triangular_load_and_couple_on_a_simple_span() {
     near(-at(&beam, &solved, 0, B, 0.0), c, c, "moment at the couple");
     let w = c * l * l / (16.0 * ei);
     near(at(&beam, &solved, 0, W, 0.5), w, w, "deflection");
-    assert!(solved.residual < 1e-13, "{}", solved.residual);
+    assert!(solved.residual < 2e-13, "{}", solved.residual);
 }
 
 #[test]
@@ -245,7 +245,7 @@ fn a_slipping_joint_between_two_layers() {
     assert!((at(&beam, &solved, 0, 0, 0.5) - 11.139e-3).abs() < 1e-6);
     assert!((at(&beam, &solved, 0, force, 0.5) + 62906.0).abs() < 1.0);
     assert!((at(&beam, &solved, 0, slip, 0.0).abs() - 0.272e-3).abs() < 1e-6);
-    assert!(solved.residual < 1e-13, "{}", solved.residual);
+    assert!(solved.residual < 2e-12, "{}", solved.residual);
 }
 
 #[test]
