@@ -39,8 +39,9 @@ impl Beam {
             reactions: Vec::new(),
             residual: 0.0,
         };
-        self.centre_loose(&mut solved);
         residual::complete(self, load, &mut solved, &defects);
+        // Only now, for the conditions hold the slip of such joints at one place.
+        self.centre_loose(&mut solved);
         solved
     }
 
