@@ -1,8 +1,9 @@
 //! The plan of a member: everything given, nothing checked yet.
 
 use super::{
-    Action, Anchor, Hinge, Member, OwnCombination, PartialFactors, SectionChange, ShearModel,
-    Support, checks, checks_parts, checks_places, checks_sections, combination, sections,
+    Action, Anchor, Hinge, Member, OwnCombination, PartialFactors, Release, SectionChange,
+    ShearModel, Support, checks, checks_parts, checks_places, checks_sections, combination,
+    sections,
 };
 use crate::error::{Error, Problem, Result};
 use crate::section::{JointKind, Section, Sideways};
@@ -215,11 +216,14 @@ impl MemberPlan {
         self.pitch
     }
 
-    /// The same plan with all joints of its sections of one kind, without anchors, gaps kept.
+    /// The same plan with all joints of its sections of one kind, without anchors and hinges of
+    /// single layers, gaps kept.
     pub(crate) fn with_joints(&self, kind: &JointKind) -> Result<Self> {
         let mut plan = self.clone();
         plan.section = self.section.with_joints(kind)?;
         plan.anchors = Vec::new();
+        plan.hinges
+            .retain(|hinge| matches!(hinge.release(), Release::Moment(None) | Release::Shear));
         for change in &mut plan.changes {
             let (SectionChange::Step { section, .. } | SectionChange::Taper { section, .. }) =
                 change;

@@ -22,6 +22,8 @@ impl Motion {
     /// Reads the motion from the scaled states at the nodes, `places` being those of the nodes.
     pub(super) fn new(places: &[f64], motion: &[f64], states: States, scale: &Scale) -> Self {
         let all = states.all();
+        // The motion ends where the elimination found it.
+        let places = &places[..motion.len() / all];
         let state = |node: usize, i: usize| motion[node * all + i];
         let peak =
             |i: usize| (0..places.len()).fold(0.0_f64, |size, node| size.max(state(node, i).abs()));
