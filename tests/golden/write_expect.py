@@ -282,13 +282,16 @@ def main() -> int:
     from haunched_beam import haunched_beam
     from lift_off import lift_off
     from rafter import rafter
+    from sandwich_strips import bimetal_strip, sandwich_panel
+    from three_layers import three_layers
     from screwed_floor import screwed_floor
     from side_plates import side_plates
     from concrete_timber import clearance_floor, concrete_timber, shrinking_topping
 
     cases = [flitch(), brass_core(), *handbook(), two_span(), slab_strip(), roof_beam(), odd_section(), shrinking_slab(), angle_forces(),
              concrete_timber(), shrinking_topping(), clearance_floor(), screwed_floor(),
-             side_plates(), rafter(), lift_off(), haunched_beam()]
+             side_plates(), rafter(), lift_off(), haunched_beam(),
+             three_layers(), sandwich_panel(), bimetal_strip()]
     stale = []
     for case in cases:
         file = HERE / f"{case.name}.expect"
