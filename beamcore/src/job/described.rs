@@ -3,8 +3,17 @@
 use super::document_action::{ActionDocument, ActionKindDocument};
 use super::document_load::LoadDocument;
 use super::document_member::{
-    AnchorDocument, ChangeDocument, HingeDocument, SupportDocument, SupportKindDocument,
+    AnchorDocument, ChangeDocument, HingeDocument, MemberDocument, SupportDocument,
+    SupportKindDocument,
 };
+use super::written::Written;
+
+impl MemberDocument {
+    /// The pitch as it was written, for example `20 deg`.
+    pub(crate) fn pitch(&self) -> Option<&str> {
+        self.pitch.as_ref().map(Written::text)
+    }
+}
 
 impl SupportDocument {
     /// For example `pin at 0 m (holds deflection and axis)`.

@@ -288,7 +288,11 @@ fn order(tendon: &Tendon, at: &str) -> Vec<Problem> {
         return vec![Problem::new(
             ErrorKind::Missing,
             base,
-            format!("{} points", points.len()),
+            if points.is_empty() {
+                "no points"
+            } else {
+                "one point"
+            },
             "at least two points: both anchors",
         )];
     }

@@ -30,7 +30,7 @@ pub(super) fn assumptions(job: &Job) -> Vec<String> {
                            it there as they hold it upright; loads act through the shear centre"
             .into(),
     });
-    notes.extend(sections(member));
+    notes.extend(sections(job));
     notes.extend(assumptions_loads::notes(member));
     let strained = |part: &&PlacedPart| part.initial_strain() != InitialStrain::NONE;
     for part in member.parts().into_iter().filter(strained) {
@@ -81,7 +81,8 @@ fn shear(member: &Member) -> String {
 }
 
 /// What changes of section and a pitch mean.
-fn sections(member: &Member) -> Vec<String> {
+fn sections(job: &Job) -> Vec<String> {
+    let member = job.member();
     let mut notes = Vec::new();
     if !member.changes().is_empty() {
         notes.push(
@@ -98,7 +99,7 @@ fn sections(member: &Member) -> Vec<String> {
                 .into(),
         );
     }
-    if let Some(pitch) = member.pitch() {
+    if let Some(pitch) = job.document().member.pitch() {
         notes.push(format!(
             "The member rises to the right by {pitch}: lengths are measured along it, gravity \
              loads act downward, deflections are square to it, and supports hold the vertical \

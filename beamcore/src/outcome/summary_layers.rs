@@ -20,16 +20,21 @@ pub(super) fn joints(page: &mut Page, outcome: &OutcomeDocument) {
             kind(joint),
             joint.lower,
             joint.upper,
-            figure(joint.z_m * 1e3, 1),
+            figure(height(joint.z_m) * 1e3, 1),
             match joint.clearance_m {
                 Some(clearance) => format!(", clearance {} mm", figure(clearance * 1e3, 2)),
                 None => String::new(),
             }
         ));
         for stretch in &joint.stretches {
-            page.line(&moduli(stretch));
+            moduli(page, stretch);
         }
     }
+}
+
+/// A height without the rounding of coordinates: below a nanometre it is zero.
+fn height(z: f64) -> f64 {
+    if z.abs() < 1e-9 { 0.0 } else { z }
 }
 
 fn kind(joint: &JointOutcome) -> String {
@@ -45,22 +50,28 @@ fn kind(joint: &JointOutcome) -> String {
 }
 
 /// The moduli of a joint over one stretch.
-fn moduli(stretch: &JointStretchOutcome) -> String {
+fn moduli(page: &mut Page, stretch: &JointStretchOutcome) {
     let mpa = |value: f64| figure(value / 1e6, 2);
-    let square = match (
+    let mut row = |what: &str, now: f64, end: f64| {
+        page.line(&format!(
+            "  {} m to {} m: {what} {} N/mm2 now, {} N/mm2 final",
+            figure(stretch.from_m, 3),
+            figure(stretch.to_m, 3),
+            mpa(now),
+            mpa(end)
+        ));
+    };
+    row(
+        "slip modulus",
+        stretch.modulus_initial_N_per_m2,
+        stretch.modulus_final_N_per_m2,
+    );
+    if let (Some(now), Some(end)) = (
         stretch.transverse_initial_N_per_m2,
         stretch.transverse_final_N_per_m2,
     ) {
-        (Some(now), Some(end)) => format!("; square to it {} and {}", mpa(now), mpa(end)),
-        _ => String::new(),
-    };
-    format!(
-        "  {} m to {} m: slip modulus {} N/mm2 now, {} N/mm2 final{square}",
-        figure(stretch.from_m, 3),
-        figure(stretch.to_m, 3),
-        mpa(stretch.modulus_initial_N_per_m2),
-        mpa(stretch.modulus_final_N_per_m2)
-    )
+        row("square to it", now, end);
+    }
 }
 
 /// What happens in joints and layers under the combinations that are judged.

@@ -14,12 +14,16 @@ pub(super) fn description(page: &mut Page, outcome: &OutcomeDocument) {
     let mass = member
         .mass_kg
         .map_or_else(String::new, |mass| format!(", {} kg", figure(mass, 0)));
+    let pitch = outcome.job.member.pitch();
+    let pitch = pitch.map_or_else(String::new, |pitch| {
+        format!(", rising to the right by {pitch}")
+    });
     let count = match member.quantity {
         1 => String::new(),
         many => format!(", {many} of them"),
     };
     page.line(&format!(
-        "Length {} m{mass}{count}",
+        "Length {} m{pitch}{mass}{count}",
         figure(member.length_m, 3)
     ));
     for support in &outcome.job.member.supports {

@@ -24,7 +24,7 @@ pub(super) fn warnings(member: &Member, document: &OutcomeDocument) -> Vec<Strin
         }
     }
     notes.extend(uplifts(member, document));
-    notes.extend(warnings_layers::parting(document));
+    notes.extend(warnings_layers::parting(member, document));
     notes.extend(warnings_layers::lifted(member, document));
     notes.extend(warnings_layers::slender(member, document));
     notes.extend(warnings_layers::bands(member));

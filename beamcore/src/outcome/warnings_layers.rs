@@ -4,7 +4,7 @@ use super::document::OutcomeDocument;
 use super::figure::figure;
 use super::notes::each;
 use crate::member::Member;
-use crate::section::{Band, Joint, JointKind, Slip, Spacing};
+use crate::section::{Band, Joint, JointKind, PlacedJoint, Section, Slip, Spacing};
 use crate::time::Time;
 use crate::units::Length;
 
@@ -15,11 +15,37 @@ const NO_TENSION: f64 = 1e-9;
 /// no source).
 const SLENDER: f64 = 0.1;
 
+/// Whether one layer of a joint lies on the other, with nothing between them that pulls them
+/// together: of layers side by side, and across a transverse modulus, what passes square to the
+/// member is no pressure.
+fn can_open(section: &Section, placed: &PlacedJoint) -> bool {
+    let slack = placed.distance() + Length::from_mm(0.1);
+    let ends = |name: &str| -> Vec<(Length, Length)> {
+        let layer = section.layers().iter().find(|layer| layer.name() == name);
+        let names = layer.map_or(&[][..], |layer| layer.parts());
+        let parts = section.placed().iter();
+        parts
+            .filter(|part| names.iter().any(|name| name == part.name()))
+            .map(|part| (part.bottom(), part.top()))
+            .collect()
+    };
+    let z = placed.z();
+    placed.joint().transverse_modulus().is_none()
+        && ends(placed.joint().lower())
+            .iter()
+            .all(|(_, top)| *top <= z + slack)
+        && ends(placed.joint().upper())
+            .iter()
+            .all(|(bottom, _)| *bottom >= z - slack)
+}
+
 /// Joints that open: the worst combination of each.
-pub(super) fn parting(document: &OutcomeDocument) -> Vec<String> {
-    let joints = document.section.joints.iter();
+pub(super) fn parting(member: &Member, document: &OutcomeDocument) -> Vec<String> {
+    let section = member.section();
+    let joints = document.section.joints.iter().zip(section.placed_joints());
     joints
-        .filter_map(|joint| {
+        .filter(|(_, placed)| can_open(section, placed))
+        .filter_map(|(joint, _)| {
             let found = each(document).filter_map(|(combination, time, results)| {
                 let result = results.joints.iter().find(|j| j.name == joint.name)?;
                 let (least, peak) = (&result.pressure.minimum, &result.pressure.greatest);
