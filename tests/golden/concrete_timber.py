@@ -3,6 +3,7 @@ a joist, by the closed forms of slipping_layers.py."""
 
 import math
 
+from number_tools import greatest
 from slipping_layers import Layer, Pair, moments, pressure, strained, stresses, uniform
 from write_expect import Case
 
@@ -20,22 +21,6 @@ def pair(time: str) -> Pair:
                 400e6 / 3 / joint)
 
 
-def greatest(line) -> float:
-    """The greatest value over the left half, which the right one mirrors: a scan, then a search that
-    narrows down to the place."""
-    steps = 600
-    places = [LENGTH / 2 * i / steps for i in range(steps + 1)]
-    best = max(range(steps + 1), key=lambda i: line(places[i]))
-    low, high = places[max(best - 1, 0)], places[min(best + 1, steps)]
-    for _ in range(200):
-        third = (high - low) / 3
-        if line(low + third) < line(high - third):
-            low += third
-        else:
-            high -= third
-    return max(line((low + high) / 2), line(places[best]))
-
-
 def layers(case: Case, at: str, p: Pair, middle, end, peak_slip: float) -> None:
     """Axial forces, moments and stresses at midspan; slip and flow at the left end."""
     upper, lower = moments(p, middle)
@@ -48,8 +33,8 @@ def layers(case: Case, at: str, p: Pair, middle, end, peak_slip: float) -> None:
             state = uniform(p, LENGTH, Q, x)
             return stresses(layer, sign * state.n, moments(p, state)[index])
 
-        tension = greatest(lambda x: max(edges(x)))
-        compression = -greatest(lambda x: -min(edges(x)))
+        tension = greatest(lambda x: max(edges(x)), 0.0, LENGTH / 2)
+        compression = -greatest(lambda x: -min(edges(x)), 0.0, LENGTH / 2)
         peak = max(abs(tension), abs(compression))
         case.add(f'{at}.stresses["{name}"].tension.value_Pa', tension, CLOSE, peak)
         case.add(f'{at}.stresses["{name}"].compression.value_Pa', compression, CLOSE, peak)

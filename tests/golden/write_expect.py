@@ -255,10 +255,15 @@ def main() -> int:
     from shrinking_slab import shrinking_slab
     from angle_forces import angle_forces
     from slab_strip import slab_strip
+    from lift_off import lift_off
+    from rafter import rafter
+    from screwed_floor import screwed_floor
+    from side_plates import side_plates
     from concrete_timber import clearance_floor, concrete_timber, shrinking_topping
 
     cases = [flitch(), brass_core(), *handbook(), two_span(), slab_strip(), roof_beam(), odd_section(), shrinking_slab(), angle_forces(),
-             concrete_timber(), shrinking_topping(), clearance_floor()]
+             concrete_timber(), shrinking_topping(), clearance_floor(), screwed_floor(),
+             side_plates(), rafter(), lift_off()]
     stale = []
     for case in cases:
         file = HERE / f"{case.name}.expect"
