@@ -255,6 +255,7 @@ def main() -> int:
     from shrinking_slab import shrinking_slab
     from angle_forces import angle_forces
     from slab_strip import slab_strip
+    from haunched_beam import haunched_beam
     from lift_off import lift_off
     from rafter import rafter
     from screwed_floor import screwed_floor
@@ -263,7 +264,7 @@ def main() -> int:
 
     cases = [flitch(), brass_core(), *handbook(), two_span(), slab_strip(), roof_beam(), odd_section(), shrinking_slab(), angle_forces(),
              concrete_timber(), shrinking_topping(), clearance_floor(), screwed_floor(),
-             side_plates(), rafter(), lift_off()]
+             side_plates(), rafter(), lift_off(), haunched_beam()]
     stale = []
     for case in cases:
         file = HERE / f"{case.name}.expect"
