@@ -66,6 +66,7 @@ N 62906 N, end flow 36.27 N/mm, slip 0.272 mm; long term with a joint creep of 1
         case.add(f"section.{time}.bending_stiffness_yy_Nm2", p.ei_rigid, CLOSE)
     case.add('section.joints["screws"].stretches[0].modulus_final_N_per_m2', 400e6 / 3 / 2.2, "1e-14")
     case.fields(SUPPORTS, PARTS)
+    case.layered(["screws"], PARTS)
     return case
 
 
@@ -91,6 +92,7 @@ independent script: N -15645 N, w 6.291 mm, end slip 0.1892 mm.""")
     case.add(f'{at}.layers["joist"].axial.greatest.value_N', -15645.0, "4e-5")
     case.add(f'{at}.joints["screws"].slip.greatest.value_m', 0.1892e-3, "3e-4")
     case.fields(SUPPORTS, PARTS)
+    case.layered(["screws"], PARTS)
     return case
 
 
@@ -172,4 +174,5 @@ carries (concrete_timber.py, own derivation). Rounded value of an independent sc
     case.add(f'{at}.joints["screws"].slip.left_m', -(flow / p.k + c), "1e-9")
     case.add('combinations["quasi-permanent"].initial.deflection.greatest.value_m', 16.6e-3, "5e-3")
     case.fields(SUPPORTS, PARTS)
+    case.layered(["screws"], PARTS)
     return case

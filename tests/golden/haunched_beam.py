@@ -117,4 +117,5 @@ a temperature difference dT bends a free member by alpha dT/h. Load and sinking 
         case.add(f"member.changes[0].{time}.bending_stiffness_yy_Nm2",
                  E / soft * WIDTH * DEEP**3 / 12, "1e-12")
     case.fields(["wall", "column", "end"], ["beam"])
+    case.more(["rotation.greatest.value_rad"])
     return case

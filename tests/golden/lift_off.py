@@ -52,4 +52,5 @@ the long span lifts the overhang off its post; psi_2 is 0, and nothing creeps.""
             stress = max(-hogging, end**2 / (2 * long)) * mm(120) / (EI / 11_000_000_000)
             case.exact(f'{at}.stresses["beam"].tension.value_Pa', stress)
     case.fields(["post", "middle", "end"], ["beam"])
+    case.more(["steps"])
     return case

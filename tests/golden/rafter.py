@@ -77,4 +77,5 @@ snow is permanent, and psi_2 of the snow is 0.""")
             case.add(f'{at}.stresses["rafter"].compression.value_Pa', press, CLOSE, peak)
     case.add("member.pitch_rad", PITCH, "1e-15")
     case.fields(["foot", "top"], ["rafter"])
+    case.more(["axial.greatest.value_N", 'reactions["foot"].along_N'])
     return case

@@ -110,4 +110,8 @@ Final values: (combination - quasi-permanent share) with short-term moduli plus 
         case.add(f"{at}.modulus_initial_N_per_m2", k, "1e-14")
         case.add(f"{at}.modulus_final_N_per_m2", k / 2, "1e-14")
     case.fields(["left", "right"], ["joist", "slab"])
+    case.layered(["screws"], ["joist", "slab"])
+    for time in ["initial", "final"]:
+        for name in ["degree", "effective_stiffness_Nm2"]:
+            case.bits(f'combinations["characteristic"].{time}.composite_action.{name}')
     return case

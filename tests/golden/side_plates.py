@@ -88,5 +88,7 @@ the plates hang on their bolts.""")
             case.add(f'{at}.stresses["{plate}"].tension.value_Pa',
                      of_plates / 2 * 0.1 / (0.005 * 0.2**3 / 12), CURVED)
             case.add(f'{at}.reactions["{side}"].force_N', Q * SPAN / 2, CLOSE)
-    case.fields(["left", "right"], ["joist", "left plate", "right plate"])
+    names = ["joist", "left plate", "right plate"]
+    case.fields(["left", "right"], names)
+    case.layered(["left bolts", "right bolts"], names, deflections=True)
     return case

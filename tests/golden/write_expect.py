@@ -67,6 +67,30 @@ class Case:
                     self.bits(f'{at}.stresses["{part}"].compression.value_Pa')
         self.bits("accuracy.residual")
 
+    def layered(self, joints: list[str], layers: list[str], deflections: bool = False) -> None:
+        """Joints and layers, compared as bits."""
+        for at in self.states():
+            for joint in joints:
+                for end in ["slip.greatest.value_m", "slip.left_m", "flow.greatest.value_N_per_m",
+                            "pressure.minimum.value_N_per_m"]:
+                    self.bits(f'{at}.joints["{joint}"].{end}')
+            for layer in layers:
+                self.bits(f'{at}.layers["{layer}"].axial.greatest.value_N')
+                self.bits(f'{at}.layers["{layer}"].moment.greatest.value_Nm')
+                if deflections:
+                    self.bits(f'{at}.layers["{layer}"].deflection.greatest.value_m')
+
+    def more(self, endings: list[str]) -> None:
+        """More paths under every combination at both times, compared as bits."""
+        for at in self.states():
+            for ending in endings:
+                self.bits(f"{at}.{ending}")
+
+    @staticmethod
+    def states() -> list[str]:
+        return [f'combinations["{combination}"].{time}'
+                for combination in COMBINATIONS for time in ["initial", "final"]]
+
     def text(self) -> str:
         return "\n".join(self.lines) + "\n"
 
