@@ -2,6 +2,7 @@
 
 use crate::convert;
 use crate::error::OrRaise;
+use crate::layer::LayerOrName;
 use crate::load::Load;
 use crate::made::{Made, Recipe, Reduced};
 use crate::operand::Number;
@@ -37,6 +38,7 @@ struct Given<'a> {
     favourable: bool,
     duration: Option<member::LoadDuration>,
     start: Option<Duration>,
+    on: Option<String>,
 }
 
 impl Given<'_> {
@@ -67,8 +69,12 @@ impl Given<'_> {
             keywords.set_item("start", Quantity::of(start))?;
             action = action.starting(start);
         }
+        if let Some(layer) = &self.on {
+            keywords.set_item("on", layer)?;
+            action = action.on(layer);
+        }
         let recipe = Recipe::call(py, function, PyTuple::new(py, arguments)?)?.with(keywords);
-        let loads = self.loads.iter().map(|load| load.get().0.inner);
+        let loads = self.loads.iter().map(|load| load.get().0.inner.clone());
         Ok(Action(Made::new(
             loads.fold(action, member::Action::load),
             recipe,
@@ -111,6 +117,12 @@ impl Action {
         self.0.start().map(Quantity::of)
     }
 
+    /// The name of the layer that its loads enter; None if none was named.
+    #[getter]
+    fn on(&self) -> Option<&str> {
+        self.0.layer()
+    }
+
     /// The combination factors of a variable action; None for a permanent one.
     #[getter]
     fn factors(&self) -> Option<CombinationFactors> {
@@ -142,13 +154,16 @@ impl Action {
 ///   (from a week), "short" (less), "instantaneous"; no result depends on it
 /// - start: when it starts, counted from the first day of the member; the final state takes the
 ///   creep of the whole life
+/// - on: the layer, or its name, that all its loads enter; without it, transverse loads enter the
+///   first layer. It matters where layers have deflections of their own, and where forces act along
+///   the member
 ///
 /// >>> permanent("floor", self_weight(), uniform(1.2*kN/m)).kind
 /// 'permanent'
 /// >>> permanent("floor", uniform(1.2*kN/m), duration="permanent", start=28*day).start
 /// 28 d
 #[pyfunction]
-#[pyo3(signature = (name, *loads, favourable=false, duration=None, start=None))]
+#[pyo3(signature = (name, *loads, favourable=false, duration=None, start=None, on=None))]
 #[expect(
     clippy::needless_pass_by_value,
     reason = "Python's arguments are taken as owned"
@@ -160,6 +175,7 @@ fn permanent(
     favourable: bool,
     duration: Option<LoadDuration>,
     start: Option<&Bound<'_, PyAny>>,
+    on: Option<LayerOrName>,
 ) -> PyResult<Action> {
     let given = Given {
         name,
@@ -169,6 +185,7 @@ fn permanent(
         start: start
             .map(|start| convert::read(start, "start"))
             .transpose()?,
+        on: on.map(LayerOrName::into_name),
     };
     given.made(ActionKind::Permanent, "permanent", &PyDict::new(py))
 }
@@ -189,6 +206,9 @@ fn permanent(
 ///   (from a week), "short" (less), "instantaneous"; no result depends on it
 /// - start: when it starts, counted from the first day of the member; the final state takes the
 ///   creep of the whole life
+/// - on: the layer, or its name, that all its loads enter; without it, transverse loads enter the
+///   first layer. It matters where layers have deflections of their own, and where forces act along
+///   the member
 ///
 /// >>> variable("store", uniform(3*kN/m), category="E").factors
 /// CombinationFactors(psi_0=1.0, psi_1=0.9, psi_2=0.8)
@@ -197,7 +217,7 @@ fn permanent(
 #[pyfunction]
 #[pyo3(signature = (
     name, *loads, category=None, psi_0=None, psi_1=None, psi_2=None, favourable=false,
-    duration=None, start=None
+    duration=None, start=None, on=None
 ))]
 #[expect(clippy::too_many_arguments, reason = "each is a keyword in Python")]
 #[expect(
@@ -215,6 +235,7 @@ fn variable(
     favourable: bool,
     duration: Option<LoadDuration>,
     start: Option<&Bound<'_, PyAny>>,
+    on: Option<LayerOrName>,
 ) -> PyResult<Action> {
     let keywords = PyDict::new(py);
     let factors = match (category, psi_0, psi_1, psi_2) {
@@ -247,6 +268,7 @@ fn variable(
         start: start
             .map(|start| convert::read(start, "start"))
             .transpose()?,
+        on: on.map(LayerOrName::into_name),
     };
     given.made(ActionKind::Variable(factors), "variable", &keywords)
 }

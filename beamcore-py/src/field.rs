@@ -6,7 +6,9 @@ use crate::made::{Made, Reduced};
 use crate::quantity::Quantity;
 use crate::run::run;
 use beamcore::field;
-use beamcore::units::{Angle, Force, Length, Moment, Stress};
+use beamcore::units::{
+    Angle, Curvature, Force, Length, LineLoad, Moment, Quantity as CoreQuantity, ShearFlow, Stress,
+};
 use numpy::{PyArray1, PyReadonlyArray1};
 use pyo3::exceptions::{PyAttributeError, PyTypeError};
 use pyo3::prelude::*;
@@ -39,10 +41,17 @@ record! {
 pub(crate) enum Line {
     /// Downward or sideways.
     Movement(field::Field<Length>),
+    /// Of the axis or of the section.
     Slope(field::Field<Angle>),
-    Shear(field::Field<Force>),
+    Curvature(field::Field<Curvature>),
+    /// Across or along the member.
+    Force(field::Field<Force>),
     Moment(field::Field<Moment>),
     Stress(field::Field<Stress>),
+    /// Along a joint.
+    Flow(field::Field<ShearFlow>),
+    /// Square to a joint.
+    Pressure(field::Field<LineLoad>),
 }
 
 /// The same expression for the field inside any kind of line.
@@ -51,9 +60,12 @@ macro_rules! each {
         match $line {
             Line::Movement($field) => $result,
             Line::Slope($field) => $result,
-            Line::Shear($field) => $result,
+            Line::Curvature($field) => $result,
+            Line::Force($field) => $result,
             Line::Moment($field) => $result,
             Line::Stress($field) => $result,
+            Line::Flow($field) => $result,
+            Line::Pressure($field) => $result,
         }
     };
 }
@@ -64,9 +76,11 @@ impl Line {
         match self {
             Self::Movement(_) => "m",
             Self::Slope(_) => "rad",
-            Self::Shear(_) => "N",
+            Self::Curvature(_) => "per_m",
+            Self::Force(_) => "N",
             Self::Moment(_) => "Nm",
             Self::Stress(_) => "Pa",
+            Self::Flow(_) | Self::Pressure(_) => "N_per_m",
         }
     }
 
@@ -80,18 +94,22 @@ impl Line {
 /// A quantity along the member, exact between stations and evaluated anywhere.
 ///
 /// Deflection is positive downward, movement sideways towards positive y, slope is dw/dx, shear
-/// force is V = dM/dx, a moment is positive where it stretches the bottom, a tensile stress is
-/// positive. At a support or a point load a shear force has two values.
+/// force is V = dM/dx, a moment is positive where it stretches the bottom, a tensile stress or axial
+/// force is positive, slip is that of the upper layer over the lower one, and flow has its sign. At
+/// a support or a point load a shear force has two values.
 #[pyclass(frozen, module = "beamcore")]
 #[derive(Debug)]
 pub(crate) struct Field(pub(crate) Made<Line>);
 
-impl Field {
-    fn extreme(value: Quantity, at: Length) -> Extreme {
-        let at = Quantity::of(at);
-        Extreme { value, at }
+/// An extreme of a field of the core.
+pub(crate) fn extreme<Q: CoreQuantity>(found: field::Extreme<Q>) -> Extreme {
+    Extreme {
+        value: Quantity::of(found.value),
+        at: Quantity::of(found.at),
     }
+}
 
+impl Field {
     /// The values as an array, if `unit_name` is the unit of this field.
     fn array<'py>(&self, unit_name: &str, x_m: &Bound<'py, PyAny>) -> Values<'py> {
         let right = self.0.unit_name();
@@ -127,28 +145,19 @@ impl Field {
     /// The value of greatest magnitude, with its sign and place; the leftmost of equals.
     #[getter]
     fn greatest(&self) -> Extreme {
-        each!(&self.0.inner, field => {
-            let peak = field.greatest();
-            Self::extreme(Quantity::of(peak.value), peak.at)
-        })
+        each!(&self.0.inner, field => extreme(field.greatest()))
     }
 
     /// The algebraically greatest value with its place; the leftmost of equals.
     #[getter]
     fn maximum(&self) -> Extreme {
-        each!(&self.0.inner, field => {
-            let peak = field.maximum();
-            Self::extreme(Quantity::of(peak.value), peak.at)
-        })
+        each!(&self.0.inner, field => extreme(field.maximum()))
     }
 
     /// The algebraically least value with its place; the leftmost of equals.
     #[getter]
     fn minimum(&self) -> Extreme {
-        each!(&self.0.inner, field => {
-            let peak = field.minimum();
-            Self::extreme(Quantity::of(peak.value), peak.at)
-        })
+        each!(&self.0.inner, field => extreme(field.minimum()))
     }
 
     /// The value at a place: where there are two, the one just right of it (at the right end of
@@ -167,18 +176,23 @@ impl Field {
         })
     }
 
-    /// Deflections (positive downward) or movements sideways (towards positive y) in m at places x
-    /// in m, of a list or an array.
+    /// Deflections (positive downward), movements sideways (towards positive y) or slips in m at
+    /// places x in m, of a list or an array.
     fn values_m<'py>(&self, x_m: &Bound<'py, PyAny>) -> Values<'py> {
         self.array("m", x_m)
     }
 
-    /// Slopes in rad at places x in m, of a list or an array.
+    /// Slopes or rotations in rad at places x in m, of a list or an array.
     fn values_rad<'py>(&self, x_m: &Bound<'py, PyAny>) -> Values<'py> {
         self.array("rad", x_m)
     }
 
-    /// Shear forces in N at places x in m, of a list or an array.
+    /// Curvatures in 1/m at places x in m, of a list or an array; positive sagging.
+    fn values_per_m<'py>(&self, x_m: &Bound<'py, PyAny>) -> Values<'py> {
+        self.array("per_m", x_m)
+    }
+
+    /// Shear forces, or axial forces (tension positive), in N at places x in m, of a list or an array.
     #[pyo3(name = "values_N")]
     fn values_n<'py>(&self, x_m: &Bound<'py, PyAny>) -> Values<'py> {
         self.array("N", x_m)
@@ -194,6 +208,12 @@ impl Field {
     #[pyo3(name = "values_Pa")]
     fn values_pa<'py>(&self, x_m: &Bound<'py, PyAny>) -> Values<'py> {
         self.array("Pa", x_m)
+    }
+
+    /// Flows or pressures in N/m at places x in m, of a list or an array.
+    #[pyo3(name = "values_N_per_m")]
+    fn values_n_per_m<'py>(&self, x_m: &Bound<'py, PyAny>) -> Values<'py> {
+        self.array("N_per_m", x_m)
     }
 
     /// The places in m where the pieces of the field meet: ends, supports, point loads, ends of

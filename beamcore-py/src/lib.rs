@@ -5,7 +5,9 @@
 mod record;
 
 mod action;
+mod band;
 mod camber;
+mod change;
 mod characteristic;
 mod classes;
 mod combination;
@@ -17,24 +19,42 @@ mod error;
 mod factors;
 mod field;
 mod forces;
+mod gamma;
+mod hinge;
 mod initial_strain;
 mod job;
+mod joint;
+mod joint_values;
+mod layer;
+mod layer_response;
 mod limit;
 mod load;
+mod load_axial;
+mod load_imposed;
 mod made;
 mod material;
 mod material_values;
 mod member;
+mod member_given;
+mod member_values;
 mod operand;
 mod outline;
 mod part;
 mod placed;
+mod placed_joint;
 mod quantity;
+mod reaction;
 mod reading;
 mod response;
+mod response_layers;
 mod run;
 mod section;
+mod section_layers;
 mod shapes;
+mod simplified;
+mod simplified_layer;
+mod simplified_span;
+mod sine_layers;
 mod span;
 mod stiffness;
 mod strength;
@@ -45,6 +65,7 @@ mod transformed;
 mod unit;
 mod word;
 
+use beamcore::section::SHEAR_STIFFNESS_DEFINITION;
 use pyo3::prelude::*;
 
 /// The compiled part of beamcore; import it from `beamcore`.
@@ -69,6 +90,12 @@ fn _core(module: &Bound<'_, PyModule>) -> PyResult<()> {
     module.add_class::<initial_strain::StrainPlane>()?;
     module.add_class::<part::Part>()?;
     module.add_class::<placed::PlacedPart>()?;
+    module.add_class::<layer::Layer>()?;
+    module.add_class::<layer::MergedLayer>()?;
+    module.add_class::<band::Band>()?;
+    module.add_class::<joint::Joint>()?;
+    module.add_class::<placed_joint::PlacedJoint>()?;
+    module.add("SHEAR_STIFFNESS_DEFINITION", SHEAR_STIFFNESS_DEFINITION)?;
     module.add_class::<section::Section>()?;
     module.add_class::<forces::SectionForces>()?;
     module.add_class::<forces::PointStress>()?;
@@ -77,7 +104,12 @@ fn _core(module: &Bound<'_, PyModule>) -> PyResult<()> {
     module.add_class::<transformed::TransformedPart>()?;
     module.add_class::<transformed::TransformedSection>()?;
     support::register(module)?;
+    change::register(module)?;
+    module.add_class::<hinge::Hinge>()?;
+    module.add_class::<hinge::Anchor>()?;
     load::register(module)?;
+    load_axial::register(module)?;
+    load_imposed::register(module)?;
     action::register(module)?;
     combination::register(module)?;
     module.add_class::<span::Span>()?;
@@ -87,6 +119,10 @@ fn _core(module: &Bound<'_, PyModule>) -> PyResult<()> {
     camber::register(module)?;
     limit::register(module)?;
     module.add_class::<reading::Reading>()?;
+    module.add_class::<reaction::Reaction>()?;
+    layer_response::register(module)?;
     module.add_class::<response::Response>()?;
+    simplified::register(module)?;
+    simplified_span::register(module)?;
     job::register(module)
 }

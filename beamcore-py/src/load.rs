@@ -1,9 +1,9 @@
 //! The class `Load`.
 
 use crate::convert::{self, Inputs};
+use crate::layer::stretch;
 use crate::made::{Made, Recipe, Reduced};
 use beamcore::member;
-use pyo3::exceptions::PyTypeError;
 use pyo3::prelude::*;
 use pyo3::types::PyTuple;
 
@@ -14,7 +14,7 @@ pub(crate) struct Load(pub(crate) Made<member::Load>);
 
 #[pymethods]
 impl Load {
-    /// What it is: "self_weight", "uniform", "partial", "trapezoidal", "area", "point" or "couple".
+    /// What it is: the name of the function that made it, as "uniform" or "temperature".
     #[getter]
     fn kind(&self) -> &'static str {
         self.0.name()
@@ -135,19 +135,7 @@ fn area<'py>(
     let mut inputs = Inputs::default();
     let pressure = inputs.read(load, "area.load")?;
     let width = inputs.read(tributary_width, "area.tributary_width")?;
-    let stretch = match (from_, to) {
-        (None, None) => Some(None),
-        (Some(from), Some(to)) => {
-            let from = inputs.read(from, "area.from")?;
-            from.zip(inputs.read(to, "area.to")?).map(Some)
-        }
-        _ => {
-            return Err(PyTypeError::new_err(
-                "area: only one of from_ and to was given; both are needed, or neither for the \
-                 whole member",
-            ));
-        }
-    };
+    let stretch = stretch(&mut inputs, "area", from_, to)?;
     let core = || {
         Some(member::Load::Area {
             load: pressure?,

@@ -7,7 +7,7 @@ macro_rules! record {
         $Name:ident { $($(#[$field_doc:meta])* $field:ident: $Type:ty,)+ }
     ) => {
         $(#[$doc])*
-        #[pyo3::pyclass(frozen, eq, get_all, module = "beamcore")]
+        #[pyo3::pyclass(frozen, eq, get_all, from_py_object, module = "beamcore")]
         #[derive(Clone, Debug, PartialEq)]
         pub(crate) struct $Name {
             $($(#[$field_doc])* pub(crate) $field: $Type,)+
@@ -16,6 +16,10 @@ macro_rules! record {
         #[pyo3::pymethods]
         impl $Name {
             #[new]
+            #[allow(
+                clippy::too_many_arguments,
+                reason = "a record is made of all of its fields"
+            )]
             const fn new($($field: $Type),+) -> Self {
                 Self { $($field),+ }
             }

@@ -11,7 +11,6 @@ use crate::part::PartOrName;
 use crate::quantity::Quantity;
 use crate::reading;
 use crate::stress::{PartStress, Utilisation};
-use crate::support::Reaction;
 use crate::time::TimeText;
 use beamcore::member;
 use beamcore::response;
@@ -59,7 +58,8 @@ impl Response {
         Ok(Combination::of(self.0.combination(name).or_raise(py)?))
     }
 
-    /// The deflection w along the member, positive downward.
+    /// The deflection w along the member, positive downward (square to a pitched member); of layers
+    /// with deflections of their own, that of the first layer.
     fn deflection(slf: &Bound<'_, Self>, combination: &str, time: TimeText) -> PyResult<Field> {
         let of = |r: &response::Response, time| r.deflection(combination, time);
         Self::field(slf, "deflection", combination, time, of, Line::Movement)
@@ -73,40 +73,42 @@ impl Response {
         Self::field(slf, "sideways", combination, time, of, Line::Movement)
     }
 
-    /// The slope dw/dx along the member, positive where the deflection grows to the right.
+    /// The slope dw/dx along the member, positive where the deflection grows to the right. With
+    /// shear it is not the rotation of the section.
     fn slope(slf: &Bound<'_, Self>, combination: &str, time: TimeText) -> PyResult<Field> {
         let of = |r: &response::Response, time| r.slope(combination, time);
         Self::field(slf, "slope", combination, time, of, Line::Slope)
     }
 
-    /// The shear force V = dM/dx along the member.
-    fn shear(slf: &Bound<'_, Self>, combination: &str, time: TimeText) -> PyResult<Field> {
-        let of = |r: &response::Response, time| r.shear(combination, time);
-        Self::field(slf, "shear", combination, time, of, Line::Shear)
+    /// The rotation of the section along the member, positive clockwise: dw/dx - V/kGA.
+    fn rotation(slf: &Bound<'_, Self>, combination: &str, time: TimeText) -> PyResult<Field> {
+        let of = |r: &response::Response, time| r.rotation(combination, time);
+        Self::field(slf, "rotation", combination, time, of, Line::Slope)
     }
 
-    /// The moment M along the member, positive where it stretches the bottom (sagging).
+    /// The curvature along the member, positive sagging, with its free part.
+    fn curvature(slf: &Bound<'_, Self>, combination: &str, time: TimeText) -> PyResult<Field> {
+        let of = |r: &response::Response, time| r.curvature(combination, time);
+        Self::field(slf, "curvature", combination, time, of, Line::Curvature)
+    }
+
+    /// The shear force V = dM/dx along the member, that of all layers.
+    fn shear(slf: &Bound<'_, Self>, combination: &str, time: TimeText) -> PyResult<Field> {
+        let of = |r: &response::Response, time| r.shear(combination, time);
+        Self::field(slf, "shear", combination, time, of, Line::Force)
+    }
+
+    /// The moment M along the member, positive where it stretches the bottom (sagging), about the
+    /// elastic centroid that the section has on the first day.
     fn moment(slf: &Bound<'_, Self>, combination: &str, time: TimeText) -> PyResult<Field> {
         let of = |r: &response::Response, time| r.moment(combination, time);
         Self::field(slf, "moment", combination, time, of, Line::Moment)
     }
 
-    /// The reaction of a support.
-    fn reaction(
-        &self,
-        py: Python<'_>,
-        combination: &str,
-        time: TimeText,
-        support: &str,
-    ) -> PyResult<Reaction> {
-        let reaction = self
-            .0
-            .reaction(combination, time.into(), support)
-            .or_raise(py)?;
-        Ok(Reaction {
-            force: Quantity::of(reaction.force),
-            couple: Quantity::of(reaction.couple),
-        })
+    /// The axial force N along the member, tension positive.
+    fn axial(slf: &Bound<'_, Self>, combination: &str, time: TimeText) -> PyResult<Field> {
+        let of = |r: &response::Response, time| r.axial(combination, time);
+        Self::field(slf, "axial", combination, time, of, Line::Force)
     }
 
     /// The normal stress in a part.
@@ -283,8 +285,9 @@ impl Response {
         reading::readings(&slf.get().0, camber, left, right, parts)
     }
 
-    /// What is left of equilibrium and continuity in the solutions, relative to their greatest
-    /// terms: the error estimate of the calculation.
+    /// The error estimate of the solutions, relative to the peak of each field: what is left of
+    /// equilibrium and continuity at the stations, and of the equations between the points of
+    /// pieces whose section changes.
     #[getter]
     fn residual(&self) -> f64 {
         self.0.residual()

@@ -4,6 +4,8 @@ use crate::convert::Inputs;
 use crate::error::OrRaise;
 use crate::forces::{PointStress, SectionForces};
 use crate::initial_strain::StrainPlane;
+use crate::joint::Joint;
+use crate::layer::Layer;
 use crate::made::{Made, Recipe, Reduced};
 use crate::part::{Part, PartOrName};
 use crate::placed::PlacedPart;
@@ -14,14 +16,22 @@ use crate::transformed::TransformedSection;
 use crate::word::Sideways;
 use beamcore::section;
 use pyo3::prelude::*;
-use pyo3::types::PyTuple;
+use pyo3::types::{PyDict, PyTuple};
 
-/// Parts joined rigidly: at one place along the member all of them share one plane of strain.
+/// The layers and joints at one place along the member.
+///
+/// The parts of a layer, and the layers that rigid joints hold together, share one plane of strain;
+/// a section of parts alone is one layer, named "section".
 ///
 /// >>> joist = Part("joist", rectangle(80*mm, 200*mm), timber("C24", service_class=1))
 /// >>> plate = Part("plate", rectangle(8*mm, 200*mm), steel("S275")).right_of(joist)
 /// >>> Section([joist, plate]).stiffness("initial").axial
 /// 512 MN
+/// >>> bolts = Joint.slipping("bolts", "wood", "steel", modulus="60 N/mm2", creep=0.6)
+/// >>> section = Section([joist, plate], joints=[bolts],
+/// ...                   layers=[Layer("wood", [joist]), Layer("steel", [plate])])
+/// >>> section.joint("bolts").width
+/// 200 mm
 #[pyclass(frozen, eq, module = "beamcore")]
 #[derive(Debug, PartialEq)]
 pub(crate) struct Section(pub(crate) Made<section::Section>);
@@ -29,9 +39,25 @@ pub(crate) struct Section(pub(crate) Made<section::Section>);
 #[pymethods]
 impl Section {
     #[new]
-    fn new(py: Python<'_>, parts: Vec<Py<Part>>) -> PyResult<Self> {
-        let core = section::Section::of(parts.iter().map(|part| part.get().0.inner.clone()));
-        let recipe = Recipe::call(py, "Section", (parts,))?;
+    #[pyo3(signature = (parts, *, layers=None, joints=None))]
+    fn new(
+        py: Python<'_>,
+        parts: Vec<Py<Part>>,
+        layers: Option<Vec<Py<Layer>>>,
+        joints: Option<Vec<Py<Joint>>>,
+    ) -> PyResult<Self> {
+        let cores = parts.iter().map(|part| part.get().0.inner.clone());
+        let core = if layers.is_none() && joints.is_none() {
+            section::Section::of(cores)
+        } else {
+            let layers = layers.iter().flatten().map(|layer| layer.get().0.clone());
+            let joints = joints.iter().flatten().map(|joint| joint.get().0.clone());
+            section::Section::layered(cores, layers, joints)
+        };
+        let keywords = PyDict::new(py);
+        keywords.set_item("layers", layers)?;
+        keywords.set_item("joints", joints)?;
+        let recipe = Recipe::call(py, "Section", (parts,))?.with(&keywords);
         Ok(Self(Made::new(core.or_raise(py)?, recipe)))
     }
 
@@ -67,7 +93,8 @@ impl Section {
         PlacedPart::of(slf, slf.get().0.part(name).or_raise(slf.py())?)
     }
 
-    /// The stiffness at a time, "initial" or "final".
+    /// The stiffness at a time, "initial" or "final", of all parts as one piece, as if every joint
+    /// were rigid.
     fn stiffness(slf: &Bound<'_, Self>, time: TimeText) -> PyResult<Stiffness> {
         let time = time.into();
         let stiffness = slf.get().0.stiffness(time);

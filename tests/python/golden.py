@@ -6,10 +6,13 @@ A line of an answer is CASE<TAB>PATH<TAB>BITS, the bits of the number as 16 hexa
 
 import struct
 import sys
-from collections.abc import Iterator
+from collections.abc import Callable, Iterator
+from functools import partial as partial_of
 from pathlib import Path
 from typing import Literal
 
+import golden_along
+import golden_layers
 import golden_odd_section
 import golden_roof_beam
 import golden_shrinking_slab
@@ -114,10 +117,30 @@ def typed() -> list[str]:
     answers += [line("roof-beam", *found) for found in golden_roof_beam.answers()]
     answers += [line("odd-section", *found) for found in golden_odd_section.answers()]
     answers += [line("shrinking-slab", *found) for found in golden_shrinking_slab.answers()]
+    for case, member, more in along():
+        response = member.solve()
+        answers += [line(case, *found) for found in stiffnesses(member.section)]
+        answers += [line(case, *found) for found in fields(member.section, member, response)]
+        answers += [line(case, *found) for reader in more for found in reader(response)]
     return answers
 
 
 Found = Iterator[tuple[str, float]]
+Reader = Callable[[Response], Found]
+
+
+def along() -> Iterator[tuple[str, Member, list[Reader]]]:
+    """Members of layers and members that change along their length, with what is read beside the
+    fields of every case."""
+    for case, member, more in [
+        ("screwed-floor", golden_layers.screwed_floor(), [golden_layers.composite_action]),
+        ("clearance-floor", golden_layers.clearance_floor(), []),
+        ("side-plates", golden_layers.side_plates(), []),
+    ]:
+        yield case, member, [partial_of(golden_layers.layered, member), *more]
+    yield "rafter", golden_along.rafter(), [golden_along.of_rafter]
+    yield "lift-off", golden_along.lift_off(), [golden_along.of_lift_off]
+    yield "haunched-beam", golden_along.haunched_beam(), [golden_along.of_haunched_beam]
 
 
 def stiffnesses(section: Section) -> Found:

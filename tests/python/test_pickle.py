@@ -11,6 +11,7 @@ import golden_roof_beam
 import golden_shrinking_slab
 import numpy as np
 import pytest
+import values_of_layers
 
 import beamcore
 from beamcore import (
@@ -109,6 +110,7 @@ VALUES: list[Any] = [
     RESPONSE.stress("fundamental", "final", "slab").greatest_tension,
     beamcore.Utilisation(0.5, 2*m),
     Problem("Unit", "a.b", "x", "y", 3),
+    *values_of_layers.VALUES,
 ]
 
 
@@ -121,7 +123,10 @@ def test_values_come_back_equal(value: Any) -> None:
     assert str(found) == str(value) or " object at 0x" in str(value)
 
 
-@pytest.mark.parametrize("value", [*VALUES, MEMBER, RESPONSE, Job.open(JOB), Job.open(JOB).solve()])
+OBJECTS = [MEMBER, RESPONSE, Job.open(JOB), Job.open(JOB).solve(), *values_of_layers.OBJECTS]
+
+
+@pytest.mark.parametrize("value", [*VALUES, *OBJECTS])
 def test_objects_are_frozen(value: Any) -> None:
     assert type(value).__module__ == "beamcore"
     for name in ("extra", *(name for name in dir(value) if not name.startswith("_"))):
@@ -166,6 +171,7 @@ FIELDS = {
     "bottom": (RESPONSE.stress("fundamental", "final", "slab").bottom, "values_Pa"),
     "centroid": (RESPONSE.stress("fundamental", "final", "slab").centroid, "values_Pa"),
     "top": (RESPONSE.stress("fundamental", "final", "slab").top, "values_Pa"),
+    **values_of_layers.FIELDS,
 }
 
 
@@ -180,12 +186,16 @@ def test_fields_come_back_with_their_bits(name: str) -> None:
 
 def test_members_and_responses_come_back() -> None:
     for _, member in (golden.two_span(), golden.slab_strip(), golden_roof_beam.roof_beam(),
-                      (ODD, ODD_MEMBER), (SHRINKING, SHRINKING_MEMBER)):
+                      (ODD, ODD_MEMBER), (SHRINKING, SHRINKING_MEMBER),
+                      (None, values_of_layers.MEMBER), (None, values_of_layers.RAFTER)):
         found = again(member)
         assert found.sideways == member.sideways
         assert found.length == member.length
         assert found.support_names == member.support_names
         assert found.partial_factors == member.partial_factors
+        assert (found.section, found.changes) == (member.section, member.changes)
+        assert (found.hinges, found.anchors) == (member.hinges, member.anchors)
+        assert (found.shear, found.pitch) == (member.shear, member.pitch)
         response = again(member.solve())
         assert response.combinations == member.combinations
         for combination in member.combinations:

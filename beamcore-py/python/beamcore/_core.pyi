@@ -6,9 +6,11 @@ from beamcore._typing import QuantityLike
 from beamcore.actions import (
     CombinationFactors as CombinationFactors, Load as Load, self_weight as self_weight,
     uniform as uniform, partial as partial, trapezoidal as trapezoidal, area as area,
-    point as point, couple as couple, Action as Action, permanent as permanent,
-    variable as variable, PartialFactors as PartialFactors, OwnCombination as OwnCombination,
-    Combination as Combination,
+    point as point, couple as couple, plan as plan, axial as axial, prestress as prestress,
+    settlement as settlement, imposed_rotation as imposed_rotation, temperature as temperature,
+    temperature_difference as temperature_difference, free_strain as free_strain, Action as Action,
+    permanent as permanent, variable as variable, PartialFactors as PartialFactors,
+    OwnCombination as OwnCombination, Combination as Combination,
 )
 from beamcore.errors import (
     BeamcoreError as BeamcoreError, ValueProblem as ValueProblem, NameProblem as NameProblem,
@@ -17,6 +19,10 @@ from beamcore.errors import (
     MechanismProblem as MechanismProblem, PositionProblem as PositionProblem,
     SyntaxProblem as SyntaxProblem, VersionProblem as VersionProblem, FileProblem as FileProblem,
     LookupProblem as LookupProblem, NumericalProblem as NumericalProblem, Problem as Problem,
+)
+from beamcore.joints import (
+    Layer as Layer, MergedLayer as MergedLayer, Band as Band, Joint as Joint,
+    PlacedJoint as PlacedJoint,
 )
 from beamcore.materials import (
     TimberStrength as TimberStrength, MetalStrength as MetalStrength,
@@ -33,16 +39,29 @@ from beamcore.materials import (
 from beamcore.results import (
     Extreme as Extreme, Sides as Sides, Field as Field, StressExtreme as StressExtreme,
     Utilisation as Utilisation, PartStress as PartStress, Ordinate as Ordinate, Camber as Camber,
-    Reading as Reading, Reaction as Reaction, Limit as Limit, LimitCheck as LimitCheck,
-    Response as Response,
+    Reading as Reading, Reaction as Reaction, JointResponse as JointResponse,
+    LayerForces as LayerForces, CompositeAction as CompositeAction, Limit as Limit,
+    LimitCheck as LimitCheck, Response as Response,
 )
 from beamcore.sections import (
     Outline as Outline, rectangle as rectangle, polygon as polygon, disc as disc, ring as ring,
     i_shape as i_shape, tee as tee, channel as channel, angle as angle, hollow_box as hollow_box,
     InitialStrain as InitialStrain, StrainPlane as StrainPlane, Part as Part,
-    PlacedPart as PlacedPart, Section as Section, SectionForces as SectionForces,
-    PointStress as PointStress, Stiffness as Stiffness, Principal as Principal,
-    TransformedPart as TransformedPart, TransformedSection as TransformedSection,
+    PlacedPart as PlacedPart, SHEAR_STIFFNESS_DEFINITION as SHEAR_STIFFNESS_DEFINITION,
+    Section as Section, SectionForces as SectionForces, PointStress as PointStress,
+    Stiffness as Stiffness, Principal as Principal, TransformedPart as TransformedPart,
+    TransformedSection as TransformedSection,
+)
+from beamcore.simplified import (
+    ReferenceLength as ReferenceLength, LayerInput as LayerInput, LayerStress as LayerStress,
+    ShearStress as ShearStress, EffectiveSpacing as EffectiveSpacing,
+    effective_spacing as effective_spacing, Gamma as Gamma, SineLayers as SineLayers,
+    SimplifiedSpan as SimplifiedSpan, SimplifiedJoint as SimplifiedJoint,
+    SimplifiedLayer as SimplifiedLayer,
+)
+from beamcore.supports import (
+    Support as Support, pin as pin, roller as roller, fixed as fixed, Hinge as Hinge,
+    Anchor as Anchor,
 )
 
 __all__ = [
@@ -52,20 +71,27 @@ __all__ = [
     "concrete_strength_share", "concrete_modulus_at_age", "Material", "timber", "steel",
     "steel_of_thickness", "aluminium", "concrete", "Outline", "rectangle", "polygon", "disc",
     "ring", "i_shape", "tee", "channel", "angle", "hollow_box", "InitialStrain", "StrainPlane",
-    "Part", "PlacedPart", "Section", "SectionForces", "PointStress", "Stiffness", "Principal",
-    "TransformedPart", "TransformedSection", "Support", "pin", "roller", "fixed",
-    "CombinationFactors", "Load", "self_weight", "uniform", "partial", "trapezoidal", "area",
-    "point", "couple", "Action", "permanent", "variable", "PartialFactors", "OwnCombination",
+    "Part", "PlacedPart", "Layer", "MergedLayer", "Band", "Joint", "PlacedJoint",
+    "SHEAR_STIFFNESS_DEFINITION", "Section", "SectionForces", "PointStress", "Stiffness",
+    "Principal", "TransformedPart", "TransformedSection", "Support", "pin", "roller", "fixed",
+    "Hinge", "Anchor", "SectionChange", "step", "taper", "CombinationFactors", "Load",
+    "self_weight", "uniform", "partial", "trapezoidal", "area", "point", "couple", "plan", "axial",
+    "prestress", "settlement", "imposed_rotation", "temperature", "temperature_difference",
+    "free_strain", "Action", "permanent", "variable", "PartialFactors", "OwnCombination",
     "Combination", "Span", "Member", "Job", "Outcome", "run", "job_schema", "outcome_schema",
     "BeamcoreError", "ValueProblem", "NameProblem", "KeyProblem", "UnitProblem", "DuplicateProblem",
     "GeometryProblem", "MissingProblem", "MechanismProblem", "PositionProblem", "SyntaxProblem",
     "VersionProblem", "FileProblem", "LookupProblem", "NumericalProblem", "Problem", "Extreme",
     "Sides", "Field", "StressExtreme", "Utilisation", "PartStress", "Ordinate", "Camber", "Reading",
-    "Reaction", "Limit", "LimitCheck", "Response",
+    "Reaction", "JointResponse", "LayerForces", "CompositeAction", "Limit", "LimitCheck",
+    "Response", "ReferenceLength", "LayerInput", "LayerStress", "ShearStress", "EffectiveSpacing",
+    "effective_spacing", "Gamma", "SineLayers",
+    "SimplifiedSpan", "SimplifiedJoint", "SimplifiedLayer",
 ]
 
 _T = TypeVar("_T", Unit, Quantity)
 _Sideways: TypeAlias = Literal["held", "free"]
+_Shear: TypeAlias = Literal["rigid", "flexible"]
 _Format: TypeAlias = Literal["toml", "json"]
 
 __version__: str
@@ -127,16 +153,6 @@ class Quantity:
     def __hash__(self) -> int: ...
 
 @final
-class Support:
-    name: Final[str]
-    kind: Final[str]
-    at: Final[Quantity]
-
-def pin(name: str, at: QuantityLike) -> Support: ...
-def roller(name: str, at: QuantityLike) -> Support: ...
-def fixed(name: str, at: QuantityLike) -> Support: ...
-
-@final
 class Span:
     name: Final[str]
     from_: Final[Quantity]
@@ -148,7 +164,26 @@ class Span:
     ) -> Span: ...
 
 @final
+class SectionChange:
+    kind: Final[Literal["step", "taper"]]
+    from_: Final[Quantity]
+    to: Final[Quantity]
+    section: Final[Section]
+
+def step(at: QuantityLike, section: Section) -> SectionChange: ...
+def taper(from_: QuantityLike, to: QuantityLike, section: Section) -> SectionChange: ...
+
+@final
 class Member:
+    section: Final[Section]
+    changes: Final[tuple[SectionChange, ...]]
+    parts: Final[tuple[PlacedPart, ...]]
+    hinges: Final[tuple[Hinge, ...]]
+    anchors: Final[tuple[Anchor, ...]]
+    shear: Final[_Shear | Quantity]
+    pitch: Final[Quantity | None]
+    has_deflections_of_layers: Final[bool]
+    has_axial_force: Final[bool]
     length: Final[Quantity]
     support_names: Final[tuple[str, ...]]
     combinations: Final[tuple[str, ...]]
@@ -165,7 +200,12 @@ class Member:
         *,
         partial_factors: PartialFactors | None = None,
         own_combinations: Sequence[OwnCombination] = ...,
-        sideways: _Sideways = ...,
+        sideways: _Sideways | None = None,
+        changes: Sequence[SectionChange] = ...,
+        hinges: Sequence[Hinge] = ...,
+        anchors: Sequence[Anchor] = ...,
+        shear: _Shear | QuantityLike | None = None,
+        pitch: QuantityLike | None = None,
     ) -> Member: ...
     @staticmethod
     def simple_span(
@@ -175,9 +215,15 @@ class Member:
         *,
         partial_factors: PartialFactors | None = None,
         own_combinations: Sequence[OwnCombination] = ...,
-        sideways: _Sideways = ...,
+        sideways: _Sideways | None = None,
+        changes: Sequence[SectionChange] = ...,
+        hinges: Sequence[Hinge] = ...,
+        anchors: Sequence[Anchor] = ...,
+        shear: _Shear | QuantityLike | None = None,
+        pitch: QuantityLike | None = None,
     ) -> Member: ...
     def span(self, name: str) -> Span: ...
+    def section_at(self, at: QuantityLike) -> Section: ...
     def solve(self) -> Response: ...
 
 @final

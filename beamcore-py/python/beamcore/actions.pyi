@@ -1,7 +1,7 @@
 from collections.abc import Mapping, Sequence
 from typing import Final, Literal, TypeAlias, final, overload
 
-from beamcore._core import Quantity
+from beamcore._core import InitialStrain, Layer, Part, Quantity, Support
 from beamcore._typing import QuantityLike
 
 __all__ = [
@@ -14,6 +14,14 @@ __all__ = [
     "area",
     "point",
     "couple",
+    "plan",
+    "axial",
+    "prestress",
+    "settlement",
+    "imposed_rotation",
+    "temperature",
+    "temperature_difference",
+    "free_strain",
     "Action",
     "permanent",
     "variable",
@@ -25,6 +33,7 @@ __all__ = [
 _Category: TypeAlias = Literal[
     "A", "B", "C", "D", "E", "F", "G", "H", "snow", "snow_high", "wind", "temperature"
 ]
+_Point: TypeAlias = Sequence[QuantityLike]
 _Duration: TypeAlias = Literal["permanent", "long", "medium", "short", "instantaneous"]
 
 @final
@@ -47,6 +56,24 @@ def area(
 ) -> Load: ...
 def point(load: QuantityLike, at: QuantityLike) -> Load: ...
 def couple(couple: QuantityLike, at: QuantityLike) -> Load: ...
+@overload
+def plan(load: QuantityLike, from_: None = None, to: None = None) -> Load: ...
+@overload
+def plan(load: QuantityLike, from_: QuantityLike, to: QuantityLike) -> Load: ...
+def axial(load: QuantityLike, at: QuantityLike, height: QuantityLike) -> Load: ...
+@overload
+def prestress(
+    force: QuantityLike, *, draped: Sequence[_Point], parabolic: None = None
+) -> Load: ...
+@overload
+def prestress(
+    force: QuantityLike, *, draped: None = None, parabolic: tuple[_Point, _Point, _Point]
+) -> Load: ...
+def settlement(support: Support | str, settlement: QuantityLike) -> Load: ...
+def imposed_rotation(support: Support | str, rotation: QuantityLike) -> Load: ...
+def temperature(change: QuantityLike, parts: Sequence[Part | str] = ...) -> Load: ...
+def temperature_difference(difference: QuantityLike) -> Load: ...
+def free_strain(part: Part | str, strain: InitialStrain) -> Load: ...
 
 @final
 class CombinationFactors:
@@ -62,6 +89,7 @@ class Action:
     favourable: Final[bool]
     duration: Final[_Duration | None]
     start: Final[Quantity | None]
+    on: Final[str | None]
     factors: Final[CombinationFactors | None]
 
 def permanent(
@@ -70,6 +98,7 @@ def permanent(
     favourable: bool = False,
     duration: _Duration | None = None,
     start: QuantityLike | None = None,
+    on: Layer | str | None = None,
 ) -> Action: ...
 @overload
 def variable(
@@ -82,6 +111,7 @@ def variable(
     favourable: bool = False,
     duration: _Duration | None = None,
     start: QuantityLike | None = None,
+    on: Layer | str | None = None,
 ) -> Action: ...
 @overload
 def variable(
@@ -94,6 +124,7 @@ def variable(
     favourable: bool = False,
     duration: _Duration | None = None,
     start: QuantityLike | None = None,
+    on: Layer | str | None = None,
 ) -> Action: ...
 
 @final

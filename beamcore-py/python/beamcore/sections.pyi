@@ -1,7 +1,7 @@
 from collections.abc import Sequence
 from typing import Final, Literal, TypeAlias, final
 
-from beamcore._core import Material, Quantity
+from beamcore._core import Joint, Layer, Material, MergedLayer, PlacedJoint, Quantity
 from beamcore._typing import QuantityLike
 
 __all__ = [
@@ -19,6 +19,7 @@ __all__ = [
     "StrainPlane",
     "Part",
     "PlacedPart",
+    "SHEAR_STIFFNESS_DEFINITION",
     "Section",
     "SectionForces",
     "PointStress",
@@ -32,6 +33,8 @@ _Time: TypeAlias = Literal["initial", "final"]
 _Sideways: TypeAlias = Literal["held", "free"]
 _Axis: TypeAlias = Literal["upright", "level"]
 _Point: TypeAlias = Sequence[QuantityLike]
+
+SHEAR_STIFFNESS_DEFINITION: Final[str]
 
 @final
 class Outline:
@@ -137,9 +140,24 @@ class Section:
     line_mass: Final[Quantity | None]
     notes: Final[tuple[str, ...]]
     placed: Final[tuple[PlacedPart, ...]]
-    def __new__(cls, parts: Sequence[Part]) -> Section: ...
+    layers: Final[tuple[Layer, ...]]
+    joints: Final[tuple[Joint, ...]]
+    placed_joints: Final[tuple[PlacedJoint, ...]]
+    merged_layers: Final[tuple[MergedLayer, ...]]
+    def __new__(
+        cls,
+        parts: Sequence[Part],
+        *,
+        layers: Sequence[Layer] | None = None,
+        joints: Sequence[Joint] | None = None,
+    ) -> Section: ...
     def part(self, name: str) -> PlacedPart: ...
+    def joint(self, joint: Joint | str) -> PlacedJoint: ...
+    def only(self, parts: Sequence[Part | str]) -> Section: ...
+    def between(self, other: Section, share: float) -> Section: ...
     def stiffness(self, time: _Time) -> Stiffness: ...
+    def shear_stiffness(self, time: _Time) -> Quantity: ...
+    def fastened_shear_stiffness(self, time: _Time) -> Quantity: ...
     def free_plane(self, time: _Time, sideways: _Sideways) -> StrainPlane: ...
     def transformed_to(self, material: str, time: _Time) -> TransformedSection: ...
     def stress_at(
