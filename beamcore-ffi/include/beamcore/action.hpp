@@ -67,8 +67,8 @@ public:
         });
     }
 
-    // The same action with a line load per length of the plan, as snow on a pitched member; over the
-    // whole member or between two places along it.
+    // The same action with a line load per length of the plan, as snow on a pitched member; over
+    // the whole member or between two places along it.
     Action plan(LineLoad load) const {
         return made(
             [&](bc_action **out) { return bc_action_with_plan_load(get(), load.si(), out); });

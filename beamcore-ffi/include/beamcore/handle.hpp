@@ -57,7 +57,8 @@ template <class Q, class Call> std::optional<Q> optional_of(Call call) {
 }
 
 // The handles of a list of objects, which keep them.
-template <class C, class Object> std::vector<const C *> handles(const std::vector<Object> &objects) {
+template <class C, class Object>
+std::vector<const C *> handles(const std::vector<Object> &objects) {
     std::vector<const C *> handles;
     for (const Object &object : objects) {
         handles.push_back(object.get());

@@ -156,7 +156,9 @@ inline Section Section::layered(const std::vector<Part> &parts, const std::vecto
 }
 
 // What is meant by kGA, in words, for definitions of the shear coefficient differ.
-inline std::string shear_stiffness_definition() { return detail::text(bc_shear_stiffness_definition); }
+inline std::string shear_stiffness_definition() {
+    return detail::text(bc_shear_stiffness_definition);
+}
 
 } // namespace beamcore
 
