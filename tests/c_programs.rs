@@ -161,6 +161,7 @@ fn the_test_programs_in_c_pass() {
         "imposed",
         "slips",
         "simplified",
+        "comparisons",
         "limits",
         "documents",
         "errors",

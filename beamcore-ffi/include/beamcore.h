@@ -453,6 +453,12 @@
 // Length of the simplified methods: a cantilever of length L, l = 2 L.
 #define BC_LENGTH_CANTILEVER 3
 
+// Simplified method: gamma, EN 1995-1-1:2004 Annex B, for two or three layers.
+#define BC_METHOD_GAMMA 1
+
+// Simplified method: sine layers, for any number of layers.
+#define BC_METHOD_SINE_LAYERS 2
+
 // An action: loads that act together, from one cause.
 typedef struct bc_action bc_action;
 
@@ -461,6 +467,9 @@ typedef struct bc_camber bc_camber;
 
 // Checks: limits compared with the results of a member.
 typedef struct bc_checks bc_checks;
+
+// A comparison: what a simplified method gives for each span, beside the exact solution.
+typedef struct bc_comparison bc_comparison;
 
 // A field: a quantity along the member, in its SI unit.
 typedef struct bc_field bc_field;
@@ -1484,9 +1493,9 @@ int32_t bc_action_duration(const bc_action *action, int32_t *has_value_out, int3
 // has_value_out is 0 and the start is left as it is.
 int32_t bc_action_start(const bc_action *action, int32_t *has_value_out, double *start_s_out);
 
-// The same action with all its loads entering the layer of this name; without it, transverse loads
-// enter the first layer. It matters where layers have deflections of their own, and where forces
-// act along the member.
+// The same action with all its loads entering the layer of this name; without it, they enter the
+// layer that bc_member_entered_layer tells. It matters where layers have deflections of their own,
+// for the pressure in joints, and where forces act along the member.
 int32_t bc_action_on(const bc_action *action, const char *layer, bc_action **action_out);
 
 // The layer that the loads of an action enter. Where none was named, has_value_out is 0 and the
@@ -1600,12 +1609,13 @@ int32_t bc_support_with_rotational_spring(const bc_support *support,
 // The same support, which can push up but not pull down: the member may lift off it.
 int32_t bc_support_one_way(const bc_support *support, bc_support **support_out);
 
-// The same support with its hold along the axis at a height z of the section; without it, at the
-// elastic centroid of the first section.
+// The same support with its hold along the axis at a height z of the section, on the first of the
+// layers that bear on it. Without it, all layers together are held at the elastic centroid of the
+// section at the left end.
 int32_t bc_support_at_height(const bc_support *support, double z_m, bc_support **support_out);
 
 // The same support as a bearing of the layers of these names only; without it (or of none), of
-// all.
+// all. Its hold along the axis, if it has one, is then on the first of them.
 int32_t bc_support_under(const bc_support *support,
                          const char *const *layer_names,
                          int32_t layer_count,
@@ -1905,6 +1915,21 @@ int32_t bc_member_given_shear(const bc_member *member,
 
 // The pitch of a member. Where it has none, has_value_out is 0 and the pitch is left as it is.
 int32_t bc_member_pitch(const bc_member *member, int32_t *has_value_out, double *pitch_rad_out);
+
+// Whether layers have deflections of their own, by transverse moduli of their joints (1), or share
+// one (0).
+int32_t bc_member_has_deflections_of_layers(const bc_member *member, int32_t *has_deflections_out);
+
+// Whether axial force takes part (1) or not (0): more than one support holds the axis, something
+// acts along the member, or it is pitched.
+int32_t bc_member_has_axial_force(const bc_member *member, int32_t *has_axial_force_out);
+
+// The layer that loads of actions without a named layer enter: the highest one where all layers
+// share one deflection, else the first.
+int32_t bc_member_entered_layer(const bc_member *member,
+                                char *buffer,
+                                int64_t capacity,
+                                int64_t *length_out);
 
 // The kind (BC_COMBINATION_...) of a combination. Combinations are counted from 0.
 int32_t bc_member_combination_kind(const bc_member *member, int32_t index, int32_t *kind_out);
@@ -2518,6 +2543,118 @@ int32_t bc_effective_spacing_warning(double least_m,
                                      char *buffer,
                                      int64_t capacity,
                                      int64_t *length_out);
+
+// Deflection, flow and stresses of each span by a simplified method (BC_METHOD_...), beside the
+// exact ones, under a combination at a time. It covers prismatic members of layers on each other
+// under transverse loads; free strains are left out of both sides.
+int32_t bc_response_compare(const bc_response *response,
+                            const char *combination,
+                            int32_t time,
+                            int32_t method,
+                            bc_comparison **comparison_out);
+
+// The number of spans of a comparison.
+int32_t bc_comparison_span_count(const bc_comparison *comparison, int32_t *count_out);
+
+// The name of a span. Spans are counted from 0, from the left.
+int32_t bc_comparison_span_name(const bc_comparison *comparison,
+                                int32_t span_index,
+                                char *buffer,
+                                int64_t capacity,
+                                int64_t *length_out);
+
+// The length of the half sine wave for a span, the effective bending stiffness with the moduli of
+// the time, and whether the combination holds free strains, which are left out (1) or not (0).
+int32_t bc_comparison_span(const bc_comparison *comparison,
+                           int32_t span_index,
+                           double *length_m_out,
+                           double *bending_stiffness_Nm2_out,
+                           int32_t *leaves_out_strains_out);
+
+// The number of factors gamma of a span, one for each layer; none of sine layers.
+int32_t bc_comparison_factor_count(const bc_comparison *comparison,
+                                   int32_t span_index,
+                                   int32_t *count_out);
+
+// A factor gamma of a span. Layers are counted from 0, from the lowest upward.
+int32_t bc_comparison_factor(const bc_comparison *comparison,
+                             int32_t span_index,
+                             int32_t layer_index,
+                             double *factor_out);
+
+// The greatest deflection of a span with its place, by the method and by the exact solution, and
+// their ratio less one.
+int32_t bc_comparison_deflection(const bc_comparison *comparison,
+                                 int32_t span_index,
+                                 double *value_m_out,
+                                 double *at_m_out,
+                                 double *exact_value_m_out,
+                                 double *exact_at_m_out,
+                                 double *difference_out);
+
+// The number of warnings for a span: where the method does not hold, or only nearly.
+int32_t bc_comparison_warning_count(const bc_comparison *comparison,
+                                    int32_t span_index,
+                                    int32_t *count_out);
+
+// A warning for a span, in words. Warnings are counted from 0.
+int32_t bc_comparison_warning(const bc_comparison *comparison,
+                              int32_t span_index,
+                              int32_t index,
+                              char *buffer,
+                              int64_t capacity,
+                              int64_t *length_out);
+
+// Frees a comparison; NULL is allowed.
+void bc_comparison_free(bc_comparison *comparison);
+
+// The number of joints of a span in a comparison.
+int32_t bc_comparison_joint_count(const bc_comparison *comparison,
+                                  int32_t span_index,
+                                  int32_t *count_out);
+
+// The name of a joint in a comparison. Joints are counted from 0.
+int32_t bc_comparison_joint_name(const bc_comparison *comparison,
+                                 int32_t span_index,
+                                 int32_t joint_index,
+                                 char *buffer,
+                                 int64_t capacity,
+                                 int64_t *length_out);
+
+// The greatest flow of a joint over a span with its place, by the method and by the exact
+// solution, with the sign of the slip.
+int32_t bc_comparison_flow(const bc_comparison *comparison,
+                           int32_t span_index,
+                           int32_t joint_index,
+                           double *flow_N_per_m_out,
+                           double *at_m_out,
+                           double *exact_flow_N_per_m_out,
+                           double *exact_at_m_out);
+
+// The number of layers of a span in a comparison.
+int32_t bc_comparison_layer_count(const bc_comparison *comparison,
+                                  int32_t span_index,
+                                  int32_t *count_out);
+
+// The name of a layer in a comparison. Layers are counted from 0, from the lowest upward.
+int32_t bc_comparison_layer_name(const bc_comparison *comparison,
+                                 int32_t span_index,
+                                 int32_t layer_index,
+                                 char *buffer,
+                                 int64_t capacity,
+                                 int64_t *length_out);
+
+// The stresses of a layer by the method at the place of the span's greatest moment: at the middle
+// of its height, and what bending of the layer adds at its lower edge; with the place, and the
+// axial force and moment of the layer there by the exact solution.
+int32_t bc_comparison_stress(const bc_comparison *comparison,
+                             int32_t span_index,
+                             int32_t layer_index,
+                             double *axial_Pa_out,
+                             double *bending_Pa_out,
+                             double *at_m_out,
+                             double *exact_axial_N_out,
+                             double *exact_moment_Nm_out);
 
 // Reads a job from a text in TOML or JSON (BC_FORMAT_...). All that is wrong is reported at once.
 int32_t bc_job_read(const char *document, int32_t format, bc_job **job_out);

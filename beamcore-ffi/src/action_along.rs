@@ -10,9 +10,9 @@ use beamcore::member::{Action, Load, Tendon};
 use beamcore::units::{Force, Length, LineLoad};
 use std::ffi::c_char;
 
-/// The same action with all its loads entering the layer of this name; without it, transverse loads
-/// enter the first layer. It matters where layers have deflections of their own, and where forces
-/// act along the member.
+/// The same action with all its loads entering the layer of this name; without it, they enter the
+/// layer that bc_member_entered_layer tells. It matters where layers have deflections of their own,
+/// for the pressure in joints, and where forces act along the member.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn bc_action_on(
     action: *const BcAction,

@@ -2,6 +2,7 @@
 
 use crate::choice::choice;
 use crate::fault::Fault;
+use beamcore::response::SimplifiedMethod;
 use beamcore::section::JointKind;
 
 /// Joint: without slip; the two layers are one piece.
@@ -52,6 +53,11 @@ pub const BC_LENGTH_SPAN: i32 = 1;
 pub const BC_LENGTH_CONTINUOUS: i32 = 2;
 /// Length of the simplified methods: a cantilever of length L, l = 2 L.
 pub const BC_LENGTH_CANTILEVER: i32 = 3;
+
+/// Simplified method: gamma, EN 1995-1-1:2004 Annex B, for two or three layers.
+pub const BC_METHOD_GAMMA: i32 = 1;
+/// Simplified method: sine layers, for any number of layers.
+pub const BC_METHOD_SINE_LAYERS: i32 = 2;
 
 /// Which field of a joint.
 #[derive(Clone, Copy)]
@@ -122,6 +128,15 @@ choice!(
     Span = BC_LENGTH_SPAN,
     Continuous = BC_LENGTH_CONTINUOUS,
     Cantilever = BC_LENGTH_CANTILEVER
+);
+choice!(
+    method,
+    method_number,
+    SimplifiedMethod,
+    "method",
+    "BC_METHOD_GAMMA, BC_METHOD_SINE_LAYERS",
+    Gamma = BC_METHOD_GAMMA,
+    SineLayers = BC_METHOD_SINE_LAYERS
 );
 
 /// The constant of a kind of joint; callers only read it.

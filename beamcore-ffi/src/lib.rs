@@ -91,6 +91,8 @@ pub mod member;
 
 pub mod member_shape;
 
+pub mod member_layers;
+
 pub mod combination;
 
 pub mod response;
@@ -120,6 +122,10 @@ pub mod simplified;
 pub mod simplified_forces;
 
 pub mod spacing;
+
+pub mod comparison;
+
+pub mod comparison_layers;
 
 pub mod job;
 

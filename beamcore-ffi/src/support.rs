@@ -116,8 +116,9 @@ pub unsafe extern "C" fn bc_support_one_way(
     unsafe { changed(support, support_out, |support| Ok(support.one_way())) }
 }
 
-/// The same support with its hold along the axis at a height z of the section; without it, at the
-/// elastic centroid of the first section.
+/// The same support with its hold along the axis at a height z of the section, on the first of the
+/// layers that bear on it. Without it, all layers together are held at the elastic centroid of the
+/// section at the left end.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn bc_support_at_height(
     support: *const BcSupport,
@@ -130,7 +131,7 @@ pub unsafe extern "C" fn bc_support_at_height(
 }
 
 /// The same support as a bearing of the layers of these names only; without it (or of none), of
-/// all.
+/// all. Its hold along the axis, if it has one, is then on the first of them.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn bc_support_under(
     support: *const BcSupport,

@@ -134,6 +134,31 @@ static void a_layer_that_is_held() {
     CHECK(response.reaction("permanent", Time::initial, "right").along == held);
 }
 
+static void a_method_beside_the_exact_solution() {
+    const Section section =
+        slab_on_joist(Joint::slipping("screws", "joist", "slab", SlipModulus::from_si(1e9 / 7.5)));
+    const Member member = Member::simple_span(section, 6_m)
+                              .action(permanent("load").uniform(3_kN_per_m))
+                              .check();
+    CHECK(!member.has_deflections_of_layers() && !member.has_axial_force());
+    CHECK(member.entered_layer() == "slab");
+    const std::vector<SimplifiedSpan> spans =
+        member.solve().simplified("permanent", Time::initial, SimplifiedMethod::gamma);
+    const SimplifiedSpan &span = spans.at(0);
+    CHECK(spans.size() == 1 && span.span == "left to right" && span.length == 6_m);
+    CHECK(span.factors.size() == 2 && within(span.factors[1], 0.27195, 5e-6));
+    CHECK(within(span.bending_stiffness.to_N_m2(), 4.53009e6, 5.0) && !span.leaves_out_strains);
+    CHECK(within(span.deflection.value.to_mm(), 11.175, 5e-4));
+    CHECK(within(span.exact_deflection.value.to_mm(), 11.139, 5e-4) && span.difference > 0.0);
+    CHECK(span.joints.size() == 1 && span.joints[0].joint == "screws");
+    CHECK(within(std::fabs(span.joints[0].flow.value.to_N_per_mm()), 41.41, 5e-3));
+    CHECK(within(std::fabs(span.joints[0].exact_flow.value.to_N_per_mm()), 36.27, 5e-3));
+    CHECK(span.layers.size() == 2 && span.layers[1].layer == "slab");
+    CHECK(within(span.layers[1].axial.to_MPa(), -1.479, 5e-4));
+    CHECK(within(span.layers[1].exact_axial.to_N(), -62906.0, 0.5));
+    CHECK(span.warnings.size() == 1);
+}
+
 static void simplified_methods() {
     const std::vector<LayerInput> layers{
         LayerInput::rectangle(11_GPa, 100_mm, 220_mm, 110_mm),
@@ -169,6 +194,7 @@ int main() {
     sections();
     responses();
     a_layer_that_is_held();
+    a_method_beside_the_exact_solution();
     simplified_methods();
     return finish();
 }

@@ -138,8 +138,8 @@ public:
         });
     }
 
-    // The same action with all its loads entering the layer of this name; without it, transverse
-    // loads enter the first layer.
+    // The same action with all its loads entering the layer of this name; without it, they enter
+    // Member::entered_layer().
     Action on(const std::string &layer) const {
         return made([&](bc_action **out) {
             return bc_action_on(get(), detail::c_text(layer, "layer"), out);

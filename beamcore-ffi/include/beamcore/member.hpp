@@ -82,6 +82,13 @@ public:
     std::vector<SectionChange> changes() const;
     std::vector<Hinge> hinges() const;
     std::vector<Anchor> anchors() const;
+    // Whether layers have deflections of their own, by transverse moduli of their joints.
+    bool has_deflections_of_layers() const;
+    // Whether axial force takes part.
+    bool has_axial_force() const;
+    // The layer that loads of actions without a named layer enter: the highest one where all layers
+    // share one deflection, else the first.
+    std::string entered_layer() const;
     // How shear deformation is taken.
     ShearModel shear_model() const;
     // The pitch, if it has one.

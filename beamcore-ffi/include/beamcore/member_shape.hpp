@@ -78,6 +78,22 @@ inline std::vector<Anchor> Member::anchors() const {
     return anchors;
 }
 
+inline bool Member::has_deflections_of_layers() const {
+    return detail::count([&](std::int32_t *out) {
+               return bc_member_has_deflections_of_layers(get(), out);
+           }) != 0;
+}
+
+inline bool Member::has_axial_force() const {
+    return detail::count([&](std::int32_t *out) {
+               return bc_member_has_axial_force(get(), out);
+           }) != 0;
+}
+
+inline std::string Member::entered_layer() const {
+    return detail::name(get(), bc_member_entered_layer);
+}
+
 inline ShearModel Member::shear_model() const {
     const std::int32_t number =
         detail::count([&](std::int32_t *out) { return bc_member_shear(get(), out); });

@@ -5,6 +5,7 @@
 #include "component.hpp"
 #include "field.hpp"
 #include "member.hpp"
+#include "simplified.hpp"
 #include "stress.hpp"
 
 namespace beamcore {
@@ -23,6 +24,7 @@ struct CamberPlan;
 struct CompositeAction;
 struct JointResponse;
 struct LayerForces;
+struct SimplifiedSpan;
 class Limit;
 struct LimitCheck;
 struct Reading;
@@ -103,6 +105,10 @@ public:
                                        const std::string &span) const;
     Field<Length> deflection_component(Component component, const std::string &combination,
                                        const std::string &span, const Camber &camber) const;
+
+    // Deflection, flow and stresses of each span by a simplified method, beside the exact ones.
+    std::vector<SimplifiedSpan> simplified(const std::string &combination, Time time,
+                                           SimplifiedMethod method) const;
 
     // The reaction of a support.
     Reaction reaction(const std::string &combination, Time time, const std::string &support) const {
@@ -244,5 +250,7 @@ inline Response Member::solve() const {
 #include "camber.hpp"
 
 #include "composite.hpp"
+
+#include "comparison.hpp"
 
 #endif // BEAMCORE_RESPONSE_HPP

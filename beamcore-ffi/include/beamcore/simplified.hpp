@@ -7,6 +7,14 @@
 
 namespace beamcore {
 
+// A simplified method for layers that slip.
+enum class SimplifiedMethod : std::int32_t {
+    // EN 1995-1-1:2004 Annex B, for two or three layers.
+    gamma = BC_METHOD_GAMMA,
+    // For any number of layers.
+    sine_layers = BC_METHOD_SINE_LAYERS,
+};
+
 // What the simplified methods know of a layer. Layers are listed from the lowest upward.
 struct LayerInput {
     AxialStiffness axial;

@@ -69,13 +69,15 @@ public:
         return made([&](bc_support **out) { return bc_support_one_way(get(), out); });
     }
 
-    // The same support with its hold along the axis at a height of the section; without it, at the
-    // elastic centroid of the first section.
+    // The same support with its hold along the axis at a height of the section, on the first of the
+    // layers that bear on it. Without it, all layers together are held at the elastic centroid of
+    // the section at the left end.
     Support at_height(Length z) const {
         return made([&](bc_support **out) { return bc_support_at_height(get(), z.si(), out); });
     }
 
-    // The same support as a bearing of the layers of these names only; without it, of all.
+    // The same support as a bearing of the layers of these names only; without it, of all. Its hold
+    // along the axis, if it has one, is then on the first of them.
     Support under(const std::vector<std::string> &layers) const {
         return made([&](bc_support **out) {
             const auto names = detail::c_texts(layers, "layer_names");
