@@ -3,6 +3,7 @@ a joist, by the closed forms of slipping_layers.py."""
 
 import math
 
+from number_tools import greatest
 from slipping_layers import Layer, Pair, moments, pressure, strained, stresses, uniform
 from write_expect import Case
 
@@ -20,22 +21,6 @@ def pair(time: str) -> Pair:
                 400e6 / 3 / joint)
 
 
-def greatest(line) -> float:
-    """The greatest value over the left half, which the right one mirrors: a scan, then a search that
-    narrows down to the place."""
-    steps = 600
-    places = [LENGTH / 2 * i / steps for i in range(steps + 1)]
-    best = max(range(steps + 1), key=lambda i: line(places[i]))
-    low, high = places[max(best - 1, 0)], places[min(best + 1, steps)]
-    for _ in range(200):
-        third = (high - low) / 3
-        if line(low + third) < line(high - third):
-            low += third
-        else:
-            high -= third
-    return max(line((low + high) / 2), line(places[best]))
-
-
 def layers(case: Case, at: str, p: Pair, middle, end, peak_slip: float) -> None:
     """Axial forces, moments and stresses at midspan; slip and flow at the left end."""
     upper, lower = moments(p, middle)
@@ -48,8 +33,8 @@ def layers(case: Case, at: str, p: Pair, middle, end, peak_slip: float) -> None:
             state = uniform(p, LENGTH, Q, x)
             return stresses(layer, sign * state.n, moments(p, state)[index])
 
-        tension = greatest(lambda x: max(edges(x)))
-        compression = -greatest(lambda x: -min(edges(x)))
+        tension = greatest(lambda x: max(edges(x)), 0.0, LENGTH / 2)
+        compression = -greatest(lambda x: -min(edges(x)), 0.0, LENGTH / 2)
         peak = max(abs(tension), abs(compression))
         case.add(f'{at}.stresses["{name}"].tension.value_Pa', tension, CLOSE, peak)
         case.add(f'{at}.stresses["{name}"].compression.value_Pa', compression, CLOSE, peak)
@@ -81,6 +66,7 @@ N 62906 N, end flow 36.27 N/mm, slip 0.272 mm; long term with a joint creep of 1
         case.add(f"section.{time}.bending_stiffness_yy_Nm2", p.ei_rigid, CLOSE)
     case.add('section.joints["screws"].stretches[0].modulus_final_N_per_m2', 400e6 / 3 / 2.2, "1e-14")
     case.fields(SUPPORTS, PARTS)
+    case.layered(["screws"], PARTS)
     return case
 
 
@@ -106,6 +92,7 @@ independent script: N -15645 N, w 6.291 mm, end slip 0.1892 mm.""")
     case.add(f'{at}.layers["joist"].axial.greatest.value_N', -15645.0, "4e-5")
     case.add(f'{at}.joints["screws"].slip.greatest.value_m', 0.1892e-3, "3e-4")
     case.fields(SUPPORTS, PARTS)
+    case.layered(["screws"], PARTS)
     return case
 
 
@@ -187,4 +174,5 @@ carries (concrete_timber.py, own derivation). Rounded value of an independent sc
     case.add(f'{at}.joints["screws"].slip.left_m', -(flow / p.k + c), "1e-9")
     case.add('combinations["quasi-permanent"].initial.deflection.greatest.value_m', 16.6e-3, "5e-3")
     case.fields(SUPPORTS, PARTS)
+    case.layered(["screws"], PARTS)
     return case

@@ -11,12 +11,24 @@ use beamcore::section::{Part, Section, rectangle};
 use beamcore::time::Time;
 use beamcore::units::{Length, Number};
 
+#[path = "typed_haunched_beam.rs"]
+mod haunched_beam;
+#[path = "typed_layers.rs"]
+mod layers;
+#[path = "typed_lift_off.rs"]
+mod lift_off;
 #[path = "typed_odd_section.rs"]
 mod odd_section;
+#[path = "typed_rafter.rs"]
+mod rafter;
 #[path = "typed_roof_beam.rs"]
 mod roof_beam;
+#[path = "typed_screwed_floor.rs"]
+mod screwed_floor;
 #[path = "typed_shrinking_slab.rs"]
 mod shrinking_slab;
+#[path = "typed_side_plates.rs"]
+mod side_plates;
 
 /// All typed cases, answered.
 pub fn answers() -> Result<String> {
@@ -28,6 +40,11 @@ pub fn answers() -> Result<String> {
     text += &roof_beam::answers()?;
     text += &odd_section::answers()?;
     text += &shrinking_slab::answers()?;
+    text += &screwed_floor::answers()?;
+    text += &side_plates::answers()?;
+    text += &rafter::answers()?;
+    text += &lift_off::answers()?;
+    text += &haunched_beam::answers()?;
     Ok(text)
 }
 

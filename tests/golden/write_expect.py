@@ -67,6 +67,30 @@ class Case:
                     self.bits(f'{at}.stresses["{part}"].compression.value_Pa')
         self.bits("accuracy.residual")
 
+    def layered(self, joints: list[str], layers: list[str], deflections: bool = False) -> None:
+        """Joints and layers, compared as bits."""
+        for at in self.states():
+            for joint in joints:
+                for end in ["slip.greatest.value_m", "slip.left_m", "flow.greatest.value_N_per_m",
+                            "pressure.minimum.value_N_per_m"]:
+                    self.bits(f'{at}.joints["{joint}"].{end}')
+            for layer in layers:
+                self.bits(f'{at}.layers["{layer}"].axial.greatest.value_N')
+                self.bits(f'{at}.layers["{layer}"].moment.greatest.value_Nm')
+                if deflections:
+                    self.bits(f'{at}.layers["{layer}"].deflection.greatest.value_m')
+
+    def more(self, endings: list[str]) -> None:
+        """More paths under every combination at both times, compared as bits."""
+        for at in self.states():
+            for ending in endings:
+                self.bits(f"{at}.{ending}")
+
+    @staticmethod
+    def states() -> list[str]:
+        return [f'combinations["{combination}"].{time}'
+                for combination in COMBINATIONS for time in ["initial", "final"]]
+
     def text(self) -> str:
         return "\n".join(self.lines) + "\n"
 
@@ -255,10 +279,16 @@ def main() -> int:
     from shrinking_slab import shrinking_slab
     from angle_forces import angle_forces
     from slab_strip import slab_strip
+    from haunched_beam import haunched_beam
+    from lift_off import lift_off
+    from rafter import rafter
+    from screwed_floor import screwed_floor
+    from side_plates import side_plates
     from concrete_timber import clearance_floor, concrete_timber, shrinking_topping
 
     cases = [flitch(), brass_core(), *handbook(), two_span(), slab_strip(), roof_beam(), odd_section(), shrinking_slab(), angle_forces(),
-             concrete_timber(), shrinking_topping(), clearance_floor()]
+             concrete_timber(), shrinking_topping(), clearance_floor(), screwed_floor(),
+             side_plates(), rafter(), lift_off(), haunched_beam()]
     stale = []
     for case in cases:
         file = HERE / f"{case.name}.expect"

@@ -332,11 +332,15 @@ impl Member {
         Err(lookup::unknown("part", name, &names).into())
     }
 
-    /// Whether supports can move: on springs, one-way, or by loads that move them.
+    /// Whether the deflection need not be zero over a support: on springs, one-way, under some of
+    /// the layers only, by loads that move supports, or of a pitched member, which its supports do
+    /// not hold square to its axis.
     pub(crate) fn has_moving_supports(&self) -> bool {
-        let gives = |s: &Support| s.given_spring().is_some() || s.is_one_way();
+        let gives =
+            |s: &Support| s.given_spring().is_some() || s.is_one_way() || !s.layers().is_empty();
         let moves = |load: &Load| matches!(load, Load::Settlement { .. });
-        self.supports().iter().any(gives)
+        self.pitch().is_some()
+            || self.supports().iter().any(gives)
             || self
                 .actions()
                 .iter()
