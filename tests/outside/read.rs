@@ -241,9 +241,11 @@ fn supported(mut plan: MemberPlan, case: &Table, node: &Table, name: &str) -> Me
 
 fn loads(case: &Table) -> Vec<Action> {
     let mut action = Action::permanent("loads");
-    for piece in tables(case, "piece").filter(|piece| given(piece, "q_N_per_m") != Some(0.0)) {
+    for piece in tables(case, "piece") {
         let [from, to] = ["from_m", "to_m"].map(|key| m(number(piece, key)));
-        action = action.partial(LineLoad::from_N_per_m(number(piece, "q_N_per_m")), from, to);
+        if let Some(q) = given(piece, "q_N_per_m").filter(|q| *q != 0.0) {
+            action = action.partial(LineLoad::from_N_per_m(q), from, to);
+        }
     }
     for (i, layer) in layers(case).iter().enumerate() {
         if let Some(shrinkage) = given(layer, "shrinkage") {

@@ -53,15 +53,15 @@ impl Builder<'_> {
                     *sum = sum.plus(strain);
                 }
                 let law = layout.law_of(node, self.time);
-                let forces = law.free_forces(&node.free(self.time, &strains));
+                let free = law.free_gradients(&node.free(self.time, &strains));
                 let target = if piece.is_prismatic() {
                     &mut self.case.loads.free[gradients * k..gradients * (k + 1)]
                 } else {
                     let first = n * (half + gradients) + half;
                     &mut self.case.loads.at_nodes[k][first..first + gradients]
                 };
-                for (sum, force) in target.iter_mut().zip(forces) {
-                    *sum += force;
+                for (sum, gradient) in target.iter_mut().zip(free) {
+                    *sum += gradient;
                 }
             }
         }

@@ -12,7 +12,7 @@ const DECAY: f64 = 1.0;
 const GONE: f64 = 40.0;
 
 /// How much a depth may grow over one piece.
-const GROWTH: f64 = 0.15;
+const GROWTH: f64 = 0.08;
 
 /// The places of the cuts of a stretch, with its ends, given the laws at both ends and times.
 pub(super) fn cuts([from, to]: [f64; 2], laws: &[Law]) -> Vec<f64> {

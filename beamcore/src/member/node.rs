@@ -90,6 +90,7 @@ impl Node {
         joints
             .map(|(j, joint)| PlainJoint {
                 above: (0..count).map(|i| joint.above.contains(&i)).collect(),
+                layers: [joint.lower, joint.upper],
                 strands: [strands[joint.lower], strands[joint.upper]],
                 modulus: if engaged(j) {
                     joint.modulus_at(self.x, time)

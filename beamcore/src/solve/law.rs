@@ -4,7 +4,10 @@
 //! axial strain u' + theta' z_i + sum of s' of the joints below it at its centroid, so with a_i the
 //! factors in this sum and eps_i*, kappa_i* its free strain and curvature,
 //!
-//! f = C e - f*, C = sum EA_i a_i a_i^T + EI_i on theta', f* = sum EA_i eps_i* a_i - EI_i kappa_i*.
+//! f = C (e - e*), C = sum EA_i a_i a_i^T + EI_i on theta'. The free gradients e* are those under
+//! which no layer has an axial force and no strand a moment: a_i . e* = eps_i* and
+//! theta'* = -sum EI_i kappa_i*/sum EI_i. They are kept instead of forces C e*, because of these
+//! next to nothing is left where joints are soft.
 //!
 //! Where axial force takes no part, N = 0 takes u' out: each a_i is then counted from the mean
 //! weighted with EA. Joints give forces per length: slip modulus times slip, transverse modulus
@@ -33,7 +36,9 @@ pub(crate) struct PlainLayer {
 pub(crate) struct PlainJoint {
     /// For each layer, whether it lies on the upper side.
     pub(crate) above: Vec<bool>,
-    /// The strands of the layers that it joins: lower, upper.
+    /// The layers that it joins: lower, upper.
+    pub(crate) layers: [usize; 2],
+    /// Their strands.
     pub(crate) strands: [usize; 2],
     /// Slip modulus per length in N/m2.
     pub(crate) modulus: f64,
@@ -56,6 +61,10 @@ pub(crate) struct Law {
     pub(crate) joints: DMatrix<f64>,
     /// 1/kGA of each strand.
     pub(crate) shear_flexibility: Vec<f64>,
+    /// The layer that lies above no joint: its slip is none.
+    reference: usize,
+    /// The lower and the upper layer of each joint.
+    joined: Vec<[usize; 2]>,
 }
 
 impl Law {
@@ -100,20 +109,41 @@ impl Law {
             stiffness,
             joints: joint_stiffness(states, joints),
             shear_flexibility,
+            reference: (0..layers.len())
+                .find(|&i| joints.iter().all(|joint| !joint.above[i]))
+                .unwrap_or(0),
+            joined: joints.iter().map(|joint| joint.layers).collect(),
             layers,
         }
     }
 
-    /// f* over the gradients, of free strains and curvatures at the centroids of the layers.
-    pub(crate) fn free_forces(&self, free: &[(f64, f64)]) -> Vec<f64> {
-        let mut forces = vec![0.0; self.stiffness.nrows()];
-        for ((layer, a), &(strain, curvature)) in self.layers.iter().zip(&self.factors).zip(free) {
-            for (force, factor) in forces.iter_mut().zip(a) {
-                *force += layer.axial * strain * factor;
-            }
-            forces[layer.strand] -= layer.bending * curvature;
+    /// The free gradients e* of free strains and curvatures at the centroids of the layers.
+    pub(crate) fn free_gradients(&self, free: &[(f64, f64)]) -> Vec<f64> {
+        let states = self.states;
+        let strands = states.strands;
+        let mut gradients = vec![0.0; states.half() - strands];
+        let mut bending = vec![0.0; strands];
+        for (layer, (_, curvature)) in self.layers.iter().zip(free) {
+            gradients[layer.strand] -= layer.bending * curvature;
+            bending[layer.strand] += layer.bending;
         }
-        forces
+        for (gradient, bending) in gradients.iter_mut().zip(bending) {
+            *gradient /= bending;
+        }
+        // What each layer strains by beyond the rotation of its strand.
+        let own: Vec<f64> = self
+            .layers
+            .iter()
+            .zip(free)
+            .map(|(layer, (strain, _))| strain - layer.z * gradients[layer.strand])
+            .collect();
+        if states.has_axial {
+            gradients[states.axial() - strands] = own[self.reference];
+        }
+        for (j, [lower, upper]) in self.joined.iter().enumerate() {
+            gradients[states.slip(j) - strands] = own[*upper] - own[*lower];
+        }
+        gradients
     }
 
     /// The rate in 1/m at which the fastest disturbance decays along the member.

@@ -11,7 +11,7 @@ use super::states::States;
 pub(crate) struct PieceLoad<'a> {
     /// Load per length on each displacement at the left end, then at the right end; linear between.
     pub(crate) line: &'a [f64],
-    /// f* over the gradients.
+    /// The free gradients, see [`super::law`].
     pub(crate) free: &'a [f64],
     /// Of a varying piece, more of both at each of its nodes; empty otherwise.
     pub(crate) at_nodes: &'a [f64],

@@ -1,12 +1,12 @@
 //! A prismatic section of one strand, in the modes in which its joints slip.
 //!
-//! With b the gradients theta' and u', s' the slips' and C in blocks:
-//! e_b = C_bb^-1 (f_b + f_b*) + R s', R = -C_bb^-1 C_bs: without slip the section is rigidly
-//! joined; S s' = T + T* + R^T (f_b + f_b*), S = C_ss - C_sb C_bb^-1 C_bs. With K the slip moduli,
-//! K Q = S Q L^2 and Q^T S Q = 1 the slips s = Q x fall apart into modes:
+//! With e* the gradients that the layers take freely, b the gradients theta' and u', s' the slips'
+//! and C in blocks: e_b - e_b* = C_bb^-1 f_b + R (s' - s*'), R = -C_bb^-1 C_bs: without slip the
+//! section is rigidly joined; S (s' - s*') = T + R^T f_b, S = C_ss - C_sb C_bb^-1 C_bs. With K the
+//! slip moduli, K Q = S Q L^2 and Q^T S Q = 1 the slips s = Q x fall apart into modes:
 //!
-//! x' = y + g, y' = L^2 x - p, where y = Q^T T, g = Q^T (T* + R^T (f_b + f_b*)), p = Q^T n and n
-//! the axial load per length on the layers above each joint.
+//! x' - x*' = y + g, y' = L^2 x - p, where y = Q^T T, g = Q^T R^T f_b, p = Q^T n and n the axial
+//! load per length on the layers above each joint.
 
 use super::law::Law;
 use crate::math::eigen;

@@ -2,7 +2,7 @@
 //! slip, exponentials that decay from both ends; exact.
 //!
 //! With t = x/h along the piece and s the slips:
-//! V' = -q, B' = -V - m, N' = -n, e_b = (theta, u): e_b' = C_bb^-1 (f_b + f_b*) + R s',
+//! V' = -q, B' = -V - m, N' = -n, e_b = (theta, u): e_b' = e_b*' + C_bb^-1 f_b + R (s' - s*'),
 //! w' = theta + V/kGA; the slips in modes as told in [`super::modes`].
 
 use super::load::PieceLoad;
@@ -92,7 +92,8 @@ impl PrismaticPiece {
         statics
     }
 
-    /// C_bb^-1 (f_b + f_b*) along the piece.
+    /// The gradients theta' and u' of the rigidly joined section along the piece, C_bb^-1 f_b, with
+    /// the free ones.
     pub(super) fn strains(&self, statics: &Statics, free: &[f64]) -> Base<Polynomial> {
         let base = self.modes.base;
         let mut strains = [[0.0; TERMS]; 2];
@@ -102,8 +103,8 @@ impl PrismaticPiece {
                 for (sum, term) in strain.iter_mut().zip(force) {
                     *sum += factor * term;
                 }
-                strain[0] += factor * free.get(j).copied().unwrap_or(0.0);
             }
+            strain[0] += free.get(i).copied().unwrap_or(0.0);
         }
         strains
     }
@@ -124,14 +125,11 @@ impl PrismaticPiece {
             }
         }
         if let Some(load) = load {
-            for (j, free) in load.free[..base].iter().enumerate() {
-                drive.strain[0] += self.modes.drive[mode * base + j] * free;
-            }
             let half = self.states.half();
             for j in 0..slips {
                 let shape = self.modes.shapes[j * slips + mode];
                 let slip = self.states.slip(j);
-                drive.strain[0] += shape * load.free[base + j];
+                drive.free += self.modes.duals[j * slips + mode] * load.free[base + j];
                 drive.axial[0] += shape * load.line[slip];
                 drive.axial[1] += shape * (load.line[half + slip] - load.line[slip]);
             }
@@ -139,11 +137,11 @@ impl PrismaticPiece {
         drive
     }
 
-    /// R of theta' times the shape of a mode: the rotation per slip of the mode.
-    fn rotation_of_mode(&self, mode: usize) -> f64 {
+    /// R times the shape of a mode: what each base displacement gains per slip gained in the mode.
+    pub(super) fn share_of_mode(&self, i: usize, mode: usize) -> f64 {
         let slips = self.modes.slips;
         (0..slips)
-            .map(|j| self.modes.coupling[j] * self.modes.shapes[j * slips + mode])
+            .map(|j| self.modes.coupling[i * slips + j] * self.modes.shapes[j * slips + mode])
             .sum()
     }
 
@@ -162,15 +160,6 @@ impl PrismaticPiece {
             relation.left[force * all + force] = -1.0;
         }
         relation.left[1] = -h;
-        for j in 0..slips {
-            let slip = states.slip(j);
-            for i in 0..self.modes.base {
-                let factor = self.modes.coupling[i * slips + j];
-                relation.right[(1 + i) * all + slip] -= factor;
-                relation.left[(1 + i) * all + slip] += factor;
-            }
-            relation.left[slip] += self.modes.coupling[j] * h;
-        }
         for (input, column) in self.inputs() {
             let statics = self.statics(input, None);
             let strains = self.strains(&statics, &[]);
@@ -190,7 +179,7 @@ impl PrismaticPiece {
         relation
     }
 
-    /// The two rows of a mode, and its share in the deflection.
+    /// The two rows of a mode, and its share in the deflection and the base displacements.
     fn mode_rows(&self, mode: usize, relation: &mut Relation) {
         let (states, half, all) = (self.states, self.states.half(), self.states.all());
         let slips = states.slips;
@@ -200,8 +189,10 @@ impl PrismaticPiece {
             relation.right[row * all..(row + 1) * all].fill(0.0);
         }
         let piece = &self.slip[mode];
-        let share = self.rotation_of_mode(mode);
         let ends = piece.ends();
+        // Rows that grow with the slip gained (0) or its integral (1).
+        let mut grown = vec![(0, 1, self.share_of_mode(0, mode))];
+        grown.extend((0..self.modes.base).map(|i| (1 + i, 0, self.share_of_mode(i, mode))));
         for j in 0..slips {
             let slip = states.slip(j);
             let dual = self.modes.duals[j * slips + mode];
@@ -212,17 +203,22 @@ impl PrismaticPiece {
                 relation.right[row * all + slip] += ends.right[which][0] * dual;
                 relation.right[row * all + half + slip] += ends.right[which][1] * shape;
             }
-            // w grows by the integral of R s.
-            relation.left[slip] -= share * ends.integral_left[0] * dual;
-            relation.left[half + slip] -= share * ends.integral_left[1] * shape;
-            relation.right[half + slip] -= share * ends.integral_right * shape;
+            for &(row, which, share) in &grown {
+                let (left, right) = (ends.gained_left[which], ends.gained_right[which]);
+                relation.left[row * all + slip] -= share * left[0] * dual;
+                relation.left[row * all + half + slip] -= share * left[1] * shape;
+                relation.right[row * all + slip] -= share * right[0] * dual;
+                relation.right[row * all + half + slip] -= share * right[1] * shape;
+            }
         }
         for (input, column) in self.inputs() {
             let side = piece.side(&self.drive(mode, &self.statics(input, None), None));
             for (which, row) in rows.into_iter().enumerate() {
                 relation.left[row * all + column] -= side.rows[which];
             }
-            relation.left[column] -= share * side.integral;
+            for &(row, which, share) in &grown {
+                relation.left[row * all + column] -= share * side.gained[which];
+            }
         }
     }
 
@@ -255,7 +251,10 @@ impl PrismaticPiece {
             let own = piece.side(&self.drive(mode, &statics, Some(load)));
             side[states.slip(mode)] = own.rows[0];
             side[half + states.slip(mode)] = own.rows[1];
-            side[0] += self.rotation_of_mode(mode) * own.integral;
+            side[0] += self.share_of_mode(0, mode) * own.gained[1];
+            for i in 0..self.modes.base {
+                side[1 + i] += self.share_of_mode(i, mode) * own.gained[0];
+            }
         }
     }
 }

@@ -94,13 +94,11 @@ impl PrismaticPiece {
             );
         }
         for i in 0..self.modes.base {
-            let factor: f64 = (0..slips)
-                .map(|j| self.modes.coupling[i * slips + j] * self.modes.shapes[j * slips + mode])
-                .sum();
-            put(1 + i, factor, &lines.slip_gained);
+            let share = self.share_of_mode(i, mode);
+            put(1 + i, share, &lines.gained);
             if i == 0 {
-                put(0, factor, &lines.slip_gained_integral);
-                put(2 * half, -factor, &lines.slip_gradient);
+                put(0, share, &lines.gained_integral);
+                put(2 * half, -share, &lines.gain);
             }
         }
     }

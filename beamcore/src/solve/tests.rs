@@ -155,14 +155,14 @@ fn free_curvature_bends_and_restrained_curvature_makes_moments() {
     let (l, ei, kappa) = (6.2, 3.0e6, 1.4e-3);
     let simple = plain(&[0.0, l], &[&[W], &[W]], &[ei]).unwrap();
     let mut case = simple.no_load();
-    case.free[0] = -ei * kappa;
+    case.free[0] = -kappa;
     let solved = simple.solve(&case);
     let w = kappa * l * l / 8.0;
     near(at(&simple, &solved, 0, W, 0.5), w, w, "deflection");
     near(at(&simple, &solved, 0, B, 0.0), 0.0, kappa * ei, "moment");
     let fixed = plain(&[0.0, l], &[&[W, THETA], &[W, THETA]], &[ei]).unwrap();
     let mut case = fixed.no_load();
-    case.free[0] = -ei * kappa;
+    case.free[0] = -kappa;
     let solved = fixed.solve(&case);
     near(
         -at(&fixed, &solved, 0, B, 0.0),
@@ -219,6 +219,7 @@ fn two_layers(k: f64) -> (States, Law) {
     let layers = vec![layer(11e9, 0.1, 0.22, 0.0), layer(31e9, 0.6, 0.07, 0.145)];
     let joint = PlainJoint {
         above: vec![false, true],
+        layers: [0, 1],
         strands: [0, 0],
         modulus: k,
         transverse: 0.0,

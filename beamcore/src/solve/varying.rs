@@ -26,7 +26,6 @@ pub(crate) struct VaryingLaws {
 pub(crate) struct VaryingPiece {
     states: States,
     length: f64,
-    laws: Arc<VaryingLaws>,
     matrices: Vec<DMatrix<f64>>,
     end_matrices: [DMatrix<f64>; 2],
     units: Vec<f64>,
@@ -71,7 +70,6 @@ impl VaryingPiece {
         Self {
             states,
             length,
-            laws,
             matrices,
             end_matrices,
             units,
@@ -116,24 +114,19 @@ impl VaryingPiece {
     fn load_at_point(&self, load: &PieceLoad<'_>, j: usize) -> DVector<f64> {
         let per_point = load.at_nodes.len() / (POINTS + 2);
         let more = &load.at_nodes[j * per_point..(j + 1) * per_point];
-        self.load_at(load, RULE.points[j], &self.laws.points[j], more)
+        self.load_at(load, RULE.points[j], more)
     }
 
     /// b at a place: free gradients, and loads with their sign reversed.
-    fn load_at(&self, load: &PieceLoad<'_>, t: f64, law: &Law, more: &[f64]) -> DVector<f64> {
+    fn load_at(&self, load: &PieceLoad<'_>, t: f64, more: &[f64]) -> DVector<f64> {
         let (half, strands) = (self.states.half(), self.states.strands);
         let mut b = DVector::zeros(2 * half);
-        let mut free = DVector::from_column_slice(load.free);
         for i in 0..half {
             let line = load.line[i] + (load.line[half + i] - load.line[i]) * t;
             b[half + i] = -(line + more.get(i).copied().unwrap_or(0.0));
         }
-        for (i, force) in free.iter_mut().enumerate() {
-            *force += more.get(half + i).copied().unwrap_or(0.0);
-        }
-        let gradients = inverse(&law.stiffness) * free;
-        for (i, gradient) in gradients.iter().enumerate() {
-            b[strands + i] = *gradient;
+        for (i, gradient) in load.free.iter().enumerate() {
+            b[strands + i] = gradient + more.get(half + i).copied().unwrap_or(0.0);
         }
         for (number, unit) in b.iter_mut().zip(&self.units) {
             *number /= unit;
@@ -230,8 +223,7 @@ impl VaryingPiece {
             let t = which as f64;
             let first = (POINTS + which) * per_point;
             let more = &load.at_nodes[first..first + per_point];
-            let law = &self.laws.ends[which];
-            let wanted = &self.end_matrices[which] * y + self.load_at(load, t, law, more);
+            let wanted = &self.end_matrices[which] * y + self.load_at(load, t, more);
             for i in 0..all {
                 let at_end = |c: &[f64; POINTS]| if which == 0 { c[0] } else { c.iter().sum() };
                 let slope: f64 = slopes
