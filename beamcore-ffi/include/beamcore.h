@@ -38,13 +38,16 @@
  * as it is). To ask for the length, pass NULL with capacity 0.
  *
  * UNITS. All numbers are SI; the unit stands at the end of a parameter's name: width_m, load_N,
- * load_N_per_m, load_N_per_m2, modulus_Pa, moment_Nm, stiffness_Nm2, second_moment_m4, age_s.
+ * load_N_per_m, load_N_per_m2, modulus_Pa, moment_Nm, stiffness_Nm2, second_moment_m4, age_s,
+ * modulus_N_per_m2, stiffness_N_per_m, stiffness_Nm_per_rad, pitch_rad, change_K, curvature_per_m.
  *
  * SIGNS. x runs left to right, z up; a section is drawn as seen against x, with y to the right.
  * Deflection and loads are positive downward, couples clockwise, the slope is dw/dx, the shear
  * force V = dM/dx, a positive (sagging) moment stretches the bottom, tension is positive, forces of
  * supports, cambers and readings are positive upward. A movement sideways is positive towards
- * positive y.
+ * positive y. Forces along the member are positive to the right, settlements downward, rotations
+ * clockwise, changes of temperature where warmer. The slip of a joint is the displacement along x
+ * of its upper layer minus that of its lower one; its flow bears the same sign.
  *
  * PANICS. A fault inside the library is caught and reported as BC_ERROR_PANIC; the caller is never
  * aborted by it.
@@ -182,6 +185,15 @@
 
 // Field: moment in N m, positive where it stretches the bottom.
 #define BC_FIELD_MOMENT 4
+
+// Field: axial force in N, tension positive.
+#define BC_FIELD_AXIAL 5
+
+// Field: rotation of the section in rad, positive clockwise; with shear it is not the slope.
+#define BC_FIELD_ROTATION 6
+
+// Field: curvature in 1/m, positive sagging, with its free part.
+#define BC_FIELD_CURVATURE 7
 
 // Extreme: the value of greatest magnitude, with its sign.
 #define BC_EXTREME_GREATEST 1
@@ -379,6 +391,74 @@
 // Mean strength of concrete: tension, f_ctm.
 #define BC_STRENGTH_MEAN_TENSION 15
 
+// Joint: without slip; the two layers are one piece.
+#define BC_JOINT_RIGID 1
+
+// Joint: with slip in proportion to the flow.
+#define BC_JOINT_SLIPPING 2
+
+// Joint: the layers slip freely and share their deflection only.
+#define BC_JOINT_LOOSE 3
+
+// Field of a joint: slip in m, displacement along x of the upper layer minus the lower one's.
+#define BC_JOINT_FIELD_SLIP 1
+
+// Field of a joint: flow in N/m, with the sign of the slip.
+#define BC_JOINT_FIELD_FLOW 2
+
+// Field of a joint: pressure of the layers above on those below in N/m, negative where they would
+// part.
+#define BC_JOINT_FIELD_PRESSURE 3
+
+// Field of a layer: axial force in N, tension positive.
+#define BC_LAYER_FIELD_AXIAL 1
+
+// Field of a layer: moment about its own centroid in N m, positive where it stretches the bottom.
+#define BC_LAYER_FIELD_MOMENT 2
+
+// Field of a layer: deflection in m, positive downward; that of the member unless a transverse
+// modulus gives the layer one of its own.
+#define BC_LAYER_FIELD_DEFLECTION 3
+
+// Change of the section: another one from a place on.
+#define BC_CHANGE_STEP 1
+
+// Change of the section: linear between two places.
+#define BC_CHANGE_TAPER 2
+
+// Hinge: no moment passes.
+#define BC_HINGE_MOMENT 1
+
+// Hinge: no shear force passes.
+#define BC_HINGE_SHEAR 2
+
+// Hinge: one layer is butted, no axial force of it passes.
+#define BC_HINGE_BUTT 3
+
+// Shear deformation: left out.
+#define BC_SHEAR_RIGID 1
+
+// Shear deformation: with kGA of each section, from the energy of its shear stress.
+#define BC_SHEAR_FLEXIBLE 2
+
+// Shear deformation: with the kGA that is given (bc_plan_with_given_shear).
+#define BC_SHEAR_GIVEN 3
+
+// Length of the simplified methods: a single span L, l = L.
+#define BC_LENGTH_SPAN 1
+
+// Length of the simplified methods: a span L of several, l = 0.8 L.
+#define BC_LENGTH_CONTINUOUS 2
+
+// Length of the simplified methods: a cantilever of length L, l = 2 L.
+#define BC_LENGTH_CANTILEVER 3
+
+// Simplified method: gamma, EN 1995-1-1:2004 Annex B, for two or three layers.
+#define BC_METHOD_GAMMA 1
+
+// Simplified method: sine layers, for any number of layers.
+#define BC_METHOD_SINE_LAYERS 2
+
 // An action: loads that act together, from one cause.
 typedef struct bc_action bc_action;
 
@@ -388,8 +468,23 @@ typedef struct bc_camber bc_camber;
 // Checks: limits compared with the results of a member.
 typedef struct bc_checks bc_checks;
 
+// A comparison: what a simplified method gives for each span, beside the exact solution.
+typedef struct bc_comparison bc_comparison;
+
+// A field: a quantity along the member, in its SI unit.
+typedef struct bc_field bc_field;
+
 // A job: all inputs of a calculation as one document, read and found without fault.
 typedef struct bc_job bc_job;
+
+// A joint: what holds two layers together along the member.
+typedef struct bc_joint bc_joint;
+
+// A layer: the parts that act as one piece, without slip between them.
+typedef struct bc_layer bc_layer;
+
+// What the simplified methods know of a layer.
+typedef struct bc_layer_input bc_layer_input;
 
 // A limit of a component of the deflection.
 typedef struct bc_limit bc_limit;
@@ -420,8 +515,14 @@ typedef struct bc_readings bc_readings;
 // A response: the solved member.
 typedef struct bc_response bc_response;
 
-// A section: parts joined rigidly, each at its place.
+// A section: parts in layers with joints between them, each at its place.
 typedef struct bc_section bc_section;
+
+// Layers by a simplified method: the gamma method, or sine layers.
+typedef struct bc_simplified bc_simplified;
+
+// A support: where a member is held, and how. What it holds is rigid unless a spring is given.
+typedef struct bc_support bc_support;
 
 #ifdef __cplusplus
 extern "C" {
@@ -835,8 +936,8 @@ int32_t bc_part_set_into(const bc_part *part,
 // The same part with a mass per length of its own, instead of density x area.
 int32_t bc_part_with_line_mass(const bc_part *part, double line_mass_kg_per_m, bc_part **part_out);
 
-// A section of parts. All that is wrong with them is reported at once; no part at all is
-// BC_ERROR_MISSING.
+// A section of parts, joined rigidly as one layer named "section". All that is wrong with them is
+// reported at once; no part at all is BC_ERROR_MISSING.
 int32_t bc_section_new(const bc_part *const *parts, int32_t part_count, bc_section **section_out);
 
 // EA, the sum of E A over the parts, at a time.
@@ -893,6 +994,273 @@ int32_t bc_section_note(const bc_section *section,
 
 // Frees a section; NULL is allowed.
 void bc_section_free(bc_section *section);
+
+// A layer over the whole length of the member, of the parts of these names. It is checked when it
+// is used in a section.
+int32_t bc_layer_new(const char *name,
+                     const char *const *part_names,
+                     int32_t part_count,
+                     bc_layer **layer_out);
+
+// The same layer, there only from one place along the member to another, from the left end. What
+// is set into a host displaces it over the whole length all the same.
+int32_t bc_layer_between(const bc_layer *layer, double from_m, double to_m, bc_layer **layer_out);
+
+// The name of a layer.
+int32_t bc_layer_name(const bc_layer *layer, char *buffer, int64_t capacity, int64_t *length_out);
+
+// The number of parts of a layer.
+int32_t bc_layer_part_count(const bc_layer *layer, int32_t *count_out);
+
+// The name of a part of a layer. Parts are counted from 0.
+int32_t bc_layer_part_name(const bc_layer *layer,
+                           int32_t index,
+                           char *buffer,
+                           int64_t capacity,
+                           int64_t *length_out);
+
+// From where to where along the member a layer is there. Where it is there over the whole length,
+// has_value_out is 0 and the places are left as they are.
+int32_t bc_layer_extent(const bc_layer *layer,
+                        int32_t *has_value_out,
+                        double *from_m_out,
+                        double *to_m_out);
+
+// Frees a layer; NULL is allowed.
+void bc_layer_free(bc_layer *layer);
+
+// A joint without slip between two layers, given by their names. The slip of a joint is the
+// displacement along x of its upper layer minus that of its lower one; of layers side by side
+// either may be called the upper one, which only fixes that sign. Joints are checked when they are
+// used in a section.
+int32_t bc_joint_rigid(const char *name,
+                       const char *lower,
+                       const char *upper,
+                       bc_joint **joint_out);
+
+// A joint in which the two layers slip freely; they share their deflection only.
+int32_t bc_joint_loose(const char *name,
+                       const char *lower,
+                       const char *upper,
+                       bc_joint **joint_out);
+
+// A joint that slips in proportion to the flow, with its slip modulus k: force per length of the
+// joint and slip.
+int32_t bc_joint_slipping(const char *name,
+                          const char *lower,
+                          const char *upper,
+                          double slip_modulus_N_per_m2,
+                          bc_joint **joint_out);
+
+// A joint of fasteners in rows along the member, at one spacing: k = rows planes K/spacing, with K
+// the slip modulus of one fastener in one shear plane, force per slip.
+int32_t bc_joint_of_fasteners(const char *name,
+                              const char *lower,
+                              const char *upper,
+                              double stiffness_N_per_m,
+                              int32_t rows,
+                              int32_t planes,
+                              double spacing_m,
+                              bc_joint **joint_out);
+
+// A joint of fasteners as bc_joint_of_fasteners, with a spacing of its own in each band along the
+// member (three lists of one length: where a band begins and ends, from the left end, and its
+// spacing). There are no fasteners outside of the bands.
+int32_t bc_joint_of_fasteners_in_bands(const char *name,
+                                       const char *lower,
+                                       const char *upper,
+                                       double stiffness_N_per_m,
+                                       int32_t rows,
+                                       int32_t planes,
+                                       const double *band_from_m,
+                                       const double *band_to_m,
+                                       const double *band_spacing_m,
+                                       int32_t band_count,
+                                       bc_joint **joint_out);
+
+// A joint of a soft layer of glue: k = G width/thickness, with its shear modulus G, the width of
+// the glue line across the member and the thickness of the glue.
+int32_t bc_joint_of_glue(const char *name,
+                         const char *lower,
+                         const char *upper,
+                         double shear_modulus_Pa,
+                         double width_m,
+                         double thickness_m,
+                         bc_joint **joint_out);
+
+// The same joint across a gap: the clear distance between the two layers, which must agree with
+// their places to 0.1 mm. It must be stated where the layers do not touch.
+int32_t bc_joint_with_gap(const bc_joint *joint, double gap_m, bc_joint **joint_out);
+
+// The same joint with a modulus square to the member, force per length that one length of
+// difference between the deflections makes: the two layers then have a deflection each.
+int32_t bc_joint_with_transverse(const bc_joint *joint,
+                                 double modulus_N_per_m2,
+                                 bc_joint **joint_out);
+
+// The same slipping joint with a clearance, as of bolts in wider holes: it carries nothing until
+// the slip, in either sense, has used it up.
+int32_t bc_joint_with_clearance(const bc_joint *joint, double clearance_m, bc_joint **joint_out);
+
+// The same joint with a creep factor of its own: at the end its moduli are divided by
+// (1 + factor). Without it, the factor follows from wood-based layers; beside any other material
+// it must be given.
+int32_t bc_joint_with_creep_factor(const bc_joint *joint,
+                                   double creep_factor,
+                                   bc_joint **joint_out);
+
+// The kind of a joint (BC_JOINT_...).
+int32_t bc_joint_kind(const bc_joint *joint, int32_t *kind_out);
+
+// Frees a joint; NULL is allowed.
+void bc_joint_free(bc_joint *joint);
+
+// The name of a joint.
+int32_t bc_joint_name(const bc_joint *joint, char *buffer, int64_t capacity, int64_t *length_out);
+
+// The name of the lower layer of a joint.
+int32_t bc_joint_lower(const bc_joint *joint, char *buffer, int64_t capacity, int64_t *length_out);
+
+// The name of the upper layer of a joint.
+int32_t bc_joint_upper(const bc_joint *joint, char *buffer, int64_t capacity, int64_t *length_out);
+
+// The gap that was stated. Where none was, has_value_out is 0 and the gap is left as it is.
+int32_t bc_joint_gap(const bc_joint *joint, int32_t *has_value_out, double *gap_m_out);
+
+// The modulus square to the member that was given. Where none was, has_value_out is 0 and the
+// modulus is left as it is.
+int32_t bc_joint_transverse(const bc_joint *joint,
+                            int32_t *has_value_out,
+                            double *modulus_N_per_m2_out);
+
+// The clearance that was given. Where none was, has_value_out is 0 and the clearance is left as
+// it is.
+int32_t bc_joint_clearance(const bc_joint *joint, int32_t *has_value_out, double *clearance_m_out);
+
+// The creep factor that was given. Where none was, has_value_out is 0 and the factor is left as it
+// is; what follows then is told by bc_section_joint_creep_factor.
+int32_t bc_joint_creep_factor(const bc_joint *joint,
+                              int32_t *has_value_out,
+                              double *creep_factor_out);
+
+// A section of parts in layers, with joints between the layers. All that is wrong is reported at
+// once.
+int32_t bc_section_layered(const bc_part *const *parts,
+                           int32_t part_count,
+                           const bc_layer *const *layers,
+                           int32_t layer_count,
+                           const bc_joint *const *joints,
+                           int32_t joint_count,
+                           bc_section **section_out);
+
+// The section whose every size and place lies at a share of the way from one section's (0) to
+// another's (1), as along a taper. The two must be alike: the same parts of the same materials and
+// shapes, placed in the same ways, in the same layers and joints.
+int32_t bc_section_between(const bc_section *section,
+                           const bc_section *other,
+                           double share,
+                           bc_section **section_out);
+
+// The shear stiffness kGA at a time of a section whose parts are glued over their whole height, so
+// that they act as one layer, bent about the level axis:
+// kGA = EI^2/int [ES(z)^2/(sum of b_i G_i)] dz. It is worked out exactly, for edges that are level
+// or upright.
+int32_t bc_section_shear_stiffness(const bc_section *section,
+                                   int32_t time,
+                                   double *shear_stiffness_N_out);
+
+// The shear stiffness kGA at a time of a section whose parts stand side by side, with their
+// centroids at one height, and are only fastened to each other:
+// 1/kGA = sum of (EI_i/EI)^2/kGA_i.
+int32_t bc_section_fastened_shear_stiffness(const bc_section *section,
+                                            int32_t time,
+                                            double *shear_stiffness_N_out);
+
+// What is meant by kGA, in words, for definitions of the shear coefficient differ.
+int32_t bc_shear_stiffness_definition(char *buffer, int64_t capacity, int64_t *length_out);
+
+// The number of layers of a section; of a section without layers, one named "section".
+int32_t bc_section_layer_count(const bc_section *section, int32_t *count_out);
+
+// A layer of a section as it was given. Layers are counted from 0.
+int32_t bc_section_layer(const bc_section *section, int32_t index, bc_layer **layer_out);
+
+// The number of joints of a section.
+int32_t bc_section_joint_count(const bc_section *section, int32_t *count_out);
+
+// A joint of a section as it was given. Joints are counted from 0.
+int32_t bc_section_joint(const bc_section *section, int32_t index, bc_joint **joint_out);
+
+// The number of merged layers of a section: layers that rigid joints hold together count once.
+int32_t bc_section_merged_layer_count(const bc_section *section, int32_t *count_out);
+
+// The number of layers in a merged layer. Merged layers are counted from 0.
+int32_t bc_section_merged_layer_size(const bc_section *section, int32_t index, int32_t *count_out);
+
+// The name of a layer in a merged layer. Both are counted from 0.
+int32_t bc_section_merged_layer_name(const bc_section *section,
+                                     int32_t index,
+                                     int32_t layer_index,
+                                     char *buffer,
+                                     int64_t capacity,
+                                     int64_t *length_out);
+
+// Where a joint lies in its section: the clear distance of its two layers (zero where they touch),
+// the z of the middle of the contact or gap, and the length of the contact line in the section, or
+// of what faces across the gap.
+int32_t bc_section_joint_place(const bc_section *section,
+                               const char *joint,
+                               double *distance_m_out,
+                               double *z_m_out,
+                               double *width_m_out);
+
+// The slip modulus of a joint at a place along the member and a time: k on the first day and
+// k/(1 + creep factor) at the end; zero of a loose joint, outside of all bands and where one of
+// the layers is not there. Of a rigid joint has_value_out is 0 and the modulus is left as it is.
+int32_t bc_section_joint_slip_modulus(const bc_section *section,
+                                      const char *joint,
+                                      double at_m,
+                                      int32_t time,
+                                      int32_t *has_value_out,
+                                      double *modulus_N_per_m2_out);
+
+// The modulus of a joint square to the member at a place along it and a time. Where the two layers
+// share their deflection, has_value_out is 0 and the modulus is left as it is.
+int32_t bc_section_joint_transverse_modulus(const bc_section *section,
+                                            const char *joint,
+                                            double at_m,
+                                            int32_t time,
+                                            int32_t *has_value_out,
+                                            double *modulus_N_per_m2_out);
+
+// The creep factor of a joint, given or found: at the end its moduli are divided by (1 + factor).
+int32_t bc_section_joint_creep_factor(const bc_section *section,
+                                      const char *joint,
+                                      double *creep_factor_out);
+
+// Where the creep factor of a joint comes from, in words.
+int32_t bc_section_joint_creep_basis(const bc_section *section,
+                                     const char *joint,
+                                     char *buffer,
+                                     int64_t capacity,
+                                     int64_t *length_out);
+
+// The clearance of a joint; zero unless it was given.
+int32_t bc_section_joint_clearance(const bc_section *section,
+                                   const char *joint,
+                                   double *clearance_m_out);
+
+// The number of stations of a joint: places along the member where one of its moduli changes, the
+// ends of its bands and of its layers.
+int32_t bc_section_joint_station_count(const bc_section *section,
+                                       const char *joint,
+                                       int32_t *count_out);
+
+// A station of a joint. Stations are counted from 0, from the left.
+int32_t bc_section_joint_station(const bc_section *section,
+                                 const char *joint,
+                                 int32_t index,
+                                 double *at_m_out);
 
 // The principal bending stiffnesses at a time, the greater and the smaller one, and the angle from
 // the level axis to the axis of the greater one, positive from y towards z.
@@ -1125,6 +1493,205 @@ int32_t bc_action_duration(const bc_action *action, int32_t *has_value_out, int3
 // has_value_out is 0 and the start is left as it is.
 int32_t bc_action_start(const bc_action *action, int32_t *has_value_out, double *start_s_out);
 
+// The same action with all its loads entering the layer of this name; without it, they enter the
+// layer that bc_member_entered_layer tells. It matters where layers have deflections of their own,
+// for the pressure in joints, and where forces act along the member.
+int32_t bc_action_on(const bc_action *action, const char *layer, bc_action **action_out);
+
+// The layer that the loads of an action enter. Where none was named, has_value_out is 0 and the
+// other results are left as they are.
+int32_t bc_action_layer(const bc_action *action,
+                        int32_t *has_value_out,
+                        char *buffer,
+                        int64_t capacity,
+                        int64_t *length_out);
+
+// The same action with a line load per length of the plan, as snow on a pitched member, over the
+// whole member; positive downward. Other line loads count per length of the member.
+int32_t bc_action_with_plan_load(const bc_action *action,
+                                 double load_N_per_m,
+                                 bc_action **action_out);
+
+// The same action with a line load per length of the plan between two places along the member.
+int32_t bc_action_with_partial_plan_load(const bc_action *action,
+                                         double load_N_per_m,
+                                         double from_m,
+                                         double to_m,
+                                         bc_action **action_out);
+
+// The same action with a force along the member, positive to the right, at a height z of the
+// section.
+int32_t bc_action_with_axial(const bc_action *action,
+                             double load_N,
+                             double at_m,
+                             double height_m,
+                             bc_action **action_out);
+
+// The same action with a tendon that pulls its two anchors towards each other (a positive force is
+// tension) and presses on the member where it turns: straight between its points, the first and
+// last of which are the anchors; two points make a straight tendon. Places along the member and
+// heights z of the section are two lists of one length, from the left.
+int32_t bc_action_with_draped_tendon(const bc_action *action,
+                                     double force_N,
+                                     const double *at_m,
+                                     const double *height_m,
+                                     int32_t point_count,
+                                     bc_action **action_out);
+
+// The same action with a tendon as bc_action_with_draped_tendon, along the parabola through three
+// points, the first and last of which are the anchors.
+int32_t bc_action_with_parabolic_tendon(const bc_action *action,
+                                        double force_N,
+                                        const double *at_m,
+                                        const double *height_m,
+                                        int32_t point_count,
+                                        bc_action **action_out);
+
+// The same action with a support that sinks, positive downward.
+int32_t bc_action_with_settlement(const bc_action *action,
+                                  const char *support,
+                                  double settlement_m,
+                                  bc_action **action_out);
+
+// The same action with a support that turns the section with it, positive clockwise.
+int32_t bc_action_with_imposed_rotation(const bc_action *action,
+                                        const char *support,
+                                        double rotation_rad,
+                                        bc_action **action_out);
+
+// The same action with a change of temperature, positive where warmer, of the parts of these
+// names; of none means of all. Each strains by its thermal expansion.
+int32_t bc_action_with_temperature(const bc_action *action,
+                                   double change_K,
+                                   const char *const *part_names,
+                                   int32_t part_count,
+                                   bc_action **action_out);
+
+// The same action with a top of the section that is warmer than its bottom by a difference,
+// linearly between them, with the mean over the height unchanged.
+int32_t bc_action_with_temperature_difference(const bc_action *action,
+                                              double difference_K,
+                                              bc_action **action_out);
+
+// The same action with a free strain of a part: moisture, shrinkage, a built-in curvature, a
+// locked strain. Its numbers are those of bc_part_with_initial_strain.
+int32_t bc_action_with_free_strain(const bc_action *action,
+                                   const char *part,
+                                   double axial_strain,
+                                   double curvature_y_per_m,
+                                   double curvature_z_per_m,
+                                   bc_action **action_out);
+
+// A support of a kind (BC_SUPPORT_...) at a place from the left end. It is checked when it is used
+// in a member (bc_plan_on_support).
+int32_t bc_support_new(const char *name,
+                       int32_t support_kind,
+                       double at_m,
+                       bc_support **support_out);
+
+// The same support, holding the deflection by a spring instead of rigidly.
+int32_t bc_support_with_spring(const bc_support *support,
+                               double stiffness_N_per_m,
+                               bc_support **support_out);
+
+// The same support with a spring along the axis: of a pin or a fixed support in place of its rigid
+// hold, of a roller in addition.
+int32_t bc_support_with_axial_spring(const bc_support *support,
+                                     double stiffness_N_per_m,
+                                     bc_support **support_out);
+
+// The same support with a spring against rotation: of a fixed support in place of its rigid hold,
+// of a pin or roller in addition.
+int32_t bc_support_with_rotational_spring(const bc_support *support,
+                                          double stiffness_Nm_per_rad,
+                                          bc_support **support_out);
+
+// The same support, which can push up but not pull down: the member may lift off it.
+int32_t bc_support_one_way(const bc_support *support, bc_support **support_out);
+
+// The same support with its hold along the axis at a height z of the section, on the first of the
+// layers that bear on it. Without it, all layers together are held at the elastic centroid of the
+// section at the left end.
+int32_t bc_support_at_height(const bc_support *support, double z_m, bc_support **support_out);
+
+// The same support as a bearing of the layers of these names only; without it (or of none), of
+// all. Its hold along the axis, if it has one, is then on the first of them.
+int32_t bc_support_under(const bc_support *support,
+                         const char *const *layer_names,
+                         int32_t layer_count,
+                         bc_support **support_out);
+
+// The same support, holding a layer along the member by itself, at a height of the section.
+int32_t bc_support_holding(const bc_support *support,
+                           const char *layer,
+                           double height_m,
+                           bc_support **support_out);
+
+// Frees a support; NULL is allowed.
+void bc_support_free(bc_support *support);
+
+// The name of a support.
+int32_t bc_support_name(const bc_support *support,
+                        char *buffer,
+                        int64_t capacity,
+                        int64_t *length_out);
+
+// The kind of a support (BC_SUPPORT_...).
+int32_t bc_support_kind(const bc_support *support, int32_t *kind_out);
+
+// The place of a support, from the left end.
+int32_t bc_support_place(const bc_support *support, double *at_m_out);
+
+// The spring under a support. Where none was given, has_value_out is 0 and the stiffness is left
+// as it is.
+int32_t bc_support_spring(const bc_support *support,
+                          int32_t *has_value_out,
+                          double *stiffness_N_per_m_out);
+
+// The spring of a support along the axis. Where none was given, has_value_out is 0 and the
+// stiffness is left as it is.
+int32_t bc_support_axial_spring(const bc_support *support,
+                                int32_t *has_value_out,
+                                double *stiffness_N_per_m_out);
+
+// The spring of a support against rotation. Where none was given, has_value_out is 0 and the
+// stiffness is left as it is.
+int32_t bc_support_rotational_spring(const bc_support *support,
+                                     int32_t *has_value_out,
+                                     double *stiffness_Nm_per_rad_out);
+
+// Whether the member may lift off a support (1) or not (0).
+int32_t bc_support_is_one_way(const bc_support *support, int32_t *is_one_way_out);
+
+// The height of the hold of a support along the axis. Where none was given, has_value_out is 0 and
+// the height is left as it is.
+int32_t bc_support_height(const bc_support *support, int32_t *has_value_out, double *z_m_out);
+
+// The number of layers that bear on a support by name; none means all.
+int32_t bc_support_layer_count(const bc_support *support, int32_t *count_out);
+
+// The name of a layer that bears on a support. Layers are counted from 0.
+int32_t bc_support_layer_name(const bc_support *support,
+                              int32_t index,
+                              char *buffer,
+                              int64_t capacity,
+                              int64_t *length_out);
+
+// The number of layers that a support holds along the member by themselves.
+int32_t bc_support_held_layer_count(const bc_support *support, int32_t *count_out);
+
+// The name of a layer that a support holds by itself. Layers are counted from 0.
+int32_t bc_support_held_layer_name(const bc_support *support,
+                                   int32_t index,
+                                   char *buffer,
+                                   int64_t capacity,
+                                   int64_t *length_out);
+
+// The height at which a support holds a layer by itself. Layers are counted from 0.
+int32_t bc_support_held_layer_height(const bc_support *support,
+                                     int32_t index,
+                                     double *height_m_out);
+
 // A plan of a member of the given length, without supports yet.
 int32_t bc_plan_of_length(const bc_section *section, double length_m, bc_plan **plan_out);
 
@@ -1170,6 +1737,73 @@ int32_t bc_plan_check(const bc_plan *plan, bc_member **member_out);
 
 // Frees a plan; NULL is allowed.
 void bc_plan_free(bc_plan *plan);
+
+// The same plan with one more support, described on its own (bc_support_new).
+int32_t bc_plan_on_support(const bc_plan *plan, const bc_support *support, bc_plan **plan_out);
+
+// The same plan with another section from a place on, to the right of all changes before.
+int32_t bc_plan_with_step(const bc_plan *plan,
+                          double at_m,
+                          const bc_section *section,
+                          bc_plan **plan_out);
+
+// The same plan with a section that changes linearly between two places, to the right of all
+// changes before, to a like one: the same parts, shapes and materials with other sizes.
+int32_t bc_plan_with_taper(const bc_plan *plan,
+                           double from_m,
+                           double to_m,
+                           const bc_section *section,
+                           bc_plan **plan_out);
+
+// The same plan with a hinge through all layers: no moment passes.
+int32_t bc_plan_with_moment_hinge(const bc_plan *plan, double at_m, bc_plan **plan_out);
+
+// The same plan with a hinge in one layer, which must have a deflection of its own: no moment of
+// it passes.
+int32_t bc_plan_with_layer_hinge(const bc_plan *plan,
+                                 const char *layer,
+                                 double at_m,
+                                 bc_plan **plan_out);
+
+// The same plan with a shear release: no shear force passes.
+int32_t bc_plan_with_shear_hinge(const bc_plan *plan, double at_m, bc_plan **plan_out);
+
+// The same plan with a butt joint of one layer: no axial force of it passes; its curvature goes on
+// with that of the others.
+int32_t bc_plan_with_butt_joint(const bc_plan *plan,
+                                const char *layer,
+                                double at_m,
+                                bc_plan **plan_out);
+
+// The same plan with an anchor, which stops the slip of a joint at a place, as an end plate or a
+// notch does. Its name addresses its force.
+int32_t bc_plan_with_anchor(const bc_plan *plan,
+                            const char *name,
+                            const char *joint,
+                            double at_m,
+                            bc_plan **plan_out);
+
+// The same plan with an anchor that yields in proportion to its force: stiffness is force per
+// slip.
+int32_t bc_plan_with_elastic_anchor(const bc_plan *plan,
+                                    const char *name,
+                                    const char *joint,
+                                    double at_m,
+                                    double stiffness_N_per_m,
+                                    bc_plan **plan_out);
+
+// The same plan with shear deformation left out (BC_SHEAR_RIGID, also without this) or taken with
+// kGA of each section (BC_SHEAR_FLEXIBLE).
+int32_t bc_plan_with_shear(const bc_plan *plan, int32_t shear_model, bc_plan **plan_out);
+
+// The same plan with shear deformation by the kGA that is given, the same all along the member and
+// its life.
+int32_t bc_plan_with_given_shear(const bc_plan *plan, double shear_stiffness_N, bc_plan **plan_out);
+
+// The same plan of a member that rises to the right by an angle. Its length and all places are
+// measured along it, gravity loads act downward, supports hold the vertical movement (a pin the
+// level one too), and the deflection is square to the member.
+int32_t bc_plan_with_pitch(const bc_plan *plan, double pitch_rad, bc_plan **plan_out);
 
 // A member of the given length. Each support has a name, a kind (BC_SUPPORT_...) and a place
 // from the left end; the three lists are of one length. All that is wrong is reported at once.
@@ -1219,6 +1853,83 @@ int32_t bc_member_note(const bc_member *member,
 
 // Frees a member; NULL is allowed.
 void bc_member_free(bc_member *member);
+
+// The section just right of a place (at the right end, just left of it).
+int32_t bc_member_section_at(const bc_member *member, double at_m, bc_section **section_out);
+
+// The number of parts of all sections along a member, each name once.
+int32_t bc_member_part_count(const bc_member *member, int32_t *count_out);
+
+// The name of a part of a member. Parts are counted from 0, in the order in which they come first
+// from the left.
+int32_t bc_member_part_name(const bc_member *member,
+                            int32_t index,
+                            char *buffer,
+                            int64_t capacity,
+                            int64_t *length_out);
+
+// The number of supports of a member.
+int32_t bc_member_support_count(const bc_member *member, int32_t *count_out);
+
+// A support of a member. Supports are counted from 0, in the order given.
+int32_t bc_member_support(const bc_member *member, int32_t index, bc_support **support_out);
+
+// The number of changes of the section along a member.
+int32_t bc_member_change_count(const bc_member *member, int32_t *count_out);
+
+// A change of the section: its kind (BC_CHANGE_...) and where it begins and ends, which of a step
+// is one place. Changes are counted from 0, from the left; bc_member_section_at gives the section
+// after it.
+int32_t bc_member_change(const bc_member *member,
+                         int32_t index,
+                         int32_t *change_kind_out,
+                         double *from_m_out,
+                         double *to_m_out);
+
+// The number of hinges of a member.
+int32_t bc_member_hinge_count(const bc_member *member, int32_t *count_out);
+
+// What a hinge releases (BC_HINGE_...) and its place. Hinges are counted from 0, in the order
+// given.
+int32_t bc_member_hinge(const bc_member *member,
+                        int32_t index,
+                        int32_t *hinge_kind_out,
+                        double *at_m_out);
+
+// The layer that a hinge is in. Where it goes through all layers, has_value_out is 0 and the other
+// results are left as they are.
+int32_t bc_member_hinge_layer(const bc_member *member,
+                              int32_t index,
+                              int32_t *has_value_out,
+                              char *buffer,
+                              int64_t capacity,
+                              int64_t *length_out);
+
+// How the shear deformation of a member is taken (BC_SHEAR_...).
+int32_t bc_member_shear(const bc_member *member, int32_t *shear_model_out);
+
+// The kGA that was given. Where none was, has_value_out is 0 and the stiffness is left as it is.
+int32_t bc_member_given_shear(const bc_member *member,
+                              int32_t *has_value_out,
+                              double *shear_stiffness_N_out);
+
+// The pitch of a member. Where it has none, has_value_out is 0 and the pitch is left as it is.
+int32_t bc_member_pitch(const bc_member *member, int32_t *has_value_out, double *pitch_rad_out);
+
+// Whether layers have deflections of their own, by transverse moduli of their joints (1), or share
+// one (0).
+int32_t bc_member_has_deflections_of_layers(const bc_member *member, int32_t *has_deflections_out);
+
+// Whether axial force takes part (1) or not (0): more than one support holds the axis, something
+// acts along the member, or it is pitched.
+int32_t bc_member_has_axial_force(const bc_member *member, int32_t *has_axial_force_out);
+
+// The layer that loads of actions without a named layer enter: the highest one where all layers
+// share one deflection, else the first.
+int32_t bc_member_entered_layer(const bc_member *member,
+                                char *buffer,
+                                int64_t capacity,
+                                int64_t *length_out);
 
 // The kind (BC_COMBINATION_...) of a combination. Combinations are counted from 0.
 int32_t bc_member_combination_kind(const bc_member *member, int32_t index, int32_t *kind_out);
@@ -1286,6 +1997,139 @@ int32_t bc_response_residual(const bc_response *response, double *residual_out);
 
 // Frees a response; NULL is allowed.
 void bc_response_free(bc_response *response);
+
+// A field (BC_FIELD_...) of a member under a combination at a time.
+int32_t bc_response_field(const bc_response *response,
+                          int32_t field,
+                          const char *combination,
+                          int32_t time,
+                          bc_field **field_out);
+
+// A field (BC_JOINT_FIELD_...) of a joint that is not rigid, under a combination at a time. Loads
+// that name no layer are taken to enter from above.
+int32_t bc_response_joint_field(const bc_response *response,
+                                int32_t joint_field,
+                                const char *combination,
+                                int32_t time,
+                                const char *joint,
+                                bc_field **field_out);
+
+// A field (BC_LAYER_FIELD_...) of a layer, with the layers that rigid joints hold to it, under a
+// combination at a time.
+int32_t bc_response_layer_field(const bc_response *response,
+                                int32_t layer_field,
+                                const char *combination,
+                                int32_t time,
+                                const char *layer,
+                                bc_field **field_out);
+
+// An extreme (BC_EXTREME_...) of a field and its place; the leftmost of equals.
+int32_t bc_field_extreme(const bc_field *field,
+                         int32_t extreme,
+                         double *value_out,
+                         double *at_m_out);
+
+// The values of a field at count places; where it jumps, side (BC_SIDE_...) says which of the two
+// values is meant. x_m and values_out may be the same list.
+int32_t bc_field_values(const bc_field *field,
+                        int32_t side,
+                        const double *x_m,
+                        int32_t count,
+                        double *values_out);
+
+// The number of stations of a field: the places where its pieces meet.
+int32_t bc_field_station_count(const bc_field *field, int32_t *count_out);
+
+// The place of a station of a field. Stations are counted from 0, from the left.
+int32_t bc_field_station(const bc_field *field, int32_t index, double *at_m_out);
+
+// Frees a field; NULL is allowed.
+void bc_field_free(bc_field *field);
+
+// The composite action of a member of layers, seen at the place of its greatest deflection: its
+// degree (w loose - w)/(w loose - w rigid), 0 where the joints do nothing and 1 where they do not
+// slip; the bending stiffness with which a member without slip would deflect as much; the place;
+// the deflection there, with all joints loose, and with all of them rigid.
+int32_t bc_response_composite_action(const bc_response *response,
+                                     const char *combination,
+                                     int32_t time,
+                                     double *degree_out,
+                                     double *effective_stiffness_Nm2_out,
+                                     double *at_m_out,
+                                     double *deflection_m_out,
+                                     double *loose_m_out,
+                                     double *rigid_m_out);
+
+// The level force of a support on the member, positive to the right; zero where no axial force
+// takes part.
+int32_t bc_response_reaction_along(const bc_response *response,
+                                   const char *combination,
+                                   int32_t time,
+                                   const char *support,
+                                   double *force_N_out);
+
+// The force with which a support holds a layer along the member by itself, positive to the right.
+int32_t bc_response_layer_reaction(const bc_response *response,
+                                   const char *combination,
+                                   int32_t time,
+                                   const char *support,
+                                   const char *layer,
+                                   double *force_N_out);
+
+// The number of one-way supports that the member leaves under a combination.
+int32_t bc_response_lifted_count(const bc_response *response,
+                                 const char *combination,
+                                 int32_t time,
+                                 int32_t *count_out);
+
+// The name of a support that the member leaves under a combination. They are counted from 0.
+int32_t bc_response_lifted_name(const bc_response *response,
+                                const char *combination,
+                                int32_t time,
+                                int32_t index,
+                                char *buffer,
+                                int64_t capacity,
+                                int64_t *length_out);
+
+// How many linear solutions a combination took: one, unless the member may lift off supports or
+// its joints have clearance.
+int32_t bc_response_steps(const bc_response *response,
+                          const char *combination,
+                          int32_t time,
+                          int32_t *count_out);
+
+// The number of anchors of a member.
+int32_t bc_member_anchor_count(const bc_member *member, int32_t *count_out);
+
+// The name of an anchor. Anchors are counted from 0, in the order given.
+int32_t bc_member_anchor_name(const bc_member *member,
+                              int32_t index,
+                              char *buffer,
+                              int64_t capacity,
+                              int64_t *length_out);
+
+// The name of the joint whose slip an anchor stops.
+int32_t bc_member_anchor_joint(const bc_member *member,
+                               int32_t index,
+                               char *buffer,
+                               int64_t capacity,
+                               int64_t *length_out);
+
+// The place of an anchor, and its stiffness. Where it lets no slip at all, has_value_out is 0 and
+// the stiffness is left as it is.
+int32_t bc_member_anchor(const bc_member *member,
+                         int32_t index,
+                         double *at_m_out,
+                         int32_t *has_value_out,
+                         double *stiffness_N_per_m_out);
+
+// The force of an anchor: with which it pulls the upper layer of its joint to the left; it bears
+// the sign of the slip that it stops.
+int32_t bc_response_anchor_force(const bc_response *response,
+                                 const char *combination,
+                                 int32_t time,
+                                 const char *anchor,
+                                 double *force_N_out);
 
 // The greatest tension or compression (BC_STRESS_...) in a part, tension positive, with its
 // place along the member and the point (y, z) of the section where it stands; where the member is
@@ -1557,6 +2401,260 @@ int32_t bc_checks_values(const bc_checks *checks,
 
 // Frees checks; NULL is allowed.
 void bc_checks_free(bc_checks *checks);
+
+// A layer for the simplified methods: EA, EI about its own elastic centroid, height with the
+// centroid at its middle, z of the centroid upward from any level that is the same for all layers,
+// modulus of the material whose stresses are asked for, and width.
+int32_t bc_layer_input_new(double axial_stiffness_N,
+                           double bending_stiffness_Nm2,
+                           double height_m,
+                           double centroid_z_m,
+                           double modulus_Pa,
+                           double width_m,
+                           bc_layer_input **layer_input_out);
+
+// A rectangular layer of one material for the simplified methods: EA = E b h, EI = E b h^3/12.
+int32_t bc_layer_input_rectangle(double modulus_Pa,
+                                 double width_m,
+                                 double height_m,
+                                 double centroid_z_m,
+                                 bc_layer_input **layer_input_out);
+
+// EA and EI of a layer for the simplified methods.
+int32_t bc_layer_input_stiffness(const bc_layer_input *layer_input,
+                                 double *axial_stiffness_N_out,
+                                 double *bending_stiffness_Nm2_out);
+
+// Frees a layer for the simplified methods; NULL is allowed.
+void bc_layer_input_free(bc_layer_input *layer_input);
+
+// The length l of the half sine wave that the simplified methods take for a span or cantilever
+// (BC_LENGTH_...).
+int32_t bc_reference_length(int32_t length_kind, double length_m, double *reference_length_m_out);
+
+// Two or three layers that slip on each other by the gamma method (EN 1995-1-1:2004 Annex B, from
+// memory): layers from the lowest upward, the slip modulus per length of each joint between two of
+// them, and a span or cantilever (BC_LENGTH_...).
+int32_t bc_simplified_gamma(const bc_layer_input *const *layers,
+                            int32_t layer_count,
+                            const double *slip_moduli_N_per_m2,
+                            int32_t joint_count,
+                            int32_t length_kind,
+                            double length_m,
+                            bc_simplified **simplified_out);
+
+// Any number of layers that slip on each other under a load in the form of half a sine wave, for
+// which this is exact; parameters as for bc_simplified_gamma.
+int32_t bc_simplified_sine_layers(const bc_layer_input *const *layers,
+                                  int32_t layer_count,
+                                  const double *slip_moduli_N_per_m2,
+                                  int32_t joint_count,
+                                  int32_t length_kind,
+                                  double length_m,
+                                  bc_simplified **simplified_out);
+
+// The number of warnings: where the method does not hold, or only nearly.
+int32_t bc_simplified_warning_count(const bc_simplified *simplified, int32_t *count_out);
+
+// A warning in words. Warnings are counted from 0.
+int32_t bc_simplified_warning(const bc_simplified *simplified,
+                              int32_t index,
+                              char *buffer,
+                              int64_t capacity,
+                              int64_t *length_out);
+
+// Frees layers by a simplified method; NULL is allowed.
+void bc_simplified_free(bc_simplified *simplified);
+
+// The number of layers.
+int32_t bc_simplified_layer_count(const bc_simplified *simplified, int32_t *count_out);
+
+// The effective bending stiffness EI_ef.
+int32_t bc_simplified_bending_stiffness(const bc_simplified *simplified,
+                                        double *bending_stiffness_Nm2_out);
+
+// The arm of a layer, positive upward: a_i of the gamma method, the effective arm e_i of sine
+// layers (which is gamma_i a_i). Layers are counted from 0, from the lowest upward.
+int32_t bc_simplified_arm(const bc_simplified *simplified, int32_t layer_index, double *arm_m_out);
+
+// The factor gamma_i of a layer: 1 for a rigid joint, 0 for a loose one. Of sine layers, which
+// have none, has_value_out is 0 and the factor is left as it is.
+int32_t bc_simplified_gamma_factor(const bc_simplified *simplified,
+                                   int32_t layer_index,
+                                   int32_t *has_value_out,
+                                   double *factor_out);
+
+// The layer with gamma = 1 of the gamma method, counted from 0. Of sine layers, which have none,
+// has_value_out is 0 and the layer is left as it is.
+int32_t bc_simplified_base_layer(const bc_simplified *simplified,
+                                 int32_t *has_value_out,
+                                 int32_t *layer_index_out);
+
+// The axial force of a layer under a moment, tension positive.
+int32_t bc_simplified_axial_force(const bc_simplified *simplified,
+                                  double moment_Nm,
+                                  int32_t layer_index,
+                                  double *force_N_out);
+
+// The normal stresses of a layer under a moment, tension positive: at the middle of its height,
+// what bending of the layer adds at its lower edge, and their sums at its lower and its upper edge.
+int32_t bc_simplified_stress(const bc_simplified *simplified,
+                             double moment_Nm,
+                             int32_t layer_index,
+                             double *axial_Pa_out,
+                             double *bending_Pa_out,
+                             double *bottom_Pa_out,
+                             double *top_Pa_out);
+
+// The flow of a joint under a shear force. Joints are counted from 0, from the lowest upward.
+int32_t bc_simplified_flow(const bc_simplified *simplified,
+                           double shear_N,
+                           int32_t joint_index,
+                           double *flow_N_per_m_out);
+
+// The force of a fastener of a joint under a shear force: flow x spacing. Spacings are those of
+// all joints, as of one row: with n rows, the spacing along the member over n.
+int32_t bc_simplified_fastener_force(const bc_simplified *simplified,
+                                     double shear_N,
+                                     const double *spacings_m,
+                                     int32_t spacing_count,
+                                     int32_t joint_index,
+                                     double *force_N_out);
+
+// The greatest shear stress of a layer under a shear force, with its sign, and its place in the z
+// of the layers.
+int32_t bc_simplified_shear_stress(const bc_simplified *simplified,
+                                   double shear_N,
+                                   int32_t layer_index,
+                                   double *value_Pa_out,
+                                   double *z_m_out);
+
+// The effective spacing of fasteners that stand closer where the shear force is greater:
+// 0.75 s_min + 0.25 s_max (EN 1995-1-1:2004 9.1.3 and Annex B, from memory).
+int32_t bc_effective_spacing(double least_m, double greatest_m, double *spacing_m_out);
+
+// The number of warnings on an effective spacing: where it does not hold, or only nearly.
+int32_t bc_effective_spacing_warning_count(double least_m, double greatest_m, int32_t *count_out);
+
+// A warning on an effective spacing, in words. Warnings are counted from 0.
+int32_t bc_effective_spacing_warning(double least_m,
+                                     double greatest_m,
+                                     int32_t index,
+                                     char *buffer,
+                                     int64_t capacity,
+                                     int64_t *length_out);
+
+// Deflection, flow and stresses of each span by a simplified method (BC_METHOD_...), beside the
+// exact ones, under a combination at a time. It covers prismatic members of layers on each other
+// under transverse loads; free strains are left out of both sides.
+int32_t bc_response_compare(const bc_response *response,
+                            const char *combination,
+                            int32_t time,
+                            int32_t method,
+                            bc_comparison **comparison_out);
+
+// The number of spans of a comparison.
+int32_t bc_comparison_span_count(const bc_comparison *comparison, int32_t *count_out);
+
+// The name of a span. Spans are counted from 0, from the left.
+int32_t bc_comparison_span_name(const bc_comparison *comparison,
+                                int32_t span_index,
+                                char *buffer,
+                                int64_t capacity,
+                                int64_t *length_out);
+
+// The length of the half sine wave for a span, the effective bending stiffness with the moduli of
+// the time, and whether the combination holds free strains, which are left out (1) or not (0).
+int32_t bc_comparison_span(const bc_comparison *comparison,
+                           int32_t span_index,
+                           double *length_m_out,
+                           double *bending_stiffness_Nm2_out,
+                           int32_t *leaves_out_strains_out);
+
+// The number of factors gamma of a span, one for each layer; none of sine layers.
+int32_t bc_comparison_factor_count(const bc_comparison *comparison,
+                                   int32_t span_index,
+                                   int32_t *count_out);
+
+// A factor gamma of a span. Layers are counted from 0, from the lowest upward.
+int32_t bc_comparison_factor(const bc_comparison *comparison,
+                             int32_t span_index,
+                             int32_t layer_index,
+                             double *factor_out);
+
+// The greatest deflection of a span with its place, by the method and by the exact solution, and
+// their ratio less one.
+int32_t bc_comparison_deflection(const bc_comparison *comparison,
+                                 int32_t span_index,
+                                 double *value_m_out,
+                                 double *at_m_out,
+                                 double *exact_value_m_out,
+                                 double *exact_at_m_out,
+                                 double *difference_out);
+
+// The number of warnings for a span: where the method does not hold, or only nearly.
+int32_t bc_comparison_warning_count(const bc_comparison *comparison,
+                                    int32_t span_index,
+                                    int32_t *count_out);
+
+// A warning for a span, in words. Warnings are counted from 0.
+int32_t bc_comparison_warning(const bc_comparison *comparison,
+                              int32_t span_index,
+                              int32_t index,
+                              char *buffer,
+                              int64_t capacity,
+                              int64_t *length_out);
+
+// Frees a comparison; NULL is allowed.
+void bc_comparison_free(bc_comparison *comparison);
+
+// The number of joints of a span in a comparison.
+int32_t bc_comparison_joint_count(const bc_comparison *comparison,
+                                  int32_t span_index,
+                                  int32_t *count_out);
+
+// The name of a joint in a comparison. Joints are counted from 0.
+int32_t bc_comparison_joint_name(const bc_comparison *comparison,
+                                 int32_t span_index,
+                                 int32_t joint_index,
+                                 char *buffer,
+                                 int64_t capacity,
+                                 int64_t *length_out);
+
+// The greatest flow of a joint over a span with its place, by the method and by the exact
+// solution, with the sign of the slip.
+int32_t bc_comparison_flow(const bc_comparison *comparison,
+                           int32_t span_index,
+                           int32_t joint_index,
+                           double *flow_N_per_m_out,
+                           double *at_m_out,
+                           double *exact_flow_N_per_m_out,
+                           double *exact_at_m_out);
+
+// The number of layers of a span in a comparison.
+int32_t bc_comparison_layer_count(const bc_comparison *comparison,
+                                  int32_t span_index,
+                                  int32_t *count_out);
+
+// The name of a layer in a comparison. Layers are counted from 0, from the lowest upward.
+int32_t bc_comparison_layer_name(const bc_comparison *comparison,
+                                 int32_t span_index,
+                                 int32_t layer_index,
+                                 char *buffer,
+                                 int64_t capacity,
+                                 int64_t *length_out);
+
+// The stresses of a layer by the method at the place of the span's greatest moment: at the middle
+// of its height, and what bending of the layer adds at its lower edge; with the place, and the
+// axial force and moment of the layer there by the exact solution.
+int32_t bc_comparison_stress(const bc_comparison *comparison,
+                             int32_t span_index,
+                             int32_t layer_index,
+                             double *axial_Pa_out,
+                             double *bending_Pa_out,
+                             double *at_m_out,
+                             double *exact_axial_N_out,
+                             double *exact_moment_Nm_out);
 
 // Reads a job from a text in TOML or JSON (BC_FORMAT_...). All that is wrong is reported at once.
 int32_t bc_job_read(const char *document, int32_t format, bc_job **job_out);

@@ -13,6 +13,7 @@
 #include "beamcore/concrete.hpp"
 #include "beamcore/error.hpp"
 #include "beamcore/job.hpp"
+#include "beamcore/layer.hpp"
 #include "beamcore/limit.hpp"
 #include "beamcore/material.hpp"
 #include "beamcore/member.hpp"
@@ -21,6 +22,8 @@
 #include "beamcore/reading.hpp"
 #include "beamcore/response.hpp"
 #include "beamcore/section.hpp"
+#include "beamcore/simplified.hpp"
+#include "beamcore/support.hpp"
 #include "beamcore_units.hpp"
 
 namespace beamcore {

@@ -51,6 +51,12 @@ pub const BC_FIELD_SLOPE: i32 = 2;
 pub const BC_FIELD_SHEAR: i32 = 3;
 /// Field: moment in N m, positive where it stretches the bottom.
 pub const BC_FIELD_MOMENT: i32 = 4;
+/// Field: axial force in N, tension positive.
+pub const BC_FIELD_AXIAL: i32 = 5;
+/// Field: rotation of the section in rad, positive clockwise; with shear it is not the slope.
+pub const BC_FIELD_ROTATION: i32 = 6;
+/// Field: curvature in 1/m, positive sagging, with its free part.
+pub const BC_FIELD_CURVATURE: i32 = 7;
 
 /// Extreme: the value of greatest magnitude, with its sign.
 pub const BC_EXTREME_GREATEST: i32 = 1;
@@ -88,6 +94,9 @@ pub(crate) enum FieldName {
     Slope,
     Shear,
     Moment,
+    Axial,
+    Rotation,
+    Curvature,
 }
 
 /// Which extreme of a field.
@@ -207,11 +216,15 @@ choice!(
     field_number,
     FieldName,
     "field",
-    "BC_FIELD_DEFLECTION, BC_FIELD_SLOPE, BC_FIELD_SHEAR, BC_FIELD_MOMENT",
+    "BC_FIELD_DEFLECTION, BC_FIELD_SLOPE, BC_FIELD_SHEAR, BC_FIELD_MOMENT, BC_FIELD_AXIAL, \
+     BC_FIELD_ROTATION, BC_FIELD_CURVATURE",
     Deflection = BC_FIELD_DEFLECTION,
     Slope = BC_FIELD_SLOPE,
     Shear = BC_FIELD_SHEAR,
-    Moment = BC_FIELD_MOMENT
+    Moment = BC_FIELD_MOMENT,
+    Axial = BC_FIELD_AXIAL,
+    Rotation = BC_FIELD_ROTATION,
+    Curvature = BC_FIELD_CURVATURE
 );
 choice!(
     extreme,

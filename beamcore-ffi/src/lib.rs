@@ -13,6 +13,7 @@
 
 // What every function is made with.
 mod fault;
+mod get;
 mod guard;
 mod handle;
 mod text;
@@ -29,6 +30,8 @@ pub mod choice;
 pub mod choice_member;
 
 pub mod choice_section;
+
+pub mod choice_layers;
 
 pub mod material;
 
@@ -48,6 +51,16 @@ pub mod part_place;
 
 pub mod section;
 
+pub mod layer;
+
+pub mod joint;
+
+pub mod joint_given;
+
+pub mod layered;
+
+pub mod placed_joint;
+
 pub mod plane;
 
 pub mod strain;
@@ -62,13 +75,33 @@ pub mod action;
 
 pub mod action_time;
 
+pub mod action_along;
+
+pub mod action_imposed;
+
+pub mod support;
+
+pub mod support_given;
+
 pub mod plan;
 
+pub mod plan_shape;
+
 pub mod member;
+
+pub mod member_shape;
+
+pub mod member_layers;
 
 pub mod combination;
 
 pub mod response;
+
+pub mod field;
+
+pub mod composite;
+
+pub mod member_anchor;
 
 pub mod stress;
 
@@ -84,6 +117,16 @@ pub mod limit;
 
 pub mod limit_check;
 
+pub mod simplified;
+
+pub mod simplified_forces;
+
+pub mod spacing;
+
+pub mod comparison;
+
+pub mod comparison_layers;
+
 pub mod job;
 
 pub mod outcome;
@@ -97,9 +140,14 @@ pub mod plain_concrete;
 const _: () = {
     const fn shared_between_threads<T: Send + Sync>() {}
     shared_between_threads::<(material::BcMaterial, part::BcPart, section::BcSection)>();
-    shared_between_threads::<outline::BcOutline>();
+    shared_between_threads::<(outline::BcOutline, layer::BcLayer, joint::BcJoint)>();
     shared_between_threads::<(action::BcAction, member::BcMember, response::BcResponse)>();
-    shared_between_threads::<(plan::BcPlan, reading::BcReadings)>();
+    shared_between_threads::<(plan::BcPlan, support::BcSupport, reading::BcReadings)>();
+    shared_between_threads::<(
+        field::BcField,
+        simplified::BcLayerInput,
+        simplified::BcSimplified,
+    )>();
     shared_between_threads::<(limit::BcLimit, limit_check::BcChecks)>();
     shared_between_threads::<(camber::BcCamber, job::BcJob, outcome::BcOutcome)>();
 };

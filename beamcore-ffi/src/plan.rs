@@ -65,7 +65,7 @@ pub unsafe extern "C" fn bc_plan_simple_span(
 ///
 /// # Safety
 /// As for the functions of the ABI.
-unsafe fn changed(
+pub(crate) unsafe fn changed(
     plan: *const BcPlan,
     plan_out: *mut *mut BcPlan,
     change: impl FnOnce(MemberPlan) -> Result<MemberPlan, Fault>,

@@ -9,12 +9,13 @@ use beamcore::field::{Extreme, Field};
 use beamcore::response::Response;
 use beamcore::units::{Length, Quantity};
 use std::ffi::c_char;
+use std::ops::Deref;
 
 /// A response: the solved member.
 pub struct BcResponse(pub(crate) Response);
 
 /// A field in plain SI numbers, whatever its quantity is.
-pub(crate) trait PlainField {
+pub(crate) trait PlainField: Send + Sync {
     /// An extreme and its place.
     fn extreme(&self, name: ExtremeName) -> (f64, f64);
     /// The value on one side of a place.
@@ -23,7 +24,7 @@ pub(crate) trait PlainField {
     fn stations(&self) -> Vec<f64>;
 }
 
-impl<Q: Quantity> PlainField for Field<Q> {
+impl<Q: Quantity + Send + Sync> PlainField for Field<Q> {
     fn extreme(&self, name: ExtremeName) -> (f64, f64) {
         let Extreme { value, at } = match name {
             ExtremeName::Greatest => self.greatest(),
@@ -47,7 +48,7 @@ impl<Q: Quantity> PlainField for Field<Q> {
 }
 
 /// The field that the three parameters of the ABI name.
-fn field(
+pub(crate) fn field(
     response: &Response,
     field: i32,
     combination: &str,
@@ -59,6 +60,9 @@ fn field(
         FieldName::Slope => Box::new(response.slope(combination, time)?),
         FieldName::Shear => Box::new(response.shear(combination, time)?),
         FieldName::Moment => Box::new(response.moment(combination, time)?),
+        FieldName::Axial => Box::new(response.axial(combination, time)?),
+        FieldName::Rotation => Box::new(response.rotation(combination, time)?),
+        FieldName::Curvature => Box::new(response.curvature(combination, time)?),
     })
 }
 
@@ -66,8 +70,8 @@ fn field(
 ///
 /// # Safety
 /// `x_m` is NULL or points to `count` numbers, `values_out` is NULL or has room for as many.
-pub(crate) unsafe fn write_values(
-    field: impl FnOnce() -> Result<Box<dyn PlainField>, Fault>,
+pub(crate) unsafe fn write_values<F: Deref<Target = dyn PlainField>>(
+    field: impl FnOnce() -> Result<F, Fault>,
     side: i32,
     x_m: *const f64,
     count: i32,

@@ -10,11 +10,11 @@ use beamcore::section::{PlacedPart, Section};
 use beamcore::units::LineMass;
 use std::ffi::c_char;
 
-/// A section: parts joined rigidly, each at its place.
+/// A section: parts in layers with joints between them, each at its place.
 pub struct BcSection(pub(crate) Section);
 
-/// A section of parts. All that is wrong with them is reported at once; no part at all is
-/// BC_ERROR_MISSING.
+/// A section of parts, joined rigidly as one layer named "section". All that is wrong with them is
+/// reported at once; no part at all is BC_ERROR_MISSING.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn bc_section_new(
     parts: *const *const BcPart,

@@ -39,6 +39,15 @@ static inline int near(double found, double expected) {
     return equal;
 }
 
+// Equal within a tolerance, for values with few published digits and for those that may be zero.
+static inline int within(double found, double expected, double tolerance) {
+    const int equal = fabs(found - expected) <= tolerance;
+    if (!equal) {
+        fprintf(stderr, "    %.17g is not %.17g within %g\n", found, expected, tolerance);
+    }
+    return equal;
+}
+
 // Whether the last error of this thread is of a status and speaks of a path.
 static inline int last_error(int32_t status, const char *path) {
     char found[300] = "";

@@ -2,60 +2,14 @@
 #ifndef BEAMCORE_ACTION_HPP
 #define BEAMCORE_ACTION_HPP
 
-#include "../beamcore_units.hpp"
-#include "handle.hpp"
-
-#include <optional>
+#include "category.hpp"
+#include "part.hpp"
+#include "tendon.hpp"
 
 namespace beamcore {
 
-// The factors by which a variable action enters combinations.
-struct CombinationFactors {
-    double psi_0;
-    double psi_1;
-    double psi_2;
-};
-
-// A category of variable actions (EN 1990:2002 Table A1.1).
-enum class Category : std::int32_t {
-    domestic = BC_CATEGORY_DOMESTIC,           // A: homes
-    office = BC_CATEGORY_OFFICE,               // B: offices
-    congregation = BC_CATEGORY_CONGREGATION,   // C: where people gather
-    shopping = BC_CATEGORY_SHOPPING,           // D: shops
-    storage = BC_CATEGORY_STORAGE,             // E: storage
-    light_traffic = BC_CATEGORY_LIGHT_TRAFFIC, // F: vehicles up to 30 kN
-    heavy_traffic = BC_CATEGORY_HEAVY_TRAFFIC, // G: vehicles from 30 kN to 160 kN
-    roof = BC_CATEGORY_ROOF,                   // H: roofs that are only walked on for upkeep
-    snow = BC_CATEGORY_SNOW,                   // at 1000 m above the sea or lower
-    snow_high = BC_CATEGORY_SNOW_HIGH,         // above 1000 m, and everywhere in the north
-    wind = BC_CATEGORY_WIND,
-    temperature = BC_CATEGORY_TEMPERATURE, // not fire
-};
-
-// The category of a word of documents: "A" to "H", "snow", "snow_high", "wind", "temperature".
-inline Category category_of_name(const std::string &name) {
-    return static_cast<Category>(detail::count([&](std::int32_t *out) {
-        return bc_category_of_name(detail::c_text(name, "name"), out);
-    }));
-}
-
-// The recommended combination factors of a category.
-inline CombinationFactors combination_factors(Category category) {
-    double psi_0 = 0.0, psi_1 = 0.0, psi_2 = 0.0;
-    detail::check(bc_category_factors(detail::code(category), &psi_0, &psi_1, &psi_2));
-    return CombinationFactors{psi_0, psi_1, psi_2};
-}
-
-// How long an action acts at a time (EN 1995-1-1:2004 2.3.1.2, from memory).
-enum class LoadDuration : std::int32_t {
-    permanent = BC_DURATION_PERMANENT,         // more than ten years
-    long_term = BC_DURATION_LONG,              // six months to ten years
-    medium_term = BC_DURATION_MEDIUM,          // a week to six months
-    short_term = BC_DURATION_SHORT,            // less than a week
-    instantaneous = BC_DURATION_INSTANTANEOUS, // moments
-};
-
-// A named action: loads that act together, from one cause. Loads are positive downward.
+// A named action: what acts together, from one cause. Loads are positive downward, forces along the
+// member to the right.
 class Action {
 public:
     // The same action with the weight of the section, over the whole member.
@@ -113,6 +67,85 @@ public:
         });
     }
 
+    // The same action with a line load per length of the plan, as snow on a pitched member; over
+    // the whole member or between two places along it.
+    Action plan(LineLoad load) const {
+        return made(
+            [&](bc_action **out) { return bc_action_with_plan_load(get(), load.si(), out); });
+    }
+    Action plan(LineLoad load, Length from, Length to) const {
+        return made([&](bc_action **out) {
+            return bc_action_with_partial_plan_load(get(), load.si(), from.si(), to.si(), out);
+        });
+    }
+
+    // The same action with a force along the member at a height of the section.
+    Action axial(Force load, Length at, Length height) const {
+        return made([&](bc_action **out) {
+            return bc_action_with_axial(get(), load.si(), at.si(), height.si(), out);
+        });
+    }
+
+    // The same action with a tendon that pulls its two anchors towards each other.
+    Action prestress(Force force, const Draped &tendon) const {
+        return with_tendon(bc_action_with_draped_tendon, force, tendon.points);
+    }
+    Action prestress(Force force, const Parabolic &tendon) const {
+        return with_tendon(bc_action_with_parabolic_tendon, force, tendon.points);
+    }
+
+    // The same action with a support that sinks, positive downward.
+    Action settlement(const std::string &support, Length settlement) const {
+        return made([&](bc_action **out) {
+            return bc_action_with_settlement(get(), detail::c_text(support, "support"),
+                                             settlement.si(), out);
+        });
+    }
+
+    // The same action with a support that turns the section with it, positive clockwise.
+    Action imposed_rotation(const std::string &support, Angle rotation) const {
+        return made([&](bc_action **out) {
+            return bc_action_with_imposed_rotation(get(), detail::c_text(support, "support"),
+                                                   rotation.si(), out);
+        });
+    }
+
+    // The same action with a change of temperature, positive where warmer, of the parts of these
+    // names; of none means of all.
+    Action temperature(TemperatureChange change,
+                       const std::vector<std::string> &parts = {}) const {
+        return made([&](bc_action **out) {
+            const auto names = detail::c_texts(parts, "part_names");
+            return bc_action_with_temperature(get(), change.si(), names.data(),
+                                              detail::size(names.size()), out);
+        });
+    }
+
+    // The same action with a top of the section that is warmer than its bottom, linearly between
+    // them, with the mean over the height unchanged.
+    Action temperature_difference(TemperatureChange difference) const {
+        return made([&](bc_action **out) {
+            return bc_action_with_temperature_difference(get(), difference.si(), out);
+        });
+    }
+
+    // The same action with a free strain of a part: moisture, shrinkage, a built-in curvature.
+    Action free_strain(const std::string &part, const InitialStrain &strain) const {
+        return made([&](bc_action **out) {
+            return bc_action_with_free_strain(get(), detail::c_text(part, "part"),
+                                              strain.axial.si(), strain.curvature_y.si(),
+                                              strain.curvature_z.si(), out);
+        });
+    }
+
+    // The same action with all its loads entering the layer of this name; without it, they enter
+    // Member::entered_layer().
+    Action on(const std::string &layer) const {
+        return made([&](bc_action **out) {
+            return bc_action_on(get(), detail::c_text(layer, "layer"), out);
+        });
+    }
+
     // The same action, known to relieve what is being checked; without this, an action is taken as
     // unfavourable.
     Action favourable() const {
@@ -148,6 +181,14 @@ public:
         return has_value != 0 ? std::optional(Duration::from_si(start)) : std::nullopt;
     }
 
+    // The layer that its loads enter, if one was named.
+    std::optional<std::string> layer() const {
+        return detail::optional_text(
+            [&](std::int32_t *has, char *buffer, std::int64_t capacity, std::int64_t *length) {
+                return bc_action_layer(get(), has, buffer, capacity, length);
+            });
+    }
+
     bool is_favourable() const {
         return detail::count([&](std::int32_t *out) {
                    return bc_action_is_favourable(get(), out);
@@ -164,6 +205,18 @@ private:
 
     template <class Call> static Action made(Call call) {
         return Action(detail::make<bc_action>(bc_action_free, call));
+    }
+
+    template <class Call, class Points>
+    Action with_tendon(Call call, Force force, const Points &points) const {
+        std::vector<double> at, height;
+        for (const TendonPoint &point : points) {
+            at.push_back(point.at.si());
+            height.push_back(point.height.si());
+        }
+        return made([&](bc_action **out) {
+            return call(get(), force.si(), at.data(), height.data(), detail::size(at.size()), out);
+        });
     }
 
     friend Action permanent(const std::string &name);

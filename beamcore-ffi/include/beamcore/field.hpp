@@ -58,7 +58,7 @@ private:
     Values values_;
 };
 
-// A quantity along the member or a span of it, with its extremes.
+// A quantity along the member, a layer, a joint or a span of it, with its extremes.
 template <class Q> class Field : public Line<Q> {
 public:
     using Extremes =
@@ -70,6 +70,16 @@ public:
         // Whether there is such a field is said here, where its names are given.
         greatest();
     }
+
+    // The field of a handle of the C ABI.
+    explicit Field(const detail::Shared<bc_field> &field)
+        : Field(
+              [field](std::int32_t side, const double *x_m, std::int32_t count, double *out) {
+                  return bc_field_values(field.get(), side, x_m, count, out);
+              },
+              [field](std::int32_t extreme, double *value, double *at) {
+                  return bc_field_extreme(field.get(), extreme, value, at);
+              }) {}
 
     // The value of greatest magnitude, with its sign and place; the leftmost of equals.
     Extreme<Q> greatest() const { return extreme(BC_EXTREME_GREATEST); }

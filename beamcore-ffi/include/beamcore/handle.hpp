@@ -5,6 +5,7 @@
 #include "error.hpp"
 
 #include <memory>
+#include <optional>
 
 namespace beamcore {
 
@@ -41,6 +42,40 @@ template <class Call> std::int32_t count(Call call) {
     return value;
 }
 
+// The one number that `call` writes, if there is one.
+template <class Call> std::optional<double> optional(Call call) {
+    std::int32_t has_value = 0;
+    double value = 0.0;
+    check(call(&has_value, &value));
+    return has_value != 0 ? std::optional(value) : std::nullopt;
+}
+
+// The same as a quantity.
+template <class Q, class Call> std::optional<Q> optional_of(Call call) {
+    const std::optional<double> value = optional(call);
+    return value.has_value() ? std::optional(Q::from_si(*value)) : std::nullopt;
+}
+
+// The handles of a list of objects, which keep them.
+template <class C, class Object>
+std::vector<const C *> handles(const std::vector<Object> &objects) {
+    std::vector<const C *> handles;
+    for (const Object &object : objects) {
+        handles.push_back(object.get());
+    }
+    return handles;
+}
+
+// A list of texts for the C ABI; they live as long as the list they are taken from.
+inline std::vector<const char *> c_texts(const std::vector<std::string> &texts,
+                                         const char *parameter) {
+    std::vector<const char *> list;
+    for (const std::string &text : texts) {
+        list.push_back(c_text(text, parameter));
+    }
+    return list;
+}
+
 // A list of texts out of a function that counts them and one that gives them by index.
 template <class C, class Count, class Get>
 std::vector<std::string> texts(const C *handle, Count count_of, Get get) {
@@ -59,6 +94,15 @@ template <class C, class Get> std::string name(const C *handle, Get get) {
     return text([&](char *buffer, std::int64_t capacity, std::int64_t *length) {
         return get(handle, buffer, capacity, length);
     });
+}
+
+// The text that `get` writes to a buffer, if there is one.
+template <class Get> std::optional<std::string> optional_text(Get get) {
+    std::int32_t has_value = 0;
+    std::string found = text([&](char *buffer, std::int64_t capacity, std::int64_t *length) {
+        return get(&has_value, buffer, capacity, length);
+    });
+    return has_value != 0 ? std::optional(std::move(found)) : std::nullopt;
 }
 
 // A choice as it crosses the C ABI.

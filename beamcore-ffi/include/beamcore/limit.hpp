@@ -89,10 +89,7 @@ inline LimitCheck limit_check(const bc_checks *checks, std::int32_t index) {
 
 inline std::vector<LimitCheck> Response::checks(const std::vector<Limit> &limits,
                                                 const bc_camber *camber) const {
-    std::vector<const bc_limit *> handles;
-    for (const Limit &limit : limits) {
-        handles.push_back(limit.get());
-    }
+    const auto handles = detail::handles<bc_limit>(limits);
     const auto checks = detail::make<bc_checks>(bc_checks_free, [&](bc_checks **out) {
         return bc_response_check_limits(get(), handles.data(), detail::size(handles.size()),
                                         camber, out);

@@ -1,36 +1,13 @@
-// Supports, spans, combinations and members.
+// Spans, combinations and members.
 #ifndef BEAMCORE_MEMBER_HPP
 #define BEAMCORE_MEMBER_HPP
 
 #include "action.hpp"
 #include "section.hpp"
+#include "shape.hpp"
+#include "support.hpp"
 
 namespace beamcore {
-
-// What a support holds.
-enum class SupportKind : std::int32_t {
-    pin = BC_SUPPORT_PIN,
-    roller = BC_SUPPORT_ROLLER,
-    fixed = BC_SUPPORT_FIXED,
-};
-
-// A support at a distance from the left end of the member, with a name that addresses its
-// reactions.
-struct Support {
-    std::string name;
-    SupportKind kind;
-    Length at;
-
-    static Support pin(std::string name, Length at) {
-        return Support{std::move(name), SupportKind::pin, at};
-    }
-    static Support roller(std::string name, Length at) {
-        return Support{std::move(name), SupportKind::roller, at};
-    }
-    static Support fixed(std::string name, Length at) {
-        return Support{std::move(name), SupportKind::fixed, at};
-    }
-};
 
 // A stretch of a member whose deflection is looked at on its own: between two supports, or an
 // overhang.
@@ -95,6 +72,27 @@ public:
         return Length::from_si(
             detail::number([&](double *out) { return bc_member_length(get(), out); }));
     }
+
+    // The section just right of a place (at the right end, just left of it).
+    Section section_at(Length at) const;
+    // The names of the parts of all sections, in the order in which they come from the left.
+    std::vector<std::string> parts() const;
+    std::vector<Support> supports() const;
+    // The changes of the section, from left to right; section_at() gives the section after one.
+    std::vector<SectionChange> changes() const;
+    std::vector<Hinge> hinges() const;
+    std::vector<Anchor> anchors() const;
+    // Whether layers have deflections of their own, by transverse moduli of their joints.
+    bool has_deflections_of_layers() const;
+    // Whether axial force takes part.
+    bool has_axial_force() const;
+    // The layer that loads of actions without a named layer enter: the highest one where all layers
+    // share one deflection, else the first.
+    std::string entered_layer() const;
+    // How shear deformation is taken.
+    ShearModel shear_model() const;
+    // The pitch, if it has one.
+    std::optional<Angle> pitch() const;
 
     // Whether the member is held sideways or free.
     Sideways sideways() const {
@@ -174,6 +172,8 @@ private:
 };
 
 } // namespace beamcore
+
+#include "member_shape.hpp"
 
 #include "plan.hpp"
 

@@ -20,10 +20,8 @@ class MemberPlan {
 public:
     // The same plan with one more support.
     MemberPlan support(const Support &support) const {
-        return made([&](bc_plan **out) {
-            return bc_plan_with_support(get(), detail::c_text(support.name, "name"),
-                                        detail::code(support.kind), support.at.si(), out);
-        });
+        return made(
+            [&](bc_plan **out) { return bc_plan_on_support(get(), support.get(), out); });
     }
 
     // The same plan with one more action.
@@ -63,6 +61,69 @@ public:
         return made([&](bc_plan **out) {
             return bc_plan_with_sideways(get(), detail::code(sideways), out);
         });
+    }
+
+    // The same plan with another section from a place on, to the right of all changes before.
+    MemberPlan step(Length at, const Section &section) const {
+        return made([&](bc_plan **out) {
+            return bc_plan_with_step(get(), at.si(), section.get(), out);
+        });
+    }
+
+    // The same plan with a section that changes linearly between two places, to the right of all
+    // changes before, to a like one: the same parts, shapes and materials with other sizes.
+    MemberPlan taper(Length from, Length to, const Section &section) const {
+        return made([&](bc_plan **out) {
+            return bc_plan_with_taper(get(), from.si(), to.si(), section.get(), out);
+        });
+    }
+
+    // The same plan with an internal hinge.
+    MemberPlan hinge(const Hinge &hinge) const {
+        const double at = hinge.at.si();
+        const std::string layer = hinge.layer.value_or("");
+        return made([&](bc_plan **out) {
+            switch (hinge.kind) {
+            case HingeKind::shear:
+                return bc_plan_with_shear_hinge(get(), at, out);
+            case HingeKind::butt:
+                return bc_plan_with_butt_joint(get(), detail::c_text(layer, "layer"), at, out);
+            case HingeKind::moment:
+                break;
+            }
+            return hinge.layer.has_value()
+                       ? bc_plan_with_layer_hinge(get(), detail::c_text(layer, "layer"), at, out)
+                       : bc_plan_with_moment_hinge(get(), at, out);
+        });
+    }
+
+    // The same plan with something that stops the slip of a joint at a place.
+    MemberPlan anchor(const Anchor &anchor) const {
+        return made([&](bc_plan **out) {
+            const char *name = detail::c_text(anchor.name, "name");
+            const char *joint = detail::c_text(anchor.joint, "joint");
+            return anchor.stiffness.has_value()
+                       ? bc_plan_with_elastic_anchor(get(), name, joint, anchor.at.si(),
+                                                     anchor.stiffness->si(), out)
+                       : bc_plan_with_anchor(get(), name, joint, anchor.at.si(), out);
+        });
+    }
+
+    // The same plan with shear deformation taken as told; without this it is left out.
+    MemberPlan shear(const ShearModel &shear) const {
+        return made([&](bc_plan **out) {
+            const auto given = shear.stiffness();
+            return given.has_value()
+                       ? bc_plan_with_given_shear(get(), given->si(), out)
+                       : bc_plan_with_shear(
+                             get(), shear.is_rigid() ? BC_SHEAR_RIGID : BC_SHEAR_FLEXIBLE, out);
+        });
+    }
+
+    // The same plan of a member that rises to the right by an angle: its length and all places are
+    // measured along it, its deflection is square to it.
+    MemberPlan pitch(Angle angle) const {
+        return made([&](bc_plan **out) { return bc_plan_with_pitch(get(), angle.si(), out); });
     }
 
     // Checks the plan; all that is wrong is reported at once.

@@ -45,10 +45,7 @@ inline Field<Length> Response::remaining(const std::string &combination, Time ti
 
 inline std::vector<Reading> Response::readings(const Camber &camber,
                                                const Trestles &trestles) const {
-    std::vector<const char *> parts;
-    for (const std::string &part : trestles.parts) {
-        parts.push_back(detail::c_text(part, "part_names"));
-    }
+    const auto parts = detail::c_texts(trestles.parts, "part_names");
     const auto readings = detail::make<bc_readings>(bc_readings_free, [&](bc_readings **out) {
         return bc_response_readings(get(), camber.get(), trestles.left.si(), trestles.right.si(),
                                     parts.data(), detail::size(parts.size()), out);

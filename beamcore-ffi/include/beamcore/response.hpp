@@ -5,19 +5,26 @@
 #include "component.hpp"
 #include "field.hpp"
 #include "member.hpp"
+#include "simplified.hpp"
 #include "stress.hpp"
 
 namespace beamcore {
 
 // The reaction of a support: force positive upward, couple positive clockwise with x to the right
-// and z up.
+// and z up, level force positive to the right.
 struct Reaction {
     Force force;
     Moment couple;
+    // Zero where no axial force takes part.
+    Force along;
 };
 
 class Camber;
 struct CamberPlan;
+struct CompositeAction;
+struct JointResponse;
+struct LayerForces;
+struct SimplifiedSpan;
 class Limit;
 struct LimitCheck;
 struct Reading;
@@ -42,6 +49,33 @@ public:
     Field<Moment> moment(const std::string &combination, Time time) const {
         return field<Moment>(BC_FIELD_MOMENT, combination, time);
     }
+    // The axial force N, tension positive.
+    Field<Force> axial(const std::string &combination, Time time) const {
+        return field<Force>(BC_FIELD_AXIAL, combination, time);
+    }
+    // The rotation of the section, positive clockwise; with shear it is not the slope.
+    Field<Angle> rotation(const std::string &combination, Time time) const {
+        return field<Angle>(BC_FIELD_ROTATION, combination, time);
+    }
+    // The curvature, positive sagging, with its free part.
+    Field<Curvature> curvature(const std::string &combination, Time time) const {
+        return field<Curvature>(BC_FIELD_CURVATURE, combination, time);
+    }
+
+    // Slip, flow and contact pressure of a joint that is not rigid.
+    JointResponse joint(const std::string &combination, Time time, const std::string &joint) const;
+
+    // Axial force and moment of a layer, with the layers that rigid joints hold to it.
+    LayerForces layer(const std::string &combination, Time time, const std::string &layer) const;
+
+    // The deflection of a layer; that of the member unless a transverse modulus gives the layer one
+    // of its own.
+    Field<Length> layer_deflection(const std::string &combination, Time time,
+                                   const std::string &layer) const;
+
+    // The degree of composite action and the effective bending stiffness, from the same member
+    // with all its joints loose and with all of them rigid.
+    CompositeAction composite_action(const std::string &combination, Time time) const;
 
     // The movement sideways, positive towards positive y; zero unless the member is free sideways
     // and its section has no axis of symmetry.
@@ -72,13 +106,54 @@ public:
     Field<Length> deflection_component(Component component, const std::string &combination,
                                        const std::string &span, const Camber &camber) const;
 
+    // Deflection, flow and stresses of each span by a simplified method, beside the exact ones.
+    std::vector<SimplifiedSpan> simplified(const std::string &combination, Time time,
+                                           SimplifiedMethod method) const;
+
     // The reaction of a support.
     Reaction reaction(const std::string &combination, Time time, const std::string &support) const {
-        double force = 0.0, couple = 0.0;
-        detail::check(bc_response_reaction(get(), detail::c_text(combination, "combination"),
-                                           detail::code(time), detail::c_text(support, "support"),
-                                           &force, &couple));
-        return Reaction{Force::from_si(force), Moment::from_si(couple)};
+        double force = 0.0, couple = 0.0, along = 0.0;
+        const char *under = detail::c_text(combination, "combination");
+        const char *at = detail::c_text(support, "support");
+        detail::check(
+            bc_response_reaction(get(), under, detail::code(time), at, &force, &couple));
+        detail::check(
+            bc_response_reaction_along(get(), under, detail::code(time), at, &along));
+        return Reaction{Force::from_si(force), Moment::from_si(couple), Force::from_si(along)};
+    }
+
+    // The force with which a support holds a layer along the member by itself, positive to the
+    // right.
+    Force layer_reaction(const std::string &combination, Time time, const std::string &support,
+                         const std::string &layer) const {
+        return Force::from_si(detail::number([&](double *out) {
+            return bc_response_layer_reaction(get(), detail::c_text(combination, "combination"),
+                                              detail::code(time),
+                                              detail::c_text(support, "support"),
+                                              detail::c_text(layer, "layer"), out);
+        }));
+    }
+
+    // The force of an anchor; it bears the sign of the slip that it stops.
+    Force anchor_force(const std::string &combination, Time time,
+                       const std::string &anchor) const {
+        return Force::from_si(detail::number([&](double *out) {
+            return bc_response_anchor_force(get(), detail::c_text(combination, "combination"),
+                                            detail::code(time), detail::c_text(anchor, "anchor"),
+                                            out);
+        }));
+    }
+
+    // The names of the one-way supports that the member leaves under a combination.
+    std::vector<std::string> lifted(const std::string &combination, Time time) const;
+
+    // How many linear solutions a combination took: one, unless the member may lift off supports or
+    // its joints have clearance.
+    std::int32_t steps(const std::string &combination, Time time) const {
+        return detail::count([&](std::int32_t *out) {
+            return bc_response_steps(get(), detail::c_text(combination, "combination"),
+                                     detail::code(time), out);
+        });
     }
 
     // The normal stress in a part.
@@ -153,7 +228,10 @@ private:
             });
     }
 
-    // The same with a camber or, where its handle is empty, without one.
+    detail::Shared<bc_field> layer_field(std::int32_t layer_field, const std::string &combination,
+                                         Time time, const std::string &layer) const;
+
+    // A component with a camber or, where its handle is empty, without one.
     Field<Length> component(Component component, const std::string &combination,
                             const std::string &span, detail::Shared<bc_camber> camber) const;
     std::vector<LimitCheck> checks(const std::vector<Limit> &limits,
@@ -170,5 +248,9 @@ inline Response Member::solve() const {
 } // namespace beamcore
 
 #include "camber.hpp"
+
+#include "composite.hpp"
+
+#include "comparison.hpp"
 
 #endif // BEAMCORE_RESPONSE_HPP

@@ -2,6 +2,7 @@
 #ifndef BEAMCORE_SECTION_HPP
 #define BEAMCORE_SECTION_HPP
 
+#include "layer.hpp"
 #include "part.hpp"
 
 #include <initializer_list>
@@ -83,21 +84,53 @@ struct StrainPlane {
     Curvature curvature_z;
 };
 
+class PlacedJoint;
 class TransformedSection;
 
-// Parts joined rigidly, each at its place.
+// Parts in layers with joints between them, each at its place.
 class Section {
 public:
-    // A section of parts; all that is wrong with them is reported at once.
+    // A section of parts, joined rigidly as one layer; all that is wrong with them is reported at
+    // once.
     Section(std::initializer_list<Part> parts) : Section(std::vector<Part>(parts)) {}
     explicit Section(const std::vector<Part> &parts)
         : handle_(detail::make<bc_section>(bc_section_free, [&](bc_section **out) {
-              std::vector<const bc_part *> handles;
-              for (const Part &part : parts) {
-                  handles.push_back(part.get());
-              }
+              const auto handles = detail::handles<bc_part>(parts);
               return bc_section_new(handles.data(), detail::size(handles.size()), out);
           })) {}
+
+    // A section of parts in layers, with joints between the layers.
+    static Section layered(const std::vector<Part> &parts, const std::vector<Layer> &layers,
+                           const std::vector<Joint> &joints);
+
+    // The section at a share of the way from this one (0) to a like one (1), as along a taper.
+    Section between(const Section &other, double share) const {
+        return Section(detail::make<bc_section>(bc_section_free, [&](bc_section **out) {
+            return bc_section_between(get(), other.get(), share, out);
+        }));
+    }
+
+    // The layers and joints as given; of a section without layers, one named "section".
+    std::vector<Layer> layers() const;
+    std::vector<Joint> joints() const;
+    // The joint of a name, at its place.
+    PlacedJoint joint(const std::string &name) const;
+    // The names of the layers, those together that rigid joints hold together.
+    std::vector<std::vector<std::string>> merged_layers() const;
+
+    // The shear stiffness kGA of parts that are glued over their whole height, as one layer; see
+    // shear_stiffness_definition().
+    ShearStiffness shear_stiffness(Time time) const {
+        return ShearStiffness::from_si(detail::number([&](double *out) {
+            return bc_section_shear_stiffness(get(), detail::code(time), out);
+        }));
+    }
+    // The same of parts that stand side by side and are only fastened to each other.
+    ShearStiffness fastened_shear_stiffness(Time time) const {
+        return ShearStiffness::from_si(detail::number([&](double *out) {
+            return bc_section_fastened_shear_stiffness(get(), detail::code(time), out);
+        }));
+    }
 
     // The stiffness at a time.
     Stiffness stiffness(Time time) const {
@@ -198,10 +231,16 @@ public:
     const bc_section *get() const { return handle_.get(); }
 
 private:
+    explicit Section(detail::Shared<bc_section> handle) : handle_(std::move(handle)) {}
+
+    friend class Member;
+
     detail::Shared<bc_section> handle_;
 };
 
 } // namespace beamcore
+
+#include "layered.hpp"
 
 #include "transformed.hpp"
 
