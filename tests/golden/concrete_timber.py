@@ -43,6 +43,28 @@ def layers(case: Case, at: str, p: Pair, middle, end, peak_slip: float) -> None:
     case.add(f'{at}.joints["screws"].flow.greatest.value_N_per_m', -end.dn, CLOSE)
 
 
+def gamma(case: Case, time: str, p: Pair, exact: float) -> None:
+    """The gamma method of EN 1995-1-1 Annex B (from memory) for the slab as layer 1: gamma_1 =
+    1/(1 + pi^2 EA_1/(k l^2)), a_2 = gamma_1 EA_1 r/(gamma_1 EA_1 + EA_2), a_1 = r - a_2."""
+    factor = 1.0 / (1.0 + math.pi**2 * p.upper.ea / (p.k * LENGTH**2))
+    r = p.upper.z - p.lower.z
+    lower_arm = factor * p.upper.ea * r / (factor * p.upper.ea + p.lower.ea)
+    stiffness = p.ei0 + factor * p.upper.ea * (r - lower_arm) ** 2 + p.lower.ea * lower_arm**2
+    deflection = 5 * Q * LENGTH**4 / (384 * stiffness)
+    flow = p.lower.ea * lower_arm / stiffness * Q * LENGTH / 2
+    span = f'simplified["gamma"].combinations["quasi-permanent"].{time}.spans["left to right"]'
+    case.add(f"{span}.factors[0]", 1.0, "1e-15")
+    case.add(f"{span}.factors[1]", factor, CLOSE)
+    case.add(f"{span}.bending_stiffness_Nm2", stiffness, CLOSE)
+    case.add(f"{span}.deflection.value_m", deflection, CLOSE)
+    case.add(f"{span}.exact_deflection.value_m", exact, CLOSE)
+    case.add(f"{span}.difference", deflection / exact - 1.0, "1e-9")
+    case.add(f'{span}.joints["screws"].flow.value_N_per_m', -flow, CLOSE)
+    moment = Q * LENGTH**2 / 8
+    axial = lower_arm * p.lower.e * moment / stiffness
+    case.add(f'{span}.layers["joist"].axial_stress_Pa', axial, CLOSE)
+
+
 def concrete_timber() -> Case:
     case = Case("concrete-timber", """
 Closed forms of slipping layers (slipping_layers.py). Rounded values of an independent script: w 11.139 mm,
@@ -63,6 +85,7 @@ N 62906 N, end flow 36.27 N/mm, slip 0.272 mm; long term with a joint creep of 1
         case.add(f"{action}.rigid_m", rigid, CLOSE)
         case.add(f"{action}.degree", (loose - middle.w) / (loose - rigid), CLOSE)
         case.add(f"{action}.effective_stiffness_Nm2", p.ei_rigid * rigid / middle.w, CLOSE)
+        gamma(case, time, p, middle.w)
         case.add(f"section.{time}.bending_stiffness_yy_Nm2", p.ei_rigid, CLOSE)
     case.add('section.joints["screws"].stretches[0].modulus_final_N_per_m2', 400e6 / 3 / 2.2, "1e-14")
     case.fields(SUPPORTS, PARTS)
