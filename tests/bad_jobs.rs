@@ -91,7 +91,15 @@ fn a_truncated_document_is_an_error_at_every_place() {
 /// A job written back is the same job, in both formats.
 #[test]
 fn a_job_written_back_reads_the_same() {
-    for name in ["flitch", "two-span", "slab-strip"] {
+    for name in [
+        "flitch",
+        "two-span",
+        "slab-strip",
+        "haunched-beam",
+        "rafter",
+        "side-plates",
+        "shrinking-topping",
+    ] {
         let file = folder().join(format!("../golden/{name}.toml"));
         let job = Job::open(&file).unwrap();
         let first = job.solve().unwrap().to_json();
