@@ -81,6 +81,12 @@ int main(int count, char **arguments) {
         roof_beam();
         odd_section();
         shrinking_slab();
+        screwed_floor();
+        clearance_floor();
+        side_plates();
+        rafter();
+        lift_off();
+        haunched_beam();
         return EXIT_SUCCESS;
     }
     if (count == 3 && strcmp(arguments[1], "job") == 0) {

@@ -67,43 +67,49 @@ static int answer(const std::string &folder, const std::string &name) {
     return misses;
 }
 
-static void put_all(const std::string &name, const Section &section, const Response &response,
-                    const std::vector<std::string> &parts,
-                    const std::vector<std::string> &supports) {
-    const std::pair<Time, const char *> times[] = {{Time::initial, "initial"},
-                                                   {Time::final, "final"}};
-    for (const auto &[time, word] : times) {
+static const std::pair<Time, const char *> TIMES[] = {{Time::initial, "initial"},
+                                                      {Time::final, "final"}};
+
+std::vector<State> states() {
+    std::vector<State> list;
+    for (const char *c : {"permanent", "quasi-permanent", "characteristic", "fundamental"}) {
+        for (const auto &[time, word] : TIMES) {
+            list.push_back(State{c, time, std::string("combinations[\"") + c + "\"]." + word});
+        }
+    }
+    return list;
+}
+
+void put_all(const std::string &name, const Section &section, const Response &response,
+             const std::vector<std::string> &parts, const std::vector<std::string> &supports) {
+    for (const auto &[time, word] : TIMES) {
         const Stiffness stiffness = section.stiffness(time);
         const std::string base = std::string("section.") + word;
         put(name, base + ".bending_stiffness_yy_Nm2", stiffness.bending_yy.to_N_m2());
         put(name, base + ".axial_stiffness_N", stiffness.axial.to_N());
         put(name, base + ".centroid_z_m", stiffness.centroid_z.to_m());
     }
-    for (const char *c : {"permanent", "quasi-permanent", "characteristic", "fundamental"}) {
-        for (const auto &[time, word] : times) {
-            const std::string base = std::string("combinations[\"") + c + "\"]." + word;
-            const auto deflection = response.deflection(c, time).greatest();
-            put(name, base + ".deflection.greatest.value_m", deflection.value.to_m());
-            put(name, base + ".deflection.greatest.at_m", deflection.at.to_m());
-            put(name, base + ".slope.greatest.value_rad",
-                response.slope(c, time).greatest().value.to_rad());
-            put(name, base + ".shear.greatest.value_N",
-                response.shear(c, time).greatest().value.to_N());
-            put(name, base + ".moment.greatest.value_Nm",
-                response.moment(c, time).greatest().value.to_N_m());
-            for (const std::string &support : supports) {
-                const Reaction reaction = response.reaction(c, time, support);
-                const std::string at = base + ".reactions[\"" + support + "\"]";
-                put(name, at + ".force_N", reaction.force.to_N());
-                put(name, at + ".couple_Nm", reaction.couple.to_N_m());
-            }
-            for (const std::string &part : parts) {
-                const PartStress stress = response.stress(c, time, part);
-                const std::string at = base + ".stresses[\"" + part + "\"]";
-                put(name, at + ".tension.value_Pa", stress.greatest_tension().value.to_Pa());
-                put(name, at + ".compression.value_Pa",
-                    stress.greatest_compression().value.to_Pa());
-            }
+    for (const auto &[c, time, base] : states()) {
+        const auto deflection = response.deflection(c, time).greatest();
+        put(name, base + ".deflection.greatest.value_m", deflection.value.to_m());
+        put(name, base + ".deflection.greatest.at_m", deflection.at.to_m());
+        put(name, base + ".slope.greatest.value_rad",
+            response.slope(c, time).greatest().value.to_rad());
+        put(name, base + ".shear.greatest.value_N",
+            response.shear(c, time).greatest().value.to_N());
+        put(name, base + ".moment.greatest.value_Nm",
+            response.moment(c, time).greatest().value.to_N_m());
+        for (const std::string &support : supports) {
+            const Reaction reaction = response.reaction(c, time, support);
+            const std::string at = base + ".reactions[\"" + support + "\"]";
+            put(name, at + ".force_N", reaction.force.to_N());
+            put(name, at + ".couple_Nm", reaction.couple.to_N_m());
+        }
+        for (const std::string &part : parts) {
+            const PartStress stress = response.stress(c, time, part);
+            const std::string at = base + ".stresses[\"" + part + "\"]";
+            put(name, at + ".tension.value_Pa", stress.greatest_tension().value.to_Pa());
+            put(name, at + ".compression.value_Pa", stress.greatest_compression().value.to_Pa());
         }
     }
 }
@@ -180,6 +186,12 @@ int main(int count, char **arguments) {
             roof_beam();
             odd_section();
             shrinking_slab();
+            screwed_floor();
+            clearance_floor();
+            side_plates();
+            rafter();
+            lift_off();
+            haunched_beam();
             return 0;
         }
         std::cerr << "usage: golden job FOLDER | golden typed\n";

@@ -17,15 +17,6 @@ void put(const char *name, const char *path, double value) {
     printf("%s\t%s\t%016" PRIx64 "\n", name, path, bits);
 }
 
-// A case: what its results are printed of.
-struct golden {
-    const char *name;
-    const char *parts[4];    // ends with NULL
-    const char *supports[4]; // ends with NULL
-    bc_section *section;
-    bc_response *response;
-};
-
 static void put_field(const struct golden *g, const char *base, int32_t field,
                       const char *combination, int32_t time, const char *key, int with_place) {
     char path[300];
@@ -40,10 +31,9 @@ static void put_field(const struct golden *g, const char *base, int32_t field,
     }
 }
 
-static void put_combination(const struct golden *g, const char *combination, int32_t time) {
-    char base[100], path[300];
-    snprintf(base, sizeof base, "combinations[\"%s\"].%s", combination,
-             time == BC_TIME_INITIAL ? "initial" : "final");
+static void put_state(const struct golden *g, const char *combination, int32_t time,
+                      const char *base) {
+    char path[300];
     put_field(g, base, BC_FIELD_DEFLECTION, combination, time, "deflection.greatest.value_m", 1);
     put_field(g, base, BC_FIELD_SLOPE, combination, time, "slope.greatest.value_rad", 0);
     put_field(g, base, BC_FIELD_SHEAR, combination, time, "shear.greatest.value_N", 0);
@@ -69,11 +59,23 @@ static void put_combination(const struct golden *g, const char *combination, int
     }
 }
 
-static void put_all(const struct golden *g) {
+void put_states(const struct golden *g, put_state_fn *put_state) {
     static const int32_t times[] = {BC_TIME_INITIAL, BC_TIME_FINAL};
-    static const char *const words[] = {"initial", "final"};
     static const char *const combinations[] = {"permanent", "quasi-permanent", "characteristic",
                                                "fundamental"};
+    char base[100];
+    for (int c = 0; c < 4; ++c) {
+        for (int i = 0; i < 2; ++i) {
+            snprintf(base, sizeof base, "combinations[\"%s\"].%s", combinations[c],
+                     times[i] == BC_TIME_INITIAL ? "initial" : "final");
+            put_state(g, combinations[c], times[i], base);
+        }
+    }
+}
+
+void put_all(const struct golden *g) {
+    static const int32_t times[] = {BC_TIME_INITIAL, BC_TIME_FINAL};
+    static const char *const words[] = {"initial", "final"};
     char path[100];
     for (int i = 0; i < 2; ++i) {
         double ea, y, z, yy, zz, yz;
@@ -87,11 +89,7 @@ static void put_all(const struct golden *g) {
         snprintf(path, sizeof path, "section.%s.centroid_z_m", words[i]);
         put(g->name, path, z);
     }
-    for (int c = 0; c < 4; ++c) {
-        for (int i = 0; i < 2; ++i) {
-            put_combination(g, combinations[c], times[i]);
-        }
-    }
+    put_states(g, put_state);
 }
 
 // Replaces a handle by the one that was made of it.
