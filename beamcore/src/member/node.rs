@@ -8,6 +8,7 @@ use crate::section::{
 };
 use crate::solve::law::{PlainJoint, PlainLayer};
 use crate::time::Time;
+#[cfg(feature = "document")]
 use crate::units::{Length, ShearStiffness};
 use std::sync::Arc;
 
@@ -261,6 +262,7 @@ fn layer_shear(section: &Section, parts: &[usize], x: f64, time: Time) -> Result
 
 /// The shear stiffness of a section at x along a member, of layers that slip the sum of theirs;
 /// `None` of a member that does not yield in shear.
+#[cfg(feature = "document")]
 pub(crate) fn shear_stiffness(
     section: &Section,
     x: Length,

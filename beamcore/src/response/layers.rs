@@ -38,6 +38,38 @@ impl Response {
     /// p = q + (M'' of those layers) + t' z, with q the load that enters them; loads that name no
     /// layer are taken to enter from above.
     ///
+    /// # Examples
+    /// ```
+    /// use beamcore::material::{Creep, Material};
+    /// use beamcore::member::{Action, Member};
+    /// use beamcore::section::{Joint, Layer, Part, Section, Slip, Spacing, rectangle};
+    /// use beamcore::time::Time;
+    /// use beamcore::units::Number;
+    /// let wood = Material::new("wood", 11.GPa(), Creep::factor(0.6));
+    /// let concrete = Material::new("concrete", 31.GPa(), Creep::factor(2.5));
+    /// let joist = Part::new("joist", rectangle(100.mm(), 220.mm()), wood);
+    /// let slab = Part::new("slab", rectangle(600.mm(), 70.mm()), concrete).above(&joist);
+    /// let screws = Slip::Fasteners {
+    ///     stiffness: 10.kN_per_mm(),
+    ///     rows: 2,
+    ///     planes: 1,
+    ///     spacing: Spacing::Uniform(150.mm()),
+    /// };
+    /// let section = Section::layered(
+    ///     [joist, slab],
+    ///     [Layer::new("timber", ["joist"]), Layer::new("topping", ["slab"])],
+    ///     [Joint::slipping("screws", "timber", "topping", screws).creep(1.2)],
+    /// )?;
+    /// let response = Member::simple_span(section, 6.m())
+    ///     .action(Action::permanent("floor").uniform(3.kN_per_m()))
+    ///     .check()?
+    ///     .solve();
+    /// let screws = response.joint("permanent", Time::Initial, "screws")?;
+    /// let end = screws.flow.value(0.m())?;
+    /// assert_eq!(format!("{:.2} N/mm", end.to_N_per_mm()), "-36.27 N/mm");
+    /// # Ok::<(), beamcore::Error>(())
+    /// ```
+    ///
     /// # Errors
     /// As for [`Response::deflection`]; [`crate::ErrorKind::Name`] if no joint of this name slips.
     pub fn joint(&self, combination: &str, time: Time, joint: &str) -> Result<JointResponse> {
