@@ -60,8 +60,9 @@ pub(crate) struct SupportDocument {
     /// both ways.
     #[serde(default, skip_serializing_if = "is_false")]
     pub(crate) one_way: bool,
-    /// The height of the section at which the axis is held; without it, the elastic centroid of the
-    /// first section.
+    /// The height of the section at which the axis is held, on the first of the layers that bear on
+    /// the support; without it, all layers together at the elastic centroid of the section at the
+    /// left end.
     #[serde(default, skip_serializing_if = "Option::is_none")]
     pub(crate) height: Option<Written<Length>>,
     /// The layers that bear on the support; without it, all.

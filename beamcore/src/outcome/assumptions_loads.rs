@@ -84,10 +84,15 @@ fn axis(member: &Member) -> Vec<String> {
         .collect();
     if !unsaid.is_empty() {
         notes.push(format!(
-            "{} hold{} the axis at the elastic centroid that the first section has on the first \
-             day, for no height was given",
+            "{} hold{} {} at the elastic centroid that the section at the left end has on the \
+             first day, for no height was given",
             unsaid.join(", "),
-            if unsaid.len() == 1 { "s" } else { "" }
+            if unsaid.len() == 1 { "s" } else { "" },
+            if member.section().merged_layers().len() > 1 {
+                "all layers together"
+            } else {
+                "the axis"
+            }
         ));
     }
     notes.push(
