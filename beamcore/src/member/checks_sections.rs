@@ -1,12 +1,11 @@
 //! What can be wrong with sections along a member, its layers and what refers to them.
 
 use super::checks_parts::check_self_weight;
-use super::load::{Load, Tendon};
 use super::plan::MemberPlan;
 use super::references::{merged_layer, slip_of, strands};
 use super::sections::Stretch;
 use super::shear::ShearModel;
-use super::{Release, node};
+use super::{Release, checks_loads, node};
 use crate::check;
 use crate::error::{ErrorKind, Problem};
 use crate::path;
@@ -111,7 +110,7 @@ pub(super) fn problems(plan: &MemberPlan, sections: &[Stretch]) -> Vec<Problem> 
     for stretch in sections.iter().skip(1) {
         check_self_weight(&mut problems, stretch.start(), plan.actions());
     }
-    problems.extend(loads(plan, sections));
+    problems.extend(checks_loads::problems(plan, sections));
     problems
 }
 
@@ -172,140 +171,4 @@ fn free_sideways(plan: &MemberPlan) -> Option<Problem> {
         format!("{found} in a member that is free sideways"),
         "a member that is held sideways",
     ))
-}
-
-/// What loads refer to.
-fn loads(plan: &MemberPlan, sections: &[Stretch]) -> Vec<Problem> {
-    let mut problems = Vec::new();
-    let section = plan.section();
-    for action in plan.actions() {
-        let base = path::key(&path::named("actions", action.name()), "loads");
-        for (i, load) in action.loads().iter().enumerate() {
-            let at = path::key(&path::indexed(&base, i), load.name());
-            if load.is_axial() && section.merged_layers().len() > 1 && action.layer().is_none() {
-                problems.push(Problem::new(
-                    ErrorKind::Missing,
-                    path::key(&path::named("actions", action.name()), "on"),
-                    "a force along a member of several layers that slip",
-                    "the layer that it enters",
-                ));
-            }
-            match load {
-                Load::Settlement { support, .. } | Load::ImposedRotation { support, .. } => {
-                    problems.extend(moved(plan, support, load, &at));
-                }
-                Load::Temperature { parts, .. } => {
-                    for name in parts {
-                        problems.extend(part_problem(sections, name, &path::key(&at, "parts")));
-                    }
-                    problems.extend(expansion_problems(sections, parts, action.name()));
-                }
-                Load::TemperatureDifference { .. } => {
-                    problems.extend(expansion_problems(sections, &[], action.name()));
-                }
-                Load::Strain { part, .. } => {
-                    problems.extend(part_problem(sections, part, &path::key(&at, "part")));
-                }
-                Load::Prestress { tendon, .. } => {
-                    problems.extend(order(tendon, &path::key(&at, "tendon")));
-                }
-                _ => {}
-            }
-        }
-    }
-    problems
-}
-
-/// What is moved must be held.
-fn moved(plan: &MemberPlan, name: &str, load: &Load, at: &str) -> Option<Problem> {
-    let supports = plan.supports();
-    let Some(support) = supports.iter().find(|support| support.name() == name) else {
-        let names: Vec<_> = supports.iter().map(super::Support::name).collect();
-        return Some(Problem::new(
-            ErrorKind::Name,
-            path::key(at, "support"),
-            format!("the unknown support \"{name}\""),
-            format!("one of the supports {}", crate::lookup::listed(&names)),
-        ));
-    };
-    let turns = matches!(load, Load::ImposedRotation { .. });
-    (turns && !support.holds_rotation()).then(|| {
-        Problem::new(
-            ErrorKind::Value,
-            path::key(at, "support"),
-            format!("a rotation of the support \"{name}\", where nothing holds the rotation"),
-            "a support that is fixed or has a rotational spring",
-        )
-    })
-}
-
-fn part_problem(sections: &[Stretch], name: &str, at: &str) -> Option<Problem> {
-    let parts = sections.iter().flat_map(|stretch| stretch.start().parts());
-    let mut names: Vec<&str> = Vec::new();
-    for part in parts {
-        if !names.contains(&part.name()) {
-            names.push(part.name());
-        }
-    }
-    (!names.contains(&name)).then(|| {
-        Problem::new(
-            ErrorKind::Name,
-            at,
-            format!("the unknown part \"{name}\""),
-            format!("one of the parts {}", crate::lookup::listed(&names)),
-        )
-    })
-}
-
-/// Warming needs the thermal expansion of each part that becomes warmer.
-fn expansion_problems(sections: &[Stretch], parts: &[String], action: &str) -> Vec<Problem> {
-    let mut told: Vec<&str> = Vec::new();
-    let mut problems = Vec::new();
-    for part in sections.iter().flat_map(|s| s.start().placed()) {
-        let material = part.material();
-        let is_warm = parts.is_empty() || parts.iter().any(|name| name == part.name());
-        if is_warm && material.expansion().is_none() && !told.contains(&material.name()) {
-            told.push(material.name());
-            problems.push(Problem::new(
-                ErrorKind::Missing,
-                path::key(
-                    &path::named("materials", material.name()),
-                    "thermal_expansion",
-                ),
-                "no thermal expansion",
-                format!("a thermal expansion, since the action \"{action}\" warms it"),
-            ));
-        }
-    }
-    problems
-}
-
-/// The points of a tendon go from left to right.
-fn order(tendon: &Tendon, at: &str) -> Vec<Problem> {
-    let points = tendon.points();
-    let base = path::key(at, tendon.name());
-    if points.len() < 2 {
-        return vec![Problem::new(
-            ErrorKind::Missing,
-            base,
-            if points.is_empty() {
-                "no points"
-            } else {
-                "one point"
-            },
-            "at least two points: both anchors",
-        )];
-    }
-    let mut problems = Vec::new();
-    for (i, pair) in points.windows(2).enumerate() {
-        if pair[1].0 <= pair[0].0 {
-            problems.push(Problem::new(
-                ErrorKind::Position,
-                path::key(&path::indexed(&base, i + 1), "at"),
-                pair[1].0.to_string(),
-                format!("a place to the right of the point before, at {}", pair[0].0),
-            ));
-        }
-    }
-    problems
 }

@@ -4,6 +4,7 @@ mod action;
 mod case;
 mod category;
 mod checks;
+mod checks_loads;
 mod checks_parts;
 mod checks_places;
 mod checks_sections;
