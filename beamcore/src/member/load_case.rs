@@ -218,7 +218,7 @@ impl<'a> Builder<'a> {
     }
 
     /// Notes that a load enters a layer.
-    fn enter(&mut self, piece: usize, layer: usize, [left, right]: [f64; 2]) {
+    pub(super) fn enter(&mut self, piece: usize, layer: usize, [left, right]: [f64; 2]) {
         let [a, b] = &mut self.case.entered[layer][piece];
         *a += left;
         *b += right;

@@ -34,6 +34,7 @@ impl Builder<'_> {
                 let [first, to] = ends.map(|x| nearest(&self.layout.places, x));
                 for piece in first..to {
                     self.line(piece, w, [-force * bend; 2]);
+                    self.enter(piece, layer, [-force * bend; 2]);
                 }
                 let half = bend / 2.0;
                 (

@@ -40,7 +40,7 @@ impl Response {
     }
 
     /// The degree of composite action and the effective bending stiffness, from the same member
-    /// with all its joints loose and with all of them rigid (without anchors).
+    /// with all joints that slip loose, and with all of them rigid (without anchors).
     ///
     /// # Errors
     /// As for [`Response::deflection`]; [`ErrorKind::Value`] if no joint slips; what makes the

@@ -101,12 +101,15 @@ impl Section {
         }
     }
 
-    /// The same section with all its joints of one kind.
+    /// The same section with all joints that are not rigid of one kind.
     pub(crate) fn with_joints(&self, kind: &JointKind) -> Result<Self> {
-        let joints = self
-            .joints()
-            .iter()
-            .map(|joint| joint.of_kind(kind.clone()));
+        let joints = self.joints().iter().map(|joint| {
+            if *joint.kind() == JointKind::Rigid {
+                joint.clone()
+            } else {
+                joint.of_kind(kind.clone())
+            }
+        });
         Self::layered(
             self.parts().to_vec(),
             self.layers().to_vec(),
