@@ -6,7 +6,8 @@ use crate::units::Length;
 /// What a hinge releases.
 #[derive(Clone, Debug, PartialEq, Eq, Hash)]
 pub enum Release {
-    /// The rotation: no moment passes (of a layer with a deflection of its own, if one is named).
+    /// The rotation: no moment about the elastic centroid of the section just right of it passes (of
+    /// a layer with a deflection of its own, if one is named, about that layer's centroid).
     Moment(Option<String>),
     /// The deflection: no shear force passes.
     Shear,

@@ -40,26 +40,24 @@ impl Layout {
         for (i, hinge) in plan.hinges().iter().enumerate() {
             let station = nearest(&self.places, hinge.at().si());
             let at = path::indexed("member.hinges", i);
-            let mut direction = vec![0.0; self.states.half()];
             match hinge.release() {
                 Release::Shear => {
                     for strand in 0..self.states.strands {
-                        let mut direction = direction.clone();
+                        let mut direction = vec![0.0; self.states.half()];
                         direction[self.states.deflection(strand)] = 1.0;
                         self.releases[station].push(direction);
                     }
                 }
                 Release::Moment(None) => {
                     for strand in 0..self.states.strands {
-                        let mut direction = direction.clone();
-                        direction[self.states.rotation(strand)] = 1.0;
-                        self.releases[station].push(direction);
+                        let turned = self.turned(section, station, strand);
+                        self.releases[station].push(turned);
                     }
                 }
                 Release::Moment(Some(layer)) => {
-                    let layer = merged_layer(section, layer, &at)?;
-                    direction[self.states.rotation(self.strands[layer])] = 1.0;
-                    self.releases[station].push(direction);
+                    let strand = self.strands[merged_layer(section, layer, &at)?];
+                    let turned = self.turned(section, station, strand);
+                    self.releases[station].push(turned);
                 }
                 Release::Butt(layer) => {
                     let layer = merged_layer(section, layer, &at)?;
@@ -69,6 +67,27 @@ impl Layout {
             }
         }
         Ok(())
+    }
+
+    /// The displacements that part where a strand turns about the elastic centroid of its layers
+    /// just right of a station: no moment about it passes.
+    fn turned(&self, section: &Section, station: usize, strand: usize) -> Vec<f64> {
+        let nodes = &self.pieces[station.min(self.pieces.len() - 1)].nodes;
+        // Of a varying piece the last node but one lies at its left end.
+        let layers = nodes[nodes.len().max(2) - 2].at(Time::Initial);
+        let own = |i: &usize| self.strands[*i] == strand && layers[*i].is_there;
+        let own: Vec<usize> = (0..layers.len()).filter(own).collect();
+        let axial: f64 = own.iter().map(|&i| layers[i].axial).sum();
+        let first: f64 = own.iter().map(|&i| layers[i].axial * layers[i].z).sum();
+        let arm = first / axial - self.axis;
+        let mut direction = vec![0.0; self.states.half()];
+        for &layer in &own {
+            for (sum, along) in direction.iter_mut().zip(self.butt(section, layer)) {
+                *sum -= arm * along;
+            }
+        }
+        direction[self.states.rotation(strand)] = 1.0;
+        direction
     }
 
     /// The displacements that part where a layer is butted: its own along the member.

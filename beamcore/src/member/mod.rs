@@ -11,6 +11,8 @@ mod checks_sections;
 mod combination;
 mod free_strain;
 mod hinge;
+#[cfg(test)]
+mod hinge_tests;
 mod holds;
 mod layout;
 mod load;
