@@ -48,10 +48,12 @@ impl Case {
         }
     }
 
-    /// Whether anything but free strains acts.
-    pub(crate) fn has_forces(&self) -> bool {
+    /// Whether a load acts: anything but free strains and movements of supports.
+    pub(crate) fn has_loads(&self) -> bool {
         let any = |numbers: &[f64]| numbers.iter().any(|number| *number != 0.0);
-        any(&self.loads.line) || any(&self.loads.outside) || any(&self.loads.moved)
+        any(&self.loads.line)
+            || any(&self.loads.outside)
+            || self.entered.iter().flatten().any(|load| *load != [0.0; 2])
     }
 
     /// The load per length that enters any of the given layers, per piece.

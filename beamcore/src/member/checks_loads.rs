@@ -5,6 +5,8 @@ use super::plan::MemberPlan;
 use super::sections::Stretch;
 use crate::error::{ErrorKind, Problem};
 use crate::path;
+use crate::section::{Layer, Section};
+use crate::units::Length;
 
 /// What loads refer to.
 pub(super) fn problems(plan: &MemberPlan, sections: &[Stretch]) -> Vec<Problem> {
@@ -21,6 +23,10 @@ pub(super) fn problems(plan: &MemberPlan, sections: &[Stretch]) -> Vec<Problem> 
                     "a force along a member of several layers that slip",
                     "the layer that it enters",
                 ));
+            }
+            if let Some(layer) = action.layer() {
+                let on = path::key(&path::named("actions", action.name()), "on");
+                problems.extend(beside_layer(plan, layer, load, &on));
             }
             match load {
                 Load::Settlement { support, .. } | Load::ImposedRotation { support, .. } => {
@@ -46,6 +52,46 @@ pub(super) fn problems(plan: &MemberPlan, sections: &[Stretch]) -> Vec<Problem> 
         }
     }
     problems
+}
+
+/// A load must stand where its layer is there.
+fn beside_layer(plan: &MemberPlan, name: &str, load: &Load, at: &str) -> Option<Problem> {
+    if load.is_strain() || *load == Load::SelfWeight {
+        return None;
+    }
+    if matches!(load, Load::Settlement { .. } | Load::ImposedRotation { .. }) {
+        return None;
+    }
+    let (from, to) = extent(plan.section(), name)?;
+    let places = load.places();
+    let first = places.first().copied().unwrap_or(Length::ZERO);
+    let last = places.last().copied().unwrap_or_else(|| plan.length());
+    let slack = plan.length() * super::SAME_PLACE;
+    (first < from - slack || last > to + slack).then(|| {
+        Problem::new(
+            ErrorKind::Position,
+            at,
+            format!(
+                "a load between {first} and {last} on the layer \"{name}\", which is there from \
+                 {from} to {to}"
+            ),
+            "loads within the layer that they enter",
+        )
+    })
+}
+
+/// From where to where a named layer, with those that rigid joints hold to it, is there; `None` for
+/// the whole length, and for a name that no layer bears.
+pub(super) fn extent(section: &Section, name: &str) -> Option<(Length, Length)> {
+    let has = |names: &[String]| names.iter().any(|own| own == name);
+    let merged = section.merged_layers().iter().find(|m| has(m.layers()))?;
+    let own = section.layers().iter().filter(|layer| {
+        let name = layer.name();
+        merged.layers().iter().any(|other| other == name)
+    });
+    own.map(Layer::extent)
+        .reduce(|a, b| Some((a?.0.min(b?.0), a?.1.max(b?.1))))
+        .flatten()
 }
 
 /// What is moved must be held.

@@ -97,6 +97,19 @@ pub(super) fn problems(plan: &MemberPlan, sections: &[Stretch]) -> Vec<Problem> 
         let under = path::key(&base, "under");
         for layer in support.layers() {
             problems.extend(references(merged_layer(first, layer, &under)));
+            if let Some((from, to)) = checks_loads::extent(first, layer)
+                && !(from <= support.at() && support.at() <= to)
+            {
+                problems.push(Problem::new(
+                    ErrorKind::Position,
+                    &under,
+                    format!(
+                        "the layer \"{layer}\", which is there from {from} to {to}, at {}",
+                        support.at()
+                    ),
+                    "layers that are there at the support",
+                ));
+            }
         }
         for (i, hold) in support.held_layers().iter().enumerate() {
             let at = path::indexed(&path::key(&base, "holding"), i);

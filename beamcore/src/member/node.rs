@@ -260,8 +260,8 @@ fn layer_shear(section: &Section, parts: &[usize], x: f64, time: Time) -> Result
     Ok(layer_shear_stiffness(&all, time)?.si())
 }
 
-/// The shear stiffness of a section at x along a member, of layers that slip the sum of theirs;
-/// `None` of a member that does not yield in shear.
+/// The shear stiffness of a section at x along a member, of layers that slip that of parts which
+/// each bear the share `EI_i`/sum of EI; `None` of a member that does not yield in shear.
 #[cfg(feature = "document")]
 pub(crate) fn shear_stiffness(
     section: &Section,
@@ -275,11 +275,14 @@ pub(crate) fn shear_stiffness(
         ShearModel::Flexible => {
             let merged = section.merged_layers().iter();
             let there = section.layer_stiffness_at(x.si(), time);
-            let mut sum = 0.0;
-            for (merged, _) in merged.zip(there).filter(|(_, there)| there.is_some()) {
-                sum += layer_shear(section, merged.parts(), x.si(), time)?;
+            let (mut own, mut bending) = (Vec::new(), Vec::new());
+            for (merged, there) in merged.zip(there) {
+                if let Some(layer) = there {
+                    own.push(layer_shear(section, merged.parts(), x.si(), time)?);
+                    bending.push(layer.bending);
+                }
             }
-            ShearStiffness::from_si(sum)
+            ShearStiffness::from_si(side_by_side(&own, &bending))
         }
     };
     Ok(Some(given))

@@ -102,11 +102,12 @@ pub(crate) fn settle(
 }
 
 fn stand(member: &Member, time: Time, situation: &Situation) -> Result<(Arc<Layout>, Arc<Beam>)> {
-    let cuts: Vec<f64> = situation
-        .engaged
-        .iter()
-        .flat_map(|(_, stretches)| stretches.iter().flat_map(|s| [s.from, s.to]))
-        .collect();
+    let mut cuts = Vec::new();
+    for (_, stretches) in &situation.engaged {
+        for stretch in stretches {
+            cuts.extend([stretch.from, stretch.to]);
+        }
+    }
     let layout = if cuts.is_empty() {
         Arc::clone(member.layout())
     } else {

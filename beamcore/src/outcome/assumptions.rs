@@ -71,8 +71,8 @@ fn shear(member: &Member) -> String {
              and at all times"
         ),
         ShearModel::Flexible if member.section().merged_layers().len() > 1 => format!(
-            "Deflection by bending and shear ({SHEAR_STIFFNESS_DEFINITION}); layers of one \
-             deflection share the shear strain, so that their kGA add up"
+            "Deflection by bending and shear ({SHEAR_STIFFNESS_DEFINITION}); each \
+             layer bears the share EI_i/sum of EI of the shear force, whatever its joints"
         ),
         ShearModel::Flexible => {
             format!("Deflection by bending and shear ({SHEAR_STIFFNESS_DEFINITION})")

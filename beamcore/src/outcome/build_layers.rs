@@ -4,7 +4,7 @@ use super::document_layers::{
     AnchorOutcome, CompositeOutcome, FastenersOutcome, JointOutcome, JointResultOutcome,
     JointStretchOutcome, LayerOutcome, LayerResultOutcome, LayerStiffnessOutcome, SlipOutcome,
 };
-use crate::error::Result;
+use crate::error::{ErrorKind, Result};
 use crate::member::{Combination, CombinationKind, Member};
 use crate::response::Response;
 use crate::section::{JointKind, PlacedJoint, Section, Slip};
@@ -190,7 +190,12 @@ pub(super) fn composite(
     if !judged || !shares_deflection(response.member()) {
         return Ok(None);
     }
-    let found = response.composite_action(combination.name(), time)?;
+    let found = match response.composite_action(combination.name(), time) {
+        Ok(found) => found,
+        // Under no load there is nothing to compare.
+        Err(error) if error.kind() == ErrorKind::Value => return Ok(None),
+        Err(error) => return Err(error),
+    };
     let is_known = found.degree.is_finite() && found.effective_stiffness.si().is_finite();
     Ok(is_known.then(|| CompositeOutcome {
         degree: found.degree,

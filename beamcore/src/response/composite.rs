@@ -8,7 +8,7 @@ use crate::time::Time;
 use crate::units::{BendingStiffness, Length};
 
 /// The composite action of a member of layers under one combination, seen at the place of its
-/// greatest deflection under its loads; actions of free strains only are left out.
+/// greatest deflection under its loads; actions of free strains or settlements only are left out.
 #[derive(Clone, Copy, Debug, PartialEq)]
 pub struct CompositeAction {
     /// (w loose - w)/(w loose - w rigid): 0 where the joints do nothing, 1 where they do not slip.
@@ -27,12 +27,12 @@ pub struct CompositeAction {
 }
 
 impl Response {
-    /// The deflection under a combination without its actions of free strains only.
+    /// The deflection under a combination without its actions of free strains or settlements only.
     fn under_loads(&self, combination: &str, time: Time) -> Result<Piecewise> {
         let deflection = self.member().layout().states.deflection(0);
         let mut sum = self.zero();
         for term in self.terms(combination, time)? {
-            if !term.is_strain_only() {
+            if !term.is_without_load() {
                 sum.add(&term.field(deflection), 1.0);
             }
         }
@@ -43,7 +43,7 @@ impl Response {
     /// with all joints that slip loose, and with all of them rigid (without anchors).
     ///
     /// # Errors
-    /// As for [`Response::deflection`]; [`ErrorKind::Value`] if no joint slips; what makes the
+    /// As for [`Response::deflection`]; [`ErrorKind::Value`] if no joint slips, or no load acts; what makes the
     /// member with loose or rigid joints impossible.
     pub fn composite_action(&self, combination: &str, time: Time) -> Result<CompositeAction> {
         let member = self.member();
@@ -57,6 +57,15 @@ impl Response {
             .into());
         }
         let peak: Extreme<Length> = self.under_loads(combination, time)?.greatest().into();
+        if peak.value == Length::ZERO {
+            return Err(Problem::new(
+                ErrorKind::Value,
+                "combination",
+                format!("\"{combination}\", under which no load bends the member"),
+                "a combination with loads",
+            )
+            .into());
+        }
         let variant = |kind: JointKind| -> Result<Length> {
             let plan = member.plan().with_joints(&kind)?;
             let line = plan.check()?.solve().under_loads(combination, time)?;

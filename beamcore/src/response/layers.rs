@@ -110,7 +110,8 @@ impl Response {
     }
 }
 
-/// The slip at the height of a joint, with the factor of the term.
+/// The slip at the height of a joint, with the factor of the term; none where one of its layers is
+/// not there.
 pub(super) fn slip_at_joint(term: &Term<'_>, section: &Section, j: usize) -> Piecewise {
     let states = term.layout.states;
     let mut line = term.field(states.slip(j));
@@ -121,7 +122,14 @@ pub(super) fn slip_at_joint(term: &Term<'_>, section: &Section, j: usize) -> Pie
         line.add(&term.field(states.rotation(strands[1])), arm);
         line.add(&term.field(states.rotation(strands[0])), -arm);
     }
-    line
+    let is_there = |k: usize| {
+        let node = &term.layout.pieces[k].nodes[0];
+        let (joint, layers) = (&node.section.slips()[j], node.at(term.time));
+        layers[joint.lower].is_there && layers[joint.upper].is_there
+    };
+    let mut slip = line.zeroed();
+    slip.add_by_piece(&line, |k| f64::from(u8::from(is_there(k))));
+    slip
 }
 
 /// The flow of a joint from its slip, with the factor of the term.

@@ -8,6 +8,7 @@ use super::solutions::Term;
 use crate::error::{ErrorKind, Problem, Result};
 use crate::field::Piecewise;
 use crate::member::{Member, Release};
+use crate::section::Layer;
 use crate::simplified::LayerStress;
 use crate::solve::beam::{Beam, Solved};
 use crate::solve::states::States;
@@ -178,6 +179,12 @@ fn stresses_at(
     Ok(stresses)
 }
 
+/// Whether a layer is there over a part of the length only.
+fn has_short_layers(member: &Member) -> bool {
+    let layers = member.section().layers().iter();
+    layers.filter_map(Layer::extent).next().is_some()
+}
+
 /// Why the methods do not cover a member and its loads.
 fn not_covered(member: &Member, terms: &[Term<'_>]) -> Option<&'static str> {
     let layout = member.layout();
@@ -191,6 +198,10 @@ fn not_covered(member: &Member, terms: &[Term<'_>]) -> Option<&'static str> {
         Some("axial forces")
     } else if member.is_one_way() {
         Some("clearances or one-way supports")
+    } else if member.has_moving_supports() {
+        Some("supports that move")
+    } else if has_short_layers(member) {
+        Some("layers over a part of the length")
     } else if !member.anchors().is_empty() {
         Some("anchors")
     } else if member
@@ -201,7 +212,7 @@ fn not_covered(member: &Member, terms: &[Term<'_>]) -> Option<&'static str> {
         Some("butt joints")
     } else if terms
         .iter()
-        .any(|term| term.has_strains() && term.case.has_forces())
+        .any(|term| term.has_strains() && term.case.has_loads())
     {
         Some("loads and free strains in one action")
     } else {

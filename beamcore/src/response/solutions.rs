@@ -105,9 +105,9 @@ impl Term<'_> {
         !self.case.strains.is_empty()
     }
 
-    /// Whether nothing but free strains acts.
-    pub(super) fn is_strain_only(&self) -> bool {
-        self.has_strains() && !self.case.has_forces()
+    /// Whether no load acts: only free strains, or movements of supports.
+    pub(super) fn is_without_load(&self) -> bool {
+        !self.case.has_loads()
     }
 
     /// The free strains of the parts at a node of a piece; empty where there are none.

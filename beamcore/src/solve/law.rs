@@ -79,6 +79,7 @@ impl Law {
         }
         let mut stiffness = DMatrix::zeros(gradients, gradients);
         let mut shear = vec![0.0; states.strands];
+        let mut bending = vec![0.0; states.strands];
         for (layer, a) in layers.iter().zip(&factors) {
             for (i, ai) in a.iter().enumerate() {
                 for (j, aj) in a.iter().enumerate() {
@@ -86,20 +87,14 @@ impl Law {
                 }
             }
             stiffness[(layer.strand, layer.strand)] += layer.bending;
-            // Layers of one strand share the shear strain: their stiffnesses add up.
-            if layer.shear_flexibility > 0.0 && layer.bending > 0.0 {
-                shear[layer.strand] += 1.0 / layer.shear_flexibility;
-            }
+            bending[layer.strand] += layer.bending;
+            shear[layer.strand] += layer.bending * layer.bending * layer.shear_flexibility;
         }
+        // By energy: each layer of a strand bears the share EI_i/sum of EI of the shear force.
         let shear_flexibility = shear
             .into_iter()
-            .map(|stiffness| {
-                if stiffness > 0.0 {
-                    1.0 / stiffness
-                } else {
-                    0.0
-                }
-            })
+            .zip(bending)
+            .map(|(shear, bending)| shear / (bending * bending))
             .collect();
         Self {
             states,
