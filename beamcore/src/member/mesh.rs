@@ -51,7 +51,7 @@ pub(super) fn cuts([from, to]: [f64; 2], laws: &[Law]) -> Vec<f64> {
     }
     let scale = length / 2.0 / x;
     let left: Vec<f64> = steps.iter().map(|s| s * scale).collect();
-    if decay == 0.0 && left.len() == 2 {
+    if decay == 0.0 && greatest >= length {
         return vec![from, to];
     }
     let mut cuts: Vec<f64> = left.iter().map(|s| from + s).collect();
