@@ -5,8 +5,8 @@ from typing import Any
 from beamcore import (
     Anchor, Band, Gamma, Hinge, InitialStrain, Joint, Layer, LayerInput, LayerStress, Material,
     Member, Part, ReferenceLength, Section, SineLayers, axial, effective_spacing, fixed,
-    free_strain, imposed_rotation, permanent, pin, plan, prestress, rectangle, roller, settlement,
-    step, taper, temperature, temperature_difference, uniform, variable,
+    free_strain, imposed_rotation, partial, permanent, pin, plan, prestress, rectangle, roller,
+    settlement, step, taper, temperature, temperature_difference, variable,
 )
 from beamcore.units import GPa, K, MPa, N, kN, m, mm, permille, rad
 
@@ -18,7 +18,7 @@ BANDS = [Band(0*m, "1.3 m", 0.1*m), Band(1.3*m, 6*m, (1*m) / 7)]
 JOINT = Joint.fasteners("nails", LOWER, UPPER, stiffness="1.7 kN/mm", rows=2, planes=1,
                         bands=BANDS, creep=1.1)
 SECTION = Section([JOIST, SLAB], layers=[LOWER, UPPER], joints=[JOINT])
-LOAD = permanent("load", uniform(3*kN/m), on=UPPER)
+LOAD = permanent("load", partial(3*kN/m, 0*m, 5*m), on=UPPER)
 SUPPORTS = [
     pin("left", 0*m, spring=0.7*kN/mm, axial_spring="3 kN/mm", height=20*mm,
         holding={"upper": 0.1*m}),
